@@ -1,0 +1,336 @@
+/**
+ * The parameter table: every number and choice a design holds, declared once. The form, the
+ * JSON schema, the bounds check and the defaults are all made from it.
+ *
+ * Values are in kernel units: mm, rad, F, H, Hz, V (peak); counts and ratios are bare.
+ */
+
+export type Quantity =
+  | 'length'
+  | 'angle'
+  | 'capacitance'
+  | 'inductance'
+  | 'frequency'
+  | 'voltage'
+  | 'count'
+  | 'ratio';
+
+/** Which kind of target a parameter belongs to; without one it belongs to both. */
+export type TargetKind = 'terminals' | 'band';
+
+export type ParameterGroup = 'law' | 'stack' | 'shaft' | 'posts' | 'envelope' | 'sheet';
+
+export interface NumberParameter {
+  readonly kind: 'number';
+  readonly quantity: Quantity;
+  readonly group: ParameterGroup;
+  readonly label: string;
+  readonly help: string;
+  /** Smallest and largest value accepted, inclusive, in kernel units. */
+  readonly min: number;
+  readonly max: number;
+  readonly default: number;
+  readonly appliesTo?: TargetKind;
+}
+
+/** A number that may be left empty: `null` lets the kernel choose. */
+export interface OptionalNumberParameter extends Omit<NumberParameter, 'kind' | 'default'> {
+  readonly kind: 'optional-number';
+  readonly default: null;
+}
+
+export interface ChoiceParameter<V extends string = string> {
+  readonly kind: 'choice';
+  readonly group: ParameterGroup;
+  readonly label: string;
+  readonly help: string;
+  readonly options: readonly { readonly value: V; readonly label: string }[];
+  readonly default: V;
+}
+
+export type Parameter = NumberParameter | OptionalNumberParameter | ChoiceParameter;
+
+type ValueOf<P> =
+  P extends ChoiceParameter<infer V>
+    ? V
+    : P extends OptionalNumberParameter
+      ? number | null
+      : number;
+
+export type ValuesOf<T> = { -readonly [K in keyof T]: ValueOf<T[K]> };
+
+type NumberOptions = Omit<NumberParameter, 'kind' | 'quantity' | 'group'>;
+
+const number =
+  (quantity: Quantity) =>
+  (group: ParameterGroup, options: NumberOptions): NumberParameter => ({
+    kind: 'number',
+    quantity,
+    group,
+    ...options,
+  });
+
+const length = number('length');
+const angle = number('angle');
+const capacitance = number('capacitance');
+const inductance = number('inductance');
+const frequency = number('frequency');
+const voltage = number('voltage');
+const count = number('count');
+const ratio = number('ratio');
+
+function choice<V extends string>(
+  group: ParameterGroup,
+  options: Omit<ChoiceParameter<V>, 'kind' | 'group'>,
+): ChoiceParameter<V> {
+  return { kind: 'choice', group, ...options };
+}
+
+const DEGREE = Math.PI / 180;
+
+/** Parameters of one section: its law, its target and its plates. */
+export const sectionParameters = {
+  law: choice<'capacitance' | 'wavelength' | 'frequency' | 'logarithmic'>('law', {
+    label: 'Tuning law',
+    help: 'What moves by equal steps as the shaft turns. The law acts on the total capacitance.',
+    options: [
+      { value: 'capacitance', label: 'capacitance' },
+      { value: 'wavelength', label: 'wavelength' },
+      { value: 'frequency', label: 'frequency' },
+      { value: 'logarithmic', label: 'log' },
+    ],
+    default: 'frequency',
+  }),
+  targetKind: choice<TargetKind>('law', {
+    label: 'Range given as',
+    help: 'Capacitance at the terminals, or the band to be tuned with its coil and circuit stray.',
+    options: [
+      { value: 'band', label: 'band and coil' },
+      { value: 'terminals', label: 'capacitance' },
+    ],
+    default: 'band',
+  }),
+  minCapacitance: capacitance('law', {
+    label: 'Capacitance, open',
+    help: 'At the terminals with the plates fully open, trimmer included.',
+    min: 0.1e-12,
+    max: 20e-9,
+    default: 40e-12,
+    appliesTo: 'terminals',
+  }),
+  maxCapacitance: capacitance('law', {
+    label: 'Capacitance, meshed',
+    help: 'At the terminals with the plates fully meshed.',
+    min: 0.2e-12,
+    max: 50e-9,
+    default: 400e-12,
+    appliesTo: 'terminals',
+  }),
+  bandLow: frequency('law', {
+    label: 'Band, low end',
+    help: 'Tuned with the plates fully meshed.',
+    min: 1e3,
+    max: 1e9,
+    default: 530e3,
+    appliesTo: 'band',
+  }),
+  bandHigh: frequency('law', {
+    label: 'Band, high end',
+    help: 'Tuned with the plates fully open.',
+    min: 1e3,
+    max: 1e9,
+    default: 1700e3,
+    appliesTo: 'band',
+  }),
+  inductance: inductance('law', {
+    label: 'Coil inductance',
+    help: 'The coil that this section tunes.',
+    min: 1e-9,
+    max: 1,
+    default: 240e-6,
+    appliesTo: 'band',
+  }),
+  stray: capacitance('law', {
+    label: 'Circuit stray',
+    help: 'Coil, wiring and valve or transistor capacitance across the section, without the section itself.',
+    min: 0,
+    max: 5e-9,
+    default: 18e-12,
+    appliesTo: 'band',
+  }),
+  rotorPlates: count('stack', {
+    label: 'Rotor plates',
+    help: 'Plates on the shaft in this section.',
+    min: 1,
+    max: 60,
+    default: 14,
+  }),
+  statorPlates: count('stack', {
+    label: 'Stator plates',
+    help: 'Plates on the posts; one more, one fewer or as many as the rotor has.',
+    min: 1,
+    max: 61,
+    default: 15,
+  }),
+  airGap: length('stack', {
+    label: 'Air gap',
+    help: 'One side, rotor face to stator face.',
+    min: 0.1,
+    max: 15,
+    default: 0.5,
+  }),
+  rotorThickness: length('stack', {
+    label: 'Rotor sheet',
+    help: 'Thickness of a rotor plate.',
+    min: 0.1,
+    max: 6,
+    default: 0.8,
+  }),
+  statorThickness: length('stack', {
+    label: 'Stator sheet',
+    help: 'Thickness of a stator plate.',
+    min: 0.1,
+    max: 6,
+    default: 0.8,
+  }),
+  permittivity: ratio('stack', {
+    label: 'Relative permittivity',
+    help: 'Of what fills the gap. Dry air at 20 °C and 1013 hPa: 1.000537.',
+    min: 1,
+    max: 100,
+    default: 1.000537,
+  }),
+  workingVoltage: voltage('stack', {
+    label: 'Working voltage, peak',
+    help: 'Largest peak voltage across the section, direct and alternating together.',
+    min: 0,
+    max: 50e3,
+    default: 300,
+  }),
+} as const satisfies Record<string, Parameter>;
+
+/** Parameters that all sections on the shaft share. */
+export const sharedParameters = {
+  travel: angle('shaft', {
+    label: 'Travel',
+    help: 'Shaft rotation from fully open to fully meshed.',
+    min: 60 * DEGREE,
+    max: 180 * DEGREE,
+    default: 180 * DEGREE,
+  }),
+  shaftDiameter: length('shaft', {
+    label: 'Shaft diameter',
+    help: 'Nominal diameter; the hole in the rotor plate is drawn at this size.',
+    min: 1,
+    max: 30,
+    default: 6,
+  }),
+  spacerRadius: length('shaft', {
+    label: 'Rotor spacer radius',
+    help: 'Outside radius of the spacers between rotor plates.',
+    min: 1,
+    max: 60,
+    default: 6,
+  }),
+  hubRadius: length('shaft', {
+    label: 'Hub radius',
+    help: 'Radius of the rotor plate round the shaft, away from the blade.',
+    min: 1,
+    max: 60,
+    default: 7,
+  }),
+  cutoutRadius: length('shaft', {
+    label: 'Stator cut-out radius',
+    help: 'Radius of the opening in the stator round the shaft.',
+    min: 1.5,
+    max: 80,
+    default: 9,
+  }),
+  overhang: length('posts', {
+    label: 'Stator overhang',
+    help: 'How far the stator reaches past the longest rotor radius.',
+    min: 0,
+    max: 40,
+    default: 2,
+  }),
+  postCount: count('posts', {
+    label: 'Stator posts',
+    help: 'Posts that carry the stator plates.',
+    min: 2,
+    max: 4,
+    default: 3,
+  }),
+  postHoleDiameter: length('posts', {
+    label: 'Post hole',
+    help: 'Diameter of the hole for a post.',
+    min: 0.8,
+    max: 20,
+    default: 3.2,
+  }),
+  postSpacerRadius: length('posts', {
+    label: 'Post spacer radius',
+    help: 'Outside radius of the spacers between stator plates.',
+    min: 0.8,
+    max: 30,
+    default: 3.5,
+  }),
+  postWeb: length('posts', {
+    label: 'Metal round the post hole',
+    help: 'Width of the ring of sheet left round each post hole.',
+    min: 0.2,
+    max: 20,
+    default: 2.5,
+  }),
+  postClearance: length('posts', {
+    label: 'Rotor to post, at least',
+    help: 'Smallest distance allowed between the sweep of the rotor and a post spacer.',
+    min: 0.1,
+    max: 40,
+    default: 2,
+  }),
+  postCircleRadius: {
+    kind: 'optional-number',
+    quantity: 'length',
+    group: 'posts',
+    label: 'Post circle radius',
+    help: 'Distance of the posts from the shaft. Left empty: as near as the clearance allows.',
+    min: 3,
+    max: 300,
+    default: null,
+  } as OptionalNumberParameter,
+  largestRadius: length('envelope', {
+    label: 'Largest radius allowed',
+    help: 'From the shaft to the furthest part, stator ears and sweep included.',
+    min: 4,
+    max: 300,
+    default: 60,
+  }),
+  largestDepth: length('envelope', {
+    label: 'Largest depth allowed',
+    help: 'Along the shaft, over all plates of all sections.',
+    min: 1,
+    max: 500,
+    default: 60,
+  }),
+  sectionSpacing: length('envelope', {
+    label: 'Between sections',
+    help: 'Clear distance along the shaft between neighbouring sections.',
+    min: 0.5,
+    max: 100,
+    default: 6,
+  }),
+  material: choice<'brass' | 'aluminium' | 'copper' | 'steel'>('sheet', {
+    label: 'Sheet',
+    help: 'What the plates are cut from.',
+    options: [
+      { value: 'brass', label: 'Brass CuZn37' },
+      { value: 'aluminium', label: 'Aluminium EN AW-5754' },
+      { value: 'copper', label: 'Copper Cu-ETP' },
+      { value: 'steel', label: 'Steel DC01' },
+    ],
+    default: 'brass',
+  }),
+} as const satisfies Record<string, Parameter>;
+
+export type SectionKey = keyof typeof sectionParameters;
+export type SharedKey = keyof typeof sharedParameters;
