@@ -48,7 +48,11 @@ export interface LawCheck {
   /** achieved − target, F. */
   readonly error: readonly number[];
   /** Largest |error| as a fraction of the capacitance range, and where. */
-  readonly largestError: { readonly fraction: number; readonly capacitance: number; readonly angle: number };
+  readonly largestError: {
+    readonly fraction: number;
+    readonly capacitance: number;
+    readonly angle: number;
+  };
 }
 
 export interface SectionResult {

@@ -1,9 +1,5 @@
 export type KernelErrorCode =
-  | 'out-of-bounds'
-  | 'not-a-number'
-  | 'unknown-choice'
-  | 'unknown-parameter'
-  | 'section-count';
+  'out-of-bounds' | 'not-a-number' | 'unknown-choice' | 'unknown-parameter' | 'section-count';
 
 /**
  * Input that the kernel refuses. The message names the field, the value and what would work;

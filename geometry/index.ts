@@ -1,0 +1,52 @@
+/** The kernel: from a tuning law to plates. Pure; the same in page, worker, route and test. */
+
+export { KERNEL_VERSION } from './version';
+export { checkDesign, checkParameter } from './check';
+export { derive } from './derive';
+export {
+  defaultDesign,
+  defaultSection,
+  MAX_SECTIONS,
+  type Design,
+  type Section,
+  type SharedValues,
+} from './design';
+export type {
+  Derivation,
+  Derived,
+  LawCheck,
+  Plate,
+  PlateRole,
+  Post,
+  SectionResult,
+  Stack,
+  StackPlate,
+  StackSpacer,
+} from './derived';
+export { KernelError, type KernelErrorCode } from './error';
+export type { Finding, FindingCode, Severity } from './finding';
+export {
+  arcOf,
+  walk,
+  type Arc,
+  type Circle,
+  type Contour,
+  type OutlineSink,
+  type Path,
+  type Point,
+  type Vertex,
+} from './outline';
+export {
+  sectionParameters,
+  sharedParameters,
+  type ChoiceParameter,
+  type NumberParameter,
+  type OptionalNumberParameter,
+  type Parameter,
+  type ParameterGroup,
+  type Quantity,
+  type SectionKey,
+  type SharedKey,
+  type TargetKind,
+} from './parameters';
+export { formatQuantity, writeQuantity, type WrittenQuantity } from './quantity';

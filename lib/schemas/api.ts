@@ -1,0 +1,108 @@
+/** What the routes under app/api take and answer, one schema each, used at both ends. */
+
+import { z } from 'zod';
+import { designSchema } from './design';
+
+export const roles = ['owner', 'builder', 'machinist'] as const;
+export const roleSchema = z.enum(roles);
+export type Role = z.infer<typeof roleSchema>;
+
+/** `ready` is the builder's word that this may be cut; any change puts it back to `draft`. */
+export const designStatuses = ['draft', 'ready'] as const;
+export const designStatusSchema = z.enum(designStatuses);
+export type DesignStatus = z.infer<typeof designStatusSchema>;
+
+export const designNameSchema = z
+  .string()
+  .trim()
+  .min(1, 'Name: empty; give the design a name')
+  .max(80, 'Name: longer than 80 characters; shorten it');
+
+const checksSchema = z.object({ ok: z.number(), warn: z.number(), fail: z.number() });
+const personSchema = z.object({ id: z.uuid(), name: z.string() });
+
+export const designSummarySchema = z.object({
+  id: z.uuid(),
+  name: z.string(),
+  status: designStatusSchema,
+  version: z.number().int(),
+  /** Laws of the sections in order, as `frequency`. */
+  laws: z.array(z.string()),
+  /** Findings counted when it was last saved. */
+  checks: checksSchema,
+  updatedAt: z.iso.datetime(),
+  updatedBy: personSchema,
+});
+export type DesignSummary = z.infer<typeof designSummarySchema>;
+
+export const designListSchema = z.object({ designs: z.array(designSummarySchema) });
+
+export const designRecordSchema = designSummarySchema.extend({
+  design: designSchema,
+  /** Version of the kernel that checked it at the last save. */
+  kernel: z.string(),
+  createdAt: z.iso.datetime(),
+  /** May the person who asked change it? The server decides again at every write. */
+  mayEdit: z.boolean(),
+});
+export type DesignRecord = z.infer<typeof designRecordSchema>;
+
+export const createDesignSchema = z.object({
+  name: designNameSchema,
+  /** Without one: the kernel's default design. */
+  design: designSchema.optional(),
+});
+export type CreateDesign = z.input<typeof createDesignSchema>;
+
+export const saveDesignSchema = z.object({
+  /** The version this work began from; an older one than stored answers 409 with the stored. */
+  version: z.number().int().positive(),
+  name: designNameSchema,
+  design: designSchema,
+});
+export type SaveDesign = z.input<typeof saveDesignSchema>;
+
+export const setStatusSchema = z.object({
+  version: z.number().int().positive(),
+  status: designStatusSchema,
+});
+
+export const designFileSchema = z.object({
+  name: z.string(),
+  /** What it holds, for a person: `Rotor plate, section 1`. */
+  label: z.string(),
+  kind: z.enum(['dxf', 'svg', 'csv', 'json']),
+  bytes: z.number().int(),
+  sha256: z.string(),
+});
+export const designFilesSchema = z.object({
+  version: z.number().int(),
+  files: z.array(designFileSchema),
+});
+export type DesignFiles = z.infer<typeof designFilesSchema>;
+
+export const errorCodes = [
+  'bad-input',
+  'not-signed-in',
+  'not-allowed',
+  'not-found',
+  'conflict',
+  'checks-fail',
+  'too-many',
+  'unavailable',
+  'internal',
+] as const;
+
+/** Every answer that is not a success, for every route. */
+export const apiErrorSchema = z.object({
+  error: z.object({
+    code: z.enum(errorCodes),
+    /** Plain words for the person: field, value and what would work. */
+    message: z.string(),
+    /** Where in the input, as `design.sections.0.airGap`. */
+    field: z.string().optional(),
+  }),
+  /** With `conflict`: what is stored now. */
+  current: designRecordSchema.optional(),
+});
+export type ApiErrorCode = (typeof errorCodes)[number];
