@@ -1,0 +1,13 @@
+import type { ReactNode } from 'react';
+import { TopBar } from '@/components/account/top-bar';
+import { pageViewer } from '@/lib/access';
+
+export default async function WorkshopLayout({ children }: { children: ReactNode }) {
+  const viewer = await pageViewer();
+  return (
+    <div className="flex min-h-dvh flex-col">
+      <TopBar workshop={viewer.workshopName} person={viewer.name} />
+      {children}
+    </div>
+  );
+}

@@ -1,0 +1,40 @@
+import {
+  designFilesSchema,
+  designListSchema,
+  designRecordSchema,
+  type CreateDesign,
+  type DesignRecord,
+  type DesignStatus,
+  type SaveDesign,
+} from '@/lib/schemas/api';
+import { request, send } from './request';
+
+export const designKeys = {
+  list: ['designs'] as const,
+  record: (id: string) => ['designs', id] as const,
+  files: (id: string, version: number) => ['designs', id, 'files', version] as const,
+};
+
+export const fetchDesigns = async () => (await request(designListSchema, '/api/designs')).designs;
+
+export const fetchDesign = (id: string): Promise<DesignRecord> =>
+  request(designRecordSchema, `/api/designs/${id}`);
+
+export const createDesign = (body: CreateDesign): Promise<DesignRecord> =>
+  request(designRecordSchema, '/api/designs', { method: 'POST', body });
+
+export const saveDesign = (id: string, body: SaveDesign): Promise<DesignRecord> =>
+  request(designRecordSchema, `/api/designs/${id}`, { method: 'PUT', body });
+
+export const setDesignStatus = (
+  id: string,
+  body: { version: number; status: DesignStatus },
+): Promise<DesignRecord> =>
+  request(designRecordSchema, `/api/designs/${id}/status`, { method: 'PUT', body });
+
+export async function deleteDesign(id: string): Promise<void> {
+  await send(`/api/designs/${id}`, { method: 'DELETE' });
+}
+
+export const fetchFiles = (id: string) =>
+  request(designFilesSchema, `/api/designs/${id}/files`);
