@@ -49,4 +49,5 @@ export {
   type SharedKey,
   type TargetKind,
 } from './parameters';
+export { resonantCapacitance, resonantFrequency } from './target';
 export { formatQuantity, writeQuantity, type WrittenQuantity } from './quantity';

@@ -1,0 +1,195 @@
+/** Checks on finished plates, as data. A check that passes is listed too: it says by how much. */
+
+import type { Design, Section } from './design';
+import type { SectionResult, Stack } from './derived';
+import type { Finding, Severity } from './finding';
+import { formatQuantity } from './quantity';
+import { paschenVoltage, practiceVoltage } from './voltage';
+
+/** Largest law error as a fraction of the range: warned of above the first, failed above the second. */
+const LAW_WARN = 0.002;
+const LAW_FAIL = 0.01;
+
+/** Overhang in air gaps that the edge formula wants. */
+const DEEP_OVERHANG = 3;
+
+/** Blade over the cut-out in air gaps below which the two edge gains run into each other. */
+const DEEP_BLADE = 4;
+
+const mm = (value: number): string => formatQuantity(value, 'length', 4);
+
+type Ring = Pick<Finding, 'label' | 'value' | 'limit' | 'parameters'>;
+
+function atLeast(
+  code: Finding['code'],
+  section: number | null,
+  bad: Severity,
+  check: Ring & { readonly change: string },
+): Finding {
+  const holds = check.value >= check.limit;
+  return {
+    code,
+    section,
+    severity: holds ? 'ok' : bad,
+    quantity: 'length',
+    ...check,
+    change: holds ? '' : check.change,
+  };
+}
+
+function lawFinding(result: SectionResult, index: number): Finding {
+  const { fraction, angle } = result.law.largestError;
+  const severity: Severity = fraction > LAW_FAIL ? 'fail' : fraction > LAW_WARN ? 'warn' : 'ok';
+  return {
+    code: 'law-held',
+    severity,
+    section: index,
+    label: 'Largest law error, of the range',
+    value: fraction,
+    limit: LAW_WARN,
+    quantity: 'ratio',
+    change:
+      severity === 'ok'
+        ? ''
+        : `Look at the chart near ${formatQuantity(angle, 'angle', 3)}; a smaller gap or a wider blade there holds the law better.`,
+    parameters: ['airGap', 'rotorPlates', 'cutoutRadius'],
+  };
+}
+
+function voltageFinding(section: Section, index: number): Finding {
+  const { workingVoltage, airGap } = section;
+  const practice = practiceVoltage(airGap);
+  const breakdown = paschenVoltage(airGap);
+  const severity: Severity =
+    workingVoltage <= practice ? 'ok' : workingVoltage < breakdown ? 'warn' : 'fail';
+  const change =
+    severity === 'ok'
+      ? ''
+      : `Common practice is 1 kV peak per millimetre with rounded edges: take a gap of at least ${mm(workingVoltage / 1000)}. Even smooth parallel plates break down near ${formatQuantity(breakdown, 'voltage', 3)}.`;
+  return {
+    code: 'gap-voltage',
+    severity,
+    section: index,
+    label: 'Working voltage at the gap',
+    value: workingVoltage,
+    limit: practice,
+    quantity: 'voltage',
+    change,
+    parameters: ['airGap', 'workingVoltage'],
+  };
+}
+
+function sectionFindings(design: Design, result: SectionResult, index: number): Finding[] {
+  const section = design.sections[index]!;
+  const { airGap, rotorThickness, statorThickness } = section;
+  const overCutout = result.narrowestBlade + design.hubRadius - design.cutoutRadius;
+  const clearance = Math.min(...result.posts.map((post) => post.clearance));
+  return [
+    lawFinding(result, index),
+    voltageFinding(section, index),
+    atLeast('blade-narrow', index, 'fail', {
+      label: 'Narrowest blade, over the hub',
+      value: result.narrowestBlade,
+      limit: rotorThickness,
+      change:
+        'Narrower than the sheet is thick: take fewer plates, a larger gap or a smaller hub.',
+      parameters: ['hubRadius', 'rotorPlates', 'airGap'],
+    }),
+    atLeast('blade-narrow', index, 'warn', {
+      label: 'Narrowest blade, over the cut-out',
+      value: overCutout,
+      limit: DEEP_BLADE * airGap,
+      change: `The edges run into each other below ${DEEP_BLADE} gaps and the law is less sure there: take fewer plates, a larger open capacitance or a smaller cut-out.`,
+      parameters: ['cutoutRadius', 'rotorPlates', 'airGap'],
+    }),
+    atLeast('post-clearance', index, 'fail', {
+      label: 'Rotor sweep to the nearest post',
+      value: clearance,
+      limit: Math.max(design.postClearance - 1e-9, airGap),
+      change:
+        clearance < 0
+          ? `The rotor hits the post: move the post circle out by ${mm(design.postClearance - clearance)}.`
+          : `Move the post circle out by ${mm(Math.max(design.postClearance, airGap) - clearance)}.`,
+      parameters: ['postCircleRadius', 'postClearance'],
+    }),
+    atLeast('overhang-short', index, 'warn', {
+      label: 'Stator overhang past the rotor',
+      value: design.overhang,
+      limit: DEEP_OVERHANG * airGap,
+      change: `The edge gain is less than reckoned below ${DEEP_OVERHANG} gaps: make the overhang ${mm(DEEP_OVERHANG * airGap)}.`,
+      parameters: ['overhang'],
+    }),
+    atLeast('cutout-clearance', index, 'fail', {
+      label: 'Stator cut-out to hub and rotor spacer',
+      value: design.cutoutRadius - Math.max(design.hubRadius, design.spacerRadius),
+      limit: airGap,
+      change: `Nearer than the air gap: make the cut-out radius at least ${mm(Math.max(design.hubRadius, design.spacerRadius) + airGap)}.`,
+      parameters: ['cutoutRadius', 'hubRadius', 'spacerRadius'],
+    }),
+    atLeast('hole-small', index, 'warn', {
+      label: 'Smallest hole against its sheet',
+      value: Math.min(design.shaftDiameter, design.postHoleDiameter),
+      limit: design.shaftDiameter < design.postHoleDiameter ? rotorThickness : statorThickness,
+      change: 'Holes smaller than the sheet is thick cut badly: make it larger, or drill it.',
+      parameters: ['postHoleDiameter', 'shaftDiameter'],
+    }),
+    atLeast('web-thin', index, 'warn', {
+      label: 'Hub round the shaft hole',
+      value: design.hubRadius - design.shaftDiameter / 2,
+      limit: rotorThickness,
+      change: `Make the hub radius at least ${mm(design.shaftDiameter / 2 + rotorThickness)}.`,
+      parameters: ['hubRadius'],
+    }),
+    atLeast('web-thin', index, 'warn', {
+      label: 'Metal round the post hole',
+      value: design.postWeb,
+      limit: statorThickness,
+      change: `Make it at least ${mm(statorThickness)}.`,
+      parameters: ['postWeb'],
+    }),
+  ];
+}
+
+/** All checks of a design whose sections have been derived. */
+export function findingsOf(
+  design: Design,
+  results: readonly SectionResult[],
+  stack: Stack,
+): Finding[] {
+  const over = (value: number, limit: number): string => mm(value - limit);
+  const within = (
+    code: 'radius' | 'depth',
+    rest: Ring & { readonly change: string },
+  ): Finding => ({
+    code,
+    section: null,
+    severity: rest.value <= rest.limit ? 'ok' : 'fail',
+    quantity: 'length',
+    ...rest,
+    change: rest.value <= rest.limit ? '' : rest.change,
+  });
+  return [
+    ...results.flatMap((result, index) => sectionFindings(design, result, index)),
+    atLeast('spacer-proud', null, 'warn', {
+      label: 'Hub against the rotor spacer',
+      value: design.hubRadius,
+      limit: design.spacerRadius,
+      change: `The spacer stands over the hub: make the hub radius at least ${mm(design.spacerRadius)}.`,
+      parameters: ['hubRadius', 'spacerRadius'],
+    }),
+    within('radius', {
+      label: 'Furthest part from the shaft',
+      value: stack.outerRadius,
+      limit: design.largestRadius,
+      change: `Too large by ${over(stack.outerRadius, design.largestRadius)}: take more plates, a smaller gap or smaller ears.`,
+      parameters: ['largestRadius', 'rotorPlates', 'airGap'],
+    }),
+    within('depth', {
+      label: 'Depth over all plates',
+      value: stack.depth,
+      limit: design.largestDepth,
+      change: `Too deep by ${over(stack.depth, design.largestDepth)}: take fewer plates, thinner sheet or a smaller gap.`,
+      parameters: ['largestDepth', 'rotorPlates', 'airGap'],
+    }),
+  ];
+}

@@ -1,0 +1,65 @@
+/** The plates of all sections along the shaft. */
+
+import type { Design, Section } from './design';
+import type { PlateRole, SectionResult, Stack, StackPlate, StackSpacer } from './derived';
+import { contourReach } from './measure';
+
+/** Spacer between neighbouring rotor plates: two gaps and the stator plate between them, mm. */
+export function rotorSpacerLength(section: Section): number {
+  return 2 * section.airGap + section.statorThickness;
+}
+
+/** Spacer between neighbouring stator plates, mm. */
+export function statorSpacerLength(section: Section): number {
+  return 2 * section.airGap + section.rotorThickness;
+}
+
+function sectionPlates(section: Section, index: number, start: number): StackPlate[] {
+  const plates: StackPlate[] = [];
+  let z = start;
+  let role: PlateRole = section.statorPlates >= section.rotorPlates ? 'stator' : 'rotor';
+  for (let i = 0; i < section.rotorPlates + section.statorPlates; i++) {
+    const thickness = role === 'rotor' ? section.rotorThickness : section.statorThickness;
+    plates.push({ role, section: index, z: z + thickness / 2, thickness });
+    z += thickness + section.airGap;
+    role = role === 'rotor' ? 'stator' : 'rotor';
+  }
+  return plates;
+}
+
+function spacersBetween(plates: readonly StackPlate[], role: PlateRole): StackSpacer[] {
+  const own = plates.filter((plate) => plate.role === role);
+  return own.slice(1).map((plate, i) => {
+    const from = own[i]!.z + own[i]!.thickness / 2;
+    const to = plate.z - plate.thickness / 2;
+    return { role, section: plate.section, z: (from + to) / 2, length: to - from };
+  });
+}
+
+/** Stacks the sections from the first face on, each with its plates alternating. */
+export function stackOf(design: Design, sections: readonly SectionResult[]): Stack {
+  const plates: StackPlate[] = [];
+  const spacers: StackSpacer[] = [];
+  let start = 0;
+  let depth = 0;
+  design.sections.forEach((section, index) => {
+    const own = sectionPlates(section, index, start);
+    plates.push(...own);
+    spacers.push(...spacersBetween(own, 'rotor'), ...spacersBetween(own, 'stator'));
+    const last = own[own.length - 1]!;
+    depth = last.z + last.thickness / 2;
+    start = depth + design.sectionSpacing;
+  });
+  const allPlates = sections.flatMap(({ rotor, stator }) => [rotor, stator]);
+  const sum = (of: 'mass' | 'cutLength'): number =>
+    allPlates.reduce((total, plate) => total + plate[of] * plate.quantity, 0);
+  return {
+    plates,
+    spacers,
+    depth,
+    sweepRadius: Math.max(...sections.map((section) => section.sweepRadius)),
+    outerRadius: Math.max(...allPlates.map((plate) => contourReach(plate.outside))),
+    mass: sum('mass'),
+    cutLength: sum('cutLength'),
+  };
+}
