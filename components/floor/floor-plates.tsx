@@ -1,0 +1,91 @@
+import type { Ref } from 'react';
+import type { SectionResult } from '@/geometry';
+import { svgPath } from './svg-path';
+import type { useRotorDrag } from './use-rotor-drag';
+
+/** Stator of a section, hatched with a steel edge, its posts with it. Drawn with y up. */
+export function StatorPlate({
+  section,
+  hatch,
+}: {
+  section: SectionResult;
+  /** Id of the hatch pattern. */
+  hatch: string;
+}) {
+  const { stator, posts } = section;
+  return (
+    <g data-part="stator">
+      <path
+        d={svgPath([stator.outside, ...stator.holes])}
+        fillRule="evenodd"
+        fill={`url(#${hatch})`}
+        className="stroke-steel"
+        strokeWidth="1.75"
+        vectorEffect="non-scaling-stroke"
+      />
+      {posts.map((post) => (
+        <circle
+          key={`${post.x} ${post.y}`}
+          cx={post.x}
+          cy={post.y}
+          r={post.spacerRadius}
+          className="fill-none stroke-steel/70"
+          strokeDasharray="2 3"
+          vectorEffect="non-scaling-stroke"
+        />
+      ))}
+    </g>
+  );
+}
+
+/** Rotor of a section, solid with a brass edge, and the shaft; drawn at mesh angle 0, y up. */
+export function RotorPlate({
+  section,
+  shaftRadius,
+  mark,
+  angle,
+  ref,
+  drag,
+}: {
+  section: SectionResult;
+  /** mm. */
+  shaftRadius: number;
+  /** Radius at which the leading edge is marked, mm. */
+  mark: number;
+  /** Degrees, when first drawn. */
+  angle: number;
+  ref: Ref<SVGGElement>;
+  drag: ReturnType<typeof useRotorDrag>;
+}) {
+  const { rotor } = section;
+  return (
+    <g
+      ref={ref}
+      data-part="rotor"
+      transform={`rotate(${angle})`}
+      className="cursor-grab touch-none active:cursor-grabbing"
+      {...drag}
+    >
+      <path
+        d={svgPath([rotor.outside, ...rotor.holes])}
+        fillRule="evenodd"
+        className="fill-brass/45 stroke-brass"
+        strokeWidth="2"
+        strokeLinejoin="round"
+        vectorEffect="non-scaling-stroke"
+      />
+      <circle
+        r={shaftRadius}
+        className="fill-floor-edge stroke-brass"
+        strokeWidth="1.5"
+        vectorEffect="non-scaling-stroke"
+      />
+      <path
+        d={`M0 0H${shaftRadius * 0.8}M${section.sweepRadius} 0H${mark}`}
+        className="stroke-brass"
+        strokeDasharray="5 4"
+        vectorEffect="non-scaling-stroke"
+      />
+    </g>
+  );
+}

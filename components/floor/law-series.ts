@@ -1,0 +1,64 @@
+import type { SectionResult } from '@/geometry';
+import { toDegrees } from './degrees';
+import { fixedUnit, type FixedUnit } from './fixed-unit';
+import { valueAt } from './interpolate';
+import { resonance } from './resonance';
+
+/** A section's law in the units of the chart. All arrays have the same length. */
+export interface LawSeries {
+  /** Degrees. */
+  readonly angle: number[];
+  /** In the unit of `capacitance`. */
+  readonly target: number[];
+  readonly achieved: number[];
+  /** Achieved less target, percent of the capacitance range. */
+  readonly error: number[];
+  /** In the unit of `frequency`; null without a coil. */
+  readonly tuned: number[] | null;
+  readonly capacitance: FixedUnit;
+  readonly frequency: FixedUnit | null;
+}
+
+function unitsOf({ totalMin, totalMax, inductance }: SectionResult) {
+  return {
+    capacitance: fixedUnit(totalMax, 'capacitance'),
+    frequency:
+      inductance === null ? null : fixedUnit(resonance(inductance, totalMin), 'frequency'),
+  };
+}
+
+export function lawSeries(section: SectionResult): LawSeries {
+  const { law, inductance } = section;
+  const range = section.totalMax - section.totalMin;
+  const { capacitance, frequency } = unitsOf(section);
+  return {
+    angle: law.angle.map(toDegrees),
+    target: law.target.map(capacitance.scale),
+    achieved: law.achieved.map(capacitance.scale),
+    error: law.error.map((error) => (100 * error) / range),
+    tuned:
+      frequency && law.achieved.map((total) => frequency.scale(resonance(inductance!, total))),
+    capacitance,
+    frequency,
+  };
+}
+
+/** What a section gives at one mesh angle, written with the units of its chart. */
+export interface LawReading {
+  readonly capacitance: string;
+  readonly frequency: string | null;
+}
+
+/** @returns a function of the mesh angle, rad; the achieved total and what it tunes to. */
+export function lawReader(section: SectionResult): (angle: number) => LawReading {
+  const { law, inductance } = section;
+  const { capacitance, frequency } = unitsOf(section);
+  return (angle) => {
+    const total = valueAt(law.angle, law.achieved, angle);
+    return {
+      capacitance: `${capacitance.write(total)} ${capacitance.unit}`,
+      frequency:
+        frequency && `${frequency.write(resonance(inductance!, total))} ${frequency.unit}`,
+    };
+  };
+}
