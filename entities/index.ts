@@ -1,0 +1,5 @@
+export { Design, PARAMETERS_FORMAT, type CheckCounts } from './design';
+export { Membership } from './membership';
+export { RecordEntry } from './record-entry';
+export { User } from './user';
+export { Workshop } from './workshop';

@@ -1,0 +1,46 @@
+import 'server-only';
+import { randomUUID } from 'node:crypto';
+import { Design, User, Workshop } from '@/entities';
+import { defaultDesign } from '@/geometry';
+import { mayEdit, requireMember } from './access';
+import { assessDesign } from './assess-design';
+import { entityManager } from './db';
+import { toRecord } from './design-record';
+import { badInput } from './errors';
+import { addRecord } from './record';
+import { createDesignSchema, type DesignRecord } from './schemas/api';
+
+/** Makes a design in the viewer's workshop, from the one given or the kernel's default. */
+export async function createDesign(input: unknown): Promise<DesignRecord> {
+  const viewer = await requireMember(mayEdit);
+  const parsed = createDesignSchema.safeParse(input);
+  if (!parsed.success) throw badInput(parsed.error);
+  const { name, design = defaultDesign() } = parsed.data;
+  const { kernel, checks } = assessDesign(design);
+
+  const em = await entityManager();
+  return em.transactional(async (tx) => {
+    const person = await tx.findOneOrFail(User, viewer.userId);
+    const stored = tx.create(Design, {
+      id: randomUUID(),
+      workshop: tx.getReference(Workshop, viewer.workshopId),
+      name,
+      parameters: design,
+      kernel,
+      checks,
+      createdBy: person,
+      updatedBy: person,
+      createdAt: new Date(),
+      updatedAt: new Date(),
+    });
+    addRecord(tx, {
+      workshopId: viewer.workshopId,
+      who: viewer.userId,
+      what: 'design-created',
+      subject: stored.id,
+      detail: { name, kernel, checks },
+    });
+    await tx.flush();
+    return toRecord(stored, viewer);
+  });
+}

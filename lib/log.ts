@@ -1,0 +1,40 @@
+import 'server-only';
+import pino from 'pino';
+
+const secrets = [
+  'password',
+  'passwordHash',
+  'secret',
+  'token',
+  'cookie',
+  'authorization',
+  'NEXTAUTH_SECRET',
+  'DATABASE_URL',
+];
+
+/** One JSON line per event. Whatever carries a secret is blanked, two levels deep. */
+export const log = pino({
+  level: process.env.LOG_LEVEL ?? 'info',
+  base: undefined,
+  timestamp: pino.stdTimeFunctions.isoTime,
+  formatters: { level: (label) => ({ level: label }) },
+  redact: {
+    paths: secrets.flatMap((name) => [name, `*.${name}`, `*.*.${name}`]),
+    censor: '[redacted]',
+  },
+  serializers: { err: describeError },
+});
+
+/** Name, message, code and stack of an error and its causes. Driver errors carry rows: left out. */
+function describeError(error: unknown): unknown {
+  if (!(error instanceof Error)) return String(error);
+  const code: unknown = Reflect.get(error, 'code');
+  return {
+    name: error.name,
+    // A driver's message ends in the statement with its values, which may be somebody's.
+    message: error.message.split('\n')[0]!.replace(/^.* - /, ''),
+    ...(typeof code === 'string' && { code }),
+    stack: error.stack?.split('\n').filter((line) => /^\s+at /.test(line)),
+    ...(error.cause !== undefined && { cause: describeError(error.cause) }),
+  };
+}

@@ -1,0 +1,43 @@
+import 'server-only';
+import { mayDownload, requireMember } from './access';
+import { entityManager } from './db';
+import { derivePlates, hashedFiles, type HashedFile } from './design-files';
+import { notFound, RequestError } from './errors';
+import { findDesign } from './queries';
+import { addRecord } from './record';
+
+/**
+ * One file of a design, from the stored parameters, with a row in the record that names its
+ * bytes by their hash. No row, no file.
+ * @throws RequestError not-found or checks-fail.
+ */
+export async function recordDownload(id: string, fileName: string): Promise<HashedFile> {
+  const viewer = await requireMember(mayDownload);
+  const stored = await findDesign(viewer, id);
+  if (!stored) throw notFound();
+  const derived = derivePlates(stored.design);
+  const file = hashedFiles(stored.name, derived).find(({ name }) => name === fileName);
+  if (!file) {
+    throw new RequestError(
+      'not-found',
+      'No such file in this design; it may have been saved since. Load the list of files again.',
+    );
+  }
+  const em = await entityManager();
+  await em.transactional((tx) => {
+    addRecord(tx, {
+      workshopId: viewer.workshopId,
+      who: viewer.userId,
+      what: 'file-downloaded',
+      subject: id,
+      detail: {
+        file: file.name,
+        sha256: file.sha256,
+        bytes: file.body.byteLength,
+        version: stored.version,
+        kernel: derived.kernel,
+      },
+    });
+  });
+  return file;
+}
