@@ -19,7 +19,7 @@ import { targetOf } from './target';
 
 /** Intervals over the travel: of the solved curve, and of the back-check and chart. */
 const CURVE_STEPS = 360;
-const CHECK_STEPS = 180;
+const CHECK_STEPS = 90;
 
 type Cut = Pick<
   Plate,

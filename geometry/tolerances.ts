@@ -10,7 +10,7 @@ export const FIT_AT_SAMPLES = 0.004;
 export const SAME_ARC = 1e-7;
 
 /** mm. Sagitta of the chords in the back-check. The polygon keeps the area, so less is not needed. */
-export const FLATTENING = 0.01;
+export const FLATTENING = 0.02;
 
 /** mm per clipping unit: clipper2 works on integers. */
 export const CLIP_UNIT = 1e-5;
