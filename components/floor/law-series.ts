@@ -13,6 +13,8 @@ export interface LawSeries {
   readonly achieved: number[];
   /** Achieved less target, percent of the capacitance range. */
   readonly error: number[];
+  /** Where the error is largest, degrees, and its value there. */
+  readonly largest: { readonly angle: number; readonly error: number };
   /** In the unit of `frequency`; null without a coil. */
   readonly tuned: number[] | null;
   readonly capacitance: FixedUnit;
@@ -31,11 +33,16 @@ export function lawSeries(section: SectionResult): LawSeries {
   const { law, inductance } = section;
   const range = section.totalMax - section.totalMin;
   const { capacitance, frequency } = unitsOf(section);
+  const { angle } = law.largestError;
   return {
     angle: law.angle.map(toDegrees),
     target: law.target.map(capacitance.scale),
     achieved: law.achieved.map(capacitance.scale),
     error: law.error.map((error) => (100 * error) / range),
+    largest: {
+      angle: toDegrees(angle),
+      error: (100 * valueAt(law.angle, law.error, angle)) / range,
+    },
     tuned:
       frequency && law.achieved.map((total) => frequency.scale(resonance(inductance!, total))),
     capacitance,

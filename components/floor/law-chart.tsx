@@ -1,0 +1,63 @@
+'use client';
+
+import 'uplot/dist/uPlot.min.css';
+import { useMemo, useRef } from 'react';
+import type { SectionResult } from '@/geometry';
+import { AngleCursor } from './angle-cursor';
+import type { AngleStore } from './angle-store';
+import { INSET_LEFT, INSET_RIGHT } from './insets';
+import { LawLegend } from './law-legend';
+import { errorPlot, lawPlot } from './law-plots';
+import { lawSeries } from './law-series';
+import { LawTable } from './law-table';
+import { useAngleDrag } from './use-angle-drag';
+import { usePlot } from './use-plot';
+
+/**
+ * The law over the travel: capacitance asked and achieved, the error in a strip below, and the
+ * frequency with a coil. It stands under the angle rule, which is the scale of its angles.
+ */
+export function LawChart({ section, store }: { section: SectionResult; store: AngleStore }) {
+  const track = useRef<HTMLDivElement>(null);
+  const lawHost = useRef<HTMLDivElement>(null);
+  const errorHost = useRef<HTMLDivElement>(null);
+  const travel = section.law.angle.at(-1)!;
+  const series = useMemo(() => lawSeries(section), [section]);
+  const drag = useAngleDrag(store, travel, track);
+
+  usePlot(lawHost, lawPlot, series);
+  usePlot(errorHost, errorPlot, series);
+
+  return (
+    <section aria-label="Law chart" className="bg-panel" data-part="law-chart">
+      <div className="relative cursor-ew-resize touch-pan-y border-t border-line" {...drag}>
+        <div aria-hidden="true">
+          <div className="relative">
+            <div ref={lawHost} className="h-44" />
+            <span className="absolute top-1 left-2 text-small text-brass-dark">
+              {series.capacitance.unit}
+            </span>
+            {series.frequency && (
+              <span className="absolute top-1 right-2 text-small text-action">
+                {series.frequency.unit}
+              </span>
+            )}
+          </div>
+          <div className="relative border-t border-line">
+            <div ref={errorHost} className="h-24" />
+            <span className="absolute top-1 left-2 text-small text-bad">error, % of range</span>
+          </div>
+        </div>
+        <div
+          ref={track}
+          className="pointer-events-none absolute inset-y-0"
+          style={{ left: INSET_LEFT, right: INSET_RIGHT }}
+        >
+          <AngleCursor store={store} travel={travel} />
+        </div>
+      </div>
+      <LawLegend section={section} series={series} />
+      <LawTable section={section} series={series} />
+    </section>
+  );
+}

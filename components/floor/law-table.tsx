@@ -1,0 +1,67 @@
+import type { SectionResult } from '@/geometry';
+import { toDegrees, toRadians } from './degrees';
+import { valueAt } from './interpolate';
+import type { LawSeries } from './law-series';
+import { resonance } from './resonance';
+
+const EVERY = 10;
+
+/** The chart in figures, every 10° and at the end of the travel. */
+export function LawTable({ section, series }: { section: SectionResult; series: LawSeries }) {
+  const { law, inductance, totalMax, totalMin } = section;
+  const { capacitance, frequency } = series;
+  const travel = toDegrees(law.angle.at(-1)!);
+  const rows: number[] = [];
+  for (let degree = 0; degree < travel - 0.05; degree += EVERY) rows.push(degree);
+  rows.push(travel);
+
+  return (
+    <details className="border-t border-line">
+      <summary className="flex min-h-11 cursor-pointer items-center px-3 text-small font-medium">
+        The chart in figures, every {EVERY}°
+      </summary>
+      <div
+        role="region"
+        aria-label="The chart in figures"
+        tabIndex={0}
+        className="max-h-72 overflow-auto px-3 pb-3"
+      >
+        <table className="dense w-full max-w-2xl text-right text-small tabular-nums">
+          <thead className="sticky top-0 bg-panel">
+            <tr className="border-b border-line">
+              {[
+                'Mesh angle, °',
+                `Asked, ${capacitance.unit}`,
+                `Achieved, ${capacitance.unit}`,
+                'Error, % of range',
+                ...(frequency ? [`Tunes to, ${frequency.unit}`] : []),
+              ].map((title) => (
+                <th key={title} scope="col" className="py-1.5 pl-3 font-medium first:pl-0">
+                  {title}
+                </th>
+              ))}
+            </tr>
+          </thead>
+          <tbody>
+            {rows.map((degree) => {
+              const angle = toRadians(degree);
+              const achieved = valueAt(law.angle, law.achieved, angle);
+              const error = valueAt(law.angle, law.error, angle);
+              return (
+                <tr key={degree} className="border-b border-line/60">
+                  <th scope="row" className="py-1 font-normal">
+                    {Number(degree.toFixed(1))}
+                  </th>
+                  <td>{capacitance.write(valueAt(law.angle, law.target, angle))}</td>
+                  <td>{capacitance.write(achieved)}</td>
+                  <td>{((100 * error) / (totalMax - totalMin)).toFixed(3)}</td>
+                  {frequency && <td>{frequency.write(resonance(inductance!, achieved))}</td>}
+                </tr>
+              );
+            })}
+          </tbody>
+        </table>
+      </div>
+    </details>
+  );
+}
