@@ -1,0 +1,78 @@
+'use client';
+
+import { useCallback, useRef, useState } from 'react';
+import type { Derived } from '@/geometry';
+import type { AngleStore } from '@/components/floor/angle-store';
+import { toDegrees } from '@/components/floor/degrees';
+import { Button } from '@/components/ui/button';
+import type { EyeHandle } from './eye';
+import { Scene } from './scene';
+import { StackCanvas } from './stack-canvas';
+import { views, type ViewName } from './views';
+
+/**
+ * The meshed stack in 3D: every plate, spacer and post and the shaft. It turns with the store. The
+ * wrapper carries data-plates, and data-angle with the turn, in degrees, of the frame last drawn.
+ */
+export function StackView({ derived, store }: { derived: Derived; store: AngleStore }) {
+  const wrapper = useRef<HTMLElement>(null);
+  const eye = useRef<EyeHandle>(null);
+  const [drawable, setDrawable] = useState(true);
+  const fail = useCallback(() => setDrawable(false), []);
+  const onFrame = useCallback((angle: number) => {
+    if (wrapper.current) wrapper.current.dataset.angle = toDegrees(angle).toFixed(1);
+  }, []);
+  const { plates, depth } = derived.stack;
+  const rotors = plates.filter(({ role }) => role === 'rotor').length;
+
+  return (
+    <section
+      ref={wrapper}
+      aria-label="Meshed stack"
+      data-part="stack"
+      data-plates={plates.length}
+      className="flex h-full min-h-64 w-full flex-col bg-well"
+    >
+      <div
+        role="img"
+        aria-label={
+          `Meshed stack of ${rotors} rotor and ${plates.length - rotors} stator plates, ` +
+          `${depth.toFixed(1)} mm deep, turned to the mesh angle of the angle rule`
+        }
+        className="relative min-h-0 flex-1"
+      >
+        {drawable ? (
+          <div className="absolute inset-0">
+            <StackCanvas onFailure={fail}>
+              <Scene derived={derived} store={store} eye={eye} onFrame={onFrame} />
+            </StackCanvas>
+          </div>
+        ) : null}
+      </div>
+      {drawable ? (
+        <div
+          role="group"
+          aria-label="View of the stack"
+          className="flex flex-wrap gap-1 border-t border-line p-1"
+        >
+          {(Object.keys(views) as ViewName[]).map((name) => (
+            <Button key={name} look="quiet" onPress={() => eye.current?.look(name)}>
+              {views[name].label}
+            </Button>
+          ))}
+          <Button look="quiet" onPress={() => eye.current?.step(0.8)}>
+            Nearer
+          </Button>
+          <Button look="quiet" onPress={() => eye.current?.step(1.25)}>
+            Further
+          </Button>
+        </div>
+      ) : (
+        <p className="m-auto max-w-sm p-4 text-ink-2">
+          This browser offers no WebGL 2, which the picture of the stack needs. Plan, chart and
+          files do not depend on it.
+        </p>
+      )}
+    </section>
+  );
+}
