@@ -9,6 +9,9 @@ import { formatQuantity } from './quantity';
 
 const mm = (value: number): string => formatQuantity(value, 'length', 4);
 
+/** mm. Plates beyond this are not drawn: twice the largest radius that a design may ask for. */
+const LARGEST_DRAWN = 600;
+
 /** Shapes that contradict themselves, whatever the law. */
 export function shapeFindings(design: Design, section: Section, index: number): Finding[] {
   const findings: Finding[] = [];
@@ -60,6 +63,25 @@ export function shapeFindings(design: Design, section: Section, index: number): 
     }
   }
   return findings;
+}
+
+/**
+ * How to bring the longest rotor radius down: the swept area goes as gap over gaps.
+ * @param sweep longest rotor radius now, mm
+ * @param wanted the radius that would fit, mm
+ */
+export function smallerRadius(
+  design: Design,
+  section: Section,
+  sweep: number,
+  wanted: number,
+): string {
+  const rc2 = design.cutoutRadius ** 2;
+  if (wanted <= design.cutoutRadius) return 'Make the cut-out and what surrounds the rotor smaller.';
+  const factor = (sweep ** 2 - rc2) / (wanted ** 2 - rc2);
+  const gaps = section.rotorPlates + section.statorPlates - 1;
+  const plates = Math.ceil(gaps * factor) + 1;
+  return `Take about ${plates} plates in all, or an air gap of about ${mm(section.airGap / factor)}.`;
 }
 
 export interface OutlineInput {
@@ -143,8 +165,24 @@ function earFindings({ design, layout, statorRadius }: OutlineInput): Finding[] 
   return findings;
 }
 
+function hugeFinding({ design, section, index, curve }: OutlineInput): Finding | null {
+  const sweep = curve.radius.reduce((a, b) => Math.max(a, b), 0);
+  if (sweep <= LARGEST_DRAWN) return null;
+  return {
+    code: 'radius',
+    severity: 'fail',
+    section: index,
+    label: 'Longest rotor radius',
+    value: sweep,
+    limit: design.largestRadius,
+    quantity: 'length',
+    change: smallerRadius(design, section, sweep, design.largestRadius),
+    parameters: ['rotorPlates', 'airGap'],
+  };
+}
+
 /** What leaves no outline although the range is possible. */
 export function outlineFindings(input: OutlineInput): Finding[] {
-  const blade = bladeFinding(input);
-  return blade ? [blade] : earFindings(input);
+  const none = bladeFinding(input) ?? hugeFinding(input);
+  return none ? [none] : earFindings(input);
 }

@@ -2,6 +2,7 @@
 
 import type { Design, Section } from './design';
 import type { SectionResult, Stack } from './derived';
+import { smallerRadius } from './feasibility';
 import type { Finding, Severity } from './finding';
 import { formatQuantity } from './quantity';
 import { paschenVoltage, practiceVoltage } from './voltage';
@@ -156,6 +157,8 @@ export function findingsOf(
   results: readonly SectionResult[],
   stack: Stack,
 ): Finding[] {
+  const widest = results.findIndex((result) => result.sweepRadius === stack.sweepRadius);
+  const plates = stack.plates.length;
   const over = (value: number, limit: number): string => mm(value - limit);
   const within = (
     code: 'radius' | 'depth',
@@ -181,14 +184,14 @@ export function findingsOf(
       label: 'Furthest part from the shaft',
       value: stack.outerRadius,
       limit: design.largestRadius,
-      change: `Too large by ${over(stack.outerRadius, design.largestRadius)}: take more plates, a smaller gap or smaller ears.`,
+      change: `Too large by ${over(stack.outerRadius, design.largestRadius)}. ${smallerRadius(design, design.sections[widest]!, stack.sweepRadius, stack.sweepRadius - (stack.outerRadius - design.largestRadius))}`,
       parameters: ['largestRadius', 'rotorPlates', 'airGap'],
     }),
     within('depth', {
       label: 'Depth over all plates',
       value: stack.depth,
       limit: design.largestDepth,
-      change: `Too deep by ${over(stack.depth, design.largestDepth)}: take fewer plates, thinner sheet or a smaller gap.`,
+      change: `Too deep by ${over(stack.depth, design.largestDepth)}: at this gap and sheet take at most ${Math.max(2, Math.floor((plates * design.largestDepth) / stack.depth))} plates in all, or make gap and sheet thinner.`,
       parameters: ['largestDepth', 'rotorPlates', 'airGap'],
     }),
   ];

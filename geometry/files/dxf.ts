@@ -40,7 +40,7 @@ export function dxfOf(placements: readonly Placement[]): string {
   Handle.seed = 0;
   const drawing = new Drawing();
   drawing.setUnits('Millimeters');
-  drawing.header('$MEASUREMENT', [[70, 1]]);
+  drawing.header('MEASUREMENT', [[70, 1]]);
   for (const { plate, dx, dy } of placements) {
     const part = partSlug(plate).toUpperCase();
     const outer = `${part}-OUTER-CUT`;

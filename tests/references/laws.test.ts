@@ -1,0 +1,83 @@
+/**
+ * The four laws between 40 and 400 pF over 180°, n = 20, g = 0.5 mm, rc = 10 mm, εr = 1, area term
+ * alone. Laws: E. A. Kolster, Bull. Bur. Standards 11 (1914), from memory. Table: computed from
+ * the equations of the laws, outside this project's code.
+ */
+import { describe, expect, test } from 'vitest';
+import { EPSILON_0 } from '../../geometry/constants';
+import { lawBetween, type LawName } from '../../geometry/law';
+import { solveRotorCurve } from '../../geometry/rotor-curve';
+
+const GAPS = 20;
+const GAP = 0.5;
+const CUTOUT = 10;
+
+/** Radius in mm and total in pF at 0°, 90° and 180°. */
+const table: Record<LawName, [number, number][]> = {
+  capacitance: [
+    [27.3332, 40],
+    [27.3332, 220],
+    [27.3332, 400],
+  ],
+  wavelength: [
+    [20.2716, 40],
+    [27.3332, 173.2456],
+    [32.9131, 400],
+  ],
+  frequency: [
+    [14.0829, 40],
+    [21.0941, 92.3545],
+    [56.6513, 400],
+  ],
+  logarithmic: [
+    [16.2959, 40],
+    [24.9707, 126.4911],
+    [41.8995, 400],
+  ],
+};
+
+/** ∫ (r² − rc²)/2 dφ by Simpson's rule. */
+function sweptArea(radius: Float64Array, travel: number): number {
+  const steps = radius.length - 1;
+  let sum = 0;
+  radius.forEach((r, i) => {
+    const weight = i === 0 || i === steps ? 1 : i % 2 === 1 ? 4 : 2;
+    sum += (weight * (r * r - CUTOUT * CUTOUT)) / 2;
+  });
+  return (sum * travel) / steps / 3;
+}
+
+describe.each(Object.entries(table) as [LawName, [number, number][]][])('%s', (name, rows) => {
+  const law = lawBetween(name, 40e-12, 400e-12);
+  const curve = solveRotorCurve({
+    law,
+    travel: Math.PI,
+    permittivityGaps: EPSILON_0 * GAPS,
+    airGap: GAP,
+    cutoutRadius: CUTOUT,
+    rotorEdge: 0,
+    statorEdge: 0,
+    steps: 360,
+  });
+
+  test.each([0, 1, 2])('radius and total at row %i', (row) => {
+    const [radius, total] = rows[row]!;
+    expect(curve.radius[row * 180]).toBeCloseTo(radius, 4);
+    expect(law.total(row / 2) * 1e12).toBeCloseTo(total, 4);
+  });
+
+  test('swept area g·ΔC/(ε·n) = 1016.46816 mm²', () => {
+    expect(sweptArea(curve.radius, Math.PI)).toBeCloseTo(1016.46816, 4);
+  });
+
+  test.each([0.1, 0.5, 0.9])(
+    'slope and curvature are the derivatives of the total at %f',
+    (x) => {
+      const h = 1e-4;
+      const slope = (law.total(x + h) - law.total(x - h)) / (2 * h);
+      const curvature = (law.total(x + h) - 2 * law.total(x) + law.total(x - h)) / (h * h);
+      expect(law.slope(x) / slope).toBeCloseTo(1, 6);
+      expect((law.curvature(x) - curvature) / law.total(x)).toBeCloseTo(0, 5);
+    },
+  );
+});
