@@ -1,0 +1,110 @@
+/**
+ * Fills an empty database with the demo workshop, once: two workshops, four people, and the
+ * worked designs. Passwords are made here and written to the file named as argument, so that no
+ * two installations share one. All names are invented.
+ */
+
+import { randomBytes, randomUUID } from 'node:crypto';
+import { existsSync, readFileSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { MikroORM, type EntityManager } from '@mikro-orm/postgresql';
+import { Design, Membership, RecordEntry, User, Workshop } from '../entities';
+import { checkDesign } from '../geometry';
+import { assessDesign } from '../lib/assess-design';
+import { hashPassword } from '../lib/password';
+import type { Role } from '../lib/schemas/api';
+import config from '../mikro-orm.config';
+
+const demo: { workshop: string; people: { name: string; email: string; role: Role }[] }[] = [
+  {
+    workshop: 'Larkfield Condenser Works',
+    people: [
+      { name: 'Maud Ferrin', email: 'maud@larkfield.example', role: 'owner' },
+      { name: 'Ivo Castell', email: 'ivo@larkfield.example', role: 'builder' },
+      { name: 'Petra Holm', email: 'petra@larkfield.example', role: 'machinist' },
+    ],
+  },
+  {
+    workshop: 'Tidewell Bench',
+    people: [{ name: 'Nils Auber', email: 'nils@tidewell.example', role: 'owner' }],
+  },
+];
+
+const SEED_LOCK = 80_411_908;
+const examples = join(import.meta.dirname, '..', 'public', 'examples');
+
+/** Two groups of letters and digits that can't be taken for one another; 60 bits. */
+function makePassword(): string {
+  const signs = 'abcdefghjkmnpqrstuvwxyz23456789x';
+  const word = [...randomBytes(12)].map((byte) => signs[byte % 32]).join('');
+  return `${word.slice(0, 6)}-${word.slice(6)}`;
+}
+
+function readJson(name: string): unknown {
+  return JSON.parse(readFileSync(join(examples, name), 'utf8'));
+}
+
+function workedDesigns(): { name: string; design: unknown }[] {
+  if (!existsSync(join(examples, 'index.json'))) return [];
+  const index = readJson('index.json') as { file: string }[];
+  return index.map(({ file }) => readJson(file) as { name: string; design: unknown });
+}
+
+function addDesigns(em: EntityManager, workshop: Workshop, builder: User): void {
+  for (const { name, design } of workedDesigns()) {
+    const parameters = checkDesign(design);
+    const { kernel, checks } = assessDesign(parameters);
+    const now = new Date();
+    const people = { createdBy: builder, updatedBy: builder };
+    const times = { createdAt: now, updatedAt: now };
+    const id = randomUUID();
+    const made = { id, workshop, name, parameters, kernel, checks, ...people, ...times };
+    em.create(Design, made);
+    em.create(RecordEntry, {
+      workshop,
+      who: builder,
+      what: 'design-created',
+      subject: id,
+      detail: { name, kernel, checks },
+    });
+  }
+}
+
+async function seed(em: EntityManager, signInsFile: string): Promise<boolean> {
+  await em.execute('select pg_advisory_xact_lock(?)', [SEED_LOCK]);
+  if ((await em.count(Workshop)) > 0) return false;
+  const signIns: Record<string, string>[] = [];
+  for (const { workshop: workshopName, people } of demo) {
+    const workshop = em.create(Workshop, { id: randomUUID(), name: workshopName });
+    for (const { name, email, role } of people) {
+      const password = makePassword();
+      signIns.push({ workshop: workshopName, name, email, role, password });
+      const passwordHash = await hashPassword(password);
+      const user = em.create(User, { id: randomUUID(), name, email, passwordHash });
+      em.create(Membership, { workshop, user, role });
+      if (role === 'owner') {
+        em.create(RecordEntry, {
+          workshop,
+          who: user,
+          what: 'workshop-opened',
+          subject: workshop.id,
+          detail: { name: workshopName },
+        });
+      }
+      if (role === 'builder') addDesigns(em, workshop, user);
+    }
+  }
+  // Before the commit: passwords that were lost would leave a demo nobody can enter.
+  writeFileSync(signInsFile, JSON.stringify(signIns, null, 2), { mode: 0o600 });
+  return true;
+}
+
+const [signInsFile] = process.argv.slice(2);
+if (!signInsFile) throw new Error('seed: name the file for the demo sign-ins');
+const orm = await MikroORM.init(config);
+try {
+  const made = await orm.em.fork().transactional((em) => seed(em, signInsFile));
+  if (made) console.log('Seeded the demo workshop');
+} finally {
+  await orm.close();
+}

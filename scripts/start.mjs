@@ -1,0 +1,90 @@
+/** npm start: from a fresh clone to a served workshop. npm run dev: the same with `--dev`. */
+
+import { randomBytes } from 'node:crypto';
+import { existsSync, readFileSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { ensureBuild } from './build.mjs';
+import { mustRun } from './command.mjs';
+import { claimClone, rememberServer } from './leftovers.mjs';
+import { checkNode, ensureNodeModules, ensureSystemPackages } from './packages.mjs';
+import { data, makeData } from './paths.mjs';
+import { freePortFrom } from './port.mjs';
+import { startPostgres } from './postgres.mjs';
+import { startServer } from './server.mjs';
+import { runUntilStopped, Stop } from './stop.mjs';
+
+const dev = process.argv.includes('--dev');
+const signIns = join(data, 'sign-ins.json');
+
+/** The address of the database: the one given, or our own cluster, started for it. */
+async function database() {
+  if (process.env.DATABASE_URL) return process.env.DATABASE_URL;
+  console.log('Starting PostgreSQL');
+  return (await startPostgres()).ensureDatabase('vaneloft');
+}
+
+/** What session cookies are sealed with: made once, kept where only we can read it. */
+function secret() {
+  if (process.env.NEXTAUTH_SECRET) return process.env.NEXTAUTH_SECRET;
+  const file = join(data, 'session-secret');
+  if (!existsSync(file)) {
+    writeFileSync(file, randomBytes(32).toString('base64url'), { mode: 0o600 });
+  }
+  return readFileSync(file, 'utf8');
+}
+
+function printSignIns() {
+  if (!existsSync(signIns)) {
+    console.log('The demo sign-ins were made by another start, which printed them.');
+    return;
+  }
+  const people = JSON.parse(readFileSync(signIns, 'utf8'));
+  const width = Math.max(...people.map(({ email }) => email.length));
+  console.log('Demo sign-ins:');
+  for (const { email, password, role, workshop } of people) {
+    console.log(`  ${email.padEnd(width)}  ${password}  ${role}, ${workshop}`);
+  }
+}
+
+async function main() {
+  checkNode();
+  makeData();
+  if (!process.env.DATABASE_URL) {
+    await claimClone();
+    await ensureSystemPackages(['postgresql']);
+  }
+  await ensureNodeModules();
+
+  const env = { ...process.env, DATABASE_URL: await database() };
+  await mustRun('The migration', process.execPath, ['--import', 'tsx', 'scripts/migrate.ts'], {
+    env,
+  });
+  await mustRun('The seed', process.execPath, ['--import', 'tsx', 'scripts/seed.ts', signIns], {
+    env,
+  });
+  if (!dev) await ensureBuild();
+
+  const host = process.env.HOST || '127.0.0.1';
+  const wanted = Number(process.env.PORT || 3000);
+  if (!Number.isInteger(wanted) || wanted < 1 || wanted > 65_535) {
+    throw new Stop(`PORT: ${process.env.PORT} is not a port; give 1 to 65535.`);
+  }
+  const port = await freePortFrom(wanted, host);
+  if (port !== wanted) console.log(`Port ${wanted} is taken; using ${port}.`);
+  const shown = ['0.0.0.0', '::'].includes(host) ? 'localhost' : host;
+  const address = process.env.NEXTAUTH_URL || `http://${shown}:${port}`;
+  const server = await startServer({
+    mode: dev ? 'dev' : 'start',
+    host,
+    port,
+    env: { DATABASE_URL: env.DATABASE_URL, NEXTAUTH_URL: address, NEXTAUTH_SECRET: secret() },
+  });
+  if (!process.env.DATABASE_URL) rememberServer(server.child.pid);
+
+  console.log(`\nVaneloft is at ${address}\n`);
+  printSignIns();
+  console.log('\nCtrl-C stops it.');
+  throw new Stop(`The server ended (${await server.exited}).`);
+}
+
+await runUntilStopped(main);
