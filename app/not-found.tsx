@@ -6,8 +6,8 @@ export default function NotFound() {
   return (
     <PageMessage title="Nothing here">
       <p>
-        There is no such page, or it belongs to another workshop, or it was deleted by somebody of
-        yours.
+        There is no such page, or it belongs to another workshop, or it was deleted by somebody
+        of yours.
       </p>
       <Link href="/designs" className={buttonClass('plain')}>
         To the designs

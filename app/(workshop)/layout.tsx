@@ -1,9 +1,9 @@
 import type { ReactNode } from 'react';
 import { TopBar } from '@/components/account/top-bar';
-import { pageViewer } from '@/lib/access';
+import { requirePageMember } from '@/lib/access';
 
 export default async function WorkshopLayout({ children }: { children: ReactNode }) {
-  const viewer = await pageViewer();
+  const viewer = await requirePageMember();
   return (
     <div className="flex min-h-dvh flex-col">
       <TopBar workshop={viewer.workshopName} person={viewer.name} />

@@ -10,7 +10,7 @@ import { TextField } from '@/components/ui/text-field';
 import { safeCallback } from './callback';
 
 const messages: Record<string, string> = {
-  'bad-credentials':
+  CredentialsSignin:
     'No account has this address with this password. Check both; the password is told apart by capitals.',
   'too-many':
     'Too many attempts with this address. Wait a few minutes, then try again with the right password.',
@@ -38,7 +38,8 @@ export function SignInForm({ callbackUrl }: { callbackUrl?: string | undefined }
     }
     setBusy(false);
     setMessage(
-      messages[answer?.error ?? ''] ?? 'The server could not be reached. Try again in a moment.',
+      messages[answer?.error ?? ''] ??
+        'The server could not be reached. Try again in a moment.',
     );
   }
 

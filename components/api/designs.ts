@@ -15,7 +15,8 @@ export const designKeys = {
   files: (id: string, version: number) => ['designs', id, 'files', version] as const,
 };
 
-export const fetchDesigns = async () => (await request(designListSchema, '/api/designs')).designs;
+export const fetchDesigns = async () =>
+  (await request(designListSchema, '/api/designs')).designs;
 
 export const fetchDesign = (id: string): Promise<DesignRecord> =>
   request(designRecordSchema, `/api/designs/${id}`);

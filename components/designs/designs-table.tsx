@@ -48,7 +48,12 @@ export function DesignsTable({
         <div className="w-full max-w-80 grow">
           <TextField label="Search" type="search" value={search} onChange={setSearch} />
         </div>
-        <SelectField label="Status" value={status} options={statusOptions} onChange={setStatus} />
+        <SelectField
+          label="Status"
+          value={status}
+          options={statusOptions}
+          onChange={setStatus}
+        />
         <p role="status" className="py-2 text-ink-2">
           {rows.length === designs.length
             ? `${designs.length} ${designs.length === 1 ? 'design' : 'designs'}`

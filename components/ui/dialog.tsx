@@ -1,6 +1,11 @@
 'use client';
 
-import { Dialog as AriaDialog, Heading, Modal, ModalOverlay } from 'react-aria-components/Modal';
+import {
+  Dialog as AriaDialog,
+  Heading,
+  Modal,
+  ModalOverlay,
+} from 'react-aria-components/Modal';
 import type { ReactNode } from 'react';
 
 /** A question that must be answered before the work goes on. */

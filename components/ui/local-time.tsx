@@ -14,7 +14,11 @@ export function useHydrated(): boolean {
 }
 
 const clock = new Intl.DateTimeFormat('en-GB', { hour: '2-digit', minute: '2-digit' });
-const day = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'short', year: 'numeric' });
+const day = new Intl.DateTimeFormat('en-GB', {
+  day: 'numeric',
+  month: 'short',
+  year: 'numeric',
+});
 
 function write(date: Date, today: Date): string {
   const sameDay = date.toDateString() === today.toDateString();
@@ -29,7 +33,9 @@ export function LocalTime({ iso }: { iso: string }) {
   const hydrated = useHydrated();
   return (
     <time dateTime={iso} className="whitespace-nowrap">
-      {hydrated ? write(new Date(iso), new Date()) : `${iso.slice(0, 16).replace('T', ' ')} UTC`}
+      {hydrated
+        ? write(new Date(iso), new Date())
+        : `${iso.slice(0, 16).replace('T', ' ')} UTC`}
     </time>
   );
 }

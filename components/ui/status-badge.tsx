@@ -7,7 +7,9 @@ export const statusWords: Record<DesignStatus, string> = {
 
 export function StatusBadge({ status }: { status: DesignStatus }) {
   const look =
-    status === 'ready' ? 'border-ok text-ok font-semibold' : 'border-edge text-ink-2 border-dashed';
+    status === 'ready'
+      ? 'border-ok text-ok font-semibold'
+      : 'border-edge text-ink-2 border-dashed';
   return (
     <span
       className={`inline-block rounded-[3px] border bg-panel px-2 py-0.5 text-small whitespace-nowrap ${look}`}

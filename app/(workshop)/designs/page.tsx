@@ -1,11 +1,11 @@
 import type { Metadata } from 'next';
 import { DesignsList } from '@/components/designs/designs-list';
-import { mayEdit, pageViewer } from '@/lib/access';
+import { mayEdit, requirePageMember } from '@/lib/access';
 import { listDesigns } from '@/lib/queries';
 
 export const metadata: Metadata = { title: 'Designs' };
 
 export default async function DesignsPage() {
-  const viewer = await pageViewer();
+  const viewer = await requirePageMember();
   return <DesignsList initial={await listDesigns(viewer)} mayEdit={mayEdit(viewer.role)} />;
 }

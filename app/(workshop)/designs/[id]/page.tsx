@@ -2,18 +2,18 @@ import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
 import { DesignScreen } from '@/components/design/design-screen';
 import { derive } from '@/geometry';
-import { pageViewer } from '@/lib/access';
+import { requirePageMember } from '@/lib/access';
 import { findDesign } from '@/lib/queries';
 
 type Props = { params: Promise<{ id: string }> };
 
 export async function generateMetadata({ params }: Props): Promise<Metadata> {
-  const record = await findDesign(await pageViewer(), (await params).id);
+  const record = await findDesign(await requirePageMember(), (await params).id);
   return { title: record?.name ?? 'Nothing here' };
 }
 
 export default async function DesignPage({ params }: Props) {
-  const viewer = await pageViewer();
+  const viewer = await requirePageMember();
   const record = await findDesign(viewer, (await params).id);
   if (!record) notFound();
   return (

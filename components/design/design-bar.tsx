@@ -1,0 +1,77 @@
+'use client';
+
+import { useMutation } from '@tanstack/react-query';
+import { useState } from 'react';
+import { Input, Label, TextField } from 'react-aria-components/TextField';
+import { useController, useFormContext } from 'react-hook-form';
+import { setDesignStatus } from '@/components/api/designs';
+import { Button } from '@/components/ui/button';
+import { Notice } from '@/components/ui/notice';
+import { StatusBadge } from '@/components/ui/status-badge';
+import type { Draft } from './draft';
+import { SaveState } from './save-state';
+import type { Saving } from './use-saving';
+
+function NameField() {
+  const { control } = useFormContext<Draft>();
+  const { field } = useController({ control, name: 'name' });
+  return (
+    <TextField
+      value={field.value}
+      onChange={field.onChange}
+      onBlur={field.onBlur}
+      maxLength={80}
+    >
+      <Label className="sr-only">Name of the design</Label>
+      <Input className="wide-letter field-sizing-content max-w-full min-w-40 rounded-[3px] border border-transparent bg-transparent px-1.5 py-1 text-title font-semibold hover:border-edge focus:border-edge focus:bg-white max-bench:min-h-11" />
+    </TextField>
+  );
+}
+
+/** Name, status, where saving stands, and the two things to do with the whole design. */
+export function DesignBar({ saving }: { saving: Saving }) {
+  const { stored, dirty, state, refusal } = saving;
+  const [hint, setHint] = useState<string | null>(null);
+  const next = stored.status === 'ready' ? 'draft' : 'ready';
+  const status = useMutation({
+    mutationFn: () => setDesignStatus(stored.id, { version: stored.version, status: next }),
+    onSuccess: saving.adopt,
+  });
+  const trouble = refusal ?? hint ?? status.error?.message;
+
+  return (
+    <>
+      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-line px-5 py-2.5 max-wide:px-3">
+        <h1 className="sr-only">{stored.name}</h1>
+        <NameField />
+        <StatusBadge status={stored.status} />
+        <SaveState saving={saving} />
+        <div className="ml-auto flex flex-wrap gap-2">
+          <Button
+            isDisabled={status.isPending}
+            onPress={() => {
+              if (dirty) {
+                setHint('Save first: it is a saved version that is ready to cut or a draft.');
+                return;
+              }
+              setHint(null);
+              status.mutate();
+            }}
+          >
+            {next === 'ready' ? 'Mark ready to cut' : 'Back to draft'}
+          </Button>
+          <Button
+            look="action"
+            onPress={() => {
+              setHint(null);
+              if (dirty) saving.save();
+            }}
+          >
+            {state === 'idle' ? 'Save' : 'Saving'}
+          </Button>
+        </div>
+      </div>
+      {trouble && <Notice look="bad">{trouble}</Notice>}
+    </>
+  );
+}

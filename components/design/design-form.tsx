@@ -1,0 +1,69 @@
+'use client';
+
+import { useState } from 'react';
+import { useFormContext, useWatch } from 'react-hook-form';
+import { ListField, RadioField } from './choice-field';
+import { applies, type Draft } from './draft';
+import { sectionGroups, sharedGroups, type Group, type GroupEntry } from './parameter-groups';
+import { QuantityField } from './quantity-field';
+
+function Field({ entry, prefix }: { entry: GroupEntry; prefix: string }) {
+  const { key, parameter } = entry;
+  const path = prefix + key;
+  if (parameter.kind !== 'choice') return <QuantityField path={path} parameter={parameter} />;
+  return key === 'material' ? (
+    <ListField path={path} parameter={parameter} />
+  ) : (
+    <RadioField path={path} parameter={parameter} />
+  );
+}
+
+function Fields({ group, prefix }: { group: Group; prefix: string }) {
+  return (
+    <fieldset className="flex flex-col gap-1.5">
+      <legend className="wide-letter mb-2 font-semibold">{group.title}</legend>
+      {group.entries.map((entry) => (
+        <Field key={prefix + entry.key} entry={entry} prefix={prefix} />
+      ))}
+    </fieldset>
+  );
+}
+
+/** All parameters of one section and those that the sections share, made from the kernel's table. */
+export function DesignForm({ section }: { section: number }) {
+  const { control } = useFormContext<Draft>();
+  const targetKind = useWatch({ control, name: `design.sections.${section}.targetKind` });
+  const prefix = `sections.${section}.`;
+  const [help, setHelp] = useState('');
+
+  /** The help of the field one is in stands at the foot; readers get it as its description. */
+  function showHelp(target: HTMLElement) {
+    const ids = target.getAttribute('aria-describedby')?.split(' ') ?? [];
+    const text = ids.map((id) => document.getElementById(id)?.textContent ?? '');
+    setHelp(text[0] ?? '');
+  }
+
+  return (
+    <div className="flex flex-col gap-5" onFocus={(event) => showHelp(event.target)}>
+      {sectionGroups.map((group) => (
+        <Fields
+          key={prefix + group.group}
+          prefix={prefix}
+          group={{
+            ...group,
+            entries: group.entries.filter(({ parameter }) => applies(parameter, targetKind)),
+          }}
+        />
+      ))}
+      {sharedGroups.map((group) => (
+        <Fields key={group.group} prefix="" group={group} />
+      ))}
+      <p
+        aria-hidden="true"
+        className="sticky bottom-0 -mx-5 min-h-16 border-t border-line bg-page px-5 py-2 text-small text-ink-2"
+      >
+        {help || 'Write a unit if you like: 365 pF, 0.02 in, 1/4 in, 530 kHz.'}
+      </p>
+    </div>
+  );
+}

@@ -1,0 +1,162 @@
+import {
+  checkDesign,
+  checkParameter,
+  formatQuantity,
+  KernelError,
+  sectionParameters,
+  sharedParameters,
+  type Design,
+  type NumberParameter,
+  type OptionalNumberParameter,
+  type Parameter,
+} from '@/geometry';
+
+/** A kernel value, null for one left empty on purpose, or text that is no value (yet). */
+export type DraftValue = number | string | null;
+
+export type DraftSection = Record<string, DraftValue>;
+
+/** A design as it stands in the form, finished or not. */
+export interface Draft {
+  name: string;
+  design: Record<string, DraftValue> & { sections: DraftSection[] };
+}
+
+export type QuantityParameter = NumberParameter | OptionalNumberParameter;
+
+const sectionTable: Record<string, Parameter> = sectionParameters;
+const sharedTable: Record<string, Parameter> = sharedParameters;
+
+export function draftOf(name: string, design: Design): Draft {
+  return structuredClone({ name, design }) as unknown as Draft;
+}
+
+const inOrder = (_key: string, value: unknown) =>
+  typeof value === 'object' && value !== null && !Array.isArray(value)
+    ? Object.fromEntries(Object.entries(value).sort(([a], [b]) => (a < b ? -1 : 1)))
+    : value;
+
+/** Whatever order their keys came in from the database, the form or this browser's store. */
+export function sameDraft(a: Draft, b: Draft): boolean {
+  return JSON.stringify(a, inOrder) === JSON.stringify(b, inOrder);
+}
+
+/** The parameter a path of the design stands for: `sections.0.airGap`, `travel`. */
+export function parameterAt(path: string): Parameter | undefined {
+  const parts = path.split('.');
+  const key = parts[parts.length - 1] ?? '';
+  return parts.length === 1 ? sharedTable[key] : sectionTable[key];
+}
+
+/** Does the parameter count for a section with this kind of target? */
+export function applies(parameter: Parameter, targetKind: DraftValue | undefined): boolean {
+  return (
+    parameter.kind === 'choice' ||
+    parameter.appliesTo === undefined ||
+    parameter.appliesTo === targetKind
+  );
+}
+
+const quantityWords: Record<NumberParameter['quantity'], string> = {
+  length: 'a length',
+  angle: 'an angle',
+  capacitance: 'a capacitance',
+  inductance: 'an inductance',
+  frequency: 'a frequency',
+  voltage: 'a voltage',
+  count: 'a whole number',
+  ratio: 'a number',
+};
+
+/** What is wrong with a value in the form, or undefined. */
+export function messageFor(parameter: Parameter, path: string, value: DraftValue) {
+  if (typeof value === 'string' && parameter.kind !== 'choice') {
+    const { label, quantity, min, max } = parameter;
+    const range = `${formatQuantity(min, quantity)} to ${formatQuantity(max, quantity)}`;
+    return value.trim() === ''
+      ? `${label}: empty; give ${range}`
+      : `${label}: “${value}” is not ${quantityWords[quantity]}; give ${range}`;
+  }
+  try {
+    checkParameter(parameter, path, value);
+    return undefined;
+  } catch (error) {
+    if (error instanceof KernelError) return error.message;
+    throw error;
+  }
+}
+
+/** Fields that don't apply may hold anything; an unusable one goes back to its default. */
+function settle(section: DraftSection, index: number): DraftSection {
+  return Object.fromEntries(
+    Object.entries(section).map(([key, value]) => {
+      const parameter = sectionTable[key];
+      const dormant = parameter && !applies(parameter, section.targetKind);
+      return dormant && messageFor(parameter, `sections.${index}.${key}`, value)
+        ? [key, parameter.default]
+        : [key, value];
+    }),
+  );
+}
+
+/** The design in the form, or what is wrong with it and where. */
+export function designOf(
+  draft: Draft,
+): { ok: true; design: Design } | { ok: false; path: string; message: string } {
+  try {
+    const sections = draft.design.sections.map(settle);
+    return { ok: true, design: checkDesign({ ...draft.design, sections }) };
+  } catch (error) {
+    if (!(error instanceof KernelError)) throw error;
+    return { ok: false, path: error.path, message: error.message };
+  }
+}
+
+export interface Difference {
+  readonly label: string;
+  readonly mine: string;
+  readonly theirs: string;
+}
+
+function written(parameter: Parameter, value: unknown): string {
+  if (parameter.kind === 'choice') {
+    return parameter.options.find((option) => option.value === value)?.label ?? String(value);
+  }
+  return typeof value === 'number' ? formatQuantity(value, parameter.quantity) : 'empty';
+}
+
+/** What two designs differ in, for a person to choose between them. */
+export function differences(mine: Design, theirs: Design): Difference[] {
+  const found: Difference[] = [];
+  const compare = (
+    table: Record<string, Parameter>,
+    a: Record<string, unknown>,
+    b: Record<string, unknown>,
+    where: string,
+  ) => {
+    for (const [key, parameter] of Object.entries(table)) {
+      if (a[key] === b[key]) continue;
+      found.push({
+        label: parameter.label + where,
+        mine: written(parameter, a[key]),
+        theirs: written(parameter, b[key]),
+      });
+    }
+  };
+  const count = Math.max(mine.sections.length, theirs.sections.length);
+  for (let index = 0; index < count; index++) {
+    const where = count > 1 ? `, section ${index + 1}` : '';
+    const a = mine.sections[index];
+    const b = theirs.sections[index];
+    if (a && b) compare(sectionTable, a, b, where);
+    else {
+      found.push({
+        label: `Section ${index + 1}`,
+        mine: a ? 'there' : 'not there',
+        theirs: b ? 'there' : 'not there',
+      });
+    }
+  }
+  compare(sharedTable, { ...mine }, { ...theirs }, '');
+  return found;
+}

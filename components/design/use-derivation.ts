@@ -1,0 +1,74 @@
+'use client';
+
+import { releaseProxy, wrap, type Remote } from 'comlink';
+import { useCallback, useEffect, useRef, useState } from 'react';
+import type { Derivation, Derived, Design, Finding } from '@/geometry';
+import type { KernelWorker } from './derive.worker';
+
+export interface Plates {
+  /** The last plates there were; null only when there never were any. */
+  readonly derived: Derived | null;
+  /** What the checks say about the latest design that could be read. */
+  readonly findings: readonly Finding[];
+  /** Do the plates belong to the findings, or to an earlier design? */
+  readonly current: boolean;
+  /** The kernel itself failed: a fault of the program, not of the design. */
+  readonly broken: boolean;
+}
+
+function platesAfter(before: Derived | null, derivation: Derivation): Plates {
+  return derivation.ok
+    ? {
+        derived: derivation.derived,
+        findings: derivation.derived.findings,
+        current: true,
+        broken: false,
+      }
+    : { derived: before, findings: derivation.findings, current: false, broken: false };
+}
+
+/**
+ * Derives in a worker. At most one design is on its way and one waits: a newer one takes the
+ * waiting one's place, so typing never builds a queue.
+ */
+export function useDerivation(first: Derivation): [Plates, (design: Design) => void] {
+  const [plates, setPlates] = useState(() => platesAfter(null, first));
+  const kernel = useRef<Remote<KernelWorker> | null>(null);
+  const waiting = useRef<Design | null>(null);
+  const busy = useRef(false);
+
+  useEffect(() => {
+    const worker = new Worker(new URL('./derive.worker.ts', import.meta.url), {
+      type: 'module',
+    });
+    const remote = wrap<KernelWorker>(worker);
+    kernel.current = remote;
+    return () => {
+      kernel.current = null;
+      busy.current = false;
+      remote[releaseProxy]();
+      worker.terminate();
+    };
+  }, []);
+
+  const request = useCallback(async (design: Design) => {
+    waiting.current = design;
+    if (busy.current) return;
+    busy.current = true;
+    while (kernel.current && waiting.current) {
+      const remote = kernel.current;
+      const next = waiting.current;
+      waiting.current = null;
+      try {
+        const derivation = await remote.derive(next);
+        if (kernel.current !== remote) return;
+        setPlates((before) => platesAfter(before.derived, derivation));
+      } catch {
+        setPlates((before) => ({ ...before, current: false, broken: true }));
+      }
+    }
+    busy.current = false;
+  }, []);
+
+  return [plates, request];
+}

@@ -1,0 +1,29 @@
+'use client';
+
+import { useQuery } from '@tanstack/react-query';
+import { designKeys, fetchDesign } from '@/components/api/designs';
+import { RequestError } from '@/components/api/request';
+import type { DesignRecord } from '@/lib/schemas/api';
+
+/** How often an open design is looked at for others' changes, ms. */
+const PERIOD = 10_000;
+
+/** What others did to the open design: a later version, or its end. */
+export function useNews(known: DesignRecord): { later: DesignRecord | null; gone: boolean } {
+  const { data, error } = useQuery({
+    queryKey: designKeys.record(known.id),
+    queryFn: () => fetchDesign(known.id),
+    initialData: known,
+    initialDataUpdatedAt: () => Date.now(),
+    refetchInterval: PERIOD,
+    refetchOnWindowFocus: true,
+    retry: false,
+  });
+  const changed =
+    data.version > known.version ||
+    (data.version === known.version && data.updatedAt > known.updatedAt);
+  return {
+    later: changed ? data : null,
+    gone: error instanceof RequestError && error.code === 'not-found',
+  };
+}

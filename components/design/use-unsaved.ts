@@ -1,0 +1,74 @@
+'use client';
+
+import { useEffect, useRef, useState } from 'react';
+import type { UseFormReturn } from 'react-hook-form';
+import { draftOf, sameDraft, type Draft } from './draft';
+import { dropUnsaved, keepUnsaved, readUnsaved, type Unsaved } from './unsaved-store';
+import type { Saving } from './use-saving';
+
+/** Pause in typing after which the work is kept, ms. */
+const PAUSE = 250;
+
+/**
+ * Keeps unsaved work in this browser and brings it back after a reload. Returns what was brought
+ * back until the person has answered, and how to answer.
+ */
+export function useUnsaved(
+  form: UseFormReturn<Draft>,
+  saving: Saving,
+  userId: string,
+): { restored: Unsaved | null; accept: () => void } {
+  const [restored, setRestored] = useState<Unsaved | null>(null);
+  const looked = useRef(false);
+  const wasDirty = useRef(false);
+  const { stored, dirty, restore, baseVersion } = saving;
+
+  useEffect(() => {
+    if (looked.current) return;
+    looked.current = true;
+    const unsaved = readUnsaved(userId, stored.id);
+    if (!unsaved) return;
+    if (sameDraft(unsaved.draft, draftOf(stored.name, stored.design))) {
+      dropUnsaved(userId, stored.id);
+      return;
+    }
+    restore(unsaved.draft, unsaved.version);
+    setRestored(unsaved);
+  }, [restore, stored, userId]);
+
+  useEffect(() => {
+    if (!dirty) {
+      if (wasDirty.current) dropUnsaved(userId, stored.id);
+      wasDirty.current = false;
+      return;
+    }
+    wasDirty.current = true;
+    let kept = true;
+    let timer: ReturnType<typeof setTimeout> | undefined;
+    const keep = () => {
+      clearTimeout(timer);
+      timer = undefined;
+      kept = keepUnsaved(userId, stored.id, baseVersion(), form.getValues());
+    };
+    const leave = (event: BeforeUnloadEvent) => {
+      if (timer !== undefined) keep();
+      if (!kept) event.preventDefault();
+    };
+    keep();
+    const unsubscribe = form.subscribe({
+      formState: { values: true },
+      callback: () => {
+        clearTimeout(timer);
+        timer = setTimeout(keep, PAUSE);
+      },
+    });
+    window.addEventListener('beforeunload', leave);
+    return () => {
+      if (timer !== undefined) keep();
+      unsubscribe();
+      window.removeEventListener('beforeunload', leave);
+    };
+  }, [baseVersion, dirty, form, stored.id, userId]);
+
+  return { restored, accept: () => setRestored(null) };
+}
