@@ -77,7 +77,8 @@ export function smallerRadius(
   wanted: number,
 ): string {
   const rc2 = design.cutoutRadius ** 2;
-  if (wanted <= design.cutoutRadius) return 'Make the cut-out and what surrounds the rotor smaller.';
+  if (wanted <= design.cutoutRadius)
+    return 'Make the cut-out and what surrounds the rotor smaller.';
   const factor = (sweep ** 2 - rc2) / (wanted ** 2 - rc2);
   const gaps = section.rotorPlates + section.statorPlates - 1;
   const plates = Math.ceil(gaps * factor) + 1;

@@ -6,6 +6,7 @@ import { sheetMaterials } from '../material';
 export function slugOf(designName: string): string {
   const slug = designName
     .normalize('NFKD')
+    .replace(/\p{M}/gu, '')
     .replace(/[^\p{L}\p{N}]+/gu, '-')
     .replace(/[^A-Za-z0-9-]/g, '')
     .replace(/^-+|-+$/g, '')

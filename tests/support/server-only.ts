@@ -1,0 +1,2 @@
+/** Stands in for Next's marker of server code, which has nothing in it either. */
+export {};
