@@ -62,7 +62,7 @@ export function AngleRule({
         <AngleField store={store} travel={travel} />
       </div>
       <div
-        className="relative h-12 cursor-ew-resize touch-none border-t border-line has-focus-visible:outline-2 has-focus-visible:-outline-offset-2 has-focus-visible:outline-action"
+        className="relative h-12 overflow-x-clip cursor-ew-resize touch-none border-t border-line has-focus-visible:outline-2 has-focus-visible:-outline-offset-2 has-focus-visible:outline-action"
         {...drag}
         onPointerUp={() => slider.current?.focus({ preventScroll: true })}
       >

@@ -47,11 +47,20 @@ export function FloorReadout({
 }
 
 /** Which plate is which, in the hatch and colours of the floor. */
-export function FloorKey({ section, limit }: { section: SectionResult; limit: string | null }) {
+export function FloorKey({
+  section,
+  step,
+  limit,
+}: {
+  section: SectionResult;
+  /** Between rings, mm. */
+  step: number;
+  limit: { readonly text: string; readonly shown: boolean };
+}) {
   return (
     <ul className="pointer-events-none absolute bottom-3 left-4 flex flex-col gap-0.5 font-mono text-small text-scribe">
       <li className="flex items-center gap-2">
-        <span className="h-3 w-4 border-2 border-brass bg-brass/45" aria-hidden="true" />
+        <span className="h-3 w-4 border-2 border-brass bg-brass/65" aria-hidden="true" />
         {section.rotor.quantity} rotor
       </li>
       <li className="flex items-center gap-2">
@@ -61,12 +70,18 @@ export function FloorKey({ section, limit }: { section: SectionResult; limit: st
         />
         {section.stator.quantity} stator
       </li>
-      {limit && (
-        <li className="flex items-center gap-2">
+      <li className="flex items-center gap-2">
+        <span className="w-4 border-t border-scribe/60" aria-hidden="true" />
+        ring every {step} mm
+      </li>
+      <li className="flex items-center gap-2">
+        {limit.shown && (
           <span className="w-4 border-t-2 border-dashed border-scribe" aria-hidden="true" />
-          {limit}
-        </li>
-      )}
+        )}
+        <span className="max-w-44">
+          {limit.shown ? limit.text : `${limit.text}, outside this view`}
+        </span>
+      </li>
     </ul>
   );
 }

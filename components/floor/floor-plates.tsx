@@ -1,4 +1,3 @@
-import type { Ref } from 'react';
 import type { SectionResult } from '@/geometry';
 import { svgPath } from './svg-path';
 import type { useRotorDrag } from './use-rotor-drag';
@@ -43,8 +42,6 @@ export function RotorPlate({
   section,
   shaftRadius,
   mark,
-  angle,
-  ref,
   drag,
 }: {
   section: SectionResult;
@@ -52,24 +49,15 @@ export function RotorPlate({
   shaftRadius: number;
   /** Radius at which the leading edge is marked, mm. */
   mark: number;
-  /** Degrees, when first drawn. */
-  angle: number;
-  ref: Ref<SVGGElement>;
   drag: ReturnType<typeof useRotorDrag>;
 }) {
   const { rotor } = section;
   return (
-    <g
-      ref={ref}
-      data-part="rotor"
-      transform={`rotate(${angle})`}
-      className="cursor-grab touch-none active:cursor-grabbing"
-      {...drag}
-    >
+    <g className="pointer-events-auto cursor-grab touch-none active:cursor-grabbing" {...drag}>
       <path
         d={svgPath([rotor.outside, ...rotor.holes])}
         fillRule="evenodd"
-        className="fill-brass/45 stroke-brass"
+        className="fill-brass/65 stroke-brass"
         strokeWidth="2"
         strokeLinejoin="round"
         vectorEffect="non-scaling-stroke"

@@ -1,20 +1,17 @@
 'use client';
 
-import { useId, useRef } from 'react';
+import { useId, useRef, type CSSProperties } from 'react';
 import { formatQuantity } from '@/geometry/quantity';
 import type { Derived } from '@/geometry';
 import type { AngleStore } from './angle-store';
-import { toDegrees } from './degrees';
+import { toDegrees, writeDegrees } from './degrees';
 import { FloorKey, FloorReadout } from './floor-lettering';
 import { RotorPlate, StatorPlate } from './floor-plates';
 import { floorGrid } from './polar-grid';
 import { PolarLines, RingLetters } from './polar-lines';
 import { useAngle } from './use-angle';
 import { useRotorDrag } from './use-rotor-drag';
-import { useUnitScale } from './use-unit-scale';
-
-/** Room round the outermost ring for its lettering, as a share of its radius. */
-const MARGIN = 1.13;
+import { assumedView, useFittedView } from './use-fitted-view';
 
 /**
  * One section in plan on the marking-out blue floor, seen along the shaft. It fills its container;
@@ -31,80 +28,108 @@ export function Floor({
   store: AngleStore;
 }) {
   const id = useId();
-  const svgRef = useRef<SVGSVGElement>(null);
-  const rotorRef = useRef<SVGGElement>(null);
+  const frame = useRef<HTMLDivElement>(null);
+  const rotorLayer = useRef<SVGSVGElement>(null);
   const { design, stack, sections } = derived;
   const section = sections[index];
   if (!section) throw new RangeError(`invalid section: ${index} of ${sections.length}`);
 
   const grid = floorGrid(stack.outerRadius, design.largestRadius);
-  const half = grid.radius * MARGIN;
+  const view = assumedView(grid.radius);
   const limit = `largest radius ${formatQuantity(design.largestRadius, 'length')}`;
 
-  useUnitScale(svgRef, 2 * half);
+  useFittedView(frame, grid.radius);
   useAngle(store, (angle) => {
-    rotorRef.current?.setAttribute('transform', `rotate(${toDegrees(angle)})`);
+    const layer = rotorLayer.current;
+    if (!layer) return;
+    layer.style.transform = turned(angle);
+    layer.dataset.angle = writeDegrees(angle);
   });
-  const drag = useRotorDrag(store);
+  const drag = useRotorDrag(store, frame);
+  const layer = {
+    viewBox: view.viewBox,
+    'aria-hidden': true,
+    className: 'absolute inset-0 h-full w-full',
+  } as const;
 
   return (
     <div className="relative h-full min-h-80 w-full overflow-hidden bg-floor select-none">
-      <svg
-        ref={svgRef}
+      {/* Three layers, so that turning moves a picture of the rotor and draws nothing again. */}
+      <div
+        ref={frame}
         role="img"
         aria-label={`Plan of section ${index + 1}`}
         aria-describedby={`${id}-text`}
-        viewBox={`${-half} ${-half} ${2 * half} ${2 * half}`}
-        className="absolute inset-0 h-full w-full"
-        style={{ '--px': (2 * half) / 560 } as React.CSSProperties}
+        data-part="floor"
+        className="absolute inset-0"
+        style={{ '--px': view.unit } as CSSProperties}
       >
-        <defs>
-          <pattern
-            id={`${id}-hatch`}
-            width={half / 36}
-            height={half / 36}
-            patternUnits="userSpaceOnUse"
-            patternTransform="rotate(45)"
-          >
-            <path
-              d={`M0 0V${half / 36}`}
-              className="stroke-steel/80"
-              strokeWidth={half / 220}
+        <svg {...layer}>
+          <Hatch id={`${id}-hatch`} size={grid.radius / 32} />
+          <PolarLines grid={grid} />
+          <g transform="scale(1 -1)">
+            <StatorPlate section={section} hatch={`${id}-hatch`} />
+          </g>
+          {grid.limitShown && (
+            <circle
+              data-part="limit"
+              r={design.largestRadius}
+              className="fill-none stroke-scribe"
+              strokeDasharray="6 5"
+              vectorEffect="non-scaling-stroke"
             />
-          </pattern>
-        </defs>
-        <PolarLines grid={grid} />
-        <g transform="scale(1 -1)">
-          <StatorPlate section={section} hatch={`${id}-hatch`} />
-          <RotorPlate
-            ref={rotorRef}
-            section={section}
-            shaftRadius={design.shaftDiameter / 2}
-            mark={grid.radius}
-            angle={toDegrees(store.get())}
-            drag={drag}
-          />
-        </g>
-        {grid.limitShown && (
-          <circle
-            data-part="limit"
-            r={design.largestRadius}
-            className="pointer-events-none fill-none stroke-scribe"
-            strokeDasharray="6 5"
-            vectorEffect="non-scaling-stroke"
-          />
-        )}
-        <RingLetters grid={grid} />
-      </svg>
+          )}
+        </svg>
+        <svg
+          {...layer}
+          ref={rotorLayer}
+          data-part="rotor"
+          className={`${layer.className} pointer-events-none will-change-transform`}
+          style={{ transform: turned(store.get()) }}
+        >
+          <g transform="scale(1 -1)">
+            <RotorPlate
+              section={section}
+              shaftRadius={design.shaftDiameter / 2}
+              mark={grid.radius}
+              drag={drag}
+            />
+          </g>
+        </svg>
+        <svg {...layer} className={`${layer.className} pointer-events-none`}>
+          <RingLetters grid={grid} from={design.hubRadius} />
+        </svg>
+      </div>
       <p id={`${id}-text`} className="sr-only">
         {describe(section, limit)}
       </p>
       <FloorReadout section={section} store={store} />
       <FloorKey
         section={section}
-        limit={grid.limitShown ? limit : `${limit}, outside this view`}
+        step={grid.step}
+        limit={{ text: limit, shown: grid.limitShown }}
       />
     </div>
+  );
+}
+
+/** CSS turns clockwise; the rotor meshes counter-clockwise. */
+const turned = (angle: number) => `rotate(${-toDegrees(angle)}deg)`;
+
+/** Scribed lines across the stator, `size` mm apart. */
+function Hatch({ id, size }: { id: string; size: number }) {
+  return (
+    <defs>
+      <pattern
+        id={id}
+        width={size}
+        height={size}
+        patternUnits="userSpaceOnUse"
+        patternTransform="rotate(45)"
+      >
+        <path d={`M0 0V${size}`} className="stroke-steel/80" strokeWidth={size / 6} />
+      </pattern>
+    </defs>
   );
 }
 

@@ -30,7 +30,10 @@ export function LawChart({ section, store }: { section: SectionResult; store: An
 
   return (
     <section aria-label="Law chart" className="bg-panel" data-part="law-chart">
-      <div className="relative cursor-ew-resize touch-pan-y border-t border-line" {...drag}>
+      <div
+        className="relative overflow-x-clip cursor-ew-resize touch-pan-y border-t border-line"
+        {...drag}
+      >
         <div aria-hidden="true">
           <div className="relative">
             <div ref={lawHost} className="h-44" />

@@ -5,20 +5,24 @@ import { palette } from './palette';
 import type { PlotKind } from './use-plot';
 
 /** Room over each plot for the letters of its scales, CSS px. */
-export const PLOT_TOP = 22;
+export const PLOT_TOP = 26;
 const PLOT_BOTTOM = 6;
 
-/** What both plots share: the travel across exactly the width of the angle rule. */
+/**
+ * What both plots share: the travel across exactly the width of the angle rule. `right` keeps the
+ * right inset where no scale stands in it.
+ */
 function base(
   font: string,
   travel: () => number,
+  right: number,
 ): Partial<uPlot.Options> & {
   axes: uPlot.Axis[];
 } {
   return {
     legend: { show: false },
     cursor: { show: false },
-    padding: [PLOT_TOP, 0, PLOT_BOTTOM, 0],
+    padding: [PLOT_TOP, right, PLOT_BOTTOM, 0],
     axes: [
       {
         // The angle rule above is the scale of this axis; here it only rules lines.
@@ -53,8 +57,8 @@ type Options = PlotKind['options'];
 /** Capacitance asked and achieved, with the frequency on its own scale when there is a coil. */
 const lawOptions: Options = (font, series, size) => {
   const travel = () => series().angle.at(-1)!;
-  const shared = base(font, travel);
   const tuned = series().tuned !== null;
+  const shared = base(font, travel, tuned ? 0 : INSET_RIGHT);
   return {
     ...shared,
     ...size,
@@ -66,16 +70,18 @@ const lawOptions: Options = (font, series, size) => {
     axes: [
       ...shared.axes,
       axis(font, { scale: 'capacitance', size: INSET_LEFT, space: 28 }),
-      tuned
-        ? axis(font, {
-            scale: 'frequency',
-            side: 1,
-            size: INSET_RIGHT,
-            space: 28,
-            stroke: palette.action,
-            grid: { show: false },
-          })
-        : blank(font),
+      ...(tuned
+        ? [
+            axis(font, {
+              scale: 'frequency',
+              side: 1,
+              size: INSET_RIGHT,
+              space: 28,
+              stroke: palette.action,
+              grid: { show: false },
+            }),
+          ]
+        : []),
     ],
     series: [
       {},
@@ -83,6 +89,7 @@ const lawOptions: Options = (font, series, size) => {
         scale: 'capacitance',
         stroke: palette.brassDark,
         width: 2.5,
+        pxAlign: 0,
         points: { show: false },
       },
       {
@@ -90,6 +97,7 @@ const lawOptions: Options = (font, series, size) => {
         stroke: palette.ink,
         width: 1.5,
         dash: [2, 5],
+        pxAlign: 0,
         points: { show: false },
       },
       ...(tuned
@@ -98,6 +106,7 @@ const lawOptions: Options = (font, series, size) => {
               scale: 'frequency',
               stroke: palette.action,
               width: 2,
+              pxAlign: 0,
               points: { show: false },
             },
           ]
@@ -109,7 +118,7 @@ const lawOptions: Options = (font, series, size) => {
 /** The law error in a strip of its own, with its largest value ringed. */
 const errorOptions: Options = (font, series, size) => {
   const travel = () => series().angle.at(-1)!;
-  const shared = base(font, travel);
+  const shared = base(font, travel, INSET_RIGHT);
   return {
     ...shared,
     ...size,
@@ -125,9 +134,11 @@ const errorOptions: Options = (font, series, size) => {
         splits: (_, __, low, high) => [low / 1.2, 0, high / 1.2],
         values: (_, splits) => splits.map(signed),
       }),
-      blank(font),
     ],
-    series: [{}, { scale: 'error', stroke: palette.bad, width: 1.5, points: { show: false } }],
+    series: [
+      {},
+      { scale: 'error', stroke: palette.bad, width: 1.5, pxAlign: 0, points: { show: false } },
+    ],
     hooks: {
       draw: [
         (plot) => {
@@ -151,11 +162,6 @@ const errorOptions: Options = (font, series, size) => {
     },
   };
 };
-
-/** Keeps the right inset where there is no scale to letter. */
-function blank(font: string): uPlot.Axis {
-  return { font, side: 1, size: INSET_RIGHT, grid: { show: false }, values: () => [] };
-}
 
 function padded(low: number | null, high: number | null): [number, number] {
   if (low === null || high === null) return [0, 1];

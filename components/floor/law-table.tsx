@@ -17,7 +17,7 @@ export function LawTable({ section, series }: { section: SectionResult; series: 
 
   return (
     <details className="border-t border-line">
-      <summary className="flex min-h-11 cursor-pointer items-center px-3 text-small font-medium">
+      <summary className="cursor-pointer px-3 py-3.5 text-small font-medium">
         The chart in figures, every {EVERY}°
       </summary>
       <div
@@ -54,7 +54,7 @@ export function LawTable({ section, series }: { section: SectionResult; series: 
                   </th>
                   <td>{capacitance.write(valueAt(law.angle, law.target, angle))}</td>
                   <td>{capacitance.write(achieved)}</td>
-                  <td>{((100 * error) / (totalMax - totalMin)).toFixed(3)}</td>
+                  <td>{percent(error / (totalMax - totalMin))}</td>
                   {frequency && <td>{frequency.write(resonance(inductance!, achieved))}</td>}
                 </tr>
               );
@@ -64,4 +64,10 @@ export function LawTable({ section, series }: { section: SectionResult; series: 
       </div>
     </details>
   );
+}
+
+function percent(fraction: number): string {
+  const size = Math.abs(100 * fraction).toFixed(3);
+  if (Number(size) === 0) return size;
+  return `${fraction < 0 ? '−' : '+'}${size}`;
 }

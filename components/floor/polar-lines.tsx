@@ -47,21 +47,23 @@ export function PolarLines({ grid }: { grid: PolarGrid }) {
   );
 }
 
-/** Radii lettered along the line to the left, above what is drawn, with the floor as their ground. */
-export function RingLetters({ grid }: { grid: PolarGrid }) {
+/** Radii lettered along the line to the left, above what is drawn, with the floor as their ground; none within `from`, mm. */
+export function RingLetters({ grid, from }: { grid: PolarGrid; from: number }) {
   return (
     <g
       aria-hidden="true"
       className="pointer-events-none fill-scribe stroke-floor font-mono"
       style={{ ...letter, paintOrder: 'stroke', strokeWidth: 'calc(var(--px) * 4px)' }}
       strokeLinejoin="round"
-      textAnchor="end"
+      textAnchor="start"
     >
-      {grid.rings.map((ring, i) => (
-        <text key={ring} x={-ring} y={0} dx="-0.25em" dy="1.15em">
-          {i === grid.rings.length - 1 ? `${ring} mm` : ring}
-        </text>
-      ))}
+      {grid.rings
+        .filter((ring) => ring > from)
+        .map((ring) => (
+          <text key={ring} x={-ring} y={0} dx="0.3em" dy="1.2em">
+            {ring}
+          </text>
+        ))}
     </g>
   );
 }

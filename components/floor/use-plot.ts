@@ -27,6 +27,11 @@ export function usePlot(
   const tuned = series.tuned !== null;
 
   useEffect(() => {
+    latest.current = series;
+    plot.current?.setData(kind.data(series));
+  }, [kind, series]);
+
+  useEffect(() => {
     const element = host.current;
     if (!element) return;
     const size = () => ({
@@ -36,7 +41,7 @@ export function usePlot(
     const font = `12.5px ${getComputedStyle(element).fontFamily}`;
     const made = new uPlot(
       kind.options(font, () => latest.current, size()),
-      undefined,
+      kind.data(latest.current),
       element,
     );
     plot.current = made;
@@ -52,10 +57,4 @@ export function usePlot(
       made.destroy();
     };
   }, [host, kind, tuned]);
-
-  // After the effect above, so that a plot just built gets its numbers too.
-  useEffect(() => {
-    latest.current = series;
-    plot.current?.setData(kind.data(series));
-  }, [kind, series]);
 }

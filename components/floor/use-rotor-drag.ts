@@ -1,4 +1,4 @@
-import { useRef, type PointerEvent } from 'react';
+import { useRef, type PointerEvent, type RefObject } from 'react';
 import type { AngleStore } from './angle-store';
 
 /** Where the pointer is round the shaft, rad counter-clockwise, and the angle it holds there. */
@@ -8,23 +8,23 @@ interface Grip {
 }
 
 /**
- * Turns the rotor with the pointer that took hold of it, on an SVG whose origin is the shaft. The
+ * Turns the rotor with the pointer that took hold of it. `frame` has the shaft in its middle. The
  * held angle runs on past the ends of the travel, so that the rotor stays under the pointer when
  * it comes back.
  */
-export function useRotorDrag(store: AngleStore) {
+export function useRotorDrag(store: AngleStore, frame: RefObject<HTMLElement | null>) {
   const grip = useRef<Grip | null>(null);
 
   return {
     onPointerDown(event: PointerEvent<SVGGraphicsElement>) {
       if (event.button !== 0) return;
       event.currentTarget.setPointerCapture(event.pointerId);
-      grip.current = { bearing: bearingOf(event), angle: store.get() };
+      grip.current = { bearing: bearingOf(event, frame.current), angle: store.get() };
     },
     onPointerMove(event: PointerEvent<SVGGraphicsElement>) {
       const held = grip.current;
       if (!held) return;
-      const bearing = bearingOf(event);
+      const bearing = bearingOf(event, frame.current);
       const turned = Math.atan2(
         Math.sin(bearing - held.bearing),
         Math.cos(bearing - held.bearing),
@@ -38,10 +38,11 @@ export function useRotorDrag(store: AngleStore) {
   };
 }
 
-function bearingOf(event: PointerEvent<SVGGraphicsElement>): number {
-  const svg = event.currentTarget.ownerSVGElement;
-  const matrix = svg?.getScreenCTM();
-  if (!matrix) return 0;
-  const { x, y } = new DOMPoint(event.clientX, event.clientY).matrixTransform(matrix.inverse());
-  return Math.atan2(-y, x);
+function bearingOf(event: PointerEvent, frame: HTMLElement | null): number {
+  const box = frame?.getBoundingClientRect();
+  if (!box) return 0;
+  return Math.atan2(
+    box.top + box.height / 2 - event.clientY,
+    event.clientX - box.left - box.width / 2,
+  );
 }

@@ -33,12 +33,12 @@ export function PlateSet({
 
   return (
     <instancedMesh
-      key={places.length}
+      key={`${geometry.uuid} ${places.length}`}
       ref={mesh}
       args={[geometry, undefined, places.length]}
       userData={{ plates: places.length }}
     >
-      <meshStandardMaterial color={colour} metalness={0.35} roughness={0.45} />
+      <meshLambertMaterial color={colour} />
     </instancedMesh>
   );
 }

@@ -28,7 +28,7 @@ export function RodSet({ rods, colour }: { rods: readonly Rod[]; colour: string 
   if (rods.length === 0) return null;
   return (
     <instancedMesh key={rods.length} ref={mesh} args={[geometry, undefined, rods.length]}>
-      <meshStandardMaterial color={colour} metalness={0.35} roughness={0.5} />
+      <meshLambertMaterial color={colour} />
     </instancedMesh>
   );
 }

@@ -46,9 +46,9 @@ export function Scene({
   return (
     <>
       <Eye ref={eye} size={size} />
-      <hemisphereLight args={['#ffffff', '#8a9499', 1.9]} />
-      <directionalLight position={[0.6, 1, 1.4]} intensity={2.2} />
-      <directionalLight position={[-1, -0.3, 0.5]} intensity={0.7} />
+      <hemisphereLight args={['#ffffff', '#6f7a80', 1.7]} />
+      <directionalLight position={[0.5, 1.2, 1]} intensity={1.6} />
+      <directionalLight position={[-1, -0.3, 0.5]} intensity={0.4} />
       <Plates derived={derived} role="stator" colour={palette.steel} />
       <RodSet rods={rods.statorSpacers} colour={palette.steel} />
       <RodSet rods={rods.posts} colour={TURNED} />

@@ -7,11 +7,11 @@ import {
   Group,
   HemisphereLight,
   InstancedMesh,
-  MeshStandardMaterial,
+  MeshLambertMaterial,
 } from 'three';
 
 // Only what the scene is made of. The ready-made Canvas would bring in the whole of three.
-extend({ DirectionalLight, Group, HemisphereLight, InstancedMesh, MeshStandardMaterial });
+extend({ DirectionalLight, Group, HemisphereLight, InstancedMesh, MeshLambertMaterial });
 
 /** Drawn at most at this many pixels to a CSS pixel: beyond it software rendering gets slow. */
 const LARGEST_RATIO = 2;

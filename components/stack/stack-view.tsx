@@ -33,40 +33,45 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
       data-plates={plates.length}
       className="flex h-full min-h-64 w-full flex-col bg-well"
     >
-      <div
-        role="img"
-        aria-label={
-          `Meshed stack of ${rotors} rotor and ${plates.length - rotors} stator plates, ` +
-          `${depth.toFixed(1)} mm deep, turned to the mesh angle of the angle rule`
-        }
-        className="relative min-h-0 flex-1"
-      >
-        {drawable ? (
-          <div className="absolute inset-0">
-            <StackCanvas onFailure={fail}>
-              <Scene derived={derived} store={store} eye={eye} onFrame={onFrame} />
-            </StackCanvas>
-          </div>
-        ) : null}
-      </div>
       {drawable ? (
-        <div
-          role="group"
-          aria-label="View of the stack"
-          className="flex flex-wrap gap-1 border-t border-line p-1"
-        >
-          {(Object.keys(views) as ViewName[]).map((name) => (
-            <Button key={name} look="quiet" onPress={() => eye.current?.look(name)}>
-              {views[name].label}
+        <>
+          <div
+            role="img"
+            aria-label={
+              `Meshed stack of ${rotors} rotor and ${plates.length - rotors} stator plates, ` +
+              `${depth.toFixed(1)} mm deep, turned to the mesh angle of the angle rule`
+            }
+            className="relative min-h-0 flex-1"
+          >
+            <div className="absolute inset-0">
+              <StackCanvas onFailure={fail}>
+                <Scene derived={derived} store={store} eye={eye} onFrame={onFrame} />
+              </StackCanvas>
+            </div>
+          </div>
+          <div
+            role="group"
+            aria-label="View of the stack"
+            className="flex flex-wrap gap-1 border-t border-line p-1"
+          >
+            {(Object.keys(views) as ViewName[]).map((name) => (
+              <Button
+                key={name}
+                look="quiet"
+                className="px-2!"
+                onPress={() => eye.current?.look(name)}
+              >
+                {views[name].label}
+              </Button>
+            ))}
+            <Button look="quiet" className="px-2!" onPress={() => eye.current?.step(0.8)}>
+              Nearer
             </Button>
-          ))}
-          <Button look="quiet" onPress={() => eye.current?.step(0.8)}>
-            Nearer
-          </Button>
-          <Button look="quiet" onPress={() => eye.current?.step(1.25)}>
-            Further
-          </Button>
-        </div>
+            <Button look="quiet" className="px-2!" onPress={() => eye.current?.step(1.25)}>
+              Further
+            </Button>
+          </div>
+        </>
       ) : (
         <p className="m-auto max-w-sm p-4 text-ink-2">
           This browser offers no WebGL 2, which the picture of the stack needs. Plan, chart and
