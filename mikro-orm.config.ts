@@ -7,7 +7,7 @@ export default defineConfig({
   clientUrl: process.env.DATABASE_URL,
   entities: [User, Workshop, Membership, Design, RecordEntry],
   extensions: [Migrator],
-  migrations: { migrationsList, snapshot: false, tableName: 'migrations' },
+  migrations: { migrationsList, snapshot: false, tableName: 'migrations', silent: true },
   // Belongs to rate-limiter-flexible, which reads and writes it by itself.
   schemaGenerator: { skipTables: ['sign_in_attempts'] },
   forceUtcTimezone: true,

@@ -40,7 +40,7 @@ const statuses: Record<ApiErrorCode, number> = {
 /** The first thing that zod found wrong, as a refusal. */
 export function badInput(error: z.ZodError): RequestError {
   const issue = error.issues[0]!;
-  const field = issue.path.map(String).join('.');
+  const field = issue.path.map(String).filter(Boolean).join('.');
   // Messages of ours begin with the field's label; zod's own get the path.
   const message = issue.code === 'custom' || /^[A-Z][\w ]*: /.test(issue.message);
   return new RequestError(

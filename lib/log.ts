@@ -13,7 +13,7 @@ const secrets = [
 ];
 
 /** One JSON line per event. Whatever carries a secret is blanked, two levels deep. */
-export const log = pino({
+export const logOptions: pino.LoggerOptions = {
   level: process.env.LOG_LEVEL ?? 'info',
   base: undefined,
   timestamp: pino.stdTimeFunctions.isoTime,
@@ -23,7 +23,9 @@ export const log = pino({
     censor: '[redacted]',
   },
   serializers: { err: describeError },
-});
+};
+
+export const log = pino(logOptions);
 
 /** Name, message, code and stack of an error and its causes. Driver errors carry rows: left out. */
 function describeError(error: unknown): unknown {

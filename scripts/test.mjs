@@ -1,0 +1,57 @@
+/** npm test: everything, on a fresh machine too. Its last line is `N passed, N failed`. */
+
+import { randomBytes } from 'node:crypto';
+import { join } from 'node:path';
+import { ensureBuild } from './build.mjs';
+import { check, playwright, printTally, unused, verify, vitest } from './checks.mjs';
+import { mustRun } from './command.mjs';
+import { checkNode, ensureNodeModules, ensureSystemPackages } from './packages.mjs';
+import { data, makeData } from './paths.mjs';
+import { freePort } from './port.mjs';
+import { startThrowawayPostgres } from './postgres.mjs';
+import { startServer } from './server.mjs';
+import { runUntilStopped } from './stop.mjs';
+
+/** A served build with the demo workshop in a database of its own. Resolves to its environment. */
+async function serve() {
+  const cluster = await startThrowawayPostgres();
+  const port = await freePort();
+  const signIns = join(data, 'test-sign-ins.json');
+  const env = {
+    DATABASE_URL: cluster.ensureDatabase('vaneloft'),
+    NEXTAUTH_URL: `http://127.0.0.1:${port}`,
+    NEXTAUTH_SECRET: randomBytes(32).toString('base64url'),
+    LOG_LEVEL: 'warn',
+  };
+  const whole = { env: { ...process.env, ...env } };
+  await mustRun('migrate', process.execPath, ['--import', 'tsx', 'scripts/migrate.ts'], whole);
+  await mustRun(
+    'seed',
+    process.execPath,
+    ['--import', 'tsx', 'scripts/seed.ts', signIns],
+    whole,
+  );
+  await startServer({ host: '127.0.0.1', port, env });
+  return { BASE_URL: env.NEXTAUTH_URL, SIGN_INS: signIns };
+}
+
+await runUntilStopped(async () => {
+  checkNode();
+  makeData();
+  const started = Date.now();
+  await ensureSystemPackages(['postgresql', 'chromium', 'ezdxf']);
+  await ensureNodeModules();
+
+  await verify();
+  await unused();
+  await vitest('house', ['house']);
+  await vitest('route', ['routes']);
+
+  let served = null;
+  const built = await check('build', async () => (await ensureBuild(), true));
+  if (built) await check('serve', async () => ((served = await serve()), true));
+  if (served) await playwright(served);
+
+  console.log(`${Math.round((Date.now() - started) / 1000)} s`);
+  printTally();
+});

@@ -1,0 +1,3 @@
+import { two } from './two';
+
+export const one = (): number => two() + 1;

@@ -1,0 +1,142 @@
+/**
+ * Every route and action there is on disk, by everybody. One that is not in the tables below
+ * fails the test, so none can come without saying who may use it.
+ */
+
+import { readdirSync, readFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { beforeAll, describe, expect, test } from 'vitest';
+import { defaultDesign, derive } from '@/geometry';
+import { cutFiles } from '@/geometry/files';
+import { RecordEntry } from '@/entities';
+import { entityManager } from '@/lib/db';
+import { call } from '../support/call';
+import { callers, Cast, storedDesign, type Caller } from '../support/cast';
+
+const root = join(import.meta.dirname, '..', '..');
+const methods = ['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE', 'OPTIONS'];
+
+interface Rule {
+  readonly status: Readonly<Record<Caller, number>>;
+  readonly body?: unknown;
+}
+
+/** Answers in the order of `callers`: owner, builder, machinist, outsider, removed, signed out. */
+function answers(
+  ...statuses: [number, number, number, number, number, number]
+): Rule['status'] {
+  return Object.fromEntries(
+    callers.map((caller, index) => [caller, statuses[index]!]),
+  ) as unknown as Rule['status'];
+}
+
+const reads = answers(200, 200, 200, 404, 401, 401);
+const writes = answers(200, 200, 403, 404, 401, 401);
+const change = { version: 1, name: 'Renamed', design: defaultDesign() };
+
+/** next-auth's own routes answer everybody; tests/e2e signs in and out through them. */
+const nextAuth = 'app/api/auth/[...nextauth]/route.ts';
+
+const routes: Record<string, Record<string, Rule>> = {
+  'app/api/health/route.ts': { GET: { status: answers(200, 200, 200, 200, 200, 200) } },
+  'app/api/designs/route.ts': {
+    GET: { status: answers(200, 200, 200, 200, 401, 401) },
+    POST: { status: answers(201, 201, 403, 201, 401, 401), body: { name: 'New' } },
+  },
+  'app/api/designs/[id]/route.ts': {
+    GET: { status: reads },
+    PUT: { status: writes, body: change },
+    DELETE: { status: answers(204, 204, 403, 404, 401, 401) },
+  },
+  'app/api/designs/[id]/status/route.ts': {
+    PUT: { status: writes, body: { version: 1, status: 'ready' } },
+  },
+  'app/api/designs/[id]/files/route.ts': { GET: { status: reads } },
+  'app/api/designs/[id]/files/[name]/route.ts': { GET: { status: reads } },
+};
+
+const actions: Record<string, readonly string[]> = {
+  // Open to everybody: it makes a workshop of one's own. tests/routes/sign-up.test.ts
+  'app/(account)/sign-up/actions.ts': ['signUpAction'],
+};
+
+const sourcesIn = (folder: string): string[] =>
+  readdirSync(join(root, folder), { recursive: true, encoding: 'utf8' })
+    .filter((file) => /\.tsx?$/.test(file))
+    .map((file) => join(folder, file));
+const load = (file: string) =>
+  import(/* @vite-ignore */ join(root, file)) as Promise<Record<string, never>>;
+
+let cast: Cast;
+let fileName: string;
+
+beforeAll(async () => {
+  cast = await Cast.gather();
+  const derivation = derive(defaultDesign());
+  if (!derivation.ok) throw new Error('the default design has no plates');
+  fileName = cutFiles('Bench section', derivation.derived)[0]!.name;
+});
+
+test('the tables name every route on disk, with every method', async () => {
+  const found = sourcesIn('app').filter((file) => /\/route\.tsx?$/.test(file));
+  expect(found.sort()).toEqual([...Object.keys(routes), nextAuth].sort());
+  for (const [file, rules] of Object.entries(routes)) {
+    const exported = Object.keys(await load(file)).filter((name) => methods.includes(name));
+    expect({ file, methods: exported.sort() }).toEqual({
+      file,
+      methods: Object.keys(rules).sort(),
+    });
+  }
+});
+
+test('the tables name every action on disk', async () => {
+  const marked = ['app', 'components', 'lib']
+    .flatMap(sourcesIn)
+    .filter((file) => /^\s*['"]use server['"]/m.test(readFileSync(join(root, file), 'utf8')));
+  expect(marked.sort()).toEqual(Object.keys(actions).sort());
+  for (const [file, names] of Object.entries(actions)) {
+    expect(Object.keys(await load(file))).toEqual(names);
+  }
+});
+
+for (const [file, rules] of Object.entries(routes)) {
+  for (const [method, rule] of Object.entries(rules)) {
+    describe(`${method} ${file.slice('app'.length, -'/route.ts'.length)}`, () => {
+      for (const caller of callers) {
+        const status = rule.status[caller];
+        test(`answers ${status} to ${caller}`, async () => {
+          const id = await cast.design();
+          const before = await storedDesign(id);
+          const em = await entityManager();
+          const rows = await em.count(RecordEntry);
+          cast.ask(caller);
+          const handler = (await load(file))[method]!;
+          const response = await call(
+            handler,
+            { id, name: fileName },
+            { method, ...(rule.body !== undefined && { body: rule.body }) },
+          );
+          const answer = await response.text();
+          expect({ status: response.status, answer: status < 400 ? '' : answer }).toEqual({
+            status,
+            answer: status < 400 ? '' : expect.stringContaining('"error"'),
+          });
+          if (status >= 400) {
+            expect(answer).not.toContain(before.name);
+            expect(await storedDesign(id)).toEqual(before);
+            expect(await em.count(RecordEntry)).toBe(rows);
+          }
+        });
+      }
+    });
+  }
+}
+
+test('an outsider sees none of our designs in the list', async () => {
+  const id = await cast.design();
+  const { GET } = await import('@/app/api/designs/route');
+  cast.ask('outsider');
+  expect(await (await call(GET, {})).text()).not.toContain(id);
+  cast.ask('machinist');
+  expect(await (await call(GET, {})).text()).toContain(id);
+});

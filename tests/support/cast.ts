@@ -1,0 +1,110 @@
+/** The people that a test sends: one workshop with every role, and those who have no business. */
+
+import { randomUUID } from 'node:crypto';
+import { encode } from 'next-auth/jwt';
+import { Design, Membership, RecordEntry, User, Workshop } from '@/entities';
+import { defaultDesign, type Design as Parameters } from '@/geometry';
+import { assessDesign } from '@/lib/assess-design';
+import { entityManager } from '@/lib/db';
+import type { Role } from '@/lib/schemas/api';
+import { askWith } from './request-context';
+
+export const callers = [
+  'owner',
+  'builder',
+  'machinist',
+  'outsider',
+  'removed',
+  'signedOut',
+] as const;
+export type Caller = (typeof callers)[number];
+
+interface Person {
+  readonly id: string;
+  readonly name: string;
+  readonly cookie: string;
+}
+
+/** A cookie as next-auth's own encoder seals it. */
+export async function cookieFor(userId: string, secret?: string): Promise<string> {
+  const token = await encode({
+    token: { sub: userId },
+    secret: secret ?? process.env.NEXTAUTH_SECRET!,
+  });
+  return `next-auth.session-token=${token}`;
+}
+
+export class Cast {
+  private constructor(
+    readonly workshopId: string,
+    private readonly people: Partial<Record<Caller, Person>>,
+  ) {}
+
+  static async gather(): Promise<Cast> {
+    const em = await entityManager();
+    const people: Partial<Record<Caller, Person>> = {};
+    const ours = em.create(Workshop, { id: randomUUID(), name: 'Harrow Lane' });
+    const theirs = em.create(Workshop, { id: randomUUID(), name: 'Quarry End' });
+    const join = async (caller: Caller, workshop: Workshop | null, role: Role) => {
+      const id = randomUUID();
+      const name = `Test ${caller}`;
+      const email = `${caller.toLowerCase()}-${id}@test.example`;
+      const user = em.create(User, { id, name, email, passwordHash: 'none' });
+      if (workshop) em.create(Membership, { user, workshop, role });
+      people[caller] = { id, name, cookie: await cookieFor(id) };
+    };
+    await join('owner', ours, 'owner');
+    await join('builder', ours, 'builder');
+    await join('machinist', ours, 'machinist');
+    await join('outsider', theirs, 'owner');
+    // Holds a session from when there was a membership.
+    await join('removed', null, 'builder');
+    await em.flush();
+    return new Cast(ours.id, people);
+  }
+
+  person(caller: Exclude<Caller, 'signedOut'>): Person {
+    return this.people[caller]!;
+  }
+
+  /** From now on this one asks. */
+  ask(caller: Caller, headers: Record<string, string> = {}): void {
+    const cookie = this.people[caller]?.cookie;
+    askWith({ ...headers, ...(cookie && { cookie }) });
+  }
+
+  /** A stored design of ours, put there without any route. */
+  async design(
+    parameters: Parameters = defaultDesign(),
+    name = 'Bench section',
+  ): Promise<string> {
+    const em = await entityManager();
+    const id = randomUUID();
+    const now = new Date();
+    const builder = em.getReference(User, this.person('builder').id);
+    em.create(Design, {
+      id,
+      workshop: em.getReference(Workshop, this.workshopId),
+      name,
+      parameters,
+      ...assessDesign(parameters),
+      createdBy: builder,
+      updatedBy: builder,
+      createdAt: now,
+      updatedAt: now,
+    });
+    await em.flush();
+    return id;
+  }
+
+  /** The record's rows about one subject, oldest first. */
+  async record(subject: string): Promise<RecordEntry[]> {
+    const em = await entityManager();
+    return em.find(RecordEntry, { subject }, { orderBy: { id: 'asc' } });
+  }
+}
+
+/** The row as it stands. */
+export async function storedDesign(id: string): Promise<Design> {
+  return (await entityManager()).findOneOrFail(Design, id);
+}

@@ -1,0 +1,41 @@
+import { defineConfig } from 'vitest/config';
+
+const alias = {
+  '@': import.meta.dirname,
+  // Next's own marker; outside Next there is nothing to mark.
+  'server-only': `${import.meta.dirname}/tests/support/server-only.ts`,
+};
+
+export default defineConfig({
+  test: {
+    projects: [
+      {
+        resolve: { alias },
+        test: {
+          name: 'kernel',
+          include: ['tests/{geometry,references,golden}/**/*.test.ts'],
+          testTimeout: 30_000,
+        },
+      },
+      {
+        resolve: { alias },
+        test: {
+          name: 'house',
+          include: ['tests/house/**/*.test.ts'],
+          testTimeout: 60_000,
+        },
+      },
+      {
+        resolve: { alias },
+        test: {
+          name: 'routes',
+          include: ['tests/routes/**/*.test.ts'],
+          globalSetup: ['tests/support/cluster.ts'],
+          setupFiles: ['tests/support/database.ts', 'tests/support/request-context.ts'],
+          testTimeout: 20_000,
+          hookTimeout: 60_000,
+        },
+      },
+    ],
+  },
+});
