@@ -36,7 +36,7 @@ export function LawChart({ section, store }: { section: SectionResult; store: An
       >
         <div aria-hidden="true">
           <div className="relative">
-            <div ref={lawHost} className="h-44" />
+            <div ref={lawHost} className="h-40" />
             <span className="absolute top-1 left-2 text-small text-brass-dark">
               {series.capacitance.unit}
             </span>
@@ -47,7 +47,7 @@ export function LawChart({ section, store }: { section: SectionResult; store: An
             )}
           </div>
           <div className="relative border-t border-line">
-            <div ref={errorHost} className="h-24" />
+            <div ref={errorHost} className="h-20" />
             <span className="absolute top-1 left-2 text-small text-bad">error, % of range</span>
           </div>
         </div>

@@ -1,11 +1,10 @@
 import type uPlot from 'uplot';
 import { INSET_LEFT, INSET_RIGHT } from './insets';
-import type { LawSeries } from './law-series';
 import { palette } from './palette';
 import type { PlotKind } from './use-plot';
 
 /** Room over each plot for the letters of its scales, CSS px. */
-export const PLOT_TOP = 26;
+const PLOT_TOP = 24;
 const PLOT_BOTTOM = 6;
 
 /**

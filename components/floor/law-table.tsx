@@ -17,7 +17,7 @@ export function LawTable({ section, series }: { section: SectionResult; series: 
 
   return (
     <details className="border-t border-line">
-      <summary className="cursor-pointer px-3 py-3.5 text-small font-medium">
+      <summary className="cursor-pointer px-3 py-2.5 text-small font-medium max-bench:py-3.5">
         The chart in figures, every {EVERY}°
       </summary>
       <div

@@ -15,7 +15,7 @@ import { views, type ViewName } from './views';
  * wrapper carries data-plates, and data-angle with the turn, in degrees, of the frame last drawn.
  */
 export function StackView({ derived, store }: { derived: Derived; store: AngleStore }) {
-  const wrapper = useRef<HTMLElement>(null);
+  const wrapper = useRef<HTMLDivElement>(null);
   const eye = useRef<EyeHandle>(null);
   const [drawable, setDrawable] = useState(true);
   const fail = useCallback(() => setDrawable(false), []);
@@ -26,12 +26,11 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
   const rotors = plates.filter(({ role }) => role === 'rotor').length;
 
   return (
-    <section
+    <div
       ref={wrapper}
-      aria-label="Meshed stack"
       data-part="stack"
       data-plates={plates.length}
-      className="flex h-full min-h-64 w-full flex-col bg-well"
+      className="flex h-full min-h-40 w-full flex-col bg-well"
     >
       {drawable ? (
         <>
@@ -52,22 +51,30 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
           <div
             role="group"
             aria-label="View of the stack"
-            className="flex flex-wrap gap-1 border-t border-line p-1"
+            className="flex flex-wrap border-t border-line"
           >
             {(Object.keys(views) as ViewName[]).map((name) => (
               <Button
                 key={name}
                 look="quiet"
-                className="px-2!"
+                className="grow px-1.5! text-small!"
                 onPress={() => eye.current?.look(name)}
               >
                 {views[name].label}
               </Button>
             ))}
-            <Button look="quiet" className="px-2!" onPress={() => eye.current?.step(0.8)}>
+            <Button
+              look="quiet"
+              className="grow px-1.5! text-small!"
+              onPress={() => eye.current?.step(0.8)}
+            >
               Nearer
             </Button>
-            <Button look="quiet" className="px-2!" onPress={() => eye.current?.step(1.25)}>
+            <Button
+              look="quiet"
+              className="grow px-1.5! text-small!"
+              onPress={() => eye.current?.step(1.25)}
+            >
               Further
             </Button>
           </div>
@@ -78,6 +85,6 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
           files do not depend on it.
         </p>
       )}
-    </section>
+    </div>
   );
 }
