@@ -2,7 +2,6 @@ import type { Metadata, Viewport } from 'next';
 import localFont from 'next/font/local';
 import { headers } from 'next/headers';
 import type { ReactNode } from 'react';
-import { Providers } from '@/components/providers';
 import './globals.css';
 
 const archivo = localFont({
@@ -33,9 +32,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
         {/* React Aria reads it for the style element it adds. */}
         <meta property="csp-nonce" nonce={nonce} content="" />
       </head>
-      <body>
-        <Providers>{children}</Providers>
-      </body>
+      <body>{children}</body>
     </html>
   );
 }

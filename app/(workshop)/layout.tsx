@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { TopBar } from '@/components/account/top-bar';
+import { Providers } from '@/components/providers';
 import { requirePageMember } from '@/lib/access';
 
 export default async function WorkshopLayout({ children }: { children: ReactNode }) {
@@ -7,7 +8,7 @@ export default async function WorkshopLayout({ children }: { children: ReactNode
   return (
     <div className="flex min-h-dvh flex-col">
       <TopBar workshop={viewer.workshopName} person={viewer.name} />
-      {children}
+      <Providers>{children}</Providers>
     </div>
   );
 }

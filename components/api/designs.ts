@@ -9,12 +9,6 @@ import {
 } from '@/lib/schemas/api';
 import { request, send } from './request';
 
-export const designKeys = {
-  list: ['designs'] as const,
-  record: (id: string) => ['designs', id] as const,
-  files: (id: string, version: number) => ['designs', id, 'files', version] as const,
-};
-
 export const fetchDesigns = async () =>
   (await request(designListSchema, '/api/designs')).designs;
 

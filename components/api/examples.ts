@@ -1,4 +1,5 @@
-import { z } from 'zod';
+import './zod-setup';
+import * as z from 'zod';
 import { designSchema } from '@/lib/schemas/design';
 import { request } from './request';
 

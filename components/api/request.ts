@@ -1,29 +1,7 @@
-import type { z } from 'zod';
-import { apiErrorSchema, type ApiErrorCode, type DesignRecord } from '@/lib/schemas/api';
-
-/** A refusal by the server, or `offline` when it could not be reached at all. */
-export class RequestError extends Error {
-  readonly code: ApiErrorCode | 'offline';
-  readonly field: string | undefined;
-  readonly current: DesignRecord | undefined;
-
-  constructor(
-    code: ApiErrorCode | 'offline',
-    message: string,
-    details: { field?: string | undefined; current?: DesignRecord | undefined } = {},
-  ) {
-    super(message);
-    this.name = 'RequestError';
-    this.code = code;
-    this.field = details.field;
-    this.current = details.current;
-  }
-
-  /** Worth another try with the same body later. */
-  get passing(): boolean {
-    return this.code === 'offline' || this.code === 'unavailable';
-  }
-}
+import './zod-setup';
+import type * as z from 'zod';
+import { apiErrorSchema } from '@/lib/schemas/api';
+import { RequestError } from './request-error';
 
 async function refusal(response: Response): Promise<RequestError> {
   const parsed = apiErrorSchema.safeParse(await response.json().catch(() => null));
@@ -34,7 +12,7 @@ async function refusal(response: Response): Promise<RequestError> {
     );
   }
   const { error, current } = parsed.data;
-  return new RequestError(error.code, error.message, { field: error.field, current });
+  return new RequestError(error.code, error.message, current);
 }
 
 /**

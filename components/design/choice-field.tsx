@@ -2,7 +2,7 @@
 
 import { Label, Radio, RadioGroup } from 'react-aria-components/RadioGroup';
 import { useController, useFormContext } from 'react-hook-form';
-import { inputClass } from '@/components/ui/text-field';
+import { inputClass } from '@/components/ui/input-class';
 import type { ChoiceParameter } from '@/geometry';
 import type { Draft } from './draft';
 import { fieldId } from './focus-field';

@@ -4,7 +4,7 @@ import { useMutation } from '@tanstack/react-query';
 import { useState } from 'react';
 import { Input, Label, TextField } from 'react-aria-components/TextField';
 import { useController, useFormContext } from 'react-hook-form';
-import { setDesignStatus } from '@/components/api/designs';
+import { loadApi } from '@/components/api/load-api';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { StatusBadge } from '@/components/ui/status-badge';
@@ -17,6 +17,7 @@ function NameField() {
   const { field } = useController({ control, name: 'name' });
   return (
     <TextField
+      className="max-w-full min-w-0"
       value={field.value}
       onChange={field.onChange}
       onBlur={field.onBlur}
@@ -34,7 +35,10 @@ export function DesignBar({ saving }: { saving: Saving }) {
   const [hint, setHint] = useState<string | null>(null);
   const next = stored.status === 'ready' ? 'draft' : 'ready';
   const status = useMutation({
-    mutationFn: () => setDesignStatus(stored.id, { version: stored.version, status: next }),
+    mutationFn: async () => {
+      const { setDesignStatus } = await loadApi();
+      return setDesignStatus(stored.id, { version: stored.version, status: next });
+    },
     onSuccess: saving.adopt,
   });
   const trouble = refusal ?? hint ?? status.error?.message;

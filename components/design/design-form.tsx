@@ -2,6 +2,7 @@
 
 import { useState } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
+import { loadApi } from '@/components/api/load-api';
 import { ListField, RadioField } from './choice-field';
 import { applies, type Draft } from './draft';
 import { sectionGroups, sharedGroups, type Group, type GroupEntry } from './parameter-groups';
@@ -41,6 +42,7 @@ export function DesignForm({ section }: { section: number }) {
     const ids = target.getAttribute('aria-describedby')?.split(' ') ?? [];
     const text = ids.map((id) => document.getElementById(id)?.textContent ?? '');
     setHelp(text[0] ?? '');
+    void loadApi().catch(() => undefined);
   }
 
   return (

@@ -1,7 +1,8 @@
 'use client';
 
+import { I18nProvider } from 'react-aria-components/I18nProvider';
 import type { Derivation } from '@/geometry';
-import type { DesignRecord } from '@/lib/schemas/api';
+import type { DesignFiles, DesignRecord } from '@/lib/schemas/api';
 import { EditScreen } from './edit-screen';
 import { ReadScreen } from './read-screen';
 
@@ -9,15 +10,21 @@ import { ReadScreen } from './read-screen';
 export function DesignScreen({
   record,
   derivation,
+  files,
   userId,
 }: {
   record: DesignRecord;
   derivation: Derivation;
+  files: DesignFiles | null;
   userId: string;
 }) {
-  return record.mayEdit ? (
-    <EditScreen record={record} derivation={derivation} userId={userId} />
-  ) : (
-    <ReadScreen record={record} derivation={derivation} />
+  return (
+    <I18nProvider locale="en-GB">
+      {record.mayEdit ? (
+        <EditScreen record={record} derivation={derivation} files={files} userId={userId} />
+      ) : (
+        <ReadScreen record={record} derivation={derivation} files={files} />
+      )}
+    </I18nProvider>
   );
 }

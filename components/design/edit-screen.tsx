@@ -4,7 +4,7 @@ import dynamic from 'next/dynamic';
 import { useEffect, useState } from 'react';
 import { FormProvider, useForm } from 'react-hook-form';
 import type { Derivation, Finding } from '@/geometry';
-import type { DesignRecord } from '@/lib/schemas/api';
+import type { DesignFiles, DesignRecord } from '@/lib/schemas/api';
 import { DesignBar } from './design-bar';
 import { DesignForm } from './design-form';
 import { designOf, draftOf, parameterAt, type Draft } from './draft';
@@ -27,10 +27,12 @@ const ConflictDialog = dynamic(() => import('./conflict-dialog'), { ssr: false }
 export function EditScreen({
   record,
   derivation,
+  files,
   userId,
 }: {
   record: DesignRecord;
   derivation: Derivation;
+  files: DesignFiles | null;
   userId: string;
 }) {
   const form = useForm<Draft>({
@@ -92,7 +94,7 @@ export function EditScreen({
           </div>
           <section
             aria-label="Parameters"
-            className="flex flex-col gap-4 px-5 pt-4 bench:order-1 bench:overflow-y-auto"
+            className="flex min-w-0 flex-col gap-4 px-5 pt-4 bench:order-1 bench:overflow-y-auto"
           >
             <SectionTools section={section} onChange={setSection} />
             <DesignForm section={section} />
@@ -100,7 +102,7 @@ export function EditScreen({
           <div className="min-w-0 bench:order-3 bench:flex bench:min-h-0 bench:flex-col">
             <SidePanel plates={plates} section={shownSection} store={store} onPick={pick}>
               <PanelSection title="Files">
-                <FilesPanel record={saving.stored} dirty={saving.dirty} />
+                <FilesPanel record={saving.stored} first={files} dirty={saving.dirty} />
               </PanelSection>
             </SidePanel>
           </div>

@@ -1,8 +1,9 @@
 'use client';
 
 import { useQuery } from '@tanstack/react-query';
-import { designKeys, fetchFiles } from '@/components/api/designs';
-import type { DesignRecord } from '@/lib/schemas/api';
+import { designKeys } from '@/components/api/design-keys';
+import { loadApi } from '@/components/api/load-api';
+import type { DesignFiles, DesignRecord } from '@/lib/schemas/api';
 
 const kinds = { dxf: 'DXF', svg: 'SVG', csv: 'CSV', json: 'JSON' } as const;
 
@@ -11,11 +12,21 @@ function size(bytes: number): string {
 }
 
 /** The files of the saved version, each one link. */
-export function FilesPanel({ record, dirty }: { record: DesignRecord; dirty: boolean }) {
+export function FilesPanel({
+  record,
+  first,
+  dirty,
+}: {
+  record: DesignRecord;
+  /** The list as the page came with it. */
+  first: DesignFiles | null;
+  dirty: boolean;
+}) {
   const { id, version } = record;
   const query = useQuery({
     queryKey: designKeys.files(id, version),
-    queryFn: () => fetchFiles(id),
+    queryFn: async () => (await loadApi()).fetchFiles(id),
+    ...(first?.version === version && { initialData: first }),
     staleTime: Infinity,
   });
   return (

@@ -1,14 +1,26 @@
 'use client';
 
-import { Button } from 'react-aria-components/Button';
 import { SeverityShape, severityWords } from '@/components/ui/severity';
 import { formatQuantity, type Finding } from '@/geometry';
 
 const colours = { ok: 'text-ok', warn: 'text-warn', fail: 'text-bad' } as const;
 const rank = { fail: 0, warn: 1, ok: 2 } as const;
 
+/** The law error is a fraction of the range; people read it in per cent. */
+function written({ code, quantity }: Finding, value: number): string {
+  return code === 'law-held'
+    ? `${Number((value * 100).toPrecision(2))} %`
+    : formatQuantity(value, quantity, 3);
+}
+
+/** Is the limit an upper or a lower one? It shows in which side a good or a bad value lies on. */
+function side({ severity, value, limit }: Finding): string {
+  const below = severity === 'ok' ? value <= limit : value < limit;
+  return below === (severity === 'ok') ? 'at most' : 'at least';
+}
+
 function FindingBody({ finding, sections }: { finding: Finding; sections: number }) {
-  const { severity, label, value, limit, quantity, change, section } = finding;
+  const { severity, label, value, limit, change, section } = finding;
   return (
     <span className="grid w-full grid-cols-[0.875rem_1fr_auto] items-start gap-x-2.5 gap-y-0.5 text-left">
       <span className="pt-0.5">
@@ -22,9 +34,9 @@ function FindingBody({ finding, sections }: { finding: Finding; sections: number
         </span>
       </span>
       <span className="text-right whitespace-nowrap">
-        {formatQuantity(value, quantity, 3)}
+        {written(finding, value)}
         <span className="block text-small text-ink-2">
-          limit {formatQuantity(limit, quantity, 3)}
+          {side(finding)} {written(finding, limit)}
         </span>
       </span>
       {change !== '' && (
@@ -53,12 +65,13 @@ export function FindingsList({
           className="border-b border-line last:border-0"
         >
           {onPick && finding.parameters.length > 0 ? (
-            <Button
-              onPress={() => onPick(finding)}
+            <button
+              type="button"
+              onClick={() => onPick(finding)}
               className="flex w-full py-1.5 hover:bg-white max-bench:min-h-11"
             >
               <FindingBody finding={finding} sections={sections} />
-            </Button>
+            </button>
           ) : (
             <div className="py-1.5">
               <FindingBody finding={finding} sections={sections} />

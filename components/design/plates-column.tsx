@@ -25,7 +25,7 @@ export function PlatesColumn({
   return (
     <section
       aria-label="Plates and law"
-      className="flex min-w-0 flex-col border-line bg-panel max-bench:border-y bench:min-h-0 bench:border-x"
+      className="flex min-w-0 flex-col border-line bg-panel max-bench:border-y bench:min-h-0 bench:grow bench:overflow-y-auto bench:border-x"
     >
       {note && (
         <p role="status" className="border-b border-warn bg-warn-tint px-4 py-2 text-small">
@@ -34,7 +34,7 @@ export function PlatesColumn({
       )}
       {derived && result ? (
         <>
-          <div className="h-[min(92vw,30rem)] bench:h-auto bench:min-h-0 bench:grow">
+          <div className="h-[min(92vw,30rem)] shrink-0 bench:h-auto bench:min-h-104 bench:grow bench:*:h-full">
             <Floor derived={derived} section={section} store={store} />
           </div>
           <AngleRule store={store} travel={derived.design.travel} />

@@ -4,7 +4,7 @@ import { useEffect, useState } from 'react';
 import { LocalTime } from '@/components/ui/local-time';
 import { StatusBadge } from '@/components/ui/status-badge';
 import type { Derivation } from '@/geometry';
-import type { DesignRecord } from '@/lib/schemas/api';
+import type { DesignFiles, DesignRecord } from '@/lib/schemas/api';
 import { FilesPanel } from './files-panel';
 import { ParameterList } from './parameter-list';
 import { PlatesColumn } from './plates-column';
@@ -18,9 +18,11 @@ import { useNews } from './use-news';
 export function ReadScreen({
   record: first,
   derivation,
+  files,
 }: {
   record: DesignRecord;
   derivation: Derivation;
+  files: DesignFiles | null;
 }) {
   const [plates, request] = useDerivation(derivation);
   const { later, gone } = useNews(first);
@@ -60,7 +62,7 @@ export function ReadScreen({
                   A draft: ask the builder before cutting from it.
                 </p>
               )}
-              <FilesPanel record={record} dirty={false} />
+              <FilesPanel record={record} first={files} dirty={false} />
             </PanelSection>
           </div>
           <div className="flex flex-col gap-5 max-bench:order-last max-bench:px-5 max-bench:py-4">

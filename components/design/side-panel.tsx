@@ -44,9 +44,9 @@ export function SidePanel({
   return (
     <div className="flex flex-col gap-5 px-5 py-4 bench:overflow-y-auto">
       {derived && (
-        <section aria-label="Meshed stack" className="h-56 shrink-0 bg-well bench:h-52">
+        <div className="h-80 shrink-0">
           <StackView derived={derived} store={store} />
-        </section>
+        </div>
       )}
       <PanelSection title="Checks">
         {broken && (

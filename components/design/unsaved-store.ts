@@ -1,19 +1,8 @@
-import { z } from 'zod';
-import type { Draft } from './draft';
-
-const valueSchema = z.union([z.number(), z.string(), z.null()]);
-const sectionSchema = z.record(z.string(), valueSchema);
-
-const unsavedSchema = z.object({
-  /** The stored version the work began from. */
-  version: z.number().int().positive(),
-  at: z.iso.datetime(),
-  name: z.string(),
-  shared: sectionSchema,
-  sections: z.array(sectionSchema).min(1),
-});
+import { draftOf, type Draft, type DraftSection } from './draft';
+import { defaultDesign } from '@/geometry';
 
 export interface Unsaved {
+  /** The stored version the work began from. */
   readonly version: number;
   readonly at: string;
   readonly draft: Draft;
@@ -21,18 +10,44 @@ export interface Unsaved {
 
 const keyOf = (userId: string, designId: string) => `vaneloft.unsaved.${userId}.${designId}`;
 
+function isRecord(value: unknown): value is Record<string, unknown> {
+  return typeof value === 'object' && value !== null && !Array.isArray(value);
+}
+
+/** The known parameters of what was kept, the rest at their defaults: other code wrote it perhaps. */
+function values(kept: unknown, defaults: DraftSection): DraftSection {
+  const found = isRecord(kept) ? kept : {};
+  return Object.fromEntries(
+    Object.entries(defaults).map(([key, fallback]) => {
+      const value = found[key];
+      const usable = value === null || typeof value === 'number' || typeof value === 'string';
+      return [key, usable ? value : fallback];
+    }),
+  );
+}
+
+function readDraft({ name, design }: Record<string, unknown>): Draft | null {
+  if (typeof name !== 'string' || !isRecord(design) || !Array.isArray(design.sections))
+    return null;
+  const { sections: defaults, ...shared } = draftOf('', defaultDesign()).design;
+  const [section] = defaults;
+  if (!section || design.sections.length === 0) return null;
+  const sections = design.sections.map((kept) => values(kept, section));
+  return {
+    name,
+    design: Object.assign(values(design, shared), { sections }) as Draft['design'],
+  };
+}
+
 /** Work of this person on this design that this browser keeps, or null. */
 export function readUnsaved(userId: string, designId: string): Unsaved | null {
   try {
-    const text = localStorage.getItem(keyOf(userId, designId));
-    const parsed = unsavedSchema.safeParse(text === null ? null : JSON.parse(text));
-    if (!parsed.success) return null;
-    const { version, at, name, shared, sections } = parsed.data;
-    return {
-      version,
-      at,
-      draft: { name, design: Object.assign(shared, { sections }) as Draft['design'] },
-    };
+    const kept: unknown = JSON.parse(localStorage.getItem(keyOf(userId, designId)) ?? 'null');
+    if (!isRecord(kept) || typeof kept.version !== 'number' || typeof kept.at !== 'string') {
+      return null;
+    }
+    const draft = readDraft(kept);
+    return draft && { version: kept.version, at: kept.at, draft };
   } catch {
     return null;
   }
@@ -43,14 +58,12 @@ export function keepUnsaved(
   userId: string,
   designId: string,
   version: number,
-  { name, design }: Draft,
+  draft: Draft,
 ): boolean {
-  const { sections, ...shared } = design;
-  const at = new Date().toISOString();
   try {
     localStorage.setItem(
       keyOf(userId, designId),
-      JSON.stringify({ version, at, name, shared, sections }),
+      JSON.stringify({ version, at: new Date().toISOString(), ...draft }),
     );
     return true;
   } catch {

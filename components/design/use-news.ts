@@ -1,8 +1,9 @@
 'use client';
 
 import { useQuery } from '@tanstack/react-query';
-import { designKeys, fetchDesign } from '@/components/api/designs';
-import { RequestError } from '@/components/api/request';
+import { designKeys } from '@/components/api/design-keys';
+import { loadApi } from '@/components/api/load-api';
+import { RequestError } from '@/components/api/request-error';
 import type { DesignRecord } from '@/lib/schemas/api';
 
 /** How often an open design is looked at for others' changes, ms. */
@@ -12,7 +13,7 @@ const PERIOD = 10_000;
 export function useNews(known: DesignRecord): { later: DesignRecord | null; gone: boolean } {
   const { data, error } = useQuery({
     queryKey: designKeys.record(known.id),
-    queryFn: () => fetchDesign(known.id),
+    queryFn: async () => (await loadApi()).fetchDesign(known.id),
     initialData: known,
     initialDataUpdatedAt: () => Date.now(),
     refetchInterval: PERIOD,

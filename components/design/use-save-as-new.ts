@@ -3,7 +3,8 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { useRouter } from 'next/navigation';
 import type { UseFormReturn } from 'react-hook-form';
-import { createDesign, designKeys } from '@/components/api/designs';
+import { designKeys } from '@/components/api/design-keys';
+import { loadApi } from '@/components/api/load-api';
 import { designOf, type Draft } from './draft';
 import { dropUnsaved } from './unsaved-store';
 
@@ -17,6 +18,7 @@ export function useSaveAsNew(form: UseFormReturn<Draft>, userId: string, designI
       const read = designOf(draft);
       if (!read.ok) throw new Error(read.message);
       const name = `${draft.name.slice(0, 71)}, my work`;
+      const { createDesign } = await loadApi();
       return (await createDesign({ name, design: read.design })).id;
     },
     onSuccess: (id) => {

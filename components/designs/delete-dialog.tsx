@@ -1,7 +1,8 @@
 'use client';
 
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { deleteDesign, designKeys } from '@/components/api/designs';
+import { designKeys } from '@/components/api/design-keys';
+import { deleteDesign } from '@/components/api/designs';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { Notice } from '@/components/ui/notice';

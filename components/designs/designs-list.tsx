@@ -3,7 +3,8 @@
 import { useQuery } from '@tanstack/react-query';
 import dynamic from 'next/dynamic';
 import { useState } from 'react';
-import { designKeys, fetchDesigns } from '@/components/api/designs';
+import { designKeys } from '@/components/api/design-keys';
+import { loadApi } from '@/components/api/load-api';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import type { DesignSummary } from '@/lib/schemas/api';
@@ -17,14 +18,16 @@ type Asking = { what: 'new' } | { what: 'copy' | 'delete'; design: DesignSummary
 /** The workshop's designs; others' changes appear while one looks. */
 export function DesignsList({
   initial,
+  lawLabels,
   mayEdit,
 }: {
   initial: DesignSummary[];
+  lawLabels: Record<string, string>;
   mayEdit: boolean;
 }) {
   const query = useQuery({
     queryKey: designKeys.list,
-    queryFn: fetchDesigns,
+    queryFn: async () => (await loadApi()).fetchDesigns(),
     initialData: initial,
     initialDataUpdatedAt: () => Date.now(),
     refetchInterval: 15_000,
@@ -55,6 +58,7 @@ export function DesignsList({
       ) : (
         <DesignsTable
           designs={designs}
+          lawLabels={lawLabels}
           {...(mayEdit && {
             onCopy: (design: DesignSummary) => setAsking({ what: 'copy', design }),
             onDelete: (design: DesignSummary) => setAsking({ what: 'delete', design }),

@@ -1,31 +1,31 @@
 'use client';
 
 import { useTable, type SortingState } from '@tanstack/react-table';
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { SelectField } from '@/components/ui/select-field';
-import { TextField } from '@/components/ui/text-field';
+import { SearchField } from '@/components/ui/search-field';
 import type { DesignSummary } from '@/lib/schemas/api';
-import { columns, features, statusOptions } from './columns';
+import { columnsWith, features, statusOptions } from './columns';
 import { SortButton } from './sort-button';
 
-/** Cells that a narrow screen leaves out; the name, status and checks stay. */
-const wideOnly = new Set(['law', 'by']);
-
-const cellClass = (id: string) => (wideOnly.has(id) ? 'max-bench:hidden' : '');
-
+// On a narrow screen every row is laid out in lines, which would take the table's meaning from it:
+// hence the roles.
 export function DesignsTable({
   designs,
+  lawLabels,
   onCopy,
   onDelete,
 }: {
   designs: DesignSummary[];
+  lawLabels: Record<string, string>;
   onCopy?: (design: DesignSummary) => void;
   onDelete?: (design: DesignSummary) => void;
 }) {
   const [search, setSearch] = useState('');
   const [status, setStatus] = useState<(typeof statusOptions)[number]['value']>('all');
   const [sorting, setSorting] = useState<SortingState>([{ id: 'updatedAt', desc: true }]);
+  const columns = useMemo(() => columnsWith(lawLabels), [lawLabels]);
   const table = useTable({
     features,
     columns,
@@ -46,7 +46,7 @@ export function DesignsTable({
     <>
       <div className="flex flex-wrap items-end gap-3">
         <div className="w-full max-w-80 grow">
-          <TextField label="Search" type="search" value={search} onChange={setSearch} />
+          <SearchField label="Search" value={search} onChange={setSearch} />
         </div>
         <SelectField
           label="Status"
@@ -60,17 +60,22 @@ export function DesignsTable({
             : `${rows.length} of ${designs.length} designs`}
         </p>
       </div>
-      <table className="dense w-full border-y border-line bg-panel">
+      <table role="table" className="dense w-full border-y border-line bg-panel max-wide:block">
         <caption className="sr-only">Designs of the workshop</caption>
-        <thead>
+        <thead role="rowgroup" className="max-wide:block">
           {table.getHeaderGroups().map((group) => (
-            <tr key={group.id} className="border-b border-line bg-page">
+            <tr
+              key={group.id}
+              role="row"
+              className="border-b border-line bg-page max-wide:flex max-wide:flex-wrap"
+            >
               {group.headers.map((header) => (
                 <th
                   key={header.id}
                   scope="col"
+                  role="columnheader"
                   aria-sort={ariaSort(header.column.getIsSorted())}
-                  className={`px-3 text-left max-wide:px-2 ${cellClass(header.column.id)}`}
+                  className="px-3 text-left"
                 >
                   <SortButton
                     direction={header.column.getIsSorted()}
@@ -81,26 +86,27 @@ export function DesignsTable({
                 </th>
               ))}
               {onCopy && (
-                <th scope="col" className="px-3 max-wide:hidden">
+                <th scope="col" role="columnheader" className="px-3 max-wide:sr-only">
                   <span className="sr-only">What can be done</span>
                 </th>
               )}
             </tr>
           ))}
         </thead>
-        <tbody>
+        <tbody role="rowgroup" className="max-wide:block">
           {rows.map((row) => (
-            <tr key={row.id} className="border-b border-line last:border-0 hover:bg-white">
+            <tr
+              key={row.id}
+              role="row"
+              className="border-b border-line last:border-0 hover:bg-white max-wide:flex max-wide:flex-wrap max-wide:items-center max-wide:pb-1"
+            >
               {row.getAllCells().map((cell) => (
-                <td
-                  key={cell.id}
-                  className={`px-3 py-0.5 max-wide:px-2 ${cellClass(cell.column.id)}`}
-                >
+                <td key={cell.id} role="cell" className="px-3 py-0.5 max-wide:first:basis-full">
                   <table.FlexRender cell={cell} />
                 </td>
               ))}
               {onCopy && onDelete && (
-                <td className="px-1 text-right whitespace-nowrap max-wide:hidden">
+                <td role="cell" className="px-1 text-right whitespace-nowrap max-wide:grow">
                   <Button
                     look="quiet"
                     aria-label={`Duplicate ${row.original.name}`}
@@ -120,8 +126,8 @@ export function DesignsTable({
             </tr>
           ))}
           {rows.length === 0 && (
-            <tr>
-              <td colSpan={columns.length + 1} className="px-3 py-4">
+            <tr role="row">
+              <td role="cell" colSpan={columns.length + 1} className="px-3 py-4">
                 No design fits this search. Clear the search or set the status to all.
               </td>
             </tr>

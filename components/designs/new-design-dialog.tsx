@@ -3,7 +3,8 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { useRouter } from 'next/navigation';
 import { useState } from 'react';
-import { createDesign, designKeys, fetchDesign } from '@/components/api/designs';
+import { designKeys } from '@/components/api/design-keys';
+import { createDesign, fetchDesign } from '@/components/api/designs';
 import { fetchExample, fetchExamples } from '@/components/api/examples';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';

@@ -1,7 +1,4 @@
-'use client';
-
 import type { ReactNode } from 'react';
-import { Button } from 'react-aria-components/Button';
 
 /** A column head that sorts; the arrow says which way, the cell's aria-sort says it aloud. */
 export function SortButton({
@@ -14,8 +11,9 @@ export function SortButton({
   children: ReactNode;
 }) {
   return (
-    <Button
-      onPress={onPress}
+    <button
+      type="button"
+      onClick={onPress}
       className="flex min-h-11 items-center gap-1.5 text-small font-semibold whitespace-nowrap text-ink-2 hover:text-ink"
     >
       {children}
@@ -27,6 +25,6 @@ export function SortButton({
           <path d="M4 10 .5 6h7z" fill="currentColor" opacity={direction ? 1 : 0.35} />
         )}
       </svg>
-    </Button>
+    </button>
   );
 }

@@ -1,7 +1,5 @@
-'use client';
-
 import { useId } from 'react';
-import { inputClass } from './text-field';
+import { inputClass } from './input-class';
 
 /** The platform's own select: quick with a glove, a keyboard and a reader alike. */
 export function SelectField<V extends string>({

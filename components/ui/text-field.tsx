@@ -8,9 +8,7 @@ import {
   TextField as AriaTextField,
   type TextFieldProps,
 } from 'react-aria-components/TextField';
-
-export const inputClass =
-  'w-full min-h-9 rounded-[3px] border border-edge bg-white px-2.5 py-1.5 text-body text-ink outline-offset-1 max-bench:min-h-11 invalid:border-bad data-invalid:border-bad';
+import { inputClass } from './input-class';
 
 /** One line of text with its label above it. */
 export function TextField({

@@ -3,7 +3,15 @@ import { notFound } from 'next/navigation';
 import { DesignScreen } from '@/components/design/design-screen';
 import { derive } from '@/geometry';
 import { requirePageMember } from '@/lib/access';
+import { listFiles } from '@/lib/design-files';
+import { RequestError } from '@/lib/errors';
 import { findDesign } from '@/lib/queries';
+
+/** A design without plates has no files; its screen asks again and says why. */
+function noFiles(error: unknown): null {
+  if (error instanceof RequestError && error.code === 'checks-fail') return null;
+  throw error;
+}
 
 type Props = { params: Promise<{ id: string }> };
 
@@ -21,6 +29,7 @@ export default async function DesignPage({ params }: Props) {
       key={record.id}
       record={record}
       derivation={derive(record.design)}
+      files={await listFiles(record.id).catch(noFiles)}
       userId={viewer.userId}
     />
   );
