@@ -30,16 +30,16 @@ export function FloorReadout({
   return (
     <dl
       data-part="readout"
-      className="pointer-events-none absolute top-3 left-4 grid grid-cols-[auto_auto] gap-x-2.5 font-mono text-small text-scribe"
+      className="pointer-events-none flex flex-wrap gap-x-1.5 px-3 pt-2 font-mono text-small text-scribe @xl:absolute @xl:top-1 @xl:left-1 @xl:grid @xl:gap-x-2.5 @xl:grid-cols-[auto_auto]"
     >
       <dt>angle</dt>
-      <dd ref={angleRef} className="text-right" />
+      <dd ref={angleRef} className="text-right not-last:mr-1 @xl:mr-0!" />
       <dt>total</dt>
-      <dd ref={capacitanceRef} className="text-right" />
+      <dd ref={capacitanceRef} className="text-right not-last:mr-1 @xl:mr-0!" />
       {section.inductance !== null && (
         <>
-          <dt>tunes to</dt>
-          <dd ref={frequencyRef} className="text-right" />
+          <dt>tunes</dt>
+          <dd ref={frequencyRef} className="text-right not-last:mr-1 @xl:mr-0!" />
         </>
       )}
     </dl>
@@ -58,7 +58,7 @@ export function FloorKey({
   limit: { readonly text: string; readonly shown: boolean };
 }) {
   return (
-    <ul className="pointer-events-none absolute bottom-3 left-4 flex flex-col gap-0.5 font-mono text-small text-scribe">
+    <ul className="pointer-events-none flex flex-wrap gap-x-4 gap-y-0.5 px-3 pb-2 font-mono text-small text-scribe @xl:absolute @xl:bottom-1 @xl:left-1 @xl:flex-col">
       <li className="flex items-center gap-2">
         <span className="h-3 w-4 border-2 border-brass bg-brass/65" aria-hidden="true" />
         {section.rotor.quantity} rotor
@@ -78,7 +78,7 @@ export function FloorKey({
         {limit.shown && (
           <span className="w-4 border-t-2 border-dashed border-scribe" aria-hidden="true" />
         )}
-        <span className="max-w-44">
+        <span className="@xl:max-w-44">
           {limit.shown ? limit.text : `${limit.text}, outside this view`}
         </span>
       </li>

@@ -51,15 +51,24 @@ export function RotorPlate({
   mark: number;
   drag: ReturnType<typeof useRotorDrag>;
 }) {
-  const { rotor } = section;
+  const path = svgPath([section.rotor.outside, ...section.rotor.holes]);
   return (
     <g className="pointer-events-auto cursor-grab touch-none active:cursor-grabbing" {...drag}>
       <path
-        d={svgPath([rotor.outside, ...rotor.holes])}
+        d={path}
         fillRule="evenodd"
         className="fill-brass/65 stroke-brass"
         strokeWidth="2"
         strokeLinejoin="round"
+        vectorEffect="non-scaling-stroke"
+      />
+      {/* A margin for fingers: the blade is narrow at its leading end. */}
+      <path
+        d={path}
+        fill="none"
+        stroke="transparent"
+        strokeWidth="28"
+        pointerEvents="stroke"
         vectorEffect="non-scaling-stroke"
       />
       <circle

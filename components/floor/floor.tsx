@@ -53,7 +53,8 @@ export function Floor({
   } as const;
 
   return (
-    <div className="relative h-full min-h-80 w-full overflow-hidden bg-floor select-none">
+    <div className="@container relative flex h-full min-h-80 w-full flex-col overflow-hidden bg-floor select-none">
+      <FloorReadout section={section} store={store} />
       {/* Three layers, so that turning moves a picture of the rotor and draws nothing again. */}
       <div
         ref={frame}
@@ -61,7 +62,7 @@ export function Floor({
         aria-label={`Plan of section ${index + 1}`}
         aria-describedby={`${id}-text`}
         data-part="floor"
-        className="absolute inset-0"
+        className="relative min-h-0 grow"
         style={{ '--px': view.unit } as CSSProperties}
       >
         <svg {...layer}>
@@ -103,7 +104,6 @@ export function Floor({
       <p id={`${id}-text`} className="sr-only">
         {describe(section, limit)}
       </p>
-      <FloorReadout section={section} store={store} />
       <FloorKey
         section={section}
         step={grid.step}

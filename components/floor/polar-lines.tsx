@@ -60,7 +60,19 @@ export function RingLetters({ grid, from }: { grid: PolarGrid; from: number }) {
       {grid.rings
         .filter((ring) => ring > from)
         .map((ring) => (
-          <text key={ring} x={-ring} y={0} dx="0.3em" dy="1.2em">
+          <text
+            key={ring}
+            x={-ring}
+            y={0}
+            dx="0.3em"
+            dy="1.2em"
+            // Every other one on a narrow screen, counted from the outermost.
+            className={
+              grid.rings.length > 4 && (grid.rings.length - grid.rings.indexOf(ring)) % 2 === 0
+                ? 'hidden @xl:block'
+                : undefined
+            }
+          >
             {ring}
           </text>
         ))}
