@@ -26,13 +26,17 @@ export function checkNode() {
   throw new Stop(`Node ${process.versions.node} is too old; install Node 20.19 or newer.`);
 }
 
-/** Installs what is missing with apt, when root. @throws Stop saying what to install. */
-export async function ensureSystemPackages(names) {
+/**
+ * Installs what is missing with apt, when root. What is `wanted` only is done without elsewhere.
+ * @throws Stop saying what to install.
+ */
+export async function ensureSystemPackages(needed, wanted = []) {
+  const canInstall = process.getuid?.() === 0 && onPath('apt-get');
+  const names = canInstall ? [...needed, ...wanted] : needed;
   const missing = names.filter((name) => !known[name].present());
   if (missing.length === 0) return;
   const packages = missing.map((name) => known[name].apt);
-  const isRoot = process.getuid?.() === 0;
-  if (!isRoot || !onPath('apt-get')) {
+  if (!canInstall) {
     throw new Stop(
       `${missing.join(', ')} missing; install with:  sudo apt-get install -y ${packages.join(' ')}`,
     );

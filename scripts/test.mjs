@@ -39,7 +39,7 @@ await runUntilStopped(async () => {
   checkNode();
   makeData();
   const started = Date.now();
-  await ensureSystemPackages(['postgresql', 'chromium', 'ezdxf']);
+  await ensureSystemPackages(['postgresql', 'chromium'], ['ezdxf']);
   await ensureNodeModules();
 
   await verify();
