@@ -37,7 +37,7 @@ export function PlatesColumn({
           <div className="h-[min(92vw,30rem)] shrink-0 bench:h-auto bench:min-h-104 bench:grow bench:*:h-full">
             <Floor derived={derived} section={section} store={store} />
           </div>
-          <AngleRule store={store} travel={derived.design.travel} />
+          <AngleRule store={store} travel={derived.design.travel} section={result} />
           <LawChart section={result} store={store} />
         </>
       ) : (
