@@ -1,6 +1,19 @@
+import type { Instrumentation } from 'next';
+
 /** Runs once as the server boots: an environment that is not complete stops it here. */
 export async function register(): Promise<void> {
   if (process.env.NEXT_RUNTIME !== 'nodejs') return;
   const { env } = await import('./lib/env');
   env();
 }
+
+/** What a page or an action threw, in the log's own form. Routes answer for themselves. */
+export const onRequestError: Instrumentation.onRequestError = async (
+  error,
+  request,
+  context,
+) => {
+  if (process.env.NEXT_RUNTIME !== 'nodejs') return;
+  const { log } = await import('./lib/log');
+  log.error({ err: error, path: request.path, kind: context.routeType }, 'render failed');
+};

@@ -9,7 +9,7 @@ import { env } from './env';
 import { toRequestError } from './errors';
 import { signIn } from './sign-in';
 
-/** Seconds for which a session lasts without being used. */
+/** Seconds from signing in to the end of the session, unless the browser renews it. */
 const SESSION_AGE = 14 * 24 * 3600;
 
 /**

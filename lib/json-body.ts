@@ -4,6 +4,9 @@ import { RequestError } from './errors';
 /** Largest request body taken. A design of four sections is about 4 kB. */
 const BODY_LIMIT = 64 * 1024;
 
+/** Levels of objects and lists taken. A design has four. */
+const DEPTH_LIMIT = 16;
+
 async function readText(request: Request): Promise<string> {
   const tooLarge = () =>
     new RequestError(
@@ -24,7 +27,7 @@ async function readText(request: Request): Promise<string> {
   return text + decoder.decode();
 }
 
-/** The JSON of a request. @throws RequestError bad-input: other type, too large, not JSON. */
+/** The JSON of a request. @throws RequestError bad-input: other type, too large or deep, not JSON. */
 export async function readJson(request: Request): Promise<unknown> {
   if (!/^application\/json\b/i.test(request.headers.get('content-type') ?? '')) {
     throw new RequestError(
@@ -33,11 +36,9 @@ export async function readJson(request: Request): Promise<unknown> {
     );
   }
   const text = await readText(request);
-  if (text.includes('\\u0000')) {
-    throw new RequestError('bad-input', 'Request: holds a null character; take it out.');
-  }
+  let body: unknown;
   try {
-    return JSON.parse(text);
+    body = JSON.parse(text);
   } catch (error) {
     if (!(error instanceof SyntaxError)) throw error;
     throw new RequestError(
@@ -45,4 +46,18 @@ export async function readJson(request: Request): Promise<unknown> {
       'Request: not JSON that can be read; check its syntax.',
     );
   }
+  refuseUnstorable(body, DEPTH_LIMIT);
+  return body;
+}
+
+/** What is JSON, but can be neither written back nor kept by the database. */
+function refuseUnstorable(value: unknown, levels: number): void {
+  if (typeof value === 'string' && value.includes('\0')) {
+    throw new RequestError('bad-input', 'Request: holds a null character; take it out.');
+  }
+  if (typeof value !== 'object' || value === null) return;
+  if (levels === 0) {
+    throw new RequestError('bad-input', `Request: more than ${DEPTH_LIMIT} levels deep.`);
+  }
+  for (const item of Object.values(value)) refuseUnstorable(item, levels - 1);
 }

@@ -31,12 +31,15 @@ export const log = pino(logOptions);
 function describeError(error: unknown): unknown {
   if (!(error instanceof Error)) return String(error);
   const code: unknown = Reflect.get(error, 'code');
+  const isDriver = typeof code === 'string' && /^[0-9A-Z]{5}$/.test(code);
   return {
     name: error.name,
-    // A driver's message ends in the statement with its values, which may be somebody's.
-    message: error.message.split('\n')[0]!.replace(/^.* - /, ''),
+    message: isDriver ? withoutStatement(error.message) : error.message,
     ...(typeof code === 'string' && { code }),
     stack: error.stack?.split('\n').filter((line) => /^\s+at /.test(line)),
     ...(error.cause !== undefined && { cause: describeError(error.cause) }),
   };
 }
+
+/** MikroORM puts the statement with its values, which may be somebody's, before the reason. */
+const withoutStatement = (message: string) => message.split('\n')[0]!.replace(/^.* - /, '');

@@ -26,17 +26,14 @@ export function checkNode() {
   throw new Stop(`Node ${process.versions.node} is too old; install Node 20.19 or newer.`);
 }
 
-/**
- * Installs what is missing with apt, when root. What is `wanted` only is done without elsewhere.
- * @throws Stop saying what to install.
- */
-export async function ensureSystemPackages(needed, wanted = []) {
-  const canInstall = process.getuid?.() === 0 && onPath('apt-get');
-  const names = canInstall ? [...needed, ...wanted] : needed;
-  const missing = names.filter((name) => !known[name].present());
+const missingOf = (names) => names.filter((name) => !known[name].present());
+
+/** Installs what is missing with apt, when root. @throws Stop saying what to install. */
+export async function ensureSystemPackages(names) {
+  const missing = missingOf(names);
   if (missing.length === 0) return;
   const packages = missing.map((name) => known[name].apt);
-  if (!canInstall) {
+  if (process.getuid?.() !== 0 || !onPath('apt-get')) {
     throw new Stop(
       `${missing.join(', ')} missing; install with:  sudo apt-get install -y ${packages.join(' ')}`,
     );
@@ -47,8 +44,18 @@ export async function ensureSystemPackages(needed, wanted = []) {
   await mustRun('apt-get update', 'apt-get', ['update', '-q'], quiet);
   const install = ['install', '-y', '-q', '--no-install-recommends', ...packages];
   await mustRun('apt-get install', 'apt-get', install, quiet);
-  const still = missing.filter((name) => !known[name].present());
+  const still = missingOf(names);
   if (still.length > 0) throw new Stop(`Still missing after installing: ${still.join(', ')}`);
+}
+
+/** The same for what is only good to have: without it, says so and goes on. */
+export async function wantSystemPackages(names) {
+  try {
+    await ensureSystemPackages(names);
+  } catch (error) {
+    if (!(error instanceof Stop)) throw error;
+    console.log(`Going on without ${missingOf(names).join(', ')}. ${error.message}`);
+  }
 }
 
 /** Runs npm ci unless node_modules already holds what the lock file says. */

@@ -5,7 +5,12 @@ import { join } from 'node:path';
 import { ensureBuild } from './build.mjs';
 import { check, playwright, printTally, unused, verify, vitest } from './checks.mjs';
 import { mustRun } from './command.mjs';
-import { checkNode, ensureNodeModules, ensureSystemPackages } from './packages.mjs';
+import {
+  checkNode,
+  ensureNodeModules,
+  ensureSystemPackages,
+  wantSystemPackages,
+} from './packages.mjs';
 import { data, makeData } from './paths.mjs';
 import { freePort } from './port.mjs';
 import { startThrowawayPostgres } from './postgres.mjs';
@@ -39,7 +44,8 @@ await runUntilStopped(async () => {
   checkNode();
   makeData();
   const started = Date.now();
-  await ensureSystemPackages(['postgresql', 'chromium'], ['ezdxf']);
+  await ensureSystemPackages(['postgresql', 'chromium']);
+  await wantSystemPackages(['ezdxf']);
   await ensureNodeModules();
 
   await verify();

@@ -44,6 +44,7 @@ describe('a body that is not taken', () => {
       'JSON',
     ],
     ['a null character', { body: { name: 'a\0b' } }, 'null character'],
+    ['nested without end', { raw: '['.repeat(30_000) + ']'.repeat(30_000) }, '16 levels'],
     ['too large', { body: { name: 'x', pad: 'x'.repeat(70_000) } }, 'larger than 64 kB'],
   ])('%s', async (_what, options, words) => {
     const response = await post(options);
