@@ -207,10 +207,15 @@ export async function startThrowawayPostgres() {
   const parent = mkdtempSync('/var/tmp/vaneloft-test-');
   chmodSync(parent, 0o711);
   if (user.uid !== undefined) chownSync(parent, user.uid, user.gid);
-  endWithUs(() => rmSync(parent, { recursive: true, force: true }));
+  const clear = endWithUs(() => rmSync(parent, { recursive: true, force: true }));
   const folder = join(parent, 'postgres');
   const password = randomBytes(24).toString('hex');
   initialise(folder, password, user, ['--no-sync']);
   const careless = ['fsync=off', 'synchronous_commit=off', 'full_page_writes=off'];
-  return cluster(await launch(folder, join(parent, 'log'), user, careless), password);
+  const server = await launch(folder, join(parent, 'log'), user, careless);
+  const stop = async () => {
+    await server.stop();
+    await clear();
+  };
+  return cluster({ ...server, stop }, password);
 }
