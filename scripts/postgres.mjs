@@ -19,7 +19,7 @@ import {
 } from 'node:fs';
 import { join } from 'node:path';
 import { isAlive, waitFor } from './command.mjs';
-import { data, makeData, root } from './paths.mjs';
+import { data, makeData } from './paths.mjs';
 import { freePort } from './port.mjs';
 import { endWithUs, Stop } from './stop.mjs';
 
@@ -65,7 +65,7 @@ function lastingFolder(user) {
     user.uid === undefined ||
     spawnSync('test', ['-x', data], { ...user, cwd: '/' }).status === 0;
   if (reachable) return join(data, 'postgres');
-  const tag = createHash('sha256').update(root).digest('hex').slice(0, 12);
+  const tag = createHash('sha256').update(data).digest('hex').slice(0, 12);
   const folder = join('/var/tmp', `vaneloft-${tag}`);
   mkdirSync(folder, { recursive: true, mode: 0o700 });
   // Anybody may write to /var/tmp: only a folder of our own, or of the server's user, will do.
