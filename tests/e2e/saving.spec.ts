@@ -118,15 +118,15 @@ test('what others save appears, and a saved version is marked ready to cut', asy
   await signIn(other, owner);
   await other.goto(page.url());
   await ready(other);
-  await enter(other, 'Air gap', '0.66 mm');
+  await enter(other, 'Air gap', '0.48 mm');
   await save(other);
   await expect(page.getByText(`${owner.name} saved version 2`)).toBeVisible({
     timeout: 20_000,
   });
-  await expect(field(page, 'Air gap')).toHaveValue('0.66');
+  await expect(field(page, 'Air gap')).toHaveValue('0.48');
   await other.context().close();
 
-  await enter(page, 'Air gap', '0.67 mm');
+  await enter(page, 'Air gap', '0.47 mm');
   await page.getByRole('button', { name: 'Mark ready to cut' }).click();
   await expect(page.getByRole('alert').filter({ hasText: 'Save first' })).toBeVisible();
   await save(page);
