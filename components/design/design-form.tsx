@@ -46,7 +46,10 @@ export const DesignForm = memo(function DesignForm({ section }: { section: numbe
   }
 
   return (
-    <div className="flex flex-col gap-5" onFocus={(event) => showHelp(event.target)}>
+    <div
+      className="flex flex-col gap-5 [&_input]:scroll-mb-28 [&_select]:scroll-mb-28"
+      onFocus={(event) => showHelp(event.target)}
+    >
       {sectionGroups.map((group) => (
         <Fields
           key={prefix + group.group}

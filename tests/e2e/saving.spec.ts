@@ -59,6 +59,7 @@ test('two people saving the same design meet a choice', async ({
   browser,
   complaints,
 }) => {
+  test.slow();
   await signIn(page, builder);
   await makeDesign(page, `Shared ${Date.now()}`);
   const path = new URL(page.url()).pathname;
