@@ -17,15 +17,25 @@ export interface SymmetricMatrix {
 /** How much of the dropped fill goes to the diagonal: all of it can meet a zero pivot. */
 const kept = 0.9995;
 
+/**
+ * Skewed cells bring positive entries, which can use a pivot up. The pivots are those of the
+ * matrix without them, its row sums kept: they are positive whatever the mesh.
+ */
 function pivots(m: SymmetricMatrix): Float64Array {
   const { size, start, column, value } = m;
   const pivot = m.diagonal.slice();
-  // Sum of the entries right of the diagonal, by row.
+  // Sum of the negative entries right of the diagonal, by row.
   const right = new Float64Array(size);
   for (let i = 0; i < size; i += 1) {
     for (let s = start[i]!; s < start[i + 1]!; s += 1) {
       const j = column[s]!;
-      right[j] = right[j]! + value[s]!;
+      const v = value[s]!;
+      if (v < 0) {
+        right[j] = right[j]! + v;
+      } else {
+        pivot[i] = pivot[i]! + v;
+        pivot[j] = pivot[j]! + v;
+      }
     }
   }
   for (let i = 0; i < size; i += 1) {
@@ -33,7 +43,7 @@ function pivots(m: SymmetricMatrix): Float64Array {
     for (let s = start[i]!; s < start[i + 1]!; s += 1) {
       const j = column[s]!;
       const v = value[s]!;
-      d -= (v / pivot[j]!) * (v + kept * (right[j]! - v));
+      if (v < 0) d -= (v / pivot[j]!) * (v + kept * (right[j]! - v));
     }
     if (!(d > 0)) throw new Error(`pivot ${d} in row ${i} of ${size}`);
     pivot[i] = d;

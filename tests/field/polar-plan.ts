@@ -1,8 +1,8 @@
 import { sameAngle, turn } from './angle';
 import { cellCount, gradedSpan, type Grading, type Stop } from './grading';
 import { gridPlan } from './grid-plan';
-import { part, planMesh, type PlanMesh } from './plan-mesh';
-import { outlines, radialEdges } from './stack-lines';
+import { part, planMesh, type PlanMesh, type Triangulation } from './plan-mesh';
+import { edgeCrossings, outlines, radialEdges, type Outlines } from './stack-lines';
 import { outerRadius, type StackShape } from './stack-shape';
 
 /** How fine a grid is: everything a solution's error depends on. */
@@ -18,8 +18,8 @@ export interface Fineness {
   box: number;
 }
 
-/** Lines that cross are kept this part of an edge step apart. */
-const apart = 0.25;
+/** Lines that cross are kept this part of the gap apart at refinement 1, and nearer on finer grids. */
+const apart = 0.5;
 
 /** A grid across lines that may cross: the same cells between them wherever it is cut. */
 interface Ruling {
@@ -74,15 +74,19 @@ function keepApart(stops: Stop[], least: number): void {
  * The plan of a stack at mesh angle θ on a polar grid: rows follow the radial edges, columns the
  * arcs and outlines. Either rows or columns may bend, not both.
  */
-export function polarPlan(shape: StackShape, theta: number, fine: Fineness): PlanMesh {
-  const { travel, shaftRadius, hubRadius, cutoutRadius, gap, edgeOffset } = shape;
+export function polarTriangulation(
+  shape: StackShape,
+  theta: number,
+  fine: Fineness,
+): Triangulation {
+  const { shaftRadius, hubRadius, cutoutRadius, gap, edgeOffset } = shape;
   const outer = outerRadius(shape);
   const bentColumns = shape.rotor.form !== 'arc' || shape.stator.form !== 'arc';
   if (bentColumns && edgeOffset !== 0) {
     throw new Error('a polar grid bends its rows or its columns, not both');
   }
   const step = fine.step * gap;
-  const least = apart * step;
+  const least = (apart * gap) / fine.refinement;
   const grading: Grading = {
     growth: fine.growth,
     most: Infinity,
@@ -110,17 +114,17 @@ export function polarPlan(shape: StackShape, theta: number, fine: Fineness): Pla
     if (edgeOffset !== 0) keepApart(stops, least / outer);
     return stops;
   };
-  const radiiAt = (psi: number): Stop[] => {
-    const { blade, rim } = outlines(shape, theta, psi, least);
-    return [
-      { at: shaftRadius, step: Infinity },
-      { at: hubRadius, step },
-      { at: cutoutRadius, step },
-      { at: blade, step },
-      { at: rim, step },
-      { at: outer * fine.box, step: Infinity },
-    ];
-  };
+  // Where edges cross, columns are near each other, as rows can't follow both edges there.
+  const crossings = edgeCrossings(shape, theta).map((at) => ({ at, step: 2 * step }));
+  const radiiAt = ({ blade, rim }: Outlines): Stop[] => [
+    { at: shaftRadius, step: Infinity },
+    { at: hubRadius, step },
+    { at: cutoutRadius, step },
+    { at: blade, step },
+    { at: rim, step },
+    { at: outer * fine.box, step: Infinity },
+    ...crossings,
+  ];
 
   // The family that may bend is ruled over the cuts that the straight one makes.
   const angular = { ...grading, most: fine.mostAngle };
@@ -128,9 +132,9 @@ export function polarPlan(shape: StackShape, theta: number, fine: Fineness): Pla
   let columns: Ruling;
   if (edgeOffset === 0) {
     rows = rule([anglesAt(outer)], angular, turn);
-    columns = rule(rows.points[0]!.map(radiiAt), grading, null);
+    columns = rule(outlines(shape, theta, rows.points[0]!, least).map(radiiAt), grading, null);
   } else {
-    columns = rule([radiiAt(0)], grading, null);
+    columns = rule(outlines(shape, theta, [0], least).map(radiiAt), grading, null);
     rows = rule(columns.points[0]!.map(anglesAt), angular, turn);
   }
   const rowCut = (column: number) => (edgeOffset === 0 ? 0 : column);
@@ -139,25 +143,28 @@ export function polarPlan(shape: StackShape, theta: number, fine: Fineness): Pla
   const between = (row: number, from: number, to: number) =>
     (row - from + count) % count <= (to - from + count) % count;
 
-  return planMesh(
-    gridPlan({
-      metric: 'polar',
-      rows: count,
-      columns: columns.points[0]!.length,
-      closed: true,
-      first: (column, row) => columns.points[columnCut(row)]![column]!,
-      second: (column, row) => rows.points[rowCut(column)]![row]!,
-      mask: (column, row) => {
-        const edge = (i: number) => rows.indexOf(lineOf[i]!, rowCut(column));
-        const arc = (i: number) => columns.indexOf(i, columnCut(row));
-        const onBlade = column <= arc(3) && between(row, edge(3), edge(2));
-        const onStator = column >= arc(2) && column <= arc(4) && between(row, edge(0), edge(1));
-        return (
-          (column === 0 ? part.shaft : 0) |
-          (column <= arc(1) || onBlade ? part.rotor : 0) |
-          (onStator ? part.stator : 0)
-        );
-      },
-    }),
-  );
+  return gridPlan({
+    metric: 'polar',
+    rows: count,
+    columns: columns.points[0]!.length,
+    closed: true,
+    first: (column, row) => columns.points[columnCut(row)]![column]!,
+    second: (column, row) => rows.points[rowCut(column)]![row]!,
+    mask: (column, row) => {
+      const edge = (i: number) => rows.indexOf(lineOf[i]!, rowCut(column));
+      const arc = (i: number) => columns.indexOf(i, columnCut(row));
+      const onBlade = column <= arc(3) && between(row, edge(3), edge(2));
+      const onStator = column >= arc(2) && column <= arc(4) && between(row, edge(0), edge(1));
+      return (
+        (column === 0 ? part.shaft : 0) |
+        (column <= arc(1) || onBlade ? part.rotor : 0) |
+        (onStator ? part.stator : 0)
+      );
+    },
+  });
+}
+
+/** The same as a mesh. */
+export function polarPlan(shape: StackShape, theta: number, fine: Fineness): PlanMesh {
+  return planMesh(polarTriangulation(shape, theta, fine));
 }

@@ -6,7 +6,7 @@
  * apart; what the crossing displaces is far below the grid's own error.
  */
 import { inTurn, sameAngle, turn } from './angle';
-import { rotorRadius, statorRadius, type StackShape } from './stack-shape';
+import { outerRadius, rotorRadius, statorRadius, type StackShape } from './stack-shape';
 
 /** Angles of the four radial edges at radius ρ, as a function of ρ, rad. */
 export interface RadialEdges {
@@ -62,18 +62,44 @@ function rimRadius(shape: StackShape, psi: number): number {
   );
 }
 
-/** Blade and rim at angle ψ, at least `apart` from each other; only a carried-on line gives way. */
+export interface Outlines {
+  blade: number;
+  rim: number;
+}
+
+/**
+ * Blade and rim at each of the rows, at least `apart` from each other. Where they cross between
+ * two rows they are as near as that at both, so that nothing is lost where they change sides.
+ * Only a carried-on line gives way.
+ */
 export function outlines(
   shape: StackShape,
   theta: number,
-  psi: number,
+  rows: number[],
   apart: number,
-): { blade: number; rim: number } {
-  const blade = bladeRadius(shape, theta, psi);
-  const rim = rimRadius(shape, psi);
-  if (Math.abs(rim - blade) >= apart) return { blade, rim };
-  const side = rim >= blade ? apart : -apart;
-  return inSector(theta - psi, 0, shape.travel)
-    ? { blade, rim: blade + side }
-    : { blade: rim - side, rim };
+): Outlines[] {
+  const at = rows.map((psi) => ({
+    blade: bladeRadius(shape, theta, psi),
+    rim: rimRadius(shape, psi),
+  }));
+  const side = at.map(({ blade, rim }) => (rim >= blade ? 1 : -1));
+  return at.map(({ blade, rim }, row) => {
+    const changes =
+      side[row] !== side.at(row - 1) || side[row] !== side[(row + 1) % rows.length];
+    if (!changes && Math.abs(rim - blade) >= apart) return { blade, rim };
+    const off = apart * side[row]!;
+    return inSector(theta - rows[row]!, 0, shape.travel)
+      ? { blade, rim: blade + off }
+      : { blade: rim - off, rim };
+  });
+}
+
+/** Radii at which the stator's offset edges cross the rotor's, rising. */
+export function edgeCrossings(shape: StackShape, theta: number): number[] {
+  const { travel, edgeOffset, cutoutRadius } = shape;
+  if (edgeOffset === 0) return [];
+  return [theta, theta - travel]
+    .flatMap((psi) => [edgeOffset / Math.sin(psi), edgeOffset / Math.sin(travel - psi)])
+    .filter((rho) => rho > cutoutRadius && rho < outerRadius(shape))
+    .sort((a, b) => a - b);
 }
