@@ -2,7 +2,13 @@ import { sameAngle, turn } from './angle';
 import { cellCount, gradedSpan, type Grading, type Stop } from './grading';
 import { gridPlan } from './grid-plan';
 import { part, planMesh, type PlanMesh, type Triangulation } from './plan-mesh';
-import { edgeCrossings, outlines, radialEdges, type Outlines } from './stack-lines';
+import {
+  edgeCrossings,
+  outlineCrossings,
+  outlines,
+  radialEdges,
+  type Outlines,
+} from './stack-lines';
 import { outerRadius, type StackShape } from './stack-shape';
 
 /** How fine a grid is: everything a solution's error depends on. */
@@ -109,13 +115,15 @@ export function polarTriangulation(
     lineOf.push(same === -1 ? curves.length : same);
     if (same === -1) curves.push(curve);
   }
+  // Where lines cross, the grid across them is fine, as it can't follow both there.
+  const angleCrossings = outlineCrossings(shape, theta);
+  const radiusCrossings = edgeCrossings(shape, theta);
+  const crossingStep = 2 * step;
   const anglesAt = (rho: number): Stop[] => {
     const stops = curves.map((curve) => ({ at: curve(rho), step: step / outer }));
     if (edgeOffset !== 0) keepApart(stops, least / outer);
-    return stops;
+    return [...stops, ...angleCrossings.map((at) => ({ at, step: crossingStep / outer }))];
   };
-  // Where edges cross, columns are near each other, as rows can't follow both edges there.
-  const crossings = edgeCrossings(shape, theta).map((at) => ({ at, step: 2 * step }));
   const radiiAt = ({ blade, rim }: Outlines): Stop[] => [
     { at: shaftRadius, step: Infinity },
     { at: hubRadius, step },
@@ -123,7 +131,7 @@ export function polarTriangulation(
     { at: blade, step },
     { at: rim, step },
     { at: outer * fine.box, step: Infinity },
-    ...crossings,
+    ...radiusCrossings.map((at) => ({ at, step: crossingStep })),
   ];
 
   // The family that may bend is ruled over the cuts that the straight one makes.

@@ -42,8 +42,8 @@ for (const { name, title, shape } of cases) {
       onGrids: found.onGrids.map((c) => places(c, 4)),
     });
     console.log(name, JSON.stringify(rows.at(-1)), `${(Date.now() - began) / 1000} s`);
-    const all: Reference = existsSync(path) ? JSON.parse(readFileSync(path, 'utf8')) : {};
-    all[name] = { title, shape, refinements, rows };
-    writeFileSync(path, `${JSON.stringify(all, null, 2)}\n`);
   }
+  const all: Reference = existsSync(path) ? JSON.parse(readFileSync(path, 'utf8')) : {};
+  all[name] = { title, shape, refinements, rows };
+  writeFileSync(path, `${JSON.stringify(all, null, 2)}\n`);
 }

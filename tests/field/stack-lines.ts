@@ -62,6 +62,9 @@ function rimRadius(shape: StackShape, psi: number): number {
   );
 }
 
+/** Crossings this near are one grid line, mm. */
+const sameRadius = 1e-6;
+
 export interface Outlines {
   blade: number;
   rim: number;
@@ -101,5 +104,26 @@ export function edgeCrossings(shape: StackShape, theta: number): number[] {
   return [theta, theta - travel]
     .flatMap((psi) => [edgeOffset / Math.sin(psi), edgeOffset / Math.sin(travel - psi)])
     .filter((rho) => rho > cutoutRadius && rho < outerRadius(shape))
-    .sort((a, b) => a - b);
+    .sort((a, b) => a - b)
+    .filter((rho, i, all) => i === 0 || rho - all[i - 1]! > sameRadius);
+}
+
+/** Angles at which blade and rim cross, where at least one of them is carried on, rising. */
+export function outlineCrossings(shape: StackShape, theta: number): number[] {
+  const above = (psi: number) => rimRadius(shape, psi) > bladeRadius(shape, theta, psi);
+  const found: number[] = [];
+  const looks = 720;
+  for (let i = 0; i < looks; i += 1) {
+    let from = (i * turn) / looks;
+    let to = ((i + 1) * turn) / looks;
+    const side = above(from);
+    if (above(to) === side) continue;
+    for (let halving = 0; halving < 40; halving += 1) {
+      const mid = (from + to) / 2;
+      if (above(mid) === side) from = mid;
+      else to = mid;
+    }
+    found.push((from + to) / 2);
+  }
+  return found;
 }
