@@ -90,8 +90,9 @@ describe.each(cases)('$title', ({ shape }) => {
     const fine = offAt(2);
     for (const metal of ['rotor', 'stator', 'overlap'] as const) {
       // Radii and arcs are carried exactly but for one triangle in a corner where two rotor edges
-      // meet inwards; spirals and offset edges by chords, so the error falls as the square.
-      const least = 1e-3;
+      // meet inwards; spirals and offset edges by chords, so the error falls as the square, down
+      // to what little crossing edges are kept apart.
+      const least = straight ? 1e-3 : 2e-5 * exact.rotor;
       expect(fine[metal]).toBeLessThan(straight ? least : Math.max(least, coarse[metal] / 3));
       expect(fine[metal]).toBeLessThan(3e-3 * exact.rotor);
     }

@@ -1,6 +1,7 @@
 import { sameAngle, turn } from './angle';
 import { cellCount, gradedSpan, type Grading, type Stop } from './grading';
 import { gridPlan } from './grid-plan';
+import { inPost, postAngles, postRadii } from './post-lines';
 import { part, planMesh, type PlanMesh, type Triangulation } from './plan-mesh';
 import {
   edgeCrossings,
@@ -78,12 +79,14 @@ function keepApart(stops: Stop[], least: number): void {
 
 /**
  * The plan of a stack at mesh angle θ on a polar grid: rows follow the radial edges, columns the
- * arcs and outlines. Either rows or columns may bend, not both.
+ * arcs and outlines. Either rows or columns may bend, not both. Where the shaft ends, the plan goes
+ * on inside it, down to an inner radius too small to matter.
  */
 export function polarTriangulation(
   shape: StackShape,
   theta: number,
   fine: Fineness,
+  innerRadius = shape.shaftRadius,
 ): Triangulation {
   const { shaftRadius, hubRadius, cutoutRadius, gap, edgeOffset } = shape;
   const outer = outerRadius(shape);
@@ -122,16 +125,22 @@ export function polarTriangulation(
   const anglesAt = (rho: number): Stop[] => {
     const stops = curves.map((curve) => ({ at: curve(rho), step: step / outer }));
     if (edgeOffset !== 0) keepApart(stops, least / outer);
-    return [...stops, ...angleCrossings.map((at) => ({ at, step: crossingStep / outer }))];
+    return [
+      ...stops,
+      ...angleCrossings.map((at) => ({ at, step: crossingStep / outer })),
+      ...postAngles(shape),
+    ];
   };
   const radiiAt = ({ blade, rim }: Outlines): Stop[] => [
-    { at: shaftRadius, step: Infinity },
+    { at: shaftRadius, step: innerRadius < shaftRadius ? step : Infinity },
     { at: hubRadius, step },
     { at: cutoutRadius, step },
     { at: blade, step },
     { at: rim, step },
     { at: outer * fine.box, step: Infinity },
     ...radiusCrossings.map((at) => ({ at, step: crossingStep })),
+    ...postRadii(shape),
+    ...(innerRadius < shaftRadius ? [{ at: innerRadius, step: Infinity }] : []),
   ];
 
   // The family that may bend is ruled over the cuts that the straight one makes.
@@ -147,6 +156,8 @@ export function polarTriangulation(
   }
   const rowCut = (column: number) => (edgeOffset === 0 ? 0 : column);
   const columnCut = (row: number) => (edgeOffset === 0 ? row : 0);
+  const first = (column: number, row: number) => columns.points[columnCut(row)]![column]!;
+  const second = (column: number, row: number) => rows.points[rowCut(column)]![row]!;
   const count = rows.points[0]!.length;
   const between = (row: number, from: number, to: number) =>
     (row - from + count) % count <= (to - from + count) % count;
@@ -156,23 +167,31 @@ export function polarTriangulation(
     rows: count,
     columns: columns.points[0]!.length,
     closed: true,
-    first: (column, row) => columns.points[columnCut(row)]![column]!,
-    second: (column, row) => rows.points[rowCut(column)]![row]!,
+    first,
+    second,
     mask: (column, row) => {
       const edge = (i: number) => rows.indexOf(lineOf[i]!, rowCut(column));
       const arc = (i: number) => columns.indexOf(i, columnCut(row));
       const onBlade = column <= arc(3) && between(row, edge(3), edge(2));
       const onStator = column >= arc(2) && column <= arc(4) && between(row, edge(0), edge(1));
       return (
-        (column === 0 ? part.shaft : 0) |
+        (column <= arc(0) ? part.shaft : 0) |
         (column <= arc(1) || onBlade ? part.rotor : 0) |
-        (onStator ? part.stator : 0)
+        (onStator ? part.stator : 0) |
+        (shape.posts && inPost(shape.posts, first(column, row), second(column, row))
+          ? part.post
+          : 0)
       );
     },
   });
 }
 
 /** The same as a mesh. */
-export function polarPlan(shape: StackShape, theta: number, fine: Fineness): PlanMesh {
-  return planMesh(polarTriangulation(shape, theta, fine));
+export function polarPlan(
+  shape: StackShape,
+  theta: number,
+  fine: Fineness,
+  innerRadius?: number,
+): PlanMesh {
+  return planMesh(polarTriangulation(shape, theta, fine, innerRadius));
 }

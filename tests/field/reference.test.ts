@@ -1,14 +1,10 @@
 /** reference.json is what the solver gives, and is what README.md claims of it. */
-import { readFileSync } from 'node:fs';
-import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
 import { cases, fractions } from './cases';
-import type { Reference } from './reference';
+import { readReference } from './reference-file';
 import { referenceFineness, solveOnGrid } from './solve-case';
 
-const reference: Reference = JSON.parse(
-  readFileSync(join(import.meta.dirname, 'reference.json'), 'utf8'),
-);
+const reference = readReference('reference.json');
 const rowOf = (name: string, fraction: number) =>
   reference[name]!.rows.find((row) => row.fraction === fraction)!;
 const rangeOf = (name: string) => rowOf(name, 1).capacitance - rowOf(name, 0).capacitance;

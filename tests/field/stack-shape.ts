@@ -18,6 +18,16 @@ export interface StackShape {
   stator: StatorOutline;
   /** Both radial edges of the stator moved parallel into it, mm. */
   edgeOffset: number;
+  posts?: Posts;
+}
+
+/** Round posts at the stator's potential, over the height of the stack. */
+export interface Posts {
+  radius: number;
+  /** Their distance from the shaft. */
+  at: number;
+  /** Their angles from the stator's first edge. */
+  angles: number[];
 }
 
 export type RotorOutline =
