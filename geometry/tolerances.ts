@@ -12,11 +12,11 @@ export const SAME_ARC = 1e-7;
 /** mm. Sagitta of the chords in the back-check. The polygon keeps the area, so less is not needed. */
 export const FLATTENING = 0.02;
 
+/** mm. Sagitta of the chords by which a finished curve is read back. */
+export const CURVE_READING = 0.001;
+
 /** mm per clipping unit: clipper2 works on integers. */
 export const CLIP_UNIT = 1e-5;
-
-/** mm. The solved radius is settled when an iteration moves it less than this. */
-export const RADIUS_SETTLED = 1e-9;
 
 /** Bulges below this are straight sides: on a 300 mm chord the sagitta is under 1 nm. */
 export const STRAIGHT = 1e-9;
