@@ -54,7 +54,7 @@ const types = () =>
   });
 
 /** Runs vitest projects and counts their tests. */
-export function vitest(name, projects) {
+export function vitest(name, projects, env = {}) {
   const file = reportFile(name);
   const args = [
     'run',
@@ -66,7 +66,7 @@ export function vitest(name, projects) {
   ];
   return check(
     `${name} tests`,
-    () => run(bin('vitest'), args, { env: { ...process.env, CI: '1' } }),
+    () => run(bin('vitest'), args, { env: { ...process.env, ...env, CI: '1' } }),
     () => {
       const report = readReport(file);
       return report && { passed: report.numPassedTests, failed: report.numFailedTests };

@@ -5,8 +5,8 @@ import { fileURLToPath } from 'node:url';
 /** The clone this script stands in. */
 export const root = dirname(dirname(fileURLToPath(import.meta.url)));
 
-/** What a running Vaneloft keeps here: cluster, secret, demo sign-ins, process ids. */
-export const data = join(root, '.data');
+/** What a running Vaneloft keeps: cluster, secret, demo sign-ins, process ids. */
+export const data = process.env.VANELOFT_DATA ?? join(root, '.data');
 
 export function makeData() {
   mkdirSync(data, { recursive: true });

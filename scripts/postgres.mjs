@@ -19,7 +19,7 @@ import {
 } from 'node:fs';
 import { join } from 'node:path';
 import { isAlive, waitFor } from './command.mjs';
-import { data, makeData, root } from './paths.mjs';
+import { data, makeData } from './paths.mjs';
 import { freePort } from './port.mjs';
 import { endWithUs, Stop } from './stop.mjs';
 
@@ -65,7 +65,7 @@ function lastingFolder(user) {
     user.uid === undefined ||
     spawnSync('test', ['-x', data], { ...user, cwd: '/' }).status === 0;
   if (reachable) return join(data, 'postgres');
-  const tag = createHash('sha256').update(root).digest('hex').slice(0, 12);
+  const tag = createHash('sha256').update(data).digest('hex').slice(0, 12);
   const folder = join('/var/tmp', `vaneloft-${tag}`);
   mkdirSync(folder, { recursive: true, mode: 0o700 });
   // Anybody may write to /var/tmp: only a folder of our own, or of the server's user, will do.
@@ -207,10 +207,15 @@ export async function startThrowawayPostgres() {
   const parent = mkdtempSync('/var/tmp/vaneloft-test-');
   chmodSync(parent, 0o711);
   if (user.uid !== undefined) chownSync(parent, user.uid, user.gid);
-  endWithUs(() => rmSync(parent, { recursive: true, force: true }));
+  const clear = endWithUs(() => rmSync(parent, { recursive: true, force: true }));
   const folder = join(parent, 'postgres');
   const password = randomBytes(24).toString('hex');
   initialise(folder, password, user, ['--no-sync']);
   const careless = ['fsync=off', 'synchronous_commit=off', 'full_page_writes=off'];
-  return cluster(await launch(folder, join(parent, 'log'), user, careless), password);
+  const server = await launch(folder, join(parent, 'log'), user, careless);
+  const stop = async () => {
+    await server.stop();
+    await clear();
+  };
+  return cluster({ ...server, stop }, password);
 }

@@ -1,6 +1,6 @@
 /** npm start: from a fresh clone to a served workshop. npm run dev: the same with `--dev`. */
 
-import { randomBytes } from 'node:crypto';
+import { createHash, randomBytes } from 'node:crypto';
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { ensureBuild } from './build.mjs';
@@ -14,11 +14,17 @@ import { startServer } from './server.mjs';
 import { runUntilStopped, Stop } from './stop.mjs';
 
 const dev = process.argv.includes('--dev');
-const signIns = join(data, 'sign-ins.json');
+const given = process.env.DATABASE_URL;
+
+/** The demo's passwords, one file for each database: another's would open nothing here. */
+function signInsFile() {
+  const tag = given ? `-${createHash('sha256').update(given).digest('hex').slice(0, 12)}` : '';
+  return join(data, `sign-ins${tag}.json`);
+}
 
 /** The address of the database: the one given, or our own cluster, started for it. */
 async function database() {
-  if (process.env.DATABASE_URL) return process.env.DATABASE_URL;
+  if (given) return given;
   console.log('Starting PostgreSQL');
   return (await startPostgres()).ensureDatabase('vaneloft');
 }
@@ -33,7 +39,7 @@ function secret() {
   return readFileSync(file, 'utf8');
 }
 
-function printSignIns() {
+function printSignIns(signIns) {
   if (!existsSync(signIns)) {
     console.log('The demo sign-ins were made by another start, which printed them.');
     return;
@@ -49,12 +55,13 @@ function printSignIns() {
 async function main() {
   checkNode();
   makeData();
-  if (!process.env.DATABASE_URL) {
+  if (!given) {
     await claimClone();
     await ensureSystemPackages(['postgresql']);
   }
   await ensureNodeModules();
 
+  const signIns = signInsFile();
   const env = { ...process.env, DATABASE_URL: await database() };
   await mustRun('The migration', process.execPath, ['--import', 'tsx', 'scripts/migrate.ts'], {
     env,
@@ -79,10 +86,10 @@ async function main() {
     port,
     env: { DATABASE_URL: env.DATABASE_URL, NEXTAUTH_URL: address, NEXTAUTH_SECRET: secret() },
   });
-  if (!process.env.DATABASE_URL) rememberServer(server.child.pid);
+  if (!given) rememberServer(server.child.pid);
 
   console.log(`\nVaneloft is at ${address}\n`);
-  printSignIns();
+  printSignIns(signIns);
   console.log('\nCtrl-C stops it.');
   throw new Stop(`The server ended (${await server.exited}).`);
 }

@@ -18,8 +18,7 @@ import { startServer } from './server.mjs';
 import { runUntilStopped } from './stop.mjs';
 
 /** A served build with the demo workshop in a database of its own. Resolves to its environment. */
-async function serve() {
-  const cluster = await startThrowawayPostgres();
+async function serve(cluster) {
   const port = await freePort();
   const signIns = join(data, 'test-sign-ins.json');
   const env = {
@@ -51,11 +50,13 @@ await runUntilStopped(async () => {
   await verify();
   await unused();
   await vitest('house', ['house']);
-  await vitest('route', ['routes']);
 
-  let served = null;
+  const cluster = await startThrowawayPostgres();
+  await vitest('route', ['routes'], { TEST_DATABASE_URL: cluster.ensureDatabase('template') });
+
   const built = await check('build', async () => (await ensureBuild(), true));
-  if (built) await check('serve', async () => ((served = await serve()), true));
+  let served = null;
+  if (built) await check('serve', async () => ((served = await serve(cluster)), true));
   if (served) await playwright(served);
 
   console.log(`${Math.round((Date.now() - started) / 1000)} s`);

@@ -59,7 +59,10 @@ export function SignInForm({ callbackUrl }: { callbackUrl?: string | undefined }
         {busy ? 'Signing in' : 'Sign in'}
       </Button>
       <p className="text-ink-2">
-        No account? <Link href="/sign-up">Set up a workshop</Link>
+        No account?{' '}
+        <Link href="/sign-up" className="underline">
+          Set up a workshop
+        </Link>
       </p>
     </form>
   );

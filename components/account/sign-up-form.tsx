@@ -29,7 +29,7 @@ const fields = [
     label: 'Password',
     type: 'password',
     autoComplete: 'new-password',
-    description: 'At least 12 characters.',
+    description: 'At least 10 characters.',
   },
 ] as const;
 
@@ -73,7 +73,10 @@ export function SignUpForm({
         {busy ? 'Setting up' : 'Set up the workshop'}
       </Button>
       <p className="text-ink-2">
-        Already have an account? <Link href="/sign-in">Sign in</Link>
+        Already have an account?{' '}
+        <Link href="/sign-in" className="underline">
+          Sign in
+        </Link>
       </p>
     </form>
   );

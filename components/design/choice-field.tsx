@@ -55,7 +55,6 @@ export function ListField({ path, parameter }: ChoiceProps) {
       </label>
       <select
         id={fieldId(path)}
-        ref={field.ref}
         value={String(field.value)}
         onChange={field.onChange}
         onBlur={field.onBlur}

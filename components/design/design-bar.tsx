@@ -24,7 +24,7 @@ function NameField() {
       maxLength={80}
     >
       <Label className="sr-only">Name of the design</Label>
-      <Input className="wide-letter field-sizing-content max-w-full min-w-40 rounded-[3px] border border-transparent bg-transparent px-1.5 py-1 text-title font-semibold hover:border-edge focus:border-edge focus:bg-white max-bench:min-h-11" />
+      <Input className="wide-letter field-sizing-content max-w-full min-w-40 rounded-[3px] border border-transparent bg-transparent -ml-1.5 px-1.5 py-1 text-title max-wide:text-lead font-semibold hover:border-edge focus:border-edge focus:bg-white max-bench:min-h-11" />
     </TextField>
   );
 }

@@ -62,7 +62,7 @@ export function DesignForm({ section }: { section: number }) {
       ))}
       <p
         aria-hidden="true"
-        className="sticky bottom-0 -mx-5 min-h-16 border-t border-line bg-page px-5 py-2 text-small text-ink-2"
+        className="sticky bottom-0 -mx-5 min-h-16 border-t max-bench:min-h-0 border-line bg-page px-5 py-2 text-small text-ink-2"
       >
         {help || 'Write a unit if you like: 365 pF, 0.02 in, 1/4 in, 530 kHz.'}
       </p>

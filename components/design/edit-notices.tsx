@@ -4,7 +4,6 @@ import { useEffect, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { LocalTime } from '@/components/ui/local-time';
 import { Notice } from '@/components/ui/notice';
-import type { DesignRecord } from '@/lib/schemas/api';
 import type { Unsaved } from './unsaved-store';
 import { useNews } from './use-news';
 import type { Saving } from './use-saving';
@@ -15,26 +14,32 @@ const rowClass = 'flex flex-wrap items-center justify-between gap-x-4 gap-y-2';
 export function EditNotices({
   saving,
   unsaved,
+  userId,
+  trouble,
   onSaveAsNew,
 }: {
   saving: Saving;
   unsaved: { restored: Unsaved | null; accept: () => void };
+  userId: string;
+  /** Why the work could not be saved as a new design. */
+  trouble: string | undefined;
   onSaveAsNew: () => void;
 }) {
   const { stored, dirty, state, adopt } = saving;
   const { restored, accept } = unsaved;
   const { later, gone } = useNews(stored);
-  const [taken, setTaken] = useState<DesignRecord | null>(null);
+  const [openedVersion] = useState(stored.version);
 
   useEffect(() => {
     // Nothing of one's own is on the screen, so the newer version can simply take its place.
     if (!later || dirty || restored || state !== 'idle') return;
     adopt(later);
-    setTaken(later);
   }, [adopt, dirty, later, restored, state]);
+  const taken = stored.version > openedVersion && stored.updatedBy.id !== userId;
 
   return (
     <>
+      {trouble && <Notice look="bad">Not saved as a new design. {trouble}</Notice>}
       {gone && (
         <Notice look="bad">
           <div className={rowClass}>
@@ -75,10 +80,10 @@ export function EditNotices({
           what to do with both.
         </Notice>
       )}
-      {taken && taken.version === stored.version && !dirty && (
+      {taken && !dirty && (
         <Notice>
-          {taken.updatedBy.name} saved version {taken.version} at{' '}
-          <LocalTime iso={taken.updatedAt} />; it is on the screen now.
+          {stored.updatedBy.name} saved version {stored.version} at{' '}
+          <LocalTime iso={stored.updatedAt} />; it is on the screen now.
         </Notice>
       )}
     </>

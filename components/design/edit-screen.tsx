@@ -82,7 +82,13 @@ export function EditScreen({
     <FormProvider {...form}>
       <main id="main" className="flex flex-col bench:h-[calc(100dvh-3rem-1px)] bench:min-h-150">
         <DesignBar saving={saving} />
-        <EditNotices saving={saving} unsaved={unsaved} onSaveAsNew={saveAsNew.mutate} />
+        <EditNotices
+          saving={saving}
+          unsaved={unsaved}
+          userId={userId}
+          trouble={saveAsNew.error?.message}
+          onSaveAsNew={saveAsNew.mutate}
+        />
         <div className="grid min-h-0 grow bench:grid-cols-[19.5rem_minmax(0,1fr)_20.5rem] bench:grid-rows-[minmax(0,1fr)]">
           <div className="min-w-0 bench:order-2 bench:flex bench:min-h-0 bench:flex-col">
             <PlatesColumn
@@ -114,7 +120,10 @@ export function EditScreen({
           theirs={saving.conflict}
           onOverwrite={() => saving.save(saving.conflict?.version)}
           onTakeTheirs={() => saving.conflict && saving.adopt(saving.conflict)}
-          onSaveAsNew={saveAsNew.mutate}
+          onSaveAsNew={() => {
+            saving.dismissConflict();
+            saveAsNew.mutate();
+          }}
           onClose={saving.dismissConflict}
         />
       )}

@@ -85,7 +85,6 @@ export function QuantityField({
       <Label className="leading-tight text-ink-2 group-data-invalid:text-bad">{label}</Label>
       <span className="relative">
         <Input
-          ref={field.ref}
           inputMode="text"
           spellCheck={false}
           className={`min-h-8 w-full rounded-[3px] border border-edge bg-white py-1 pl-2 text-right outline-offset-0 max-bench:min-h-11 data-invalid:border-2 data-invalid:border-bad ${bare && unit ? unitRoom[unit.length] : 'pr-2'}`}

@@ -1,7 +1,8 @@
 'use client';
 
-import { useEffect, useRef, useState } from 'react';
+import { useEffect, useMemo, useRef, useState } from 'react';
 import type { UseFormReturn } from 'react-hook-form';
+import { useHydrated } from '@/components/ui/local-time';
 import { draftOf, sameDraft, type Draft } from './draft';
 import { dropUnsaved, keepUnsaved, readUnsaved, type Unsaved } from './unsaved-store';
 import type { Saving } from './use-saving';
@@ -18,23 +19,22 @@ export function useUnsaved(
   saving: Saving,
   userId: string,
 ): { restored: Unsaved | null; accept: () => void } {
-  const [restored, setRestored] = useState<Unsaved | null>(null);
-  const looked = useRef(false);
-  const wasDirty = useRef(false);
   const { stored, dirty, restore, baseVersion } = saving;
+  const hydrated = useHydrated();
+  const [answered, setAnswered] = useState(false);
+  const wasDirty = useRef(false);
+
+  // Once, as the page comes alive: later the store holds only what this screen puts there.
+  const [first] = useState(stored);
+  const found = useMemo(() => {
+    const unsaved = hydrated ? readUnsaved(userId, first.id) : null;
+    const same = unsaved && sameDraft(unsaved.draft, draftOf(first.name, first.design));
+    return same ? null : unsaved;
+  }, [first, hydrated, userId]);
 
   useEffect(() => {
-    if (looked.current) return;
-    looked.current = true;
-    const unsaved = readUnsaved(userId, stored.id);
-    if (!unsaved) return;
-    if (sameDraft(unsaved.draft, draftOf(stored.name, stored.design))) {
-      dropUnsaved(userId, stored.id);
-      return;
-    }
-    restore(unsaved.draft, unsaved.version);
-    setRestored(unsaved);
-  }, [restore, stored, userId]);
+    if (found) restore(found.draft, found.version);
+  }, [found, restore]);
 
   useEffect(() => {
     if (!dirty) {
@@ -70,5 +70,5 @@ export function useUnsaved(
     };
   }, [baseVersion, dirty, form, stored.id, userId]);
 
-  return { restored, accept: () => setRestored(null) };
+  return { restored: answered ? null : found, accept: () => setAnswered(true) };
 }

@@ -45,7 +45,7 @@ function pivots(m: SymmetricMatrix): Float64Array {
 export function solve(
   m: SymmetricMatrix,
   b: Float64Array,
-  fall = 1e-6,
+  fall = 1e-4,
   most = 5000,
 ): { x: Float64Array; iterations: number } {
   const { size, start, column, value, diagonal } = m;

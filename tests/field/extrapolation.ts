@@ -1,3 +1,6 @@
+/** How finely three grids of one family are cut, rising. */
+export type Refinements = readonly [number, number, number];
+
 /** Results on three grids of one family, and where they lead. */
 export interface Limit {
   value: number;
@@ -12,9 +15,9 @@ const orders = { least: 4 / 3, most: 2 };
 /** Part of the last correction held to be doubtful; README.md shows what it is on exact cases. */
 const doubtful = 0.15;
 
-/** Richardson extrapolation with the order fitted; refinements rising. */
+/** Richardson extrapolation with the order fitted. */
 export function extrapolate(
-  refinements: readonly [number, number, number],
+  refinements: Refinements,
   values: readonly [number, number, number],
 ): Limit {
   const [n1, n2, n3] = refinements;

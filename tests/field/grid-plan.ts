@@ -1,50 +1,62 @@
+import { turn } from './angle';
 import type { Metric, Triangulation } from './plan-mesh';
 
-/** A grid of rows (second coordinate) whose points may lie anywhere along each row. */
+/** A grid of rows and columns whose points may lie anywhere. */
 export interface Grid {
   metric: Metric;
-  /** The rows' second coordinate, rising: angle in rad or y in mm. */
-  rows: number[];
+  rows: number;
+  columns: number;
   /** Whether the last row's neighbour is the first. */
   closed: boolean;
-  /** Number of points in every row. */
-  columns: number;
-  /** First coordinate of a point. */
-  place: (column: number, row: number) => number;
+  /** Radius or x of a point, mm. */
+  first: (column: number, row: number) => number;
+  /** Angle, rad, or y, mm, of a point. */
+  second: (column: number, row: number) => number;
   /** Parts whose plan the point lies in. */
   mask: (column: number, row: number) => number;
 }
 
-/** Cuts each cell of a grid along the diagonal that leaves the larger angles whole. */
+/** Cuts each cell of a grid along the diagonal that conducts, the Delaunay one. */
 export function gridPlan(grid: Grid): Triangulation {
   const { rows, columns, metric } = grid;
-  const count = rows.length * columns;
+  const count = rows * columns;
   const first = new Float64Array(count);
   const second = new Float64Array(count);
   const mask = new Uint8Array(count);
-  for (let row = 0; row < rows.length; row += 1) {
+  for (let row = 0; row < rows; row += 1) {
     for (let column = 0; column < columns; column += 1) {
       const p = row * columns + column;
-      first[p] = grid.place(column, row);
-      second[p] = rows[row]!;
+      first[p] = grid.first(column, row);
+      second[p] = grid.second(column, row);
       mask[p] = grid.mask(column, row);
     }
   }
-  const bands = grid.closed ? rows.length : rows.length - 1;
+
+  const polar = metric === 'polar';
+  const cotangent = (at: number, p: number, q: number, radius: number) => {
+    const x1 = first[p]! - first[at]!;
+    const x2 = first[q]! - first[at]!;
+    let y1 = second[p]! - second[at]!;
+    let y2 = second[q]! - second[at]!;
+    if (polar) {
+      y1 = radius * (y1 - turn * Math.round(y1 / turn));
+      y2 = radius * (y2 - turn * Math.round(y2 / turn));
+    }
+    return (x1 * x2 + y1 * y2) / Math.abs(x1 * y2 - x2 * y1);
+  };
+
+  const bands = grid.closed ? rows : rows - 1;
   const corners = new Int32Array(bands * (columns - 1) * 6);
   let at = 0;
   for (let row = 0; row < bands; row += 1) {
-    const next = (row + 1) % rows.length;
+    const next = (row + 1) % rows;
     for (let column = 0; column + 1 < columns; column += 1) {
       const a = row * columns + column;
       const d = next * columns + column;
-      // Rows are straight and parallel, so the shorter diagonal is the Delaunay one.
-      const rising = Math.abs(first[d + 1]! - first[a]!);
-      const falling = Math.abs(first[d]! - first[a + 1]!);
-      corners.set(
-        rising <= falling ? [a, a + 1, d + 1, a, d + 1, d] : [a, a + 1, d, a + 1, d + 1, d],
-        at,
-      );
+      const [b, c] = [a + 1, d + 1];
+      const radius = (first[a]! + first[b]! + first[c]! + first[d]!) / 4;
+      const rising = cotangent(b, a, c, radius) + cotangent(d, a, c, radius) >= -1e-9;
+      corners.set(rising ? [a, b, c, a, c, d] : [a, b, d, b, c, d], at);
       at += 6;
     }
   }

@@ -5,6 +5,8 @@
  * five-point difference formula; on skewed cells it keeps the energy an upper bound.
  */
 
+import { turn } from './angle';
+
 /** What a point of the plan, and a level of the stack, may be part of. */
 export const part = { rotor: 1, stator: 2, shaft: 4, post: 8 } as const;
 export type Metric = 'cartesian' | 'polar';
@@ -31,8 +33,6 @@ export interface PlanMesh {
   neighbour: Int32Array;
   conductance: Float64Array;
 }
-
-const turn = 2 * Math.PI;
 
 /** Cotangents of a triangle's angles and its area, in a metric taken at its centroid. */
 function triangleShape(t: Triangulation, at: number, out: Float64Array): void {

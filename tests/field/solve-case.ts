@@ -1,17 +1,15 @@
 import { cellLevels } from './cell-levels';
-import { extrapolate, type Limit } from './extrapolation';
+import { extrapolate, type Limit, type Refinements } from './extrapolation';
 import { polarPlan, type Fineness } from './polar-plan';
 import { stackField } from './stack-field';
 import type { StackShape } from './stack-shape';
 
 /** The grids of the reference; each is cut `refinement` times as fine in every direction. */
-export const referenceFineness: Omit<Fineness, 'refinement'> = {
-  step: 1 / 8,
-  growth: 0.6,
-  mostAngle: 0.4,
-  box: 30,
-};
-export const referenceRefinements = [2, 3, 4] as const;
+export function referenceFineness(shape: StackShape, refinement: number): Fineness {
+  // Spirals are followed by chords, so they need more rows than arcs, which are exact.
+  const spirals = shape.rotor.form !== 'arc' || shape.stator.form !== 'arc';
+  return { step: 1 / 8, growth: 0.6, mostAngle: spirals ? 0.2 : 0.4, box: 30, refinement };
+}
 
 /** C/ε of half a period at mesh angle θ on one grid, mm. */
 export function solveOnGrid(shape: StackShape, theta: number, fine: Fineness): number {
@@ -19,10 +17,14 @@ export function solveOnGrid(shape: StackShape, theta: number, fine: Fineness): n
 }
 
 /** C/ε of half a period at mesh angle θ, mm, with what each grid gave. */
-export function solveCase(shape: StackShape, theta: number): Limit & { onGrids: number[] } {
-  const onGrids = referenceRefinements.map((refinement) =>
-    solveOnGrid(shape, theta, { ...referenceFineness, refinement }),
-  );
-  const limit = extrapolate(referenceRefinements, onGrids as [number, number, number]);
-  return { ...limit, onGrids };
+export function solveCase(
+  shape: StackShape,
+  theta: number,
+  refinements: Refinements,
+): Limit & { onGrids: number[] } {
+  const [a, b, c] = refinements;
+  const on = (refinement: number) =>
+    solveOnGrid(shape, theta, referenceFineness(shape, refinement));
+  const onGrids: [number, number, number] = [on(a), on(b), on(c)];
+  return { ...extrapolate(refinements, onGrids), onGrids };
 }

@@ -1,3 +1,4 @@
+import { Client } from 'pg';
 import { beforeAll, describe, expect, test, vi } from 'vitest';
 import { GET as HEALTH } from '@/app/api/health/route';
 import { closeDatabase, entityManager } from '@/lib/db';
@@ -77,4 +78,22 @@ describe('without its database', () => {
     const back = await import('@/app/api/designs/route');
     expect((await call(back.GET, {})).status).toBe(200);
   });
+});
+
+test('connections that the database has ended are replaced', async () => {
+  cast.ask('owner');
+  const { GET } = await import('@/app/api/designs/route');
+  const health = await import('@/app/api/health/route');
+  const both = async () => [(await call(GET, {})).status, (await call(health.GET, {})).status];
+  expect(await both()).toEqual([200, 200]);
+  const client = new Client({ connectionString: process.env.DATABASE_URL });
+  await client.connect();
+  const ended = await client.query(
+    'select pg_terminate_backend(pid) from pg_stat_activity where datname = current_database() and pid <> pg_backend_pid()',
+  );
+  await client.end();
+  expect(ended.rowCount).toBeGreaterThan(1);
+  // The one that meets the end of a connection may be told to try again; nobody after it.
+  for (const status of await both()) expect([200, 503]).toContain(status);
+  expect(await both()).toEqual([200, 200]);
 });

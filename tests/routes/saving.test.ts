@@ -2,7 +2,9 @@ import { beforeAll, describe, expect, test } from 'vitest';
 import { DELETE, GET, PUT } from '@/app/api/designs/[id]/route';
 import { PUT as PUT_STATUS } from '@/app/api/designs/[id]/status/route';
 import { GET as LIST, POST } from '@/app/api/designs/route';
+import { Design as StoredDesign } from '@/entities';
 import { defaultDesign, derive, KERNEL_VERSION, type Design } from '@/geometry';
+import { entityManager } from '@/lib/db';
 import { apiErrorSchema, designListSchema, designRecordSchema } from '@/lib/schemas/api';
 import { call, refusal } from '../support/call';
 import { Cast, storedDesign } from '../support/cast';
@@ -95,6 +97,22 @@ describe('saving', () => {
     expect(answers.map(({ status }) => status).sort()).toEqual([200, 409, 409, 409]);
     expect((await storedDesign(id)).version).toBe(2);
     expect(await cast.record(id)).toHaveLength(1);
+  });
+
+  test('while another save is under way waits for it, and then is told', async () => {
+    const id = await cast.design();
+    cast.ask('builder');
+    const em = await entityManager();
+    let late: Promise<Response> | undefined;
+    let settled = false;
+    await em.transactional(async (tx) => {
+      await tx.nativeUpdate(StoredDesign, id, { version: 2, name: 'The first' });
+      late = save(id, 1, withGap(0.8)).finally(() => (settled = true));
+      await new Promise((resolve) => setTimeout(resolve, 300));
+      expect(settled).toBe(false);
+    });
+    expect((await late!).status).toBe(409);
+    expect(await storedDesign(id)).toMatchObject({ version: 2, name: 'The first' });
   });
 
   test('what is stored already changes nothing', async () => {

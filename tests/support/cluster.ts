@@ -1,4 +1,7 @@
-/** Once per run: a PostgreSQL of its own, and in it a migrated database to copy from. */
+/**
+ * Once per run: a migrated database to copy from. In the PostgreSQL that npm test has started, or
+ * in one of its own.
+ */
 
 import { MikroORM } from '@mikro-orm/postgresql';
 import type { TestProject } from 'vitest/node';
@@ -13,11 +16,12 @@ declare module 'vitest' {
 }
 
 export default async function setup(project: TestProject): Promise<() => Promise<void>> {
-  const cluster = await startThrowawayPostgres();
-  const template = cluster.ensureDatabase('template');
+  const given = process.env.TEST_DATABASE_URL;
+  const cluster = given ? null : await startThrowawayPostgres();
+  const template = given ?? cluster!.ensureDatabase('template');
   const orm = await MikroORM.init({ ...config, clientUrl: template });
   await orm.migrator.up();
   await orm.close();
   project.provide('template', template);
-  return () => cluster.stop();
+  return async () => cluster?.stop();
 }
