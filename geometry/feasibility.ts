@@ -4,7 +4,6 @@ import { longestRadius, type Blade } from './blade';
 import type { Turn } from './derived';
 import type { Design, Section } from './design';
 import type { EarShape } from './ear';
-import type { SectionEdges } from './field/cell-field';
 import type { Finding } from './finding';
 import { formatQuantity } from './quantity';
 import type { BladeProblem } from './solve-blade';
@@ -140,14 +139,19 @@ export function turnFindings(design: Design, turn: Turn): Finding[] {
   return findings;
 }
 
-/** The blade must reach over the cut-out everywhere, or the edge model has nothing to stand on. */
+/** A blade this near its least radius, as a fraction, lies on it. */
+export const ON_LEAST_RADIUS = 1e-9;
+
+/**
+ * The blade must reach over the cut-out everywhere, or the edge model has nothing to stand on.
+ * @param mostGaps tells with how many gaps it would; asked only when it does not
+ */
 export function bladeFinding(
   design: Design,
-  section: Section,
   index: number,
   problem: BladeProblem,
   blade: Blade,
-  edges: SectionEdges,
+  mostGaps: () => number,
 ): Finding | null {
   const last = blade.radius.length - 1;
   let at = 0;
@@ -155,26 +159,21 @@ export function bladeFinding(
     if (radius < blade.radius[at]!) at = i;
   });
   const radius = blade.radius[at]!;
-  if (radius > problem.leastRadius * (1 + 1e-9)) return null;
+  if (radius > problem.leastRadius * (1 + ON_LEAST_RADIUS)) return null;
   const phi = (blade.sector * at) / last;
-  // At r = rc the edges alone give this per gap: more gaps than that overshoot the law.
-  const slope = problem.wanted(Math.min(Math.max(phi, problem.from), problem.to));
-  const gaps = section.rotorPlates + section.statorPlates - 1;
-  const perGap = (edges.outerEdge + edges.hub.cutoutUnderBlade) * design.cutoutRadius;
-  const mostGaps = Math.ceil((slope * gaps) / perGap) - 1;
-  const change =
-    mostGaps >= 1 && mostGaps < gaps
-      ? `The law rises too slowly there for so many gaps: take at most ${mostGaps + 1} plates in all, a smaller cut-out or a larger open capacitance.`
-      : `The law rises too slowly there: take fewer plates, a smaller cut-out or a larger open capacitance.`;
+  const gaps = mostGaps();
   return {
     code: 'outline-infeasible',
     severity: 'fail',
     section: index,
     label: `Blade over the stator cut-out, ${formatQuantity(phi, 'angle', 3)} behind its leading edge`,
-    value: radius,
-    limit: problem.leastRadius,
+    value: radius - design.cutoutRadius,
+    limit: problem.leastRadius - design.cutoutRadius,
     quantity: 'length',
-    change,
+    change:
+      gaps > 0
+        ? `The law rises too slowly there for so many gaps: take at most ${gaps + 1} plates in all, a smaller cut-out or a larger open capacitance.`
+        : 'The law rises too slowly there even for one gap: take a smaller cut-out or a larger open capacitance.',
     parameters: ['rotorPlates', 'cutoutRadius', 'airGap'],
   };
 }

@@ -9,6 +9,7 @@ import {
   bladeFinding,
   earFinding,
   hugeFinding,
+  ON_LEAST_RADIUS,
   postFinding,
   shapeFindings,
 } from './feasibility';
@@ -131,6 +132,41 @@ interface Solved {
   readonly share: PlanShare;
 }
 
+function nextOf(
+  setting: Setting,
+  problem: BladeProblem,
+  share: PlanShare,
+  blade: Blade,
+): Blade {
+  const range = [problem.from, problem.to] as const;
+  return nextBlade(
+    problem,
+    blade,
+    cellField(setting.edges, platesOf(setting, blade), share, range),
+  );
+}
+
+/** The blade that has the law with the edges alone. */
+function bladeWithEdges(setting: Setting, problem: BladeProblem): Blade {
+  let blade = firstBlade(problem, setting.edges.outerEdge);
+  for (let i = 0; i < EDGE_STEPS; i++) blade = nextOf(setting, problem, null, blade);
+  return blade;
+}
+
+/** Most gaps with which the blade still reaches over the cut-out, 0 if none. */
+function mostGaps(setting: Setting, problem: BladeProblem, gaps: number): number {
+  let works = 0;
+  let fails = gaps;
+  while (fails - works > 1) {
+    const tried = (works + fails) >> 1;
+    const wanted = (angle: number): number => (problem.wanted(angle) * gaps) / tried;
+    const blade = bladeWithEdges(setting, { ...problem, wanted });
+    if (shortestRadius(blade) > problem.leastRadius * (1 + ON_LEAST_RADIUS)) works = tried;
+    else fails = tried;
+  }
+  return works;
+}
+
 /** The blade that has the law in the field model asked for. */
 function solveBlade(
   setting: Setting,
@@ -138,20 +174,14 @@ function solveBlade(
   model: FieldModel,
   check: (blade: Blade) => Finding | null,
 ): Solved | Finding {
-  const range = [problem.from, problem.to] as const;
-  let blade = firstBlade(problem, setting.edges.outerEdge);
+  let blade = bladeWithEdges(setting, problem);
   let share: PlanShare = null;
-  const step = (): void => {
-    const field = cellField(setting.edges, platesOf(setting, blade), share, range);
-    blade = nextBlade(problem, blade, field);
-  };
-  for (let i = 0; i < EDGE_STEPS; i++) step();
   let wrong = check(blade);
   for (let round = 0; round < PLAN_ROUNDS && model === 'field' && !wrong; round++) {
     const outlines = outlinesOf(setting, blade);
     if ('code' in outlines) return outlines;
     share = shareOf(setting, blade, outlines);
-    for (let i = 0; i < STEPS_PER_ROUND; i++) step();
+    for (let i = 0; i < STEPS_PER_ROUND; i++) blade = nextOf(setting, problem, share, blade);
     wrong = check(blade);
   }
   if (wrong) return wrong;
@@ -208,7 +238,7 @@ export function deriveSection(
     problem,
     model,
     (blade) =>
-      bladeFinding(design, section, index, problem, blade, edges) ??
+      bladeFinding(design, index, problem, blade, () => mostGaps(setting, problem, gaps)) ??
       hugeFinding(design, section, index, blade),
   );
   if ('code' in solved) return refused(solved);

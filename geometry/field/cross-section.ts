@@ -38,8 +38,6 @@ export type Wall = 0 | 1 | null;
 export interface CrossSection {
   /** Capacitance per unit length of edge over ε, without the area term of the overlap strips. */
   readonly excess: number;
-  /** Mean potential that the far end of an outermost open strip floats to, where there is one. */
-  readonly farPotential: number;
 }
 
 interface Field {
@@ -54,12 +52,15 @@ interface Field {
   readonly slope: number;
 }
 
-function fieldOf(cell: Cell, kind: StripKind, modesPerHeight: number): Field {
+/** At fineness 1. Openings get modes by their heights, or the solution converges to nothing. */
+const MODES_PER_GAP = 8;
+
+function fieldOf(cell: Cell, kind: StripKind, fineness: number): Field {
   const height = cellHeight(cell);
   const z0 = kind === 'rotor' || kind === 'both' ? cell.rotorThickness / 2 : 0;
   const z1 = height - (kind === 'stator' || kind === 'both' ? cell.statorThickness / 2 : 0);
   const h = z1 - z0;
-  const count = Math.max(4, Math.round(modesPerHeight * h));
+  const count = fineness * Math.max(4, Math.round((MODES_PER_GAP * h) / cell.airGap));
   const kappa: number[] = [];
   const phase: number[] = [];
   const scale: number[] = [];
@@ -189,15 +190,15 @@ function solve(matrix: Float64Array, right: Float64Array): Float64Array {
  * Solves a chain of strips.
  * @param strips from left to right; neighbours differ
  * @param walls potentials of full-height walls at the outer ends, null where a strip runs on
- * @param modesPerHeight modes per unit of height
+ * @param fineness multiplies the number of modes
  */
 export function solveChain(
   cell: Cell,
   strips: readonly Strip[],
   walls: readonly [Wall, Wall],
-  modesPerHeight: number,
+  fineness: number,
 ): CrossSection {
-  const fields = strips.map(({ kind }) => fieldOf(cell, kind, modesPerHeight));
+  const fields = strips.map(({ kind }) => fieldOf(cell, kind, fineness));
   const narrowLeft = fields
     .slice(1)
     .map((right, i) => fields[i]!.z1 - fields[i]!.z0 <= right.z1 - right.z0);
@@ -258,13 +259,20 @@ export function solveChain(
   let energy = quadratic.constant;
   unknowns.forEach((value, i) => (energy -= quadratic.right[i]! * value));
 
-  const far = fields[last]!;
-  let farPotential = NaN;
-  if (strips[last]!.kind === 'open' && walls[1] === null && last > 0) {
-    const mean = coefficients(last, last - 1)[0]!;
-    let sum = mean.constant;
-    mean.row.forEach((value, j) => (sum += value * unknowns[mean.from + j]!));
-    farPotential = sum * far.scale[0]!;
-  }
-  return { excess: energy, farPotential };
+  return { excess: energy };
+}
+
+/**
+ * {@link solveChain} at two finenesses, extrapolated: the error goes with the square of the
+ * number of modes.
+ * @returns capacitance per unit length of edge over ε, without the area term
+ */
+export function edgeGain(
+  cell: Cell,
+  strips: readonly Strip[],
+  walls: readonly [Wall, Wall] = [null, null],
+): number {
+  const coarse = solveChain(cell, strips, walls, 1).excess;
+  const fine = solveChain(cell, strips, walls, 2).excess;
+  return fine + (fine - coarse) / 3;
 }

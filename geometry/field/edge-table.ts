@@ -4,7 +4,7 @@
  * per gap, over ε, without the area term of the overlap.
  */
 
-import { cellHeight, solveChain, type Cell, type Strip, type Wall } from './cross-section';
+import { cellHeight, edgeGain, type Cell, type Strip } from './cross-section';
 
 export interface EdgeTable {
   /** Height of the half cell, air gaps. */
@@ -25,19 +25,9 @@ export interface EdgeTable {
   readonly statorInside: (x: number) => number;
 }
 
-/** Modes per gap of the two solutions that are extrapolated. */
-const COARSE = 8;
-const FINE = 16;
-
 /** Beyond this distance the edges no longer see each other: the fields fall as e^(−πx/height). */
 const FAR = 9;
 const NODES = 20;
-
-function solved(cell: Cell, strips: Strip[], walls: [Wall, Wall] = [null, null]): number {
-  const coarse = solveChain(cell, strips, walls, COARSE).excess;
-  const fine = solveChain(cell, strips, walls, FINE).excess;
-  return fine + (fine - coarse) / 3;
-}
 
 /**
  * A function of x ≥ 0 by cubics through nodes spaced evenly in √x, since it changes fastest
@@ -75,18 +65,18 @@ export function edgeTable(rotorThickness: number, statorThickness: number): Edge
   const cell: Cell = { airGap: 1, rotorThickness, statorThickness };
   const height = cellHeight(cell);
   const on = Infinity;
-  const rotorDeep = solved(cell, [
+  const rotorDeep = edgeGain(cell, [
     { kind: 'both', length: on },
     { kind: 'stator', length: on },
   ]);
-  const statorDeep = solved(cell, [
+  const statorDeep = edgeGain(cell, [
     { kind: 'rotor', length: on },
     { kind: 'both', length: on },
   ]);
   const reach = 4 * height;
   const rotorSetback =
     height /
-      solved(
+      edgeGain(
         cell,
         [
           { kind: 'rotor', length: on },
@@ -97,7 +87,7 @@ export function edgeTable(rotorThickness: number, statorThickness: number): Edge
     reach;
   const statorSetback =
     height /
-      solved(
+      edgeGain(
         cell,
         [
           { kind: 'open', length: reach },
@@ -108,7 +98,7 @@ export function edgeTable(rotorThickness: number, statorThickness: number): Edge
     reach;
   const chain =
     (left: Strip['kind'], middle: Strip['kind'], right: Strip['kind']) => (x: number) =>
-      solved(cell, [
+      edgeGain(cell, [
         { kind: left, length: on },
         { kind: middle, length: Math.max(x, TOUCHING) },
         { kind: right, length: on },

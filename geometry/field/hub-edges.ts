@@ -1,6 +1,6 @@
 /** Edges round the shaft: the stator's cut-out against the hub and the wall of rotor spacers. */
 
-import { cellHeight, solveChain, type Cell, type Strip, type Wall } from './cross-section';
+import { cellHeight, edgeGain, type Cell } from './cross-section';
 
 export interface HubEdges {
   /** Gain of the cut-out under the blade, per unit length, over ε. */
@@ -9,13 +9,6 @@ export interface HubEdges {
   readonly besideBlade: number;
   /** How far behind the hub's edge its stack acts as a wall, in gaps. */
   readonly hubSetback: number;
-}
-
-const MODES: readonly [number, number] = [8, 16];
-
-function solved(cell: Cell, strips: Strip[], walls: [Wall, Wall]): number {
-  const [coarse, fine] = MODES.map((modes) => solveChain(cell, strips, walls, modes).excess);
-  return fine! + (fine! - coarse!) / 3;
 }
 
 /**
@@ -36,7 +29,7 @@ export function hubEdges(
   const reach = 4 * height;
   const hubSetback =
     height /
-      solved(
+      edgeGain(
         cell,
         [
           { kind: 'rotor', length: proud },
@@ -45,7 +38,7 @@ export function hubEdges(
         [1, 0],
       ) -
     reach;
-  const facing = solved(
+  const facing = edgeGain(
     cell,
     [
       { kind: 'rotor', length: proud },
@@ -55,7 +48,7 @@ export function hubEdges(
     [1, null],
   );
   return {
-    cutoutUnderBlade: solved(
+    cutoutUnderBlade: edgeGain(
       cell,
       [
         { kind: 'both', length: on },
