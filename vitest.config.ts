@@ -13,7 +13,7 @@ export default defineConfig({
         resolve: { alias },
         test: {
           name: 'kernel',
-          include: ['tests/{geometry,references,golden,floor}/**/*.test.ts'],
+          include: ['tests/{geometry,references,golden,floor,units,design}/**/*.test.ts'],
           testTimeout: 30_000,
         },
       },

@@ -29,7 +29,7 @@ const fields = [
     label: 'Password',
     type: 'password',
     autoComplete: 'new-password',
-    description: 'At least 10 characters.',
+    description: 'At least 12 characters.',
   },
 ] as const;
 

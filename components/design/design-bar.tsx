@@ -17,14 +17,14 @@ function NameField() {
   const { field } = useController({ control, name: 'name' });
   return (
     <TextField
-      className="max-w-full min-w-0"
+      className="-ml-1.5 max-w-full min-w-0"
       value={field.value}
       onChange={field.onChange}
       onBlur={field.onBlur}
       maxLength={80}
     >
       <Label className="sr-only">Name of the design</Label>
-      <Input className="wide-letter field-sizing-content max-w-full min-w-40 rounded-[3px] border border-transparent bg-transparent -ml-1.5 px-1.5 py-1 text-title max-wide:text-lead font-semibold hover:border-edge focus:border-edge focus:bg-white max-bench:min-h-11" />
+      <Input className="wide-letter field-sizing-content max-w-full min-w-40 rounded-[3px] border border-transparent bg-transparent px-1.5 py-1 text-title max-wide:text-lead font-semibold hover:border-edge focus:border-edge focus:bg-white max-bench:min-h-11" />
     </TextField>
   );
 }

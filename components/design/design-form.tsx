@@ -1,6 +1,6 @@
 'use client';
 
-import { useState } from 'react';
+import { memo, useState } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
 import { loadApi } from '@/components/api/load-api';
 import { ListField, RadioField } from './choice-field';
@@ -31,7 +31,7 @@ function Fields({ group, prefix }: { group: Group; prefix: string }) {
 }
 
 /** All parameters of one section and those that the sections share, made from the kernel's table. */
-export function DesignForm({ section }: { section: number }) {
+export const DesignForm = memo(function DesignForm({ section }: { section: number }) {
   const { control } = useFormContext<Draft>();
   const targetKind = useWatch({ control, name: `design.sections.${section}.targetKind` });
   const prefix = `sections.${section}.`;
@@ -46,7 +46,10 @@ export function DesignForm({ section }: { section: number }) {
   }
 
   return (
-    <div className="flex flex-col gap-5" onFocus={(event) => showHelp(event.target)}>
+    <div
+      className="flex flex-col gap-5 [&_input]:scroll-mb-28 [&_select]:scroll-mb-28"
+      onFocus={(event) => showHelp(event.target)}
+    >
       {sectionGroups.map((group) => (
         <Fields
           key={prefix + group.group}
@@ -68,4 +71,4 @@ export function DesignForm({ section }: { section: number }) {
       </p>
     </div>
   );
-}
+});

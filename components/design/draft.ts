@@ -108,7 +108,13 @@ export function designOf(
     return { ok: true, design: checkDesign({ ...draft.design, sections }) };
   } catch (error) {
     if (!(error instanceof KernelError)) throw error;
-    return { ok: false, path: error.path, message: error.message };
+    // Text that is no value has its own words here; the kernel knows numbers only.
+    const parameter = parameterAt(error.path);
+    const own =
+      parameter && typeof error.value === 'string'
+        ? messageFor(parameter, error.path, error.value)
+        : undefined;
+    return { ok: false, path: error.path, message: own ?? error.message };
   }
 }
 

@@ -1,132 +1,17 @@
 'use client';
 
-import dynamic from 'next/dynamic';
-import { useEffect, useState } from 'react';
+import type { ComponentProps } from 'react';
 import { FormProvider, useForm } from 'react-hook-form';
-import type { Derivation, Finding } from '@/geometry';
-import type { DesignFiles, DesignRecord } from '@/lib/schemas/api';
-import { DesignBar } from './design-bar';
-import { DesignForm } from './design-form';
-import { designOf, draftOf, parameterAt, type Draft } from './draft';
-import { EditNotices } from './edit-notices';
-import { FilesPanel } from './files-panel';
-import { focusField } from './focus-field';
-import { PlatesColumn } from './plates-column';
-import { SectionTools } from './section-tools';
-import { PanelSection, SidePanel } from './side-panel';
-import { useAngleStore } from './use-angle-store';
-import { useDerivation } from './use-derivation';
-import { useSaveAsNew } from './use-save-as-new';
-import { useSaveKey } from './use-save-key';
-import { useSaving } from './use-saving';
-import { useUnsaved } from './use-unsaved';
+import { draftOf, type Draft } from './draft';
+import { Workbench } from './workbench';
 
-const ConflictDialog = dynamic(() => import('./conflict-dialog'), { ssr: false });
-
-/** The design in a builder's hands. */
-export function EditScreen({
-  record,
-  derivation,
-  files,
-  userId,
-}: {
-  record: DesignRecord;
-  derivation: Derivation;
-  files: DesignFiles | null;
-  userId: string;
-}) {
-  const form = useForm<Draft>({
-    mode: 'onChange',
-    defaultValues: draftOf(record.name, record.design),
-  });
-  const [plates, request] = useDerivation(derivation);
-  const [invalid, setInvalid] = useState<string | null>(null);
-  const [section, setSection] = useState(0);
-  const store = useAngleStore(plates.derived);
-
-  useEffect(
-    () =>
-      form.subscribe({
-        formState: { values: true },
-        callback: ({ values }) => {
-          const read = designOf(values);
-          setInvalid(read.ok ? null : read.message);
-          if (read.ok) request(read.design);
-        },
-      }),
-    [form, request],
-  );
-
-  const saving = useSaving(form, record, userId);
-  const unsaved = useUnsaved(form, saving, userId);
-  const saveAsNew = useSaveAsNew(form, userId, record.id);
-  useSaveKey(saving);
-
-  function pick(finding: Finding) {
-    const key = finding.parameters[0];
-    if (!key) return;
-    const shared = parameterAt(key) !== undefined;
-    const target = finding.section ?? section;
-    if (!shared) setSection(target);
-    // The other section's fields are on the screen after the next paint.
-    requestAnimationFrame(() => focusField(shared ? key : `sections.${target}.${key}`));
-  }
-
-  const shownSection = Math.min(section, (plates.derived?.sections.length ?? 1) - 1);
-  const stale =
-    plates.derived && !plates.current
-      ? 'These are the last plates that could be made. The checks say what to change.'
-      : null;
-
+/** The design in a builder's hands. Holds the form and nothing that changes with a keystroke. */
+export function EditScreen(props: Omit<ComponentProps<typeof Workbench>, 'form'>) {
+  const { name, design } = props.record;
+  const form = useForm<Draft>({ defaultValues: draftOf(name, design) });
   return (
     <FormProvider {...form}>
-      <main id="main" className="flex flex-col bench:h-[calc(100dvh-3rem-1px)] bench:min-h-150">
-        <DesignBar saving={saving} />
-        <EditNotices
-          saving={saving}
-          unsaved={unsaved}
-          userId={userId}
-          trouble={saveAsNew.error?.message}
-          onSaveAsNew={saveAsNew.mutate}
-        />
-        <div className="grid min-h-0 grow bench:grid-cols-[19.5rem_minmax(0,1fr)_20.5rem] bench:grid-rows-[minmax(0,1fr)]">
-          <div className="min-w-0 bench:order-2 bench:flex bench:min-h-0 bench:flex-col">
-            <PlatesColumn
-              derived={plates.derived}
-              section={shownSection}
-              store={store}
-              note={invalid ? `Plates as they were. ${invalid}` : stale}
-            />
-          </div>
-          <section
-            aria-label="Parameters"
-            className="flex min-w-0 flex-col gap-4 px-5 pt-4 bench:order-1 bench:overflow-y-auto"
-          >
-            <SectionTools section={section} onChange={setSection} />
-            <DesignForm section={section} />
-          </section>
-          <div className="min-w-0 bench:order-3 bench:flex bench:min-h-0 bench:flex-col">
-            <SidePanel plates={plates} section={shownSection} store={store} onPick={pick}>
-              <PanelSection title="Files">
-                <FilesPanel record={saving.stored} first={files} dirty={saving.dirty} />
-              </PanelSection>
-            </SidePanel>
-          </div>
-        </div>
-      </main>
-      {saving.conflict && (
-        <ConflictDialog
-          mine={form.getValues()}
-          theirs={saving.conflict}
-          onOverwrite={() => saving.save(saving.conflict?.version)}
-          onTakeTheirs={() => saving.conflict && saving.adopt(saving.conflict)}
-          onSaveAsNew={() => {
-            saving.dismissConflict();
-            saveAsNew.mutate();
-          }}
-          onClose={saving.dismissConflict}
-        />
-      )}
+      <Workbench {...props} form={form} />
     </FormProvider>
   );
 }

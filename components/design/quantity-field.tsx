@@ -25,11 +25,9 @@ export function QuantityField({
   parameter: QuantityParameter;
 }) {
   const { control } = useFormContext<Draft>();
-  const { field, fieldState } = useController({
-    control,
-    name: `design.${path}`,
-    rules: { validate: (value) => messageFor(parameter, path, value as DraftValue) },
-  });
+  const { field } = useController({ control, name: `design.${path}` });
+  // From the value itself: what came back after a reload is checked as what was typed just now.
+  const message = messageFor(parameter, path, field.value as DraftValue);
   const [editing, setEditing] = useState<{ text: string; unit: string } | null>(null);
   const latest = useRef('');
   const written = shown(field.value as DraftValue, parameter);
@@ -77,7 +75,7 @@ export function QuantityField({
         setEditing(null);
         field.onBlur();
       }}
-      isInvalid={fieldState.invalid}
+      isInvalid={message !== undefined}
       validationBehavior="aria"
       autoComplete="off"
       className="group grid grid-cols-[1fr_7.5rem] items-center gap-x-2"
@@ -103,9 +101,7 @@ export function QuantityField({
         {high.number} {high.unit}
         {parameter.kind === 'optional-number' ? ', or empty' : ''}.
       </Text>
-      <FieldError className="col-span-2 pt-1 text-small text-bad">
-        {fieldState.error?.message}
-      </FieldError>
+      <FieldError className="col-span-2 pt-1 text-small text-bad">{message}</FieldError>
     </TextField>
   );
 }

@@ -32,8 +32,12 @@ export function useUnsaved(
     return same ? null : unsaved;
   }, [first, hydrated, userId]);
 
+  const brought = useRef<Unsaved | null>(null);
   useEffect(() => {
-    if (found) restore(found.draft, found.version);
+    // Once: a second time would undo what was typed since.
+    if (!found || brought.current === found) return;
+    brought.current = found;
+    restore(found.draft, found.version);
   }, [found, restore]);
 
   useEffect(() => {

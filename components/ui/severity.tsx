@@ -28,13 +28,3 @@ export function SeverityShape({ severity }: { severity: Severity }) {
     </svg>
   );
 }
-
-/** Shape and word together. */
-export function SeverityWord({ severity }: { severity: Severity }) {
-  return (
-    <span className={`inline-flex items-center gap-1.5 ${colours[severity]}`}>
-      <SeverityShape severity={severity} />
-      {severityWords[severity]}
-    </span>
-  );
-}

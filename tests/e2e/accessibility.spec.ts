@@ -22,6 +22,8 @@ async function check(page: Page, what: string): Promise<void> {
 
 for (const width of [1440, 390]) {
   test(`every screen at ${width} px`, async ({ page }) => {
+    // axe reads ten screens, on a busy machine slowly.
+    test.slow();
     await page.setViewportSize({ width, height: width > 1000 ? 900 : 844 });
     await page.goto('/sign-in');
     await check(page, 'sign in');

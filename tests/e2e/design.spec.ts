@@ -135,3 +135,24 @@ test('a law and a kind of target keep the values that they hide', async ({ page 
   await page.getByText('wavelength', { exact: true }).click();
   await expect.poll(() => rotorOutline(page)).not.toBe(before);
 });
+
+test('the field one tabs to is never under the help line', async ({ page }) => {
+  await signIn(page, builder);
+  await makeDesign(page, `Tab ${Date.now()}`);
+  for (const size of [
+    { width: 1440, height: 900 },
+    { width: 390, height: 844 },
+  ]) {
+    await page.setViewportSize(size);
+    await field(page, 'Rotor plates').focus();
+    for (let step = 0; step < 14; step++) {
+      await page.keyboard.press('Tab');
+      const hit = await page.evaluate(() => {
+        const box = document.activeElement!.getBoundingClientRect();
+        const at = document.elementFromPoint(box.x + box.width / 2, box.y + box.height / 2);
+        return at === document.activeElement || document.activeElement!.contains(at);
+      });
+      expect(hit, `${size.width} px, ${step + 1} steps`).toBe(true);
+    }
+  }
+});

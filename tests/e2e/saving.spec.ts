@@ -15,6 +15,7 @@ test('unsaved work survives a reload and can be kept or discarded', async ({ pag
   await expect(page.getByText('are back on the screen')).toBeVisible();
   await expect(field(page, 'Air gap')).toHaveValue('0.61');
   await expect(field(page, 'Rotor sheet')).toHaveValue('thick');
+  await expect(field(page, 'Rotor sheet')).toHaveAttribute('aria-invalid', 'true');
   await enter(page, 'Rotor sheet', '1 mm');
   await page.getByRole('button', { name: 'Keep them' }).click();
   await save(page);
@@ -58,6 +59,7 @@ test('two people saving the same design meet a choice', async ({
   browser,
   complaints,
 }) => {
+  test.slow();
   await signIn(page, builder);
   await makeDesign(page, `Shared ${Date.now()}`);
   const path = new URL(page.url()).pathname;
@@ -105,4 +107,32 @@ test('two people saving the same design meet a choice', async ({
   await other.context().close();
   // The browser reports every 409 on its own.
   complaints.splice(0, complaints.length, ...complaints.filter((text) => !/409/.test(text)));
+});
+
+test('what others save appears, and a saved version is marked ready to cut', async ({
+  page,
+  browser,
+}) => {
+  await signIn(page, builder);
+  await makeDesign(page, `Live ${Date.now()}`);
+  const other = await (await browser.newContext()).newPage();
+  await signIn(other, owner);
+  await other.goto(page.url());
+  await ready(other);
+  await enter(other, 'Air gap', '0.48 mm');
+  await save(other);
+  await expect(page.getByText(`${owner.name} saved version 2`)).toBeVisible({
+    timeout: 20_000,
+  });
+  await expect(field(page, 'Air gap')).toHaveValue('0.48');
+  await other.context().close();
+
+  await enter(page, 'Air gap', '0.47 mm');
+  await page.getByRole('button', { name: 'Mark ready to cut' }).click();
+  await expect(page.getByRole('alert').filter({ hasText: 'Save first' })).toBeVisible();
+  await save(page);
+  await page.getByRole('button', { name: 'Mark ready to cut' }).click();
+  await expect(page.getByText('ready to cut', { exact: true })).toBeVisible();
+  await page.reload();
+  await expect(page.getByText('ready to cut', { exact: true })).toBeVisible();
 });
