@@ -172,7 +172,7 @@ export function bladeFinding(
     quantity: 'length',
     change:
       gaps > 0
-        ? `The law rises too slowly there for so many gaps: take at most ${gaps + 1} plates in all, a smaller cut-out or a larger open capacitance.`
+        ? `The law rises too slowly there for so many gaps: take ${gaps + 1} plates in all or fewer, a smaller cut-out or a larger open capacitance.`
         : 'The law rises too slowly there even for one gap: take a smaller cut-out or a larger open capacitance.',
     parameters: ['rotorPlates', 'cutoutRadius', 'airGap'],
   };

@@ -153,7 +153,10 @@ function bladeWithEdges(setting: Setting, problem: BladeProblem): Blade {
   return blade;
 }
 
-/** Most gaps with which the blade still reaches over the cut-out, 0 if none. */
+/** Of the gaps that would do with the edges alone, those that do with the plan view as well. */
+const SURE_SHARE = 0.85;
+
+/** Most gaps with which the blade still reaches over the cut-out, edges alone; 0 if none. */
 function mostGaps(setting: Setting, problem: BladeProblem, gaps: number): number {
   let works = 0;
   let fails = gaps;
@@ -238,8 +241,9 @@ export function deriveSection(
     problem,
     model,
     (blade) =>
-      bladeFinding(design, index, problem, blade, () => mostGaps(setting, problem, gaps)) ??
-      hugeFinding(design, section, index, blade),
+      bladeFinding(design, index, problem, blade, () =>
+        Math.floor(SURE_SHARE * mostGaps(setting, problem, gaps)),
+      ) ?? hugeFinding(design, section, index, blade),
   );
   if ('code' in solved) return refused(solved);
 

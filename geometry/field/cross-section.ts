@@ -55,12 +55,16 @@ interface Field {
 /** At fineness 1. Openings get modes by their heights, or the solution converges to nothing. */
 const MODES_PER_GAP = 8;
 
+/** For the whole height of a cell, so that very thick plates don't take for ever. */
+const MOST_MODES = 24;
+
 function fieldOf(cell: Cell, kind: StripKind, fineness: number): Field {
   const height = cellHeight(cell);
   const z0 = kind === 'rotor' || kind === 'both' ? cell.rotorThickness / 2 : 0;
   const z1 = height - (kind === 'stator' || kind === 'both' ? cell.statorThickness / 2 : 0);
   const h = z1 - z0;
-  const count = fineness * Math.max(4, Math.round((MODES_PER_GAP * h) / cell.airGap));
+  const density = Math.min(MODES_PER_GAP / cell.airGap, MOST_MODES / height);
+  const count = fineness * Math.max(2, Math.round(density * h));
   const kappa: number[] = [];
   const phase: number[] = [];
   const scale: number[] = [];
