@@ -37,7 +37,7 @@ import { targetOf } from './target';
 
 /** Steps of the inverse with the edges alone, then rounds with the plan view, and steps in each. */
 const EDGE_STEPS = 5;
-const PLAN_ROUNDS = 2;
+const PLAN_ROUNDS = 1;
 const STEPS_PER_ROUND = 2;
 
 /** mm. Sagitta of the polygons on which the plan view is solved. */

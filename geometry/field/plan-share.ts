@@ -21,7 +21,7 @@ export interface PlanShape {
 }
 
 /** Solutions over the turn. */
-const NODES = 12;
+const NODES = 10;
 
 /** A solution is kept this many gaps of rim away from angles at which edges lie on one another. */
 const CLEAR_OF_FLUSH = 0.4;
@@ -69,7 +69,7 @@ export function planShare(
 ): (meshAngle: number) => number {
   const { plates, sweepRadius, hubRadius } = shape;
   const { airGap: g, rotorSector, statorSector } = plates;
-  const options: WallOptions = { shortest: 0.5 * g, longest: sweepRadius / 6, grading: 0.9 };
+  const options: WallOptions = { shortest: g, longest: sweepRadius / 4, grading: 1.5 };
   const setback = (kind: 'rotor' | 'stator', radius: number): number =>
     g *
     (kind === 'stator'

@@ -35,11 +35,12 @@ function solveDense(matrix: Float64Array, right: Float64Array): void {
       right[k] = right[pivot]!;
       right[pivot] = held;
     }
-    const diagonal = matrix[k * n + k]!;
+    const row = k * n;
+    const diagonal = matrix[row + k]!;
     for (let i = k + 1; i < n; i++) {
-      const factor = matrix[i * n + k]! / diagonal;
-      if (factor === 0) continue;
-      for (let j = k + 1; j < n; j++) matrix[i * n + j]! -= factor * matrix[k * n + j]!;
+      const below = i * n;
+      const factor = matrix[below + k]! / diagonal;
+      for (let j = k + 1; j < n; j++) matrix[below + j]! -= factor * matrix[row + j]!;
       right[i]! -= factor * right[k]!;
     }
   }

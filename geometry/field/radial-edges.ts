@@ -20,26 +20,32 @@ export interface EdgePlates {
   readonly airGap: number;
 }
 
-/** Abscissae and weights of Gauss and Legendre's rule on 0 to 1, ten points. */
-const GAUSS: readonly (readonly [number, number])[] = [
-  [0.9739065285171717, 0.0666713443086881],
-  [0.8650633666889845, 0.1494513491505806],
-  [0.6794095682990244, 0.219086362515982],
-  [0.4333953941292472, 0.2692667193099963],
-  [0.1488743389816312, 0.2955242247147529],
-].flatMap(([x, w]) => [[(1 - x!) / 2, w! / 2] as const, [(1 + x!) / 2, w! / 2] as const]);
+/** Abscissae and weights of Gauss and Legendre's rule of ten points on −1 to 1, one half. */
+const ABSCISSAE = [
+  0.9739065285171717, 0.8650633666889845, 0.6794095682990244, 0.4333953941292472,
+  0.1488743389816312,
+];
+const WEIGHTS = [
+  0.0666713443086881, 0.1494513491505806, 0.219086362515982, 0.2692667193099963,
+  0.2955242247147529,
+];
 
+function rule(from: number, to: number, density: (radius: number) => number): number {
+  const middle = (from + to) / 2;
+  const half = (to - from) / 2;
+  let sum = 0;
+  for (let i = 0; i < ABSCISSAE.length; i++) {
+    const x = half * ABSCISSAE[i]!;
+    sum += WEIGHTS[i]! * (density(middle - x) + density(middle + x));
+  }
+  return sum * half;
+}
+
+/** Integral along an edge: edges come nearest at the inner end, so that half is done by itself. */
 function along(from: number, to: number, density: (radius: number) => number): number {
   if (to <= from) return 0;
   const middle = Math.sqrt(from * to);
-  let sum = 0;
-  for (const [a, b] of [
-    [from, middle],
-    [middle, to],
-  ] as const) {
-    for (const [x, w] of GAUSS) sum += w * (b - a) * density(a + (b - a) * x);
-  }
-  return sum;
+  return rule(from, middle, density) + rule(middle, to, density);
 }
 
 /** Distance per radius of a point from a radial line an angle away; beyond 90° far enough. */
