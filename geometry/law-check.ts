@@ -71,17 +71,7 @@ function worst(
  * and stray alone have more than the target, the error says so all along.
  */
 export function checkLaw(input: LawCheckInput): CheckedLaw {
-  const {
-    law,
-    turn,
-    totalMin,
-    totalMax,
-    fixed,
-    edges,
-    plates,
-    permittivityGaps: scale,
-  } = input;
-  const { airGap: g, cutoutRadius: rc, statorSector } = plates;
+  const { law, turn, totalMin, totalMax, fixed, plates, permittivityGaps: scale } = input;
   const angle = anglesOver(turn);
   const mesh = angle.map((shaft) => shaft + turn.meshAtOpen);
   const curves = { cutoutRadius: plates.cutoutRadius, blade: input.blade };

@@ -1,9 +1,7 @@
 /** Every tolerance of the kernel, with its unit and its reason. */
 
-/** mm. What a file states: no point of a cut contour lies further from the solved curve. */
-export const STATED_FIT = 0.005;
-
-/** mm. What the fit aims for at its samples, so that {@link STATED_FIT} holds between them. */
+/** mm. What the fit aims for at its samples, so that between them no point of a cut contour lies
+ * further than the stated 5 µm from the solved curve. */
 export const FIT_AT_SAMPLES = 0.004;
 
 /** mm. Two arcs whose centres and radii agree this well are one arc. */
