@@ -9,10 +9,12 @@ export interface LawSeries {
   /** Degrees. */
   readonly angle: number[];
   /** In the unit of `capacitance`. */
-  readonly target: number[];
+  readonly target: (number | null)[];
   readonly achieved: number[];
+  /** What the area of the overlap alone would give. */
+  readonly areaOnly: number[];
   /** Achieved less target, percent of the capacitance range. */
-  readonly error: number[];
+  readonly error: (number | null)[];
   /** Where the error is largest, degrees, and its value there. */
   readonly largest: { readonly angle: number; readonly error: number };
   /** In the unit of `frequency`; null without a coil. */
@@ -36,12 +38,13 @@ export function lawSeries(section: SectionResult): LawSeries {
   const { angle } = law.largestError;
   return {
     angle: law.angle.map(toDegrees),
-    target: law.target.map(capacitance.scale),
+    target: law.target.map((total) => (total === null ? null : capacitance.scale(total))),
     achieved: law.achieved.map(capacitance.scale),
-    error: law.error.map((error) => (100 * error) / range),
+    areaOnly: law.areaOnly.map(capacitance.scale),
+    error: law.error.map((error) => (error === null ? null : (100 * error) / range)),
     largest: {
       angle: toDegrees(angle),
-      error: (100 * valueAt(law.angle, law.error, angle)) / range,
+      error: (100 * law.largestError.capacitance) / range,
     },
     tuned:
       frequency && law.achieved.map((total) => frequency.scale(resonance(inductance!, total))),
@@ -50,13 +53,13 @@ export function lawSeries(section: SectionResult): LawSeries {
   };
 }
 
-/** What a section gives at one mesh angle, written with the units of its chart. */
+/** What a section gives at one shaft angle, written with the units of its chart. */
 export interface LawReading {
   readonly capacitance: string;
   readonly frequency: string | null;
 }
 
-/** @returns a function of the mesh angle, rad; the achieved total and what it tunes to. */
+/** @returns a function of the shaft angle, rad; the achieved total and what it tunes to. */
 export function lawReader(section: SectionResult): (angle: number) => LawReading {
   const { law, inductance } = section;
   const { capacitance, frequency } = unitsOf(section);
