@@ -1,8 +1,8 @@
 import type { SectionResult } from '@/geometry';
+import { resonantFrequency } from '@/geometry/target';
 import { toDegrees } from './degrees';
 import { fixedUnit, type FixedUnit } from './fixed-unit';
 import { valueAt } from './interpolate';
-import { resonance } from './resonance';
 
 /** A section's law in the units of the chart. All arrays have the same length. */
 export interface LawSeries {
@@ -27,7 +27,9 @@ function unitsOf({ totalMin, totalMax, inductance }: SectionResult) {
   return {
     capacitance: fixedUnit(totalMax, 'capacitance'),
     frequency:
-      inductance === null ? null : fixedUnit(resonance(inductance, totalMin), 'frequency'),
+      inductance === null
+        ? null
+        : fixedUnit(resonantFrequency(totalMin, inductance), 'frequency'),
   };
 }
 
@@ -47,7 +49,8 @@ export function lawSeries(section: SectionResult): LawSeries {
       error: (100 * law.largestError.capacitance) / range,
     },
     tuned:
-      frequency && law.achieved.map((total) => frequency.scale(resonance(inductance!, total))),
+      frequency &&
+      law.achieved.map((total) => frequency.scale(resonantFrequency(total, inductance!))),
     capacitance,
     frequency,
   };
@@ -68,7 +71,8 @@ export function lawReader(section: SectionResult): (angle: number) => LawReading
     return {
       capacitance: `${capacitance.write(total)} ${capacitance.unit}`,
       frequency:
-        frequency && `${frequency.write(resonance(inductance!, total))} ${frequency.unit}`,
+        frequency &&
+        `${frequency.write(resonantFrequency(total, inductance!))} ${frequency.unit}`,
     };
   };
 }

@@ -1,8 +1,8 @@
 import type { SectionResult } from '@/geometry';
+import { resonantFrequency } from '@/geometry/target';
 import { toDegrees, toRadians } from './degrees';
 import { valueAt } from './interpolate';
 import type { LawSeries } from './law-series';
-import { resonance } from './resonance';
 
 const EVERY = 10;
 
@@ -58,7 +58,9 @@ export function LawTable({ section, series }: { section: SectionResult; series: 
                   <td>{capacitance.write(achieved)}</td>
                   <td>{capacitance.write(valueAt(law.angle, law.areaOnly, angle))}</td>
                   <td>{error === null ? '–' : percent(error / (totalMax - totalMin))}</td>
-                  {frequency && <td>{frequency.write(resonance(inductance!, achieved))}</td>}
+                  {frequency && (
+                    <td>{frequency.write(resonantFrequency(achieved, inductance!))}</td>
+                  )}
                 </tr>
               );
             })}
