@@ -1,4 +1,3 @@
-import 'server-only';
 import { createEdgeCache, derive, type Derivation, type Design } from '@/geometry';
 
 /** Edges solved in this process; they depend on ratios alone and belong to nobody. */
