@@ -7,9 +7,9 @@ import type { Circle, Contour } from './outline';
 export type PlateRole = 'rotor' | 'stator';
 
 /**
- * A plate as it will be cut, mm. The rotor is drawn at mesh angle 0: leading edge along +x,
- * blade behind it (clockwise); it turns counter-clockwise to mesh. The stator is drawn where it
- * stands, from +x counter-clockwise through the travel.
+ * A plate as it will be cut, mm. The rotor is drawn at mesh angle 0: leading edge along +x, the
+ * blade behind it. The stator is drawn where it stands, its first edge along +x. Both are
+ * mirrored in x where the rotor meshes clockwise.
  */
 export interface Plate {
   readonly role: PlateRole;
@@ -37,36 +37,65 @@ export interface Post {
   readonly clearance: number;
 }
 
-/** The law over the travel, from the finished outlines. All arrays have the same length. */
+/** Which field the figures hold: plate edges alone, or edges and plan view. */
+export type FieldModel = 'edges' | 'field';
+
+/**
+ * Capacitance over the whole travel, from the finished outlines. All arrays have the same length;
+ * target and error are null in the rests before and after the law.
+ */
 export interface LawCheck {
-  /** Mesh angle, rad, from 0 to the travel. */
+  /** Shaft angle from the open stop, rad, ascending; both ends of the law are among them. */
   readonly angle: readonly number[];
   /** Total capacitance the law asks for, F. */
-  readonly target: readonly number[];
-  /** Total capacitance the finished plates give, F. */
+  readonly target: readonly (number | null)[];
+  /** Total capacitance the finished plates give, trimmer, frame and stray included, F. */
   readonly achieved: readonly number[];
+  /** What the overlap's area alone would give, counted from the law's beginning, F. */
+  readonly areaOnly: readonly number[];
   /** achieved − target, F. */
-  readonly error: readonly number[];
-  /** Largest |error| as a fraction of the capacitance range, and where. */
-  readonly largestError: {
-    readonly fraction: number;
-    readonly capacitance: number;
-    readonly angle: number;
-  };
+  readonly error: readonly (number | null)[];
+  /** Shaft angles between which the law holds, rad. */
+  readonly from: number;
+  readonly to: number;
+  /** Largest |error| over the whole law. */
+  readonly largestError: LawError;
+  /** The same between 5 % and 95 % of the law. */
+  readonly largestInner: LawError;
+  /** First shaft angle within the law at which the capacitance does not rise, or null. */
+  readonly fallsAt: number | null;
+}
+
+export interface LawError {
+  /** As a fraction of the capacitance range. */
+  readonly fraction: number;
+  /** F, signed. */
+  readonly capacitance: number;
+  /** rad */
+  readonly angle: number;
 }
 
 export interface SectionResult {
-  /** Total capacitance open and meshed, which the law acts on, F. */
+  /** Total capacitance at the beginning and the end of the law, which the law acts on, F. */
   readonly totalMin: number;
   readonly totalMax: number;
-  /** What the section itself, with its trimmer, must measure open and meshed, F. */
+  /** What the section itself, with its trimmer, must measure there, F. */
   readonly ownMin: number;
   readonly ownMax: number;
   readonly stray: number;
+  /** What the plates alone have at the open stop and at the beginning of the law, F. */
+  readonly platesOpen: number;
+  readonly platesAtLaw: number;
+  /** Allowance for insulators and frame, F. */
+  readonly frame: number;
+  /** What a trimmer has to add to bring the beginning of the law to its target, F; 0 at least. */
+  readonly trimmer: number;
   /** Coil inductance when a band is given, H. */
   readonly inductance: number | null;
   /** Gaps between facing plates. */
   readonly gaps: number;
+  readonly model: FieldModel;
+  readonly statorForm: 'even' | 'following';
   readonly rotor: Plate;
   readonly stator: Plate;
   readonly posts: readonly Post[];
@@ -110,9 +139,26 @@ export interface Stack {
   readonly cutLength: number;
 }
 
+/** How the shaft turns. */
+export interface Turn {
+  /** Shaft rotation from the open to the meshed stop, rad. */
+  readonly travel: number;
+  /** Shaft angles at which the law begins and ends, from the open stop, rad. */
+  readonly lawFrom: number;
+  readonly lawTo: number;
+  /**
+   * Mesh angle at the open stop: 0 where the leading edge stands over the stator's first edge,
+   * negative while it is short of it. At the meshed stop the trailing edge stands over it.
+   */
+  readonly meshAtOpen: number;
+  /** 1 where the rotor meshes turning counter-clockwise as drawn, −1 where clockwise. */
+  readonly direction: 1 | -1;
+}
+
 export interface Derived {
   readonly kernel: string;
   readonly design: Design;
+  readonly turn: Turn;
   readonly sections: readonly SectionResult[];
   readonly stack: Stack;
   readonly findings: readonly Finding[];

@@ -1,16 +1,21 @@
 /** Checks before cutting: what leaves no plate at all. Each says what to change, by how much. */
 
-import { EPSILON_0 } from './constants';
+import { longestRadius, type Blade } from './blade';
+import type { Turn } from './derived';
 import type { Design, Section } from './design';
+import type { EarShape } from './ear';
 import type { Finding } from './finding';
-import type { CurveInput, RotorCurve } from './rotor-curve';
-import { earHalfAngle, type PostLayout } from './post';
 import { formatQuantity } from './quantity';
+import type { BladeProblem } from './solve-blade';
+import type { StatorRadius } from './stator';
 
 const mm = (value: number): string => formatQuantity(value, 'length', 4);
 
 /** mm. Plates beyond this are not drawn: twice the largest radius that a design may ask for. */
 const LARGEST_DRAWN = 600;
+
+/** rad. A law over less than this is not one to cut plates for. */
+const LEAST_LAW = (20 * Math.PI) / 180;
 
 /** Shapes that contradict themselves, whatever the law. */
 export function shapeFindings(design: Design, section: Section, index: number): Finding[] {
@@ -85,89 +90,101 @@ export function smallerRadius(
   return `Take about ${plates} plates in all, or an air gap of about ${mm(section.airGap / factor)}.`;
 }
 
-export interface OutlineInput {
-  readonly design: Design;
-  readonly section: Section;
-  readonly index: number;
-  readonly model: Omit<CurveInput, 'steps'>;
-  readonly curve: RotorCurve;
-  readonly layout: PostLayout;
-  readonly statorRadius: number;
-}
-
-/** The blade must reach over the cut-out everywhere, or the edge model has nothing to stand on. */
-function bladeFinding({ design, section, index, model, curve }: OutlineInput): Finding | null {
-  let at = 0;
-  curve.radius.forEach((radius, i) => {
-    if (radius < curve.radius[at]!) at = i;
-  });
-  const radius = curve.radius[at]!;
-  if (radius > design.cutoutRadius) return null;
-  // At r = rc the edges alone give (Fr + Fs)·rc per gap: more gaps than this overshoot the law.
-  const slope = model.law.slope(at / (curve.radius.length - 1)) / design.travel;
-  const perGap =
-    EPSILON_0 *
-    section.permittivity *
-    (model.rotorEdge + model.statorEdge) *
-    design.cutoutRadius;
-  const mostGaps = Math.ceil(slope / perGap) - 1;
-  const change =
-    mostGaps >= 1
-      ? `The law rises too slowly there for so many gaps: take at most ${mostGaps + 1} plates in all, a smaller cut-out or a larger open capacitance.`
-      : `The law rises too slowly there even for one gap: take a smaller cut-out or a larger open capacitance.`;
-  return {
-    code: 'outline-infeasible',
-    severity: 'fail',
-    section: index,
-    label: `Blade over the stator cut-out at ${formatQuantity(curve.phi[at]!, 'angle', 3)}`,
-    value: radius,
-    limit: design.cutoutRadius,
-    quantity: 'length',
-    change,
-    parameters: ['rotorPlates', 'cutoutRadius', 'airGap'],
-  };
-}
-
-function earFindings({ design, layout, statorRadius }: OutlineInput): Finding[] {
-  const half = earHalfAngle(layout, statorRadius);
-  const room = design.travel / design.postCount / 2;
+/** A turn that contradicts itself, whatever the sections. */
+export function turnFindings(design: Design, turn: Turn): Finding[] {
+  const { travel, rotorSector, statorSector } = design;
+  const { lawFrom, lawTo, meshAtOpen } = turn;
+  const degrees = (angle: number): string => formatQuantity(angle, 'angle', 4);
+  const finding = (
+    rest: Pick<Finding, 'label' | 'value' | 'limit' | 'change' | 'parameters'>,
+  ): Finding => ({ code: 'turn', severity: 'fail', section: null, quantity: 'angle', ...rest });
   const findings: Finding[] = [];
-  if (half > room) {
-    findings.push({
-      code: 'ears-crowded',
-      severity: 'fail',
-      section: null,
-      label: 'Room for the stator ears side by side',
-      value: 2 * half,
-      limit: 2 * room,
-      quantity: 'angle',
-      change:
-        design.postCount > 2
-          ? 'Take fewer posts, smaller post holes or less metal round them.'
-          : 'Take smaller post holes or less metal round them.',
-      parameters: ['postCount', 'postHoleDiameter', 'postWeb'],
-    });
+  const law = lawTo - lawFrom;
+  if (law < LEAST_LAW) {
+    findings.push(
+      finding({
+        label: 'Turn left for the law',
+        value: law,
+        limit: LEAST_LAW,
+        change: `Shorten the rests, or make the travel at least ${degrees(travel - law + LEAST_LAW)}.`,
+        parameters: ['openRest', 'meshedRest', 'travel'],
+      }),
+    );
   }
-  const inner = layout.circleRadius - layout.earRadius;
-  if (inner <= design.cutoutRadius) {
-    const least = design.cutoutRadius + layout.earRadius;
-    findings.push({
-      code: 'post-clearance',
-      severity: 'fail',
-      section: null,
-      label: 'Post holes outside the stator cut-out',
-      value: layout.circleRadius,
-      limit: least,
-      quantity: 'length',
-      change: `Make the post circle radius larger than ${mm(least)}, or leave it empty.`,
-      parameters: ['postCircleRadius'],
-    });
+  const begins = meshAtOpen + lawFrom;
+  if (begins < -1e-9) {
+    findings.push(
+      finding({
+        label: 'Mesh where the law begins',
+        value: begins,
+        limit: 0,
+        change: `The leading edge is still short of the stator: make the rest before the law at least ${degrees(travel - rotorSector)}, or the rotor sector larger.`,
+        parameters: ['openRest', 'rotorSector', 'travel'],
+      }),
+    );
+  }
+  // At the open stop the trailing edge must not have reached the stator's last edge.
+  const apart = 2 * Math.PI - travel - statorSector;
+  if (apart < -1e-9) {
+    findings.push(
+      finding({
+        label: 'Room behind the rotor at the open stop',
+        value: apart,
+        limit: 0,
+        change: `Make the stator sector at most ${degrees(2 * Math.PI - travel)} for this travel.`,
+        parameters: ['statorSector', 'travel'],
+      }),
+    );
   }
   return findings;
 }
 
-function hugeFinding({ design, section, index, curve }: OutlineInput): Finding | null {
-  const sweep = curve.radius.reduce((a, b) => Math.max(a, b), 0);
+/** A blade this near its least radius, as a fraction, lies on it. */
+export const ON_LEAST_RADIUS = 1e-9;
+
+/**
+ * The blade must reach over the cut-out everywhere, or the edge model has nothing to stand on.
+ * @param mostGaps tells with how many gaps it would; asked only when it does not
+ */
+export function bladeFinding(
+  design: Design,
+  index: number,
+  problem: BladeProblem,
+  blade: Blade,
+  mostGaps: () => number,
+): Finding | null {
+  const last = blade.radius.length - 1;
+  let at = 0;
+  blade.radius.forEach((radius, i) => {
+    if (radius < blade.radius[at]!) at = i;
+  });
+  const radius = blade.radius[at]!;
+  if (radius > problem.leastRadius * (1 + ON_LEAST_RADIUS)) return null;
+  const phi = (blade.sector * at) / last;
+  const gaps = mostGaps();
+  return {
+    code: 'outline-infeasible',
+    severity: 'fail',
+    section: index,
+    label: `Blade over the stator cut-out, ${formatQuantity(phi, 'angle', 3)} behind its leading edge`,
+    value: radius - design.cutoutRadius,
+    limit: problem.leastRadius - design.cutoutRadius,
+    quantity: 'length',
+    change:
+      gaps > 0
+        ? `The law rises too slowly there for so many gaps: take ${gaps + 1} plates in all or fewer, a smaller cut-out or a larger open capacitance.`
+        : 'The law rises too slowly there even for one gap: take a smaller cut-out or a larger open capacitance.',
+    parameters: ['rotorPlates', 'cutoutRadius', 'airGap'],
+  };
+}
+
+export function hugeFinding(
+  design: Design,
+  section: Section,
+  index: number,
+  blade: Blade,
+): Finding | null {
+  const sweep = longestRadius(blade);
   if (sweep <= LARGEST_DRAWN) return null;
   return {
     code: 'radius',
@@ -182,8 +199,49 @@ function hugeFinding({ design, section, index, curve }: OutlineInput): Finding |
   };
 }
 
-/** What leaves no outline although the range is possible. */
-export function outlineFindings(input: OutlineInput): Finding[] {
-  const none = bladeFinding(input) ?? hugeFinding(input);
-  return none ? [none] : earFindings(input);
+/** Ears side by side, and inside the stator's straight edges. */
+export function earFinding(
+  design: Design,
+  ears: readonly EarShape[],
+  radiusAt: StatorRadius,
+  overEdge = false,
+): Finding | null {
+  const half = Math.max(
+    ...ears.map(({ angle, earRadius: re, circleRadius: rp }) =>
+      Math.asin(Math.min(1, re / Math.min(rp, radiusAt(angle)))),
+    ),
+  );
+  const room = design.statorSector / design.postCount / 2;
+  if (half <= room && !overEdge) return null;
+  return {
+    code: 'ears-crowded',
+    severity: 'fail',
+    section: null,
+    label: 'Room for the stator ears side by side',
+    value: 2 * half,
+    limit: 2 * room,
+    quantity: 'angle',
+    change:
+      design.postCount > 2
+        ? 'Take fewer posts, smaller post holes or less metal round them.'
+        : 'Take smaller post holes or less metal round them.',
+    parameters: ['postCount', 'postHoleDiameter', 'postWeb'],
+  };
+}
+
+export function postFinding(design: Design, ears: readonly EarShape[]): Finding | null {
+  const nearest = Math.min(...ears.map((ear) => ear.circleRadius - ear.earRadius));
+  if (nearest > design.cutoutRadius) return null;
+  const least = design.cutoutRadius + ears[0]!.earRadius;
+  return {
+    code: 'post-clearance',
+    severity: 'fail',
+    section: null,
+    label: 'Post holes outside the stator cut-out',
+    value: nearest,
+    limit: design.cutoutRadius,
+    quantity: 'length',
+    change: `Make the post circle radius larger than ${mm(least)}, or leave it empty.`,
+    parameters: ['postCircleRadius'],
+  };
 }

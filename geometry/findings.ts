@@ -8,8 +8,11 @@ import { formatQuantity } from './quantity';
 import { paschenVoltage, practiceVoltage } from './voltage';
 
 /** Largest law error as a fraction of the range: warned of above the first, failed above the second. */
-const LAW_WARN = 0.002;
+const LAW_WARN = 0.001;
 const LAW_FAIL = 0.01;
+
+/** The same at the very ends of the law. */
+const LAW_ENDS = 0.005;
 
 /** Overhang in air gaps that the edge formula wants. */
 const DEEP_OVERHANG = 3;
@@ -38,22 +41,80 @@ function atLeast(
   };
 }
 
-function lawFinding(result: SectionResult, index: number): Finding {
-  const { fraction, angle } = result.law.largestError;
+function lawFindings(result: SectionResult, index: number): Finding[] {
+  const { largestInner, largestError, fallsAt, from, to } = result.law;
+  const { fraction, angle } = largestInner;
   const severity: Severity = fraction > LAW_FAIL ? 'fail' : fraction > LAW_WARN ? 'warn' : 'ok';
-  return {
+  const degrees = (value: number): string => formatQuantity(value, 'angle', 3);
+  const overOpen = result.platesAtLaw + result.frame > result.ownMin;
+  const held: Finding = {
     code: 'law-held',
     severity,
     section: index,
-    label: 'Largest law error, of the range',
+    label: 'Largest law error between 5 % and 95 %, of the range',
     value: fraction,
     limit: LAW_WARN,
     quantity: 'ratio',
     change:
       severity === 'ok'
         ? ''
-        : `Look at the chart near ${formatQuantity(angle, 'angle', 3)}; a smaller gap or a wider blade there holds the law better.`,
-    parameters: ['airGap', 'rotorPlates', 'cutoutRadius'],
+        : overOpen
+          ? 'All of it comes from the capacitance where the law begins.'
+          : `Worst at ${degrees(angle)}: longer rests before and after the law, or a smaller gap, hold it better.`,
+    parameters: ['openRest', 'meshedRest', 'airGap'],
+  };
+  const atEnds: Finding = {
+    ...held,
+    severity: largestError.fraction > LAW_ENDS && !overOpen ? 'warn' : 'ok',
+    label: 'Largest law error over the whole law, of the range',
+    value: largestError.fraction,
+    limit: LAW_ENDS,
+    change:
+      largestError.fraction > LAW_ENDS && !overOpen
+        ? `Worst at ${degrees(largestError.angle)}: make the rest at that end longer.`
+        : '',
+    parameters: ['openRest', 'meshedRest'],
+  };
+  const rises: Finding = {
+    code: 'law-rises',
+    severity: fallsAt === null ? 'ok' : 'fail',
+    section: index,
+    label: 'Capacitance rises over the law, up to',
+    value: fallsAt ?? to,
+    limit: to,
+    quantity: 'angle',
+    change:
+      fallsAt === null
+        ? ''
+        : `It falls near ${degrees(fallsAt)}: ${fallsAt < (from + to) / 2 ? 'let the law begin later (rest before the law), or let the stator follow the rotor.' : 'let the law end earlier (rest after the law).'}`,
+    parameters:
+      fallsAt !== null && fallsAt < (from + to) / 2
+        ? ['openRest', 'statorForm']
+        : ['meshedRest'],
+  };
+  return [held, atEnds, rises];
+}
+
+function openFinding(result: SectionResult, index: number): Finding {
+  const { platesAtLaw, frame, ownMin } = result;
+  const open = platesAtLaw + frame;
+  const holds = open <= ownMin;
+  const over = formatQuantity(open - ownMin, 'capacitance', 3);
+  return {
+    code: 'open-capacitance',
+    severity: holds ? 'ok' : 'fail',
+    section: index,
+    label: 'Plates and frame where the law begins',
+    value: open,
+    limit: ownMin,
+    quantity: 'capacitance',
+    change: holds
+      ? ''
+      : `Too much by ${over} before any trimmer: ask for a larger open capacitance or less stray, take a larger gap with fewer plates, or a larger cut-out radius.`,
+    parameters:
+      result.inductance === null
+        ? ['minCapacitance', 'airGap', 'rotorPlates']
+        : ['stray', 'inductance', 'airGap', 'rotorPlates'],
   };
 }
 
@@ -86,7 +147,8 @@ function sectionFindings(design: Design, result: SectionResult, index: number): 
   const overCutout = result.narrowestBlade + design.hubRadius - design.cutoutRadius;
   const clearance = Math.min(...result.posts.map((post) => post.clearance));
   return [
-    lawFinding(result, index),
+    ...lawFindings(result, index),
+    openFinding(result, index),
     voltageFinding(section, index),
     atLeast('blade-narrow', index, 'fail', {
       label: 'Narrowest blade, over the hub',

@@ -2,7 +2,8 @@
 
 export { KERNEL_VERSION } from './version';
 export { checkDesign, checkParameter } from './check';
-export { derive } from './derive';
+export { derive, type DeriveOptions } from './derive';
+export { createEdgeCache, type EdgeCache } from './field/cell-field';
 export {
   defaultDesign,
   defaultSection,
@@ -14,7 +15,9 @@ export {
 export type {
   Derivation,
   Derived,
+  FieldModel,
   LawCheck,
+  LawError,
   Plate,
   PlateRole,
   Post,
@@ -22,6 +25,7 @@ export type {
   Stack,
   StackPlate,
   StackSpacer,
+  Turn,
 } from './derived';
 export { KernelError, type KernelErrorCode } from './error';
 export type { Finding, FindingCode, Severity } from './finding';

@@ -1,62 +1,126 @@
-/** Back-check: the law that the finished outlines really have. */
+/** Back-check: the capacitance that the finished outlines really have. */
 
-import type { LawCheck, Plate } from './derived';
+import { bladeRadius, type Blade } from './blade';
+import type { LawCheck, LawError, Plate, Turn } from './derived';
+import { gapCapacitance, type PlanShare, type SectionEdges } from './field/cell-field';
+import type { EdgePlates } from './field/radial-edges';
 import type { Law } from './law';
 import { overlapAt } from './overlap';
 
 export interface LawCheckInput {
   readonly law: Law;
-  /** Total capacitance open and meshed, F. */
+  readonly turn: Turn;
+  /** Total capacitance at the law's beginning and end, F. */
   readonly totalMin: number;
   readonly totalMax: number;
+  /** Stray and frame, F: what is there whatever the plates do. */
+  readonly fixed: number;
   readonly rotor: Pick<Plate, 'outside'>;
   readonly stator: Pick<Plate, 'outside'>;
-  /** rad */
-  readonly travel: number;
+  /** The blade as read from the finished rotor. */
+  readonly blade: Blade;
   /** ε·n, F/mm. */
   readonly permittivityGaps: number;
-  /** mm */
-  readonly airGap: number;
-  readonly cutoutRadius: number;
-  readonly rotorEdge: number;
-  readonly statorEdge: number;
-  /** Intervals over the travel. */
-  readonly steps: number;
+  readonly edges: SectionEdges;
+  readonly plates: EdgePlates;
+  readonly share: PlanShare;
+}
+
+export interface CheckedLaw {
+  readonly law: LawCheck;
+  readonly platesOpen: number;
+  readonly platesAtLaw: number;
+  readonly trimmer: number;
+}
+
+/** Intervals over the law, and the longest step in the rests, rad. */
+const LAW_STEPS = 80;
+const REST_STEP = (3 * Math.PI) / 180;
+
+function anglesOver({ travel, lawFrom, lawTo }: Turn): number[] {
+  const rest = (from: number, to: number): number[] => {
+    const steps = Math.ceil((to - from) / REST_STEP - 1e-9);
+    return Array.from({ length: steps }, (_, i) => from + ((to - from) * i) / steps);
+  };
+  const law = Array.from(
+    { length: LAW_STEPS },
+    (_, i) => lawFrom + ((lawTo - lawFrom) * i) / LAW_STEPS,
+  );
+  return [...rest(0, lawFrom), ...law, ...rest(lawTo, travel), travel];
+}
+
+function worst(
+  error: readonly (number | null)[],
+  angle: readonly number[],
+  range: number,
+  [from, to]: readonly [number, number],
+): LawError {
+  let at = -1;
+  error.forEach((value, i) => {
+    if (value === null || angle[i]! < from || angle[i]! > to) return;
+    if (at < 0 || Math.abs(value) > Math.abs(error[at]!)) at = i;
+  });
+  const capacitance = error[at]!;
+  return { fraction: Math.abs(capacitance) / range, capacitance, angle: angle[at]! };
 }
 
 /**
- * C(θ) = Cmin + ε·n·[A/g + Fr·(rotor edge over the stator) + Fs·(cut-out over the rotor)], with
- * area and lengths measured on the overlap of the cut contours.
- *
- * Left out: radial edges (which matter at the ends of the travel), the two end faces of the
- * stack, insulators, frame and posts. The open capacitance is taken as the target's: plates and
- * trimmer have to be brought to it.
+ * C(θ) of the plates, with area and lengths measured on the overlap of the cut contours and the
+ * radial edges taken from them (the composite of geometry/field/cell-field.ts), and the trimmer
+ * that brings the beginning of the law to its target. A trimmer only adds: where plates, frame
+ * and stray alone have more than the target, the error says so all along.
  */
-export function checkLaw(input: LawCheckInput): LawCheck {
-  const { law, travel, steps, totalMin, totalMax } = input;
-  const angle = Array.from({ length: steps + 1 }, (_, i) => (travel * i) / steps);
-  const overlaps = overlapAt(input.rotor, input.stator, angle, input.cutoutRadius);
-  const target = angle.map((_, i) => law.total(i / steps));
-  const achieved = overlaps.map(
-    ({ area, rotorEdge, cutoutEdge }) =>
-      totalMin +
-      input.permittivityGaps *
-        (area / input.airGap + input.rotorEdge * rotorEdge + input.statorEdge * cutoutEdge),
+export function checkLaw(input: LawCheckInput): CheckedLaw {
+  const { law, turn, totalMin, totalMax, fixed, plates, permittivityGaps: scale } = input;
+  const angle = anglesOver(turn);
+  const mesh = angle.map((shaft) => shaft + turn.meshAtOpen);
+  const curves = { cutoutRadius: plates.cutoutRadius, blade: input.blade };
+  const overlaps = overlapAt(input.rotor, input.stator, mesh, curves);
+  const plateCapacitance = overlaps.map(
+    (overlap, i) => scale * gapCapacitance(input.edges, plates, input.share, overlap, mesh[i]!),
   );
-  const error = achieved.map((value, i) => value - target[i]!);
-  let worst = 0;
-  error.forEach((value, i) => {
-    if (Math.abs(value) > Math.abs(error[worst]!)) worst = i;
-  });
+  const begins = angle.indexOf(turn.lawFrom);
+  const ends = begins + LAW_STEPS;
+  const platesAtLaw = plateCapacitance[begins]!;
+  const trimmer = Math.max(0, totalMin - fixed - platesAtLaw);
+  const achieved = plateCapacitance.map((value) => value + fixed + trimmer);
+  const target = angle.map((_, i) =>
+    i < begins || i > ends ? null : law.total((i - begins) / LAW_STEPS),
+  );
+  const error = target.map((value, i) => (value === null ? null : achieved[i]! - value));
+  const span = turn.lawTo - turn.lawFrom;
+  const range = totalMax - totalMin;
+  const falls = achieved.findIndex(
+    (value, i) => i > begins && i <= ends && value <= achieved[i - 1]!,
+  );
   return {
-    angle,
-    target,
-    achieved,
-    error,
-    largestError: {
-      fraction: Math.abs(error[worst]!) / (totalMax - totalMin),
-      capacitance: error[worst]!,
-      angle: angle[worst]!,
+    platesOpen: plateCapacitance[0]!,
+    platesAtLaw,
+    trimmer,
+    law: {
+      angle,
+      target,
+      achieved,
+      areaOnly: overlaps.map(
+        ({ area }) => totalMin + (scale * (area - overlaps[begins]!.area)) / plates.airGap,
+      ),
+      error,
+      from: turn.lawFrom,
+      to: turn.lawTo,
+      largestError: worst(error, angle, range, [turn.lawFrom, turn.lawTo]),
+      largestInner: worst(error, angle, range, [
+        turn.lawFrom + 0.05 * span,
+        turn.lawTo - 0.05 * span,
+      ]),
+      fallsAt: falls < 0 ? null : angle[falls - 1]!,
     },
   };
+}
+
+/** Plates for the edge model, from a blade and the stator that stands against it. */
+export function edgePlates(
+  blade: Blade,
+  rest: Omit<EdgePlates, 'rotorRadius' | 'rotorSector'>,
+): EdgePlates {
+  return { ...rest, rotorSector: blade.sector, rotorRadius: (phi) => bladeRadius(blade, phi) };
 }

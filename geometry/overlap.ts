@@ -4,18 +4,12 @@
  */
 
 import { ClipType, Clipper64, FillRule, type Path64, type Paths64 } from 'clipper2-ts';
+import { bladeRadius, type Blade } from './blade';
+import { TWO_PI } from './constants';
 import { flatten } from './flatten';
 import type { Plate } from './derived';
+import type { OverlapSizes } from './field/cell-field';
 import { CLIP_UNIT, FLATTENING } from './tolerances';
-
-export interface Overlap {
-  /** mm² */
-  readonly area: number;
-  /** Length of the rotor's outer curve over the stator, mm. */
-  readonly rotorEdge: number;
-  /** Length of the stator's cut-out over the rotor, mm. */
-  readonly cutoutEdge: number;
-}
 
 function toPath(flat: readonly number[], cos: number, sin: number): Path64 {
   const path: Path64 = [];
@@ -31,24 +25,32 @@ function toPath(flat: readonly number[], cos: number, sin: number): Path64 {
   return path;
 }
 
-function measure(paths: Paths64, cutoutRadius: number): Overlap {
+interface Curves {
+  readonly cutoutRadius: number;
+  /** Blade of the rotor, read from its outline. */
+  readonly blade: Blade;
+}
+
+function measure(paths: Paths64, angle: number, { cutoutRadius, blade }: Curves): OverlapSizes {
   let area = 0;
   let rotorEdge = 0;
   let cutoutEdge = 0;
-  const onCutout = cutoutRadius + FLATTENING;
+  const near = 2 * FLATTENING;
+  const onRotor = (x: number, y: number, r: number): boolean => {
+    const phi = angle - Math.atan2(y, x);
+    const behind = ((phi % TWO_PI) + TWO_PI + 1e-6) % TWO_PI;
+    return Math.abs(r - bladeRadius(blade, behind - 1e-6)) < near;
+  };
   for (const path of paths) {
     let a = path[path.length - 1]!;
     for (const b of path) {
-      const cross = (a.x * b.y - b.x * a.y) * CLIP_UNIT * CLIP_UNIT;
-      area += cross / 2;
+      area += ((a.x * b.y - b.x * a.y) * CLIP_UNIT * CLIP_UNIT) / 2;
       const ra = Math.hypot(a.x, a.y) * CLIP_UNIT;
       const rb = Math.hypot(b.x, b.y) * CLIP_UNIT;
       const length = Math.hypot(b.x - a.x, b.y - a.y) * CLIP_UNIT;
-      // A side along a radius, rounding apart, is the edge of a sector and belongs to no curve.
-      if (Math.abs(cross) > 2 * CLIP_UNIT * Math.max(ra, rb)) {
-        if (Math.max(ra, rb) < onCutout) cutoutEdge += length;
-        else rotorEdge += length;
-      }
+      // A side of which not both ends lie on a curve is a straight edge of a plate.
+      if (Math.max(ra, rb) < cutoutRadius + near) cutoutEdge += length;
+      else if (onRotor(a.x, a.y, ra) && onRotor(b.x, b.y, rb)) rotorEdge += length;
       a = b;
     }
   }
@@ -56,16 +58,15 @@ function measure(paths: Paths64, cutoutRadius: number): Overlap {
 }
 
 /**
- * Overlaps of a rotor plate turned to each angle with its stator plate.
+ * Overlaps of a rotor plate turned to each mesh angle with its stator plate.
  * @param angles mesh angles, rad
- * @param cutoutRadius mm
  */
 export function overlapAt(
   rotor: Pick<Plate, 'outside'>,
   stator: Pick<Plate, 'outside'>,
   angles: readonly number[],
-  cutoutRadius: number,
-): Overlap[] {
+  curves: Curves,
+): OverlapSizes[] {
   const rotorFlat = flatten(rotor.outside, FLATTENING);
   const clip: Paths64 = [toPath(flatten(stator.outside, FLATTENING), 1, 0)];
   return angles.map((angle) => {
@@ -74,6 +75,6 @@ export function overlapAt(
     clipper.addClip(clip);
     const solution: Paths64 = [];
     clipper.execute(ClipType.Intersection, FillRule.NonZero, solution);
-    return measure(solution, cutoutRadius);
+    return measure(solution, angle, curves);
   });
 }

@@ -18,7 +18,8 @@ export type Quantity =
 /** Which kind of target a parameter belongs to; without one it belongs to both. */
 export type TargetKind = 'terminals' | 'band';
 
-export type ParameterGroup = 'law' | 'stack' | 'shaft' | 'posts' | 'envelope' | 'sheet';
+export type ParameterGroup =
+  'law' | 'turn' | 'stack' | 'shaft' | 'posts' | 'envelope' | 'sheet';
 
 export interface NumberParameter {
   readonly kind: 'number';
@@ -78,6 +79,18 @@ const frequency = number('frequency');
 const voltage = number('voltage');
 const count = number('count');
 const ratio = number('ratio');
+
+const optional = (
+  quantity: Quantity,
+  group: ParameterGroup,
+  options: Omit<NumberOptions, 'default'>,
+): OptionalNumberParameter => ({
+  kind: 'optional-number',
+  quantity,
+  group,
+  default: null,
+  ...options,
+});
 
 function choice<V extends string>(
   group: ParameterGroup,
@@ -158,6 +171,23 @@ export const sectionParameters = {
     default: 18e-12,
     appliesTo: 'band',
   }),
+  frameAllowance: capacitance('law', {
+    label: 'Insulators and frame',
+    help: 'What the section has besides its plates: insulators, posts to frame, terminals. An allowance; measure it on a built one.',
+    min: 0,
+    max: 200e-12,
+    default: 2e-12,
+  }),
+  statorForm: choice<'by-law' | 'even' | 'following'>('turn', {
+    label: 'Stator form',
+    help: 'A sector of even radius, or one that follows the meshed rotor at the overhang: its far side stays small, which a law that begins slowly needs.',
+    options: [
+      { value: 'by-law', label: 'as the law needs' },
+      { value: 'even', label: 'even radius' },
+      { value: 'following', label: 'following the rotor' },
+    ],
+    default: 'by-law',
+  }),
   rotorPlates: count('stack', {
     label: 'Rotor plates',
     help: 'Plates on the shaft in this section.',
@@ -211,12 +241,54 @@ export const sectionParameters = {
 
 /** Parameters that all sections on the shaft share. */
 export const sharedParameters = {
-  travel: angle('shaft', {
+  travel: angle('turn', {
     label: 'Travel',
-    help: 'Shaft rotation from fully open to fully meshed.',
+    help: 'Shaft rotation from the open to the meshed stop.',
     min: 60 * DEGREE,
-    max: 180 * DEGREE,
+    max: 330 * DEGREE,
     default: 180 * DEGREE,
+  }),
+  openRest: optional('angle', 'turn', {
+    label: 'Rest before the law',
+    help: 'Shaft rotation from the open stop to where the law begins. Left empty: until edges that pass each other no longer disturb it.',
+    min: 0,
+    max: 120 * DEGREE,
+  }),
+  meshedRest: optional('angle', 'turn', {
+    label: 'Rest after the law',
+    help: 'Shaft rotation from where the law ends to the meshed stop. Left empty: as much as the edges need.',
+    min: 0,
+    max: 90 * DEGREE,
+  }),
+  rotorSector: angle('turn', {
+    label: 'Rotor sector',
+    help: 'Angle of the blade from its leading to its trailing edge.',
+    min: 20 * DEGREE,
+    max: 340 * DEGREE,
+    default: 170 * DEGREE,
+  }),
+  statorSector: angle('turn', {
+    label: 'Stator sector',
+    help: 'Angle of the stator from edge to edge.',
+    min: 10 * DEGREE,
+    max: 300 * DEGREE,
+    default: 170 * DEGREE,
+  }),
+  statorEdgeOffset: length('turn', {
+    label: 'Stator edges set in',
+    help: 'How far the straight edges of the stator lie inside their radial lines, parallel to them.',
+    min: -5,
+    max: 30,
+    default: 0,
+  }),
+  sense: choice<'anticlockwise' | 'clockwise'>('turn', {
+    label: 'Meshes turning',
+    help: 'Seen from the side on which the plates are drawn.',
+    options: [
+      { value: 'anticlockwise', label: 'anticlockwise' },
+      { value: 'clockwise', label: 'clockwise' },
+    ],
+    default: 'anticlockwise',
   }),
   shaftDiameter: length('shaft', {
     label: 'Shaft diameter',
@@ -288,16 +360,12 @@ export const sharedParameters = {
     max: 40,
     default: 2,
   }),
-  postCircleRadius: {
-    kind: 'optional-number',
-    quantity: 'length',
-    group: 'posts',
+  postCircleRadius: optional('length', 'posts', {
     label: 'Post circle radius',
     help: 'Distance of the posts from the shaft. Left empty: as near as the clearance allows.',
     min: 3,
     max: 300,
-    default: null,
-  } as OptionalNumberParameter,
+  }),
   largestRadius: length('envelope', {
     label: 'Largest radius allowed',
     help: 'From the shaft to the furthest part, stator ears and sweep included.',

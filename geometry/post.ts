@@ -1,56 +1,31 @@
 /** Posts that carry the stator: where they stand and how far the rotor stays from them. */
 
+import { bladeRadius, type Blade } from './blade';
 import type { Design } from './design';
-import type { Post } from './derived';
+import type { Post, Turn } from './derived';
+import type { EarShape } from './ear';
 import { polar } from './polar';
-import type { RotorCurve } from './rotor-curve';
-
-export interface PostLayout {
-  /** Distance of the posts from the shaft, mm. */
-  readonly circleRadius: number;
-  /** Radius of the metal round a post's centre, mm. */
-  readonly earRadius: number;
-  /** Angle of each post, rad, ascending. */
-  readonly angles: readonly number[];
-}
-
-/** Angle that an ear covers to either side of its post, rad. */
-export function earHalfAngle(layout: PostLayout, statorRadius: number): number {
-  const { circleRadius: rp, earRadius: re } = layout;
-  const fromArc = Math.asin(Math.min(1, re / statorRadius));
-  const fromPost = rp > re ? Math.asin(re / rp) : Math.PI / 2;
-  return Math.max(fromArc, fromPost);
-}
 
 /**
- * Posts spread evenly over the stator, as near the shaft as the clearance allows unless the
- * design sets their circle.
- * @param sweepRadius longest rotor radius, mm
+ * Smallest distance from a point in the stator's frame to the rotor's sweep, mm; negative inside
+ * it. Each point of the blade sweeps an arc, from its place at the open stop to the meshed.
  */
-export function layOutPosts(design: Design, sweepRadius: number): PostLayout {
-  const { postCount, travel } = design;
-  const earRadius = design.postHoleDiameter / 2 + design.postWeb;
-  return {
-    circleRadius:
-      design.postCircleRadius ?? sweepRadius + design.postClearance + design.postSpacerRadius,
-    earRadius,
-    angles: Array.from({ length: postCount }, (_, i) => (travel * (i + 0.5)) / postCount),
-  };
-}
-
-/**
- * Smallest distance from a point in the stator's frame to the rotor's sweep, mm; negative
- * inside it. Each point of the rotor curve sweeps an arc, from its place when open through the
- * travel.
- */
-function distanceToSweep(curve: RotorCurve, radius: number, angle: number): number {
-  const travel = curve.phi[curve.phi.length - 1]!;
+export function distanceToSweep(
+  blade: Blade,
+  turn: Turn,
+  radius: number,
+  angle: number,
+): number {
+  const last = blade.radius.length - 1;
   let nearest = Infinity;
   let covered = 0;
-  for (let i = 0; i < curve.phi.length; i++) {
-    const phi = curve.phi[i]!;
-    const r = curve.radius[i]!;
-    const past = Math.max(-phi - angle, angle - (travel - phi), 0);
+  for (let i = 0; i <= last; i++) {
+    const phi = (blade.sector * i) / last;
+    const r = blade.radius[i]!;
+    const from = turn.meshAtOpen - phi;
+    // Angle from the arc's start, once round.
+    const along = (((angle - from) % (2 * Math.PI)) + 2 * Math.PI) % (2 * Math.PI);
+    const past = along <= turn.travel ? 0 : Math.min(along - turn.travel, 2 * Math.PI - along);
     if (past === 0) {
       covered = Math.max(covered, r);
       nearest = Math.min(nearest, Math.abs(radius - r));
@@ -63,11 +38,54 @@ function distanceToSweep(curve: RotorCurve, radius: number, angle: number): numb
   return radius <= covered ? -nearest : nearest;
 }
 
-export function standPosts(design: Design, layout: PostLayout, curve: RotorCurve): Post[] {
-  return layout.angles.map((angle) => ({
-    ...polar(layout.circleRadius, angle),
+/** Nearest distance of a post from the shaft that keeps a clearance from the sweep, mm. */
+function nearestRadius(blade: Blade, turn: Turn, angle: number, clearance: number): number {
+  let radius = bladeRadius(blade, blade.sector - angle) + clearance;
+  for (let pass = 0; pass < 30; pass++) {
+    const short = clearance - distanceToSweep(blade, turn, radius, angle);
+    if (short <= 1e-9) break;
+    radius += short;
+  }
+  return radius;
+}
+
+/**
+ * An ear for each post, spread evenly over the stator. Unless the design sets their circle, posts
+ * stand as near the shaft as the clearance allows: on one circle beside an even stator, each for
+ * itself beside one that follows the rotor.
+ */
+export function layOutEars(
+  design: Design,
+  turn: Turn,
+  blade: Blade,
+  form: 'even' | 'following',
+): EarShape[] {
+  const { postCount, statorSector } = design;
+  const earRadius = design.postHoleDiameter / 2 + design.postWeb;
+  const clearance = design.postClearance + design.postSpacerRadius;
+  const angles = Array.from(
+    { length: postCount },
+    (_, i) => (statorSector * (i + 0.5)) / postCount,
+  );
+  const own = angles.map((angle) => nearestRadius(blade, turn, angle, clearance));
+  const furthest = Math.max(...own);
+  return angles.map((angle, i) => ({
+    angle,
+    earRadius,
+    circleRadius: design.postCircleRadius ?? (form === 'even' ? furthest : own[i]!),
+  }));
+}
+
+export function standPosts(
+  design: Design,
+  turn: Turn,
+  ears: readonly EarShape[],
+  blade: Blade,
+): Post[] {
+  return ears.map(({ angle, circleRadius }) => ({
+    ...polar(circleRadius, angle),
     holeRadius: design.postHoleDiameter / 2,
     spacerRadius: design.postSpacerRadius,
-    clearance: distanceToSweep(curve, layout.circleRadius, angle) - design.postSpacerRadius,
+    clearance: distanceToSweep(blade, turn, circleRadius, angle) - design.postSpacerRadius,
   }));
 }

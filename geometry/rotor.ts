@@ -1,8 +1,9 @@
+import { bladeSlope, type Blade } from './blade';
 import { fitArcs, type CurveSamples } from './fit-arcs';
+import { flatten } from './flatten';
 import type { Circle, Path, Vertex } from './outline';
 import { arcVertices, polar } from './polar';
-import type { RotorCurve } from './rotor-curve';
-import { FIT_AT_SAMPLES } from './tolerances';
+import { CURVE_READING, FIT_AT_SAMPLES } from './tolerances';
 
 export interface RotorOutline {
   readonly outside: Path;
@@ -12,18 +13,20 @@ export interface RotorOutline {
 }
 
 /** Samples of the outer curve in plan, counter-clockwise: from the trailing to the leading edge. */
-function curveInPlan(curve: RotorCurve): CurveSamples {
-  const count = curve.phi.length;
+function curveInPlan(blade: Blade): CurveSamples {
+  const count = blade.radius.length;
+  const slope = bladeSlope(blade);
   const x = new Float64Array(count);
   const y = new Float64Array(count);
   const tx = new Float64Array(count);
   const ty = new Float64Array(count);
   for (let k = 0; k < count; k++) {
     const i = count - 1 - k;
-    const r = curve.radius[i]!;
-    const dr = curve.slope[i]!;
-    const cos = Math.cos(curve.phi[i]!);
-    const sin = Math.sin(curve.phi[i]!);
+    const r = blade.radius[i]!;
+    const dr = slope[i]!;
+    const phi = (blade.sector * i) / (count - 1);
+    const cos = Math.cos(phi);
+    const sin = Math.sin(phi);
     const length = Math.hypot(r, dr);
     x[k] = r * cos;
     y[k] = -r * sin;
@@ -36,24 +39,48 @@ function curveInPlan(curve: RotorCurve): CurveSamples {
 /**
  * The rotor plate at mesh angle 0: leading edge along +x, blade behind it, hub all round.
  *
- * @param curve radius over the hub radius everywhere, mm
+ * @param blade radius over the hub radius everywhere, mm
  * @param hubRadius mm
  * @param shaftDiameter mm
  */
 export function rotorOutline(
-  curve: RotorCurve,
+  blade: Blade,
   hubRadius: number,
   shaftDiameter: number,
 ): RotorOutline {
-  const last = curve.phi.length - 1;
-  const travel = curve.phi[last]!;
-  const fitted = fitArcs(curveInPlan(curve), FIT_AT_SAMPLES);
-  const tip: Vertex = { x: curve.radius[0]!, y: 0, bulge: 0 };
-  const hub = arcVertices(hubRadius, 0, 2 * Math.PI - travel);
-  const root: Vertex = { ...polar(hubRadius, -travel), bulge: 0 };
+  const fitted = fitArcs(curveInPlan(blade), FIT_AT_SAMPLES);
+  const tip: Vertex = { x: blade.radius[0]!, y: 0, bulge: 0 };
+  const hub = arcVertices(hubRadius, 0, 2 * Math.PI - blade.sector);
+  const root: Vertex = { ...polar(hubRadius, -blade.sector), bulge: 0 };
   return {
     outside: { kind: 'path', vertices: [...fitted.vertices, tip, ...hub, root] },
     holes: [{ kind: 'circle', x: 0, y: 0, radius: shaftDiameter / 2 }],
     fitDeviation: fitted.deviation,
   };
+}
+
+/**
+ * The blade read back from a finished rotor outline, by its chords.
+ * @param sector rad, of the blade
+ */
+export function bladeOf(outside: Path, sector: number, steps: number): Blade {
+  const flat = flatten(outside, CURVE_READING);
+  const radius = new Float64Array(steps + 1);
+  // The outline begins with the outer curve, from the trailing edge to the leading.
+  let i = 0;
+  const phiAt = (k: number): number => {
+    const phi = -Math.atan2(flat[k + 1]!, flat[k]!);
+    return phi < -1e-9 ? phi + 2 * Math.PI : Math.max(phi, 0);
+  };
+  for (let s = steps; s >= 0; s--) {
+    const phi = (sector * s) / steps;
+    while (i + 2 < flat.length - 2 && phiAt(i + 2) > phi + 1e-12) i += 2;
+    const [ax, ay, bx, by] = [flat[i]!, flat[i + 1]!, flat[i + 2]!, flat[i + 3]!];
+    // The ray at −φ against the chord.
+    const ray = polar(1, -phi);
+    const cross = ray.x * (by - ay) - ray.y * (bx - ax);
+    radius[s] =
+      Math.abs(cross) < 1e-12 ? Math.hypot(ax, ay) : (ax * (by - ay) - ay * (bx - ax)) / cross;
+  }
+  return { sector, radius };
 }

@@ -1,9 +1,7 @@
 /** Every tolerance of the kernel, with its unit and its reason. */
 
-/** mm. What a file states: no point of a cut contour lies further from the solved curve. */
-export const STATED_FIT = 0.005;
-
-/** mm. What the fit aims for at its samples, so that {@link STATED_FIT} holds between them. */
+/** mm. What the fit aims for at its samples, so that between them no point of a cut contour lies
+ * further than the stated 5 µm from the solved curve. */
 export const FIT_AT_SAMPLES = 0.004;
 
 /** mm. Two arcs whose centres and radii agree this well are one arc. */
@@ -12,11 +10,11 @@ export const SAME_ARC = 1e-7;
 /** mm. Sagitta of the chords in the back-check. The polygon keeps the area, so less is not needed. */
 export const FLATTENING = 0.02;
 
+/** mm. Sagitta of the chords by which a finished curve is read back. */
+export const CURVE_READING = 0.001;
+
 /** mm per clipping unit: clipper2 works on integers. */
 export const CLIP_UNIT = 1e-5;
-
-/** mm. The solved radius is settled when an iteration moves it less than this. */
-export const RADIUS_SETTLED = 1e-9;
 
 /** Bulges below this are straight sides: on a 300 mm chord the sagitta is under 1 nm. */
 export const STRAIGHT = 1e-9;

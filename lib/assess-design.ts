@@ -1,5 +1,6 @@
 import type { CheckCounts } from '@/entities';
-import { derive, KERNEL_VERSION, type Design, type Finding } from '@/geometry';
+import { KERNEL_VERSION, type Design, type Finding } from '@/geometry';
+import { deriveDesign } from './derive-design';
 
 /** What the kernel says of a design today, for storing with it. */
 export interface Assessment {
@@ -10,7 +11,7 @@ export interface Assessment {
 }
 
 export function assessDesign(design: Design): Assessment {
-  const derivation = derive(design);
+  const derivation = deriveDesign(design);
   const findings = derivation.ok ? derivation.derived.findings : derivation.findings;
   const checks: CheckCounts = { ok: 0, warn: 0, fail: 0 };
   for (const { severity } of findings) checks[severity] += 1;

@@ -1,9 +1,10 @@
 import 'server-only';
 import { createHash } from 'node:crypto';
-import { derive, type Derived, type Design } from '@/geometry';
+import type { Derived, Design } from '@/geometry';
 import { cutFiles, type CutFile } from '@/geometry/files';
 import { mayDownload, requireMember } from './access';
 import { describeFailure } from './assess-design';
+import { deriveDesign } from './derive-design';
 import { notFound, RequestError } from './errors';
 import { findDesign } from './queries';
 import type { DesignFiles } from './schemas/api';
@@ -15,7 +16,7 @@ export interface HashedFile extends CutFile {
 
 /** The plates of a design. @throws RequestError checks-fail when it has none. */
 export function derivePlates(design: Design): Derived {
-  const derivation = derive(design);
+  const derivation = deriveDesign(design);
   if (derivation.ok) return derivation.derived;
   const failing = derivation.findings.find(({ severity }) => severity === 'fail');
   throw new RequestError(

@@ -3,7 +3,7 @@ import { ScribedPlates } from '@/components/account/scribed-plates';
 import { Mark } from '@/components/ui/mark';
 import { defaultDesign, derive } from '@/geometry';
 
-/** Real plates, those of the default design, at a mesh angle that shows both. */
+/** Real plates, those of the default design, at a shaft angle that shows both. */
 const derivation = derive(defaultDesign());
 
 export default function AccountLayout({ children }: { children: ReactNode }) {

@@ -12,7 +12,7 @@ export function ScribedPlates({
   section: SectionResult;
   /** Radius shown, mm. */
   reach: number;
-  /** Mesh angle, degrees. */
+  /** Shaft angle, degrees. */
   turn: number;
 }) {
   const { rotor, stator } = section;

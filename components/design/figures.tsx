@@ -38,8 +38,13 @@ export function StackFigures({ derived, section }: { derived: Derived; section: 
         ['Gaps between plates', result.gaps],
         ['Mass of all plates', mass(stack.mass)],
         ['Cut length, all plates', `${(stack.cutLength / 1000).toPrecision(3)} m`],
-        ['Section itself, open', picofarads(result.ownMin)],
-        ['Section itself, meshed', picofarads(result.ownMax)],
+        ['Stator form', result.statorForm === 'even' ? 'even radius' : 'follows the rotor'],
+        ['Plates alone, open stop', picofarads(result.platesOpen)],
+        ['Plates alone, law begins', picofarads(result.platesAtLaw)],
+        ['Insulators and frame, allowed', picofarads(result.frame)],
+        ['Trimmer has to add', picofarads(result.trimmer)],
+        ['Section itself, law begins', picofarads(result.ownMin)],
+        ['Section itself, law ends', picofarads(result.ownMax)],
       ]}
     />
   );

@@ -1,33 +1,47 @@
-import { formatQuantity, type SectionResult } from '@/geometry';
+import { formatQuantity, type LawError, type SectionResult } from '@/geometry';
 import { Figures } from './figures';
+
+const degrees = (angle: number): string => `${((angle * 180) / Math.PI).toFixed(1)}°`;
+const share = ({ fraction }: LawError): string =>
+  `${Number((fraction * 100).toPrecision(2))} %`;
 
 /** How well the finished plates hold the law, and what that figure doesn't know. */
 export function LawFigures({ section }: { section: SectionResult }) {
-  const { fraction, capacitance, angle } = section.law.largestError;
+  const { law, model, totalMin, totalMax } = section;
   return (
     <div className="flex flex-col gap-2">
+      <p role="status" className="text-small text-ink-2">
+        {model === 'field'
+          ? 'With edges and plan view.'
+          : 'With the edges alone; the plan view is being solved.'}
+      </p>
       <Figures
         rows={[
-          ['Largest law error', `${(fraction * 100).toPrecision(2)} % of the range`],
-          ['That is', formatQuantity(capacitance, 'capacitance', 2)],
-          ['At mesh angle', `${((angle * 180) / Math.PI).toFixed(1)}°`],
-          ['Total, open', formatQuantity(section.totalMin, 'capacitance', 4)],
-          ['Total, meshed', formatQuantity(section.totalMax, 'capacitance', 4)],
+          ['Largest error, 5 to 95 %', `${share(law.largestInner)} of the range`],
+          [
+            'That is',
+            `${formatQuantity(law.largestInner.capacitance, 'capacitance', 2)} at ${degrees(law.largestInner.angle)}`,
+          ],
+          [
+            'Over the whole law',
+            `${share(law.largestError)} at ${degrees(law.largestError.angle)}`,
+          ],
+          ['Law begins and ends', `${degrees(law.from)} to ${degrees(law.to)}`],
+          ['Total where it begins', formatQuantity(totalMin, 'capacitance', 4)],
+          ['Total where it ends', formatQuantity(totalMax, 'capacitance', 4)],
         ]}
       />
       <details className="text-small text-ink-2">
         <summary className="cursor-pointer py-1 text-ink max-bench:py-3">
-          What this figure leaves out
+          What these figures leave out
         </summary>
         <ul className="ml-4 flex list-disc flex-col gap-1 pt-1">
+          <li>The two end faces of the stack, which count most with few plates.</li>
+          <li>Posts, beyond the ears that carry them.</li>
           <li>
-            The radial edges of the blades, which count most near the two ends of the travel.
+            Insulators and frame beyond the allowance, which is yours to set and to measure.
           </li>
-          <li>The two end faces of the stack, insulators, frame and posts.</li>
-          <li>
-            The open capacitance of the plates. It is taken as the target asks: plates and
-            trimmer together must be brought to it.
-          </li>
+          <li>What sheet, cutting and assembly add by their tolerances.</li>
         </ul>
       </details>
     </div>

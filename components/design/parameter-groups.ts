@@ -7,6 +7,7 @@ import {
 
 export const groupTitles: Record<ParameterGroup, string> = {
   law: 'Tuning law and range',
+  turn: 'Turning and rests',
   stack: 'Plates of the section',
   shaft: 'Shaft and clearances',
   posts: 'Stator posts',

@@ -2,7 +2,7 @@
 
 import { releaseProxy, wrap, type Remote } from 'comlink';
 import { useCallback, useEffect, useRef, useState } from 'react';
-import type { Derivation, Derived, Design, Finding } from '@/geometry';
+import type { Derivation, Derived, Design, FieldModel, Finding } from '@/geometry';
 import type { KernelWorker } from './derive.worker';
 
 export interface Plates {
@@ -16,6 +16,8 @@ export interface Plates {
   readonly broken: boolean;
 }
 
+const STAGES: readonly FieldModel[] = ['edges', 'field'];
+
 function platesAfter(before: Derived | null, derivation: Derivation): Plates {
   return derivation.ok
     ? {
@@ -28,8 +30,9 @@ function platesAfter(before: Derived | null, derivation: Derivation): Plates {
 }
 
 /**
- * Derives in a worker. At most one design is on its way and one waits: a newer one takes the
- * waiting one's place, so typing never builds a queue.
+ * Derives in a worker, in two stages: with the edges alone, which is soon there, and then with the
+ * plan view. At most one stage is on its way and one design waits: a newer one takes the waiting
+ * one's place, so typing never builds a queue, and what is outdated when it arrives is dropped.
  */
 export function useDerivation(first: Derivation): [Plates, (design: Design) => void] {
   const [plates, setPlates] = useState(() => platesAfter(null, first));
@@ -60,9 +63,14 @@ export function useDerivation(first: Derivation): [Plates, (design: Design) => v
       const next = waiting.current;
       waiting.current = null;
       try {
-        const derivation = await remote.derive(next);
-        if (kernel.current !== remote) return;
-        setPlates((before) => platesAfter(before.derived, derivation));
+        for (const model of STAGES) {
+          const derivation = await remote.derive(next, model);
+          if (kernel.current !== remote) return;
+          if (waiting.current && model === 'field') break;
+          setPlates((before) => platesAfter(before.derived, derivation));
+          // What has no plates with the edges alone gets none from the plan view.
+          if (waiting.current || !derivation.ok) break;
+        }
       } catch {
         setPlates((before) => ({ ...before, current: false, broken: true }));
       }

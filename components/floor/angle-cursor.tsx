@@ -5,7 +5,7 @@ import type { AngleStore } from './angle-store';
 import { useAngle } from './use-angle';
 
 /**
- * The red line of the mesh angle. It is as wide as its parent, which spans the travel, and is
+ * The red line of the shaft angle. It is as wide as its parent, which spans the travel, and is
  * moved by a share of its own width: nothing is measured and nothing laid out again.
  * @param travel rad.
  */

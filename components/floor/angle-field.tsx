@@ -6,7 +6,7 @@ import type { AngleStore } from './angle-store';
 import { toDegrees, toRadians, writeDegrees } from './degrees';
 import { useAngle } from './use-angle';
 
-/** A small field to type the mesh angle. @param travel rad. */
+/** A small field to type the shaft angle. @param travel rad. */
 export function AngleField({ store, travel }: { store: AngleStore; travel: number }) {
   const id = useId();
   const input = useRef<HTMLInputElement>(null);
@@ -57,7 +57,7 @@ export function AngleField({ store, travel }: { store: AngleStore; travel: numbe
   return (
     <div className="flex flex-wrap items-center gap-x-2">
       <label htmlFor={id} className="font-medium">
-        Mesh angle
+        Shaft angle
       </label>
       <span className="relative">
         <input

@@ -46,11 +46,13 @@ export function readDegrees(
   const most = Number(travel.toFixed(1));
   const match = /^\s*([-+]?\d*[.,]?\d+|[-+]?\d+[.,])\s*(°|deg|degrees)?\s*$/i.exec(text);
   if (!match) {
-    return { problem: `Mesh angle: “${text.trim()}” is no angle. Type degrees, 0 to ${most}.` };
+    return {
+      problem: `Shaft angle: “${text.trim()}” is no angle. Type degrees, 0 to ${most}.`,
+    };
   }
   const degrees = Number(match[1]!.replace(',', '.'));
   if (degrees < 0 || degrees > travel + 0.05) {
-    return { problem: `Mesh angle: ${degrees}° is outside the travel. Type 0 to ${most}.` };
+    return { problem: `Shaft angle: ${degrees}° is outside the travel. Type 0 to ${most}.` };
   }
   return { degrees };
 }

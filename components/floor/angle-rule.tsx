@@ -33,6 +33,10 @@ export function AngleRule({
   const read = useMemo(() => section && lawReader(section), [section]);
   const drag = useAngleDrag(store, travel, track);
   const most = toDegrees(travel);
+  const law = section && {
+    from: toDegrees(section.law.from),
+    to: toDegrees(section.law.to),
+  };
 
   useEffect(() => store.setTravel(travel), [store, travel]);
 
@@ -84,7 +88,7 @@ export function AngleRule({
           className="absolute inset-y-0"
           style={{ left: INSET_LEFT, right: INSET_RIGHT }}
         >
-          <RuleScale travel={most} />
+          <RuleScale travel={most} law={law} />
           <AngleCursor store={store} travel={travel}>
             <span
               ref={flag}

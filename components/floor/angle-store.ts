@@ -1,10 +1,10 @@
 /**
- * The mesh angle that floor, angle rule, chart and 3D stack share. It is not React state: each of
+ * The shaft angle that floor, angle rule, chart and 3D stack share. It is not React state: each of
  * them moves its own part through a subscription, so that all of them turn in the same frame
  * without a render.
  */
 export interface AngleStore {
-  /** Mesh angle, rad: 0 fully open, the travel fully meshed. */
+  /** Shaft angle, rad: 0 at the open stop, the travel at the meshed one. */
   get(): number;
   /**
    * Sets the angle, rad, held between 0 and the travel. Listeners hear of it before this returns.
@@ -24,7 +24,7 @@ export function createAngleStore(travel: number): AngleStore {
   const listeners = new Set<(angle: number) => void>();
 
   function set(next: number): void {
-    if (Number.isNaN(next)) throw new RangeError(`invalid mesh angle: ${next} rad`);
+    if (Number.isNaN(next)) throw new RangeError(`invalid shaft angle: ${next} rad`);
     const held = Math.min(limit, Math.max(0, next));
     if (held === angle) return;
     angle = held;

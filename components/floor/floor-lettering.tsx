@@ -7,7 +7,7 @@ import { writeDegrees } from './degrees';
 import { lawReader } from './law-series';
 import { useAngle } from './use-angle';
 
-/** The read-out on the floor: mesh angle, total capacitance there, and what it tunes to. */
+/** The read-out on the floor: shaft angle, total capacitance there, and what it tunes to. */
 export function FloorReadout({
   section,
   store,

@@ -2,7 +2,8 @@
 
 import { useId, useRef, type CSSProperties } from 'react';
 import { formatQuantity } from '@/geometry/quantity';
-import type { Derived } from '@/geometry';
+import type { Derived, Turn } from '@/geometry';
+import { rotorTurn } from '@/geometry/turn';
 import type { AngleStore } from './angle-store';
 import { toDegrees, writeDegrees } from './degrees';
 import { FloorKey, FloorReadout } from './floor-lettering';
@@ -30,7 +31,7 @@ export function Floor({
   const id = useId();
   const frame = useRef<HTMLDivElement>(null);
   const rotorLayer = useRef<SVGSVGElement>(null);
-  const { design, stack, sections } = derived;
+  const { design, turn, stack, sections } = derived;
   const section = sections[index];
   if (!section) throw new RangeError(`invalid section: ${index} of ${sections.length}`);
 
@@ -42,10 +43,10 @@ export function Floor({
   useAngle(store, (angle) => {
     const layer = rotorLayer.current;
     if (!layer) return;
-    layer.style.transform = turned(angle);
+    layer.style.transform = turned(turn, angle);
     layer.dataset.angle = writeDegrees(angle);
   });
-  const drag = useRotorDrag(store, frame);
+  const drag = useRotorDrag(store, frame, turn.direction);
   const layer = {
     viewBox: view.viewBox,
     'aria-hidden': true,
@@ -86,7 +87,7 @@ export function Floor({
           ref={rotorLayer}
           data-part="rotor"
           className={`${layer.className} pointer-events-none will-change-transform`}
-          style={{ transform: turned(store.get()) }}
+          style={{ transform: turned(turn, store.get()) }}
         >
           <g transform="scale(1 -1)">
             <RotorPlate
@@ -113,8 +114,9 @@ export function Floor({
   );
 }
 
-/** CSS turns clockwise; the rotor meshes counter-clockwise. */
-const turned = (angle: number) => `rotate(${-toDegrees(angle)}deg)`;
+/** The rotor is drawn at mesh angle 0. CSS turns clockwise, the drawing counter-clockwise. */
+const turned = (turn: Turn, angle: number) =>
+  `rotate(${-toDegrees(rotorTurn(turn, angle))}deg)`;
 
 /** Scribed lines across the stator, `size` mm apart. */
 function Hatch({ id, size }: { id: string; size: number }) {
@@ -140,6 +142,6 @@ function describe(
   return (
     `${rotor.quantity} rotor plates that sweep ${formatQuantity(sweepRadius, 'length', 4)} from the shaft, ` +
     `${stator.quantity} stator plates on ${posts.length} posts; ${limit}. ` +
-    'The rotor is drawn at the mesh angle of the angle rule.'
+    'The rotor is drawn at the shaft angle of the angle rule.'
   );
 }

@@ -1,13 +1,14 @@
 /**
  * The value at an angle between samples, on the straight line between its neighbours; outside the
  * samples it is the nearest one.
+ * A sample may have no value, null.
  * @param angles rising, at least one, as many as there are values.
  */
-export function valueAt(
+export function valueAt<V extends number | null>(
   angles: readonly number[],
-  values: readonly number[],
+  values: readonly V[],
   angle: number,
-): number {
+): V {
   const last = angles.length - 1;
   if (last < 0 || values.length !== angles.length) {
     throw new RangeError(
@@ -23,6 +24,10 @@ export function valueAt(
     if (angles[middle]! <= angle) low = middle;
     else high = middle;
   }
+  const before = values[low]!;
+  const after = values[high]!;
+  // Beside a sample without a value there is none either.
+  if (before === null || after === null) return null as V;
   const part = (angle - angles[low]!) / (angles[high]! - angles[low]!);
-  return values[low]! + part * (values[high]! - values[low]!);
+  return (before + part * (after - before)) as V;
 }

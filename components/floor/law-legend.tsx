@@ -14,7 +14,7 @@ function Sample({ className, dash }: { className: string; dash?: string }) {
 /** What the lines are, over which range, and the largest law error with its place. */
 export function LawLegend({ section, series }: { section: SectionResult; series: LawSeries }) {
   const { capacitance, frequency, tuned } = series;
-  const { largestError, achieved } = section.law;
+  const { largestInner, largestError, achieved } = section.law;
   return (
     <ul className="flex flex-wrap items-center gap-x-5 gap-y-1 px-3 py-2 text-small text-ink-2">
       <li className="flex items-center gap-2">
@@ -28,6 +28,10 @@ export function LawLegend({ section, series }: { section: SectionResult; series:
       <li className="flex items-center gap-2">
         <Sample className="stroke-ink" dash="2 4" />
         <span>asked by the law</span>
+      </li>
+      <li className="flex items-center gap-2">
+        <Sample className="stroke-steel-dark" dash="6 3" />
+        <span>area alone, for comparison</span>
       </li>
       {frequency && tuned && (
         <li className="flex items-center gap-2">
@@ -44,11 +48,13 @@ export function LawLegend({ section, series }: { section: SectionResult; series:
       <li className="flex items-center gap-2 wide:ml-auto">
         <Sample className="stroke-bad" />
         <span>
-          largest law error{' '}
+          largest law error between 5 and 95 %{' '}
           <strong className="font-semibold text-ink">
-            {Number((100 * largestError.fraction).toPrecision(2))} % of range
+            {Number((100 * largestInner.fraction).toPrecision(2))} % of range
           </strong>{' '}
-          ({formatQuantity(Math.abs(largestError.capacitance), 'capacitance', 2)}) at{' '}
+          ({formatQuantity(Math.abs(largestInner.capacitance), 'capacitance', 2)}) at{' '}
+          {writeDegrees(largestInner.angle)}°; over the whole law{' '}
+          {Number((100 * largestError.fraction).toPrecision(2))} % at{' '}
           {writeDegrees(largestError.angle)}°
         </span>
       </li>

@@ -53,7 +53,7 @@ function axis(font: string, options: uPlot.Axis): uPlot.Axis {
 
 type Options = PlotKind['options'];
 
-/** Capacitance asked and achieved, with the frequency on its own scale when there is a coil. */
+/** Capacitance asked, achieved and of the area alone, with the frequency on its own scale when there is a coil. */
 const lawOptions: Options = (font, series, size) => {
   const travel = () => series().angle.at(-1)!;
   const tuned = series().tuned !== null;
@@ -96,6 +96,14 @@ const lawOptions: Options = (font, series, size) => {
         stroke: palette.ink,
         width: 1.5,
         dash: [2, 5],
+        pxAlign: 0,
+        points: { show: false },
+      },
+      {
+        scale: 'capacitance',
+        stroke: palette.steelDark,
+        width: 1,
+        dash: [6, 3],
         pxAlign: 0,
         points: { show: false },
       },
@@ -168,8 +176,9 @@ function padded(low: number | null, high: number | null): [number, number] {
   return [low - room, high + room];
 }
 
-function symmetric(errors: readonly number[]): [number, number] {
-  const largest = errors.reduce((most, error) => Math.max(most, Math.abs(error)), 0) || 1;
+function symmetric(errors: readonly (number | null)[]): [number, number] {
+  const largest =
+    errors.reduce<number>((most, error) => Math.max(most, Math.abs(error ?? 0)), 0) || 1;
   const power = 10 ** Math.floor(Math.log10(largest));
   const top = Math.ceil(largest / power) * power;
   return [-1.2 * top, 1.2 * top];
@@ -182,10 +191,11 @@ function signed(value: number): string {
 }
 
 export const lawPlot: PlotKind = {
-  data: ({ angle, achieved, target, tuned }) => [
+  data: ({ angle, achieved, target, areaOnly, tuned }) => [
     angle,
     achieved,
     target,
+    areaOnly,
     ...(tuned ? [tuned] : []),
   ],
   options: lawOptions,

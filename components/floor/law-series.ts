@@ -1,18 +1,20 @@
 import type { SectionResult } from '@/geometry';
+import { resonantFrequency } from '@/geometry/target';
 import { toDegrees } from './degrees';
 import { fixedUnit, type FixedUnit } from './fixed-unit';
 import { valueAt } from './interpolate';
-import { resonance } from './resonance';
 
 /** A section's law in the units of the chart. All arrays have the same length. */
 export interface LawSeries {
   /** Degrees. */
   readonly angle: number[];
   /** In the unit of `capacitance`. */
-  readonly target: number[];
+  readonly target: (number | null)[];
   readonly achieved: number[];
+  /** What the area of the overlap alone would give. */
+  readonly areaOnly: number[];
   /** Achieved less target, percent of the capacitance range. */
-  readonly error: number[];
+  readonly error: (number | null)[];
   /** Where the error is largest, degrees, and its value there. */
   readonly largest: { readonly angle: number; readonly error: number };
   /** In the unit of `frequency`; null without a coil. */
@@ -25,7 +27,9 @@ function unitsOf({ totalMin, totalMax, inductance }: SectionResult) {
   return {
     capacitance: fixedUnit(totalMax, 'capacitance'),
     frequency:
-      inductance === null ? null : fixedUnit(resonance(inductance, totalMin), 'frequency'),
+      inductance === null
+        ? null
+        : fixedUnit(resonantFrequency(totalMin, inductance), 'frequency'),
   };
 }
 
@@ -36,27 +40,29 @@ export function lawSeries(section: SectionResult): LawSeries {
   const { angle } = law.largestError;
   return {
     angle: law.angle.map(toDegrees),
-    target: law.target.map(capacitance.scale),
+    target: law.target.map((total) => (total === null ? null : capacitance.scale(total))),
     achieved: law.achieved.map(capacitance.scale),
-    error: law.error.map((error) => (100 * error) / range),
+    areaOnly: law.areaOnly.map(capacitance.scale),
+    error: law.error.map((error) => (error === null ? null : (100 * error) / range)),
     largest: {
       angle: toDegrees(angle),
-      error: (100 * valueAt(law.angle, law.error, angle)) / range,
+      error: (100 * law.largestError.capacitance) / range,
     },
     tuned:
-      frequency && law.achieved.map((total) => frequency.scale(resonance(inductance!, total))),
+      frequency &&
+      law.achieved.map((total) => frequency.scale(resonantFrequency(total, inductance!))),
     capacitance,
     frequency,
   };
 }
 
-/** What a section gives at one mesh angle, written with the units of its chart. */
+/** What a section gives at one shaft angle, written with the units of its chart. */
 export interface LawReading {
   readonly capacitance: string;
   readonly frequency: string | null;
 }
 
-/** @returns a function of the mesh angle, rad; the achieved total and what it tunes to. */
+/** @returns a function of the shaft angle, rad; the achieved total and what it tunes to. */
 export function lawReader(section: SectionResult): (angle: number) => LawReading {
   const { law, inductance } = section;
   const { capacitance, frequency } = unitsOf(section);
@@ -65,7 +71,8 @@ export function lawReader(section: SectionResult): (angle: number) => LawReading
     return {
       capacitance: `${capacitance.write(total)} ${capacitance.unit}`,
       frequency:
-        frequency && `${frequency.write(resonance(inductance!, total))} ${frequency.unit}`,
+        frequency &&
+        `${frequency.write(resonantFrequency(total, inductance!))} ${frequency.unit}`,
     };
   };
 }

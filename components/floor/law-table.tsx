@@ -1,12 +1,12 @@
 import type { SectionResult } from '@/geometry';
+import { resonantFrequency } from '@/geometry/target';
 import { toDegrees, toRadians } from './degrees';
 import { valueAt } from './interpolate';
 import type { LawSeries } from './law-series';
-import { resonance } from './resonance';
 
 const EVERY = 10;
 
-/** The chart in figures, every 10° and at the end of the travel. */
+/** The chart in figures, every 10° and at the end of the travel; in the rests nothing is asked. */
 export function LawTable({ section, series }: { section: SectionResult; series: LawSeries }) {
   const { law, inductance, totalMax, totalMin } = section;
   const { capacitance, frequency } = series;
@@ -30,9 +30,10 @@ export function LawTable({ section, series }: { section: SectionResult; series: 
           <thead className="sticky top-0 bg-panel">
             <tr className="border-b border-line">
               {[
-                'Mesh angle, °',
+                'Shaft angle, °',
                 `Asked, ${capacitance.unit}`,
                 `Achieved, ${capacitance.unit}`,
+                `Area alone, ${capacitance.unit}`,
                 'Error, % of range',
                 ...(frequency ? [`Tunes to, ${frequency.unit}`] : []),
               ].map((title) => (
@@ -46,16 +47,20 @@ export function LawTable({ section, series }: { section: SectionResult; series: 
             {rows.map((degree) => {
               const angle = toRadians(degree);
               const achieved = valueAt(law.angle, law.achieved, angle);
+              const target = valueAt(law.angle, law.target, angle);
               const error = valueAt(law.angle, law.error, angle);
               return (
                 <tr key={degree} className="border-b border-line/60">
                   <th scope="row" className="py-1 font-normal">
                     {Number(degree.toFixed(1))}
                   </th>
-                  <td>{capacitance.write(valueAt(law.angle, law.target, angle))}</td>
+                  <td>{target === null ? '–' : capacitance.write(target)}</td>
                   <td>{capacitance.write(achieved)}</td>
-                  <td>{percent(error / (totalMax - totalMin))}</td>
-                  {frequency && <td>{frequency.write(resonance(inductance!, achieved))}</td>}
+                  <td>{capacitance.write(valueAt(law.angle, law.areaOnly, angle))}</td>
+                  <td>{error === null ? '–' : percent(error / (totalMax - totalMin))}</td>
+                  {frequency && (
+                    <td>{frequency.write(resonantFrequency(achieved, inductance!))}</td>
+                  )}
                 </tr>
               );
             })}

@@ -21,8 +21,17 @@ function ticks(travel: number, every: number, skip: readonly number[], length: n
   return path;
 }
 
-/** Ticks and numbers of the angle rule, over the whole width. @param travel degrees. */
-export function RuleScale({ travel }: { travel: number }) {
+/**
+ * Ticks and numbers of the angle rule, over the whole width, with the law's span marked.
+ * @param travel degrees, as is the law.
+ */
+export function RuleScale({
+  travel,
+  law,
+}: {
+  travel: number;
+  law?: { readonly from: number; readonly to: number } | undefined;
+}) {
   const paths = useMemo(
     () => ({
       ones: ticks(travel, 1, [5], 5),
@@ -45,6 +54,12 @@ export function RuleScale({ travel }: { travel: number }) {
         <path d={paths.fives} {...stroke} className="stroke-ink-2" />
         <path d={paths.tens} {...stroke} className="stroke-ink" />
       </svg>
+      {law && (
+        <>
+          <Rest from={0} to={law.from} travel={travel} />
+          <Rest from={law.to} to={travel} travel={travel} />
+        </>
+      )}
       {paths.numbers.map((degree) => (
         <span
           key={degree}
@@ -55,5 +70,17 @@ export function RuleScale({ travel }: { travel: number }) {
         </span>
       ))}
     </div>
+  );
+}
+
+/** A rest before or after the law: hatched, since nothing is asked there. */
+function Rest({ from, to, travel }: { from: number; to: number; travel: number }) {
+  if (to - from < 1e-6) return null;
+  return (
+    <span
+      data-part="rest"
+      className="absolute top-0 h-3.5 bg-[repeating-linear-gradient(135deg,var(--color-edge)_0_1px,transparent_1px_4px)]"
+      style={{ left: `${(100 * from) / travel}%`, width: `${(100 * (to - from)) / travel}%` }}
+    />
   );
 }

@@ -3,7 +3,7 @@ import type { AngleStore } from './angle-store';
 import { toDegrees, toRadians } from './degrees';
 
 /**
- * Sets the mesh angle from where the pointer is along a track, to 0.1°: a press goes there, a drag
+ * Sets the shaft angle from where the pointer is along a track, to 0.1°: a press goes there, a drag
  * follows. Spread the result on the element that takes the pointer.
  * @param track spans the travel from its left edge to its right. @param travel rad.
  */

@@ -2,7 +2,7 @@ import { useLayoutEffect, useRef } from 'react';
 import type { AngleStore } from './angle-store';
 
 /**
- * Runs `apply` with the mesh angle now, after every render and whenever the store moves. `apply`
+ * Runs `apply` with the shaft angle now, after every render and whenever the store moves. `apply`
  * writes to elements it holds by ref; it must not set React state.
  */
 export function useAngle(store: AngleStore, apply: (angle: number) => void): void {

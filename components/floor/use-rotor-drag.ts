@@ -11,8 +11,13 @@ interface Grip {
  * Turns the rotor with the pointer that took hold of it. `frame` has the shaft in its middle. The
  * held angle runs on past the ends of the travel, so that the rotor stays under the pointer when
  * it comes back.
+ * @param direction 1 where the rotor meshes counter-clockwise, −1 where clockwise
  */
-export function useRotorDrag(store: AngleStore, frame: RefObject<HTMLElement | null>) {
+export function useRotorDrag(
+  store: AngleStore,
+  frame: RefObject<HTMLElement | null>,
+  direction: 1 | -1,
+) {
   const grip = useRef<Grip | null>(null);
 
   return {
@@ -29,8 +34,9 @@ export function useRotorDrag(store: AngleStore, frame: RefObject<HTMLElement | n
         Math.sin(bearing - held.bearing),
         Math.cos(bearing - held.bearing),
       );
-      grip.current = { bearing, angle: held.angle + turned };
-      store.set(held.angle + turned);
+      const angle = held.angle + direction * turned;
+      grip.current = { bearing, angle };
+      store.set(angle);
     },
     onLostPointerCapture() {
       grip.current = null;

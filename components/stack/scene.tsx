@@ -4,6 +4,7 @@ import { useFrame, useThree } from '@react-three/fiber';
 import { useMemo, useRef, type Ref } from 'react';
 import type { Group } from 'three';
 import type { Derived, PlateRole } from '@/geometry';
+import { rotorTurn } from '@/geometry/turn';
 import type { AngleStore } from '@/components/floor/angle-store';
 import { palette } from '@/components/floor/palette';
 import { useAngle } from '@/components/floor/use-angle';
@@ -26,7 +27,7 @@ export function Scene({
   derived: Derived;
   store: AngleStore;
   eye: Ref<EyeHandle>;
-  /** Told what a frame that was drawn shows: the rotor's turn, rad. */
+  /** Told what a frame that was drawn shows: the shaft angle, rad. */
   onFrame: (angle: number) => void;
 }) {
   const rotor = useRef<Group>(null);
@@ -36,11 +37,14 @@ export function Scene({
   const shaft = useMemo(() => [rods.shaft], [rods]);
 
   useAngle(store, (angle) => {
-    if (rotor.current) rotor.current.rotation.z = angle;
+    if (rotor.current) {
+      rotor.current.rotation.z = rotorTurn(derived.turn, angle);
+      rotor.current.userData.shaftAngle = angle;
+    }
     invalidate();
   });
   useFrame(() => {
-    if (rotor.current) onFrame(rotor.current.rotation.z);
+    if (rotor.current) onFrame(Number(rotor.current.userData.shaftAngle));
   });
 
   return (

@@ -38,7 +38,7 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
             role="img"
             aria-label={
               `Meshed stack of ${rotors} rotor and ${plates.length - rotors} stator plates, ` +
-              `${depth.toFixed(1)} mm deep, turned to the mesh angle of the angle rule`
+              `${depth.toFixed(1)} mm deep, turned to the shaft angle of the angle rule`
             }
             className="relative min-h-0 flex-1"
           >

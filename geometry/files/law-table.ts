@@ -7,25 +7,35 @@ const PICO = 1e12;
 
 export function lawTable(section: SectionResult): string {
   const { law, inductance, totalMin, totalMax } = section;
-  const head = ['angle_deg', 'target_pF', 'achieved_pF', 'error_pF', 'error_percent_of_range'];
+  const head = [
+    'shaft_angle_deg',
+    'target_pF',
+    'achieved_pF',
+    'area_only_pF',
+    'error_pF',
+    'error_percent_of_range',
+  ];
   if (inductance !== null) head.push('target_kHz', 'achieved_kHz');
+  // Outside the law there is no target: those cells stay empty.
+  const cell = (value: number | null, scale: number, digits: number): string =>
+    value === null ? '' : (value * scale).toFixed(digits);
+  const kilohertz = (total: number | null): string =>
+    total === null || inductance === null
+      ? ''
+      : (resonantFrequency(total, inductance) / 1e3).toFixed(3);
   const rows = law.angle.map((angle, i) => {
     const target = law.target[i]!;
     const achieved = law.achieved[i]!;
     const error = law.error[i]!;
     const row = [
-      ((angle * 180) / Math.PI).toFixed(3),
-      (target * PICO).toFixed(4),
-      (achieved * PICO).toFixed(4),
-      (error * PICO).toFixed(4),
-      ((100 * error) / (totalMax - totalMin)).toFixed(4),
+      cell(angle, 180 / Math.PI, 3),
+      cell(target, PICO, 4),
+      cell(achieved, PICO, 4),
+      cell(law.areaOnly[i]!, PICO, 4),
+      cell(error, PICO, 4),
+      cell(error, 100 / (totalMax - totalMin), 4),
     ];
-    if (inductance !== null) {
-      row.push(
-        (resonantFrequency(target, inductance) / 1e3).toFixed(3),
-        (resonantFrequency(achieved, inductance) / 1e3).toFixed(3),
-      );
-    }
+    if (inductance !== null) row.push(kilohertz(target), kilohertz(achieved));
     return row.join(',');
   });
   return [head.join(','), ...rows, ''].join('\r\n');

@@ -58,7 +58,7 @@ describe('angle store', () => {
 
   it('refuses what is not an angle, with the value', () => {
     const store = createAngleStore(Math.PI);
-    expect(() => store.set(Number.NaN)).toThrow('invalid mesh angle: NaN rad');
+    expect(() => store.set(Number.NaN)).toThrow('invalid shaft angle: NaN rad');
     expect(() => store.setTravel(0)).toThrow('invalid travel: 0 rad');
     expect(() => createAngleStore(Number.POSITIVE_INFINITY)).toThrow('invalid travel');
     expect(store.get()).toBe(0);

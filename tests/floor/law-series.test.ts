@@ -2,8 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { fixedUnit } from '@/components/floor/fixed-unit';
 import { valueAt } from '@/components/floor/interpolate';
 import { lawReader, lawSeries } from '@/components/floor/law-series';
-import { resonance } from '@/components/floor/resonance';
-import type { SectionResult } from '@/geometry';
+import { resonantFrequency, type SectionResult } from '@/geometry';
 
 describe('value between samples', () => {
   const angles = [0, 1, 3, 4];
@@ -18,15 +17,14 @@ describe('value between samples', () => {
     expect(valueAt(angles, values, -1)).toBe(10);
     expect(valueAt(angles, values, 9)).toBe(8);
   });
+  it('is nothing beside a sample without a value', () => {
+    expect(valueAt([0, 1, 2], [5, 7, null], 1.5)).toBeNull();
+    expect(valueAt([0, 1, 2], [5, 7, null], 0.5)).toBe(6);
+    expect(valueAt([0, 1, 2], [5, 7, null], 2)).toBeNull();
+  });
   it('refuses samples that do not pair', () => {
     expect(() => valueAt([0, 1], [1], 0.5)).toThrow('2 angles and 1 values');
     expect(() => valueAt([], [], 0.5)).toThrow('0 angles');
-  });
-});
-
-describe('resonance', () => {
-  it('gives 159.155 kHz for 1 mH and 1 nF, from ω = 10⁶ rad/s', () => {
-    expect(resonance(1e-3, 1e-9)).toBeCloseTo(1e6 / (2 * Math.PI), 6);
   });
 });
 
@@ -49,9 +47,10 @@ describe('law series', () => {
     inductance: 240e-6,
     law: {
       angle: [0, Math.PI / 2, Math.PI],
-      target: [40e-12, 220e-12, 400e-12],
+      target: [40e-12, 220e-12, null],
       achieved: [40e-12, 220.9e-12, 399.64e-12],
-      error: [0, 0.9e-12, -0.36e-12],
+      areaOnly: [40e-12, 210e-12, 390e-12],
+      error: [0, 0.9e-12, null],
       largestError: { fraction: 0.0025, capacitance: 0.9e-12, angle: Math.PI / 2 },
     },
   } as unknown as SectionResult;
@@ -61,9 +60,16 @@ describe('law series', () => {
     expect(series.angle).toEqual([0, 90, 180]);
     expect(series.achieved[1]).toBeCloseTo(220.9, 9);
     expect(series.error[1]).toBeCloseTo(0.25, 9);
-    expect(series.error[2]).toBeCloseTo(-0.1, 9);
-    expect(series.tuned![0]).toBeCloseTo(resonance(240e-6, 40e-12) / 1e3, 9);
+    expect(series.areaOnly[1]).toBeCloseTo(210, 9);
+    expect(series.largest.error).toBeCloseTo(0.25, 9);
+    expect(series.tuned![0]).toBeCloseTo(resonantFrequency(40e-12, 240e-6) / 1e3, 9);
     expect(series.tuned![0]).toBeGreaterThan(series.tuned![2]!);
+  });
+
+  it('has neither target nor error in a rest', () => {
+    const series = lawSeries(section);
+    expect(series.target[2]).toBeNull();
+    expect(series.error[2]).toBeNull();
   });
 
   it('has no frequency without a coil', () => {

@@ -6,7 +6,7 @@
 import { describe, expect, test } from 'vitest';
 import { EPSILON_0 } from '../../geometry/constants';
 import { lawBetween, type LawName } from '../../geometry/law';
-import { solveRotorCurve } from '../../geometry/rotor-curve';
+import { BLADE_STEPS, firstBlade } from '../../geometry/solve-blade';
 
 const GAPS = 20;
 const GAP = 0.5;
@@ -49,25 +49,29 @@ function sweptArea(radius: Float64Array, travel: number): number {
 
 describe.each(Object.entries(table) as [LawName, [number, number][]][])('%s', (name, rows) => {
   const law = lawBetween(name, 40e-12, 400e-12);
-  const curve = solveRotorCurve({
-    law,
-    travel: Math.PI,
-    permittivityGaps: EPSILON_0 * GAPS,
-    airGap: GAP,
-    cutoutRadius: CUTOUT,
-    rotorEdge: 0,
-    statorEdge: 0,
-    steps: 360,
-  });
+  const blade = firstBlade(
+    {
+      wanted: (angle) => law.slope(angle / Math.PI) / Math.PI / (EPSILON_0 * GAPS),
+      from: 0,
+      to: Math.PI,
+      rotorSector: Math.PI,
+      statorSector: Math.PI,
+      airGap: GAP,
+      cutoutRadius: CUTOUT,
+      edgeOffset: 0,
+      leastRadius: 0,
+    },
+    0,
+  );
 
   test.each([0, 1, 2])('radius and total at row %i', (row) => {
     const [radius, total] = rows[row]!;
-    expect(curve.radius[row * 180]).toBeCloseTo(radius, 4);
+    expect(blade.radius[(row * BLADE_STEPS) / 2]).toBeCloseTo(radius, 4);
     expect(law.total(row / 2) * 1e12).toBeCloseTo(total, 4);
   });
 
   test('swept area g·ΔC/(ε·n) = 1016.46816 mm²', () => {
-    expect(sweptArea(curve.radius, Math.PI)).toBeCloseTo(1016.46816, 4);
+    expect(sweptArea(blade.radius, Math.PI)).toBeCloseTo(1016.46816, 4);
   });
 
   test.each([0.1, 0.5, 0.9])(

@@ -36,9 +36,10 @@ const GAP = 0.5;
 
 function meshedCapacitance(): number {
   // The rotor turns half a turn from open to meshed.
+  const blade = { sector: Math.PI, radius: new Float64Array(2).fill(R1) };
   const rotor = { outside: halfRing(R1, 5, -Math.PI) };
   const stator = { outside: halfRing(30, R2, 0) };
-  const [overlap] = overlapAt(rotor, stator, [Math.PI], R2);
+  const [overlap] = overlapAt(rotor, stator, [Math.PI], { cutoutRadius: R2, blade });
   return (EPSILON_0 * (PLATES - 1) * overlap!.area) / GAP;
 }
 

@@ -85,6 +85,8 @@ export const buildableDesign = fc
       ratio: fc.double({ min: 1.3, max: 12, noNaN: true }),
       rotors: fc.integer({ min: 1, max: 30 }),
       more: fc.integer({ min: 0, max: 1 }),
+      travel: fc.double({ min: 2, max: Math.PI, noNaN: true }),
+      short: fc.double({ min: 0, max: 0.3, noNaN: true }),
     }),
   )
   .map(([design, fix]): Design => {
@@ -95,6 +97,12 @@ export const buildableDesign = fc
       spacerRadius: hubRadius,
       hubRadius,
       cutoutRadius: Math.max(1.5, hubRadius + fix.clear),
+      travel: fix.travel,
+      rotorSector: fix.travel - fix.short,
+      statorSector: fix.travel - fix.short,
+      openRest: null,
+      meshedRest: null,
+      statorEdgeOffset: 0,
       postCount: 2,
       postHoleDiameter: Math.min(design.postHoleDiameter, 4),
       postWeb: Math.min(design.postWeb, 3),

@@ -1,0 +1,133 @@
+/** The walls that bound the open space in plan: what neither plate covers of the other's outline. */
+
+import type { WallElement } from './plan-view';
+
+/** A plate as a polygon, counter-clockwise: x, y, x, y, … mm. */
+export type Polygon = readonly number[];
+
+interface Piece {
+  readonly ax: number;
+  readonly ay: number;
+  readonly bx: number;
+  readonly by: number;
+}
+
+function inside(polygon: Polygon, x: number, y: number): boolean {
+  let odd = false;
+  const n = polygon.length;
+  for (let i = 0, j = n - 2; i < n; j = i, i += 2) {
+    const yi = polygon[i + 1]!;
+    const yj = polygon[j + 1]!;
+    if (yi > y !== yj > y) {
+      const xi = polygon[i]!;
+      if (x < xi + ((polygon[j]! - xi) * (y - yi)) / (yj - yi)) odd = !odd;
+    }
+  }
+  return odd;
+}
+
+/** The parts of a polygon's sides that lie outside another polygon. */
+function uncovered(polygon: Polygon, other: Polygon): Piece[] {
+  const pieces: Piece[] = [];
+  const n = polygon.length;
+  const m = other.length;
+  for (let i = 0; i < n; i += 2) {
+    const ax = polygon[i]!;
+    const ay = polygon[i + 1]!;
+    const bx = polygon[(i + 2) % n]!;
+    const by = polygon[(i + 3) % n]!;
+    const dx = bx - ax;
+    const dy = by - ay;
+    const cuts = [0, 1];
+    for (let j = 0; j < m; j += 2) {
+      const cx = other[j]!;
+      const cy = other[j + 1]!;
+      const ex = other[(j + 2) % m]! - cx;
+      const ey = other[(j + 3) % m]! - cy;
+      const cross = dx * ey - dy * ex;
+      if (cross === 0) continue;
+      const t = ((cx - ax) * ey - (cy - ay) * ex) / cross;
+      const u = ((cx - ax) * dy - (cy - ay) * dx) / cross;
+      if (t > 0 && t < 1 && u >= 0 && u <= 1) cuts.push(t);
+    }
+    cuts.sort((p, q) => p - q);
+    for (let k = 1; k < cuts.length; k++) {
+      const from = cuts[k - 1]!;
+      const to = cuts[k]!;
+      const middle = (from + to) / 2;
+      if (to - from < 1e-9 || inside(other, ax + dx * middle, ay + dy * middle)) continue;
+      pieces.push({
+        ax: ax + dx * from,
+        ay: ay + dy * from,
+        bx: ax + dx * to,
+        by: ay + dy * to,
+      });
+    }
+  }
+  return pieces;
+}
+
+function distanceTo(x: number, y: number, pieces: readonly Piece[]): number {
+  let nearest = Infinity;
+  for (const { ax, ay, bx, by } of pieces) {
+    const dx = bx - ax;
+    const dy = by - ay;
+    const t = ((x - ax) * dx + (y - ay) * dy) / (dx * dx + dy * dy);
+    const u = t < 0 ? 0 : t > 1 ? 1 : t;
+    const px = x - ax - u * dx;
+    const py = y - ay - u * dy;
+    nearest = Math.min(nearest, px * px + py * py);
+  }
+  return Math.sqrt(nearest);
+}
+
+export interface WallOptions {
+  /** Element lengths, mm: none is split below the first nor left above the second. */
+  readonly shortest: number;
+  readonly longest: number;
+  /** An element is split while longer than this times its distance from the other kind. */
+  readonly grading: number;
+}
+
+/**
+ * @param rotor turned to its mesh angle
+ * @param setback of a rotor or stator wall whose middle is at a radius from the shaft, mm
+ */
+export function planWalls(
+  rotor: Polygon,
+  stator: Polygon,
+  setback: (kind: 'rotor' | 'stator', radius: number) => number,
+  { shortest, longest, grading }: WallOptions,
+): WallElement[] {
+  const kinds = [
+    { kind: 'rotor', potential: 1, pieces: uncovered(rotor, stator) },
+    { kind: 'stator', potential: 0, pieces: uncovered(stator, rotor) },
+  ] as const;
+  const elements: WallElement[] = [];
+  kinds.forEach(({ kind, potential, pieces }, k) => {
+    const others = kinds[1 - k]!.pieces;
+    const split = ({ ax, ay, bx, by }: Piece): void => {
+      const length = Math.hypot(bx - ax, by - ay);
+      const mx = (ax + bx) / 2;
+      const my = (ay + by) / 2;
+      if (
+        length > longest ||
+        (length > 2 * shortest && length > grading * distanceTo(mx, my, others))
+      ) {
+        split({ ax, ay, bx: mx, by: my });
+        split({ ax: mx, ay: my, bx, by });
+        return;
+      }
+      elements.push({
+        ax,
+        ay,
+        bx,
+        by,
+        potential,
+        setback: setback(kind, Math.hypot(mx, my)),
+      });
+    };
+    pieces.forEach(split);
+  });
+  return elements;
+}
