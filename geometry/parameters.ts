@@ -178,7 +178,7 @@ export const sectionParameters = {
     max: 200e-12,
     default: 2e-12,
   }),
-  statorForm: choice<'by-law' | 'even' | 'following'>('turn', {
+  statorForm: choice<'by-law' | 'even' | 'following'>('stack', {
     label: 'Stator form',
     help: 'A sector of even radius, or one that follows the meshed rotor at the overhang: its far side stays small, which a law that begins slowly needs.',
     options: [

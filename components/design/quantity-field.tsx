@@ -84,6 +84,7 @@ export function QuantityField({
       <span className="relative">
         <Input
           inputMode="text"
+          placeholder={parameter.kind === 'optional-number' ? 'chosen' : undefined}
           spellCheck={false}
           className={`min-h-8 w-full rounded-[3px] border border-edge bg-white py-1 pl-2 text-right outline-offset-0 max-bench:min-h-11 data-invalid:border-2 data-invalid:border-bad ${bare && unit ? unitRoom[unit.length] : 'pr-2'}`}
         />
