@@ -7,6 +7,8 @@
 import { cellHeight, edgeGain, type Cell, type Strip } from './cross-section';
 
 export interface EdgeTable {
+  readonly rotorThickness: number;
+  readonly statorThickness: number;
   /** Height of the half cell, air gaps. */
   readonly height: number;
   /** One edge deep inside the other plate's reach. */
@@ -106,6 +108,8 @@ export function edgeTable(rotorThickness: number, statorThickness: number): Edge
   const walls = (x: number): number => height / (x + rotorSetback + statorSetback);
   const facing = chain('rotor', 'open', 'stator');
   return {
+    rotorThickness,
+    statorThickness,
     height,
     rotorDeep,
     statorDeep,

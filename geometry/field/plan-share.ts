@@ -7,7 +7,7 @@
 import type { EdgeTable } from './edge-table';
 import type { HubEdges } from './hub-edges';
 import { planCapacitance } from './plan-view';
-import { planWalls, type Polygon, type WallOptions } from './plan-walls';
+import { planWalls, type Polygon, type Wall, type WallOptions } from './plan-walls';
 import { openWedges, type EdgePlates } from './radial-edges';
 
 export interface PlanShape {
@@ -36,6 +36,56 @@ function turned(polygon: Polygon, angle: number): number[] {
     out.push(x * cos - y * sin, x * sin + y * cos);
   }
   return out;
+}
+
+/** rad. A wall this near a radial line lies on it. */
+const ON_LINE = 1e-3;
+
+/** Angle brought to −π … π. */
+function wrapped(angle: number): number {
+  return angle - 2 * Math.PI * Math.round(angle / (2 * Math.PI));
+}
+
+/**
+ * What the walls are at a mesh angle. A stack acts with its own potential, but beside a radial
+ * edge behind which the other stack's edge lies flush, both share the wall: its potential goes to
+ * one half as the edges close up, with the slowest mode of the strip between them.
+ */
+function wallsAt(
+  { plates, hubRadius }: PlanShape,
+  table: EdgeTable,
+  hub: HubEdges,
+  meshAngle: number,
+): (kind: 'rotor' | 'stator', x: number, y: number) => Wall {
+  const { airGap: g, rotorSector, statorSector, edgeOffset, cutoutRadius } = plates;
+  const leading = plates.rotorRadius(0);
+  // The strip beside a plate reaches from its face to the other's mid-plane.
+  const strip = (ownThickness: number): number =>
+    (2 * (table.height - ownThickness / 2) * g) / Math.PI;
+  const shared = (apart: number, reach: number): number =>
+    apart < 0 ? 0 : Math.exp(-apart / reach) / 2;
+  return (kind, x, y) => {
+    const radius = Math.hypot(x, y);
+    const bearing = Math.atan2(y, x);
+    if (kind === 'rotor') {
+      if (radius < hubRadius * 1.02) return { potential: 1, setback: hub.hubSetback * g };
+      const setback = table.rotorSetback * g;
+      const behind = rotorSector - meshAngle;
+      const trails = Math.abs(wrapped(bearing + behind)) < ON_LINE;
+      if (!trails || radius < cutoutRadius || behind > Math.PI / 2)
+        return { potential: 1, setback };
+      const apart = radius * Math.sin(behind) + edgeOffset;
+      return { potential: 1 - shared(apart, strip(table.rotorThickness)), setback };
+    }
+    const setback = table.statorSetback * g;
+    const short = statorSector - meshAngle;
+    const line = statorSector - (edgeOffset === 0 ? 0 : Math.asin(edgeOffset / radius));
+    const last = Math.abs(wrapped(bearing - line)) < ON_LINE;
+    if (!last || radius > leading || Math.abs(short) > Math.PI / 2)
+      return { potential: 0, setback };
+    const apart = radius * Math.sin(short) - edgeOffset;
+    return { potential: shared(apart, strip(table.statorThickness)), setback };
+  };
 }
 
 /** Chebyshev points of the second kind on an interval, kept away from the flush angles. */
@@ -67,20 +117,14 @@ export function planShare(
   hub: HubEdges,
   [from, to]: readonly [number, number],
 ): (meshAngle: number) => number {
-  const { plates, sweepRadius, hubRadius } = shape;
+  const { plates, sweepRadius } = shape;
   const { airGap: g, rotorSector, statorSector } = plates;
   const options: WallOptions = { shortest: g, longest: sweepRadius / 4, grading: 1.5 };
-  const setback = (kind: 'rotor' | 'stator', radius: number): number =>
-    g *
-    (kind === 'stator'
-      ? table.statorSetback
-      : radius < hubRadius * 1.02
-        ? hub.hubSetback
-        : table.rotorSetback);
   const flush = [0, rotorSector, statorSector, rotorSector + statorSector - 2 * Math.PI];
   const nodes = nodesBetween(from, to, flush, (CLEAR_OF_FLUSH * g) / sweepRadius);
   const values = nodes.map((angle) => {
-    const walls = planWalls(turned(shape.rotor, angle), shape.stator, setback, options);
+    const wallAt = wallsAt(shape, table, hub, angle);
+    const walls = planWalls(turned(shape.rotor, angle), shape.stator, wallAt, options);
     return planCapacitance(walls) - openWedges(plates, table, angle);
   });
   // Barycentric weights of the nodes as they came to lie.

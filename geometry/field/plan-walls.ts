@@ -89,22 +89,25 @@ export interface WallOptions {
   readonly grading: number;
 }
 
+/** How a stack bounds the open space: its potential, and how far behind its edge it acts, mm. */
+export type Wall = Pick<WallElement, 'potential' | 'setback'>;
+
 /**
  * @param rotor turned to its mesh angle
- * @param setback of a rotor or stator wall whose middle is at a radius from the shaft, mm
+ * @param wallAt what a wall is whose middle is at a point
  */
 export function planWalls(
   rotor: Polygon,
   stator: Polygon,
-  setback: (kind: 'rotor' | 'stator', radius: number) => number,
+  wallAt: (kind: 'rotor' | 'stator', x: number, y: number) => Wall,
   { shortest, longest, grading }: WallOptions,
 ): WallElement[] {
   const kinds = [
-    { kind: 'rotor', potential: 1, pieces: uncovered(rotor, stator) },
-    { kind: 'stator', potential: 0, pieces: uncovered(stator, rotor) },
+    { kind: 'rotor', pieces: uncovered(rotor, stator) },
+    { kind: 'stator', pieces: uncovered(stator, rotor) },
   ] as const;
   const elements: WallElement[] = [];
-  kinds.forEach(({ kind, potential, pieces }, k) => {
+  kinds.forEach(({ kind, pieces }, k) => {
     const others = kinds[1 - k]!.pieces;
     const split = ({ ax, ay, bx, by }: Piece): void => {
       const length = Math.hypot(bx - ax, by - ay);
@@ -118,14 +121,7 @@ export function planWalls(
         split({ ax: mx, ay: my, bx, by });
         return;
       }
-      elements.push({
-        ax,
-        ay,
-        bx,
-        by,
-        potential,
-        setback: setback(kind, Math.hypot(mx, my)),
-      });
+      elements.push({ ax, ay, bx, by, ...wallAt(kind, mx, my) });
     };
     pieces.forEach(split);
   });
