@@ -3,7 +3,14 @@
  * so that two machines can be compared. Nothing here passes or fails.
  */
 
-import { derive, defaultDesign, defaultSection, type Derived, type Design } from '../geometry';
+import {
+  createEdgeCache,
+  derive,
+  defaultDesign,
+  defaultSection,
+  type Derived,
+  type Design,
+} from '../geometry';
 import { cutFiles } from '../geometry/files';
 import { dxfOf } from '../geometry/files/dxf';
 import { placeInRow } from '../geometry/files/placement';
@@ -60,24 +67,32 @@ function row(what: string, goal: string, run: () => unknown): Row {
   return { what, ms: ms.toFixed(2), ratio: (ms / unit).toFixed(3), goal };
 }
 
+/** Edges solved once, as a worker keeps them. */
+const cache = createEdgeCache();
 const usual = defaultDesign();
 const usualDerived = derivedOf(usual);
 
 console.log(`yardstick ${unit.toFixed(2)} ms, medians of ${RUNS} runs`);
 console.table([
-  row('derive and back-check, 29 plates', '10 ms, aim 4', () => derive(usual)),
+  row('edges alone, 29 plates: inverse and back-check', '16 ms, aim 8', () =>
+    derive(usual, { model: 'edges', cache }),
+  ),
+  row('the same when gap or sheet is new', '', () => derive(usual, { model: 'edges' })),
+  row('whole field: inverse, plan view and back-check', '200 ms, aim 60', () =>
+    derive(usual, { cache }),
+  ),
   row('one DXF', '50 ms', () => dxfOf(placeInRow([usualDerived.sections[0]!.rotor]))),
   row('all files of a design', '', () => cutFiles('bench', usualDerived)),
 ]);
 
-console.log('growth with plates (one section) and with sections (29 plates each)');
+console.log('whole field: growth with plates (one section) and with sections (29 plates each)');
 console.table([
   ...[5, 15, 29, 61, 101].map((plates) =>
-    row(`1 section, ${plates} plates`, '', () => derive(designWith(1, plates))),
+    row(`1 section, ${plates} plates`, '', () => derive(designWith(1, plates), { cache })),
   ),
   ...[1, 2, 3, 4].map((sections) =>
     row(`${sections} section${sections > 1 ? 's' : ''}, 29 plates`, '', () =>
-      derive(designWith(sections, 29)),
+      derive(designWith(sections, 29), { cache }),
     ),
   ),
 ]);

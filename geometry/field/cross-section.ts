@@ -15,12 +15,6 @@
 /** Metal of a strip: rotor below, stator above, both (the overlap) or neither. */
 export type StripKind = 'rotor' | 'stator' | 'both' | 'open';
 
-export interface Strip {
-  readonly kind: StripKind;
-  /** Along x; Infinity for an outermost strip that runs on. */
-  readonly length: number;
-}
-
 /** Heights of the half cell, all in the same unit. */
 export interface Cell {
   readonly airGap: number;
@@ -34,11 +28,6 @@ export function cellHeight({ airGap, rotorThickness, statorThickness }: Cell): n
 
 /** Where a strip that does not run on ends: at a wall of this potential. */
 export type Wall = 0 | 1 | null;
-
-export interface CrossSection {
-  /** Capacitance per unit length of edge over ε, without the area term of the overlap strips. */
-  readonly excess: number;
-}
 
 interface Field {
   readonly z0: number;
@@ -80,9 +69,12 @@ function fieldOf(cell: Cell, kind: StripKind, fineness: number): Field {
   return { z0, z1, kappa, phase, scale, base, slope: kind === 'both' ? -1 / h : 0 };
 }
 
+/** Wave numbers this near are taken as one: their difference is no divisor. */
+const SAME_WAVE = 1e-7;
+
 /** ∫ cos(az + p) dz from z0 to z1. */
 function integral(a: number, p: number, z0: number, z1: number): number {
-  if (Math.abs(a) < 1e-12) return Math.cos(p) * (z1 - z0);
+  if (Math.abs(a) < SAME_WAVE) return Math.cos((a * (z0 + z1)) / 2 + p) * (z1 - z0);
   return (Math.sin(a * z1 + p) - Math.sin(a * z0 + p)) / a;
 }
 
@@ -101,18 +93,48 @@ interface Projection {
   readonly face: Float64Array;
 }
 
+/** Sine and cosine of each mode's argument at a height. */
+function argumentsAt({ kappa, phase }: Field, z: number): [Float64Array, Float64Array] {
+  const sine = new Float64Array(kappa.length);
+  const cosine = new Float64Array(kappa.length);
+  for (let k = 0; k < kappa.length; k++) {
+    const argument = kappa[k]! * z + phase[k]!;
+    sine[k] = Math.sin(argument);
+    cosine[k] = Math.cos(argument);
+  }
+  return [sine, cosine];
+}
+
 function project(wide: Field, narrow: Field): Projection {
   const rows = wide.kappa.length;
   const columns = narrow.kappa.length;
   const matrix = new Float64Array(rows * columns);
   const face = new Float64Array(rows);
   const { z0, z1 } = narrow;
+  const [ws0, wc0] = argumentsAt(wide, z0);
+  const [ws1, wc1] = argumentsAt(wide, z1);
+  const [ns0, nc0] = argumentsAt(narrow, z0);
+  const [ns1, nc1] = argumentsAt(narrow, z1);
   for (let k = 0; k < rows; k++) {
     const [a, p, sa] = [wide.kappa[k]!, wide.phase[k]!, wide.scale[k]!];
     for (let j = 0; j < columns; j++) {
-      const [b, q, sb] = [narrow.kappa[j]!, narrow.phase[j]!, narrow.scale[j]!];
-      matrix[k * columns + j] =
-        (sa * sb * (integral(a - b, p - q, z0, z1) + integral(a + b, p + q, z0, z1))) / 2;
+      const b = narrow.kappa[j]!;
+      // ∫ cos A·cos B by sines of A ± B at both ends.
+      const crossed1 = wc1[k]! * ns1[j]!;
+      const crossed0 = wc0[k]! * ns0[j]!;
+      const straight1 = ws1[k]! * nc1[j]!;
+      const straight0 = ws0[k]! * nc0[j]!;
+      const sum = a + b;
+      const difference = a - b;
+      const together =
+        sum < SAME_WAVE
+          ? integral(sum, p + narrow.phase[j]!, z0, z1)
+          : (straight1 + crossed1 - straight0 - crossed0) / sum;
+      const apart =
+        Math.abs(difference) < SAME_WAVE
+          ? integral(difference, p - narrow.phase[j]!, z0, z1)
+          : (straight1 - crossed1 - straight0 + crossed0) / difference;
+      matrix[k * columns + j] = (sa * narrow.scale[j]! * (together + apart)) / 2;
     }
     // Over the opening: the narrow strip's particular solution; on the faces: the metal's own.
     const offset = narrow.base - narrow.slope * z0;
@@ -133,32 +155,67 @@ function ends(kappa: number, length: number): { own: number; cross: number } {
   return { own: kappa / Math.tanh(x), cross: kappa / Math.sinh(x) };
 }
 
-/** Adds the energy of an affine form (rowsᵀ·unknowns + constants) into matrix and right side. */
+/** A quadratic form in the unknowns: uᵀ·matrix·u − 2·rightᵀ·u + constant. */
 class Quadratic {
-  readonly matrix: Float64Array;
-  readonly right: Float64Array;
-  constant = 0;
+  constructor(
+    readonly size: number,
+    readonly matrix = new Float64Array(size * size),
+    readonly right = new Float64Array(size),
+    public constant = 0,
+  ) {}
 
-  constructor(readonly size: number) {
-    this.matrix = new Float64Array(size * size);
-    this.right = new Float64Array(size);
+  copy(): Quadratic {
+    return new Quadratic(this.size, this.matrix.slice(), this.right.slice(), this.constant);
   }
 
-  /** weight · f·g, each f(u) = Σ row[j]·u[from + j] + constant. */
-  add(weight: number, f: Affine, g: Affine): void {
-    this.constant += weight * f.constant * g.constant;
-    for (let i = 0; i < f.row.length; i++) {
-      const fi = f.row[i]!;
-      this.right[f.from + i]! -= (weight * fi * g.constant) / 2;
-      for (let j = 0; j < g.row.length; j++) {
-        const half = (weight * fi * g.row[j]!) / 2;
-        this.matrix[(f.from + i) * this.size + g.from + j]! += half;
-        this.matrix[(g.from + j) * this.size + f.from + i]! += half;
+  /** weight · f², f(u) = Σ row[j]·u[from + j] + constant. */
+  addSquare(weight: number, { from, row, constant }: Affine): void {
+    this.constant += weight * constant * constant;
+    for (let i = 0; i < row.length; i++) {
+      const scaled = weight * row[i]!;
+      if (scaled === 0) continue;
+      this.right[from + i]! -= scaled * constant;
+      const at = (from + i) * this.size + from;
+      for (let j = 0; j <= i; j++) this.matrix[at + j]! += scaled * row[j]!;
+    }
+  }
+
+  /** 2·weight · f·g of forms in different unknowns, those of f before those of g. */
+  addProduct(weight: number, f: Affine, g: Affine): void {
+    this.constant += 2 * weight * f.constant * g.constant;
+    for (let i = 0; i < f.row.length; i++)
+      this.right[f.from + i]! -= weight * f.row[i]! * g.constant;
+    for (let j = 0; j < g.row.length; j++) {
+      const scaled = weight * g.row[j]!;
+      if (scaled === 0) continue;
+      this.right[g.from + j]! -= scaled * f.constant;
+      const at = (g.from + j) * this.size + f.from;
+      for (let i = 0; i < f.row.length; i++) this.matrix[at + i]! += scaled * f.row[i]!;
+    }
+  }
+
+  /** Its least value, by Cholesky's method on the lower half. The form is used up. */
+  least(): number {
+    const { matrix: m, right: x, size: n } = this;
+    for (let i = 0; i < n; i++) {
+      const row = i * n;
+      for (let j = 0; j <= i; j++) {
+        const other = j * n;
+        let sum = m[row + j]!;
+        for (let k = 0; k < j; k++) sum -= m[row + k]! * m[other + k]!;
+        m[row + j] = i === j ? Math.sqrt(Math.max(sum, Number.MIN_VALUE)) : sum / m[other + j]!;
       }
     }
-    for (let j = 0; j < g.row.length; j++) {
-      this.right[g.from + j]! -= (weight * g.row[j]! * f.constant) / 2;
+    // With L·y = right the least value is constant − y·y.
+    let least = this.constant;
+    for (let i = 0; i < n; i++) {
+      const row = i * n;
+      let sum = x[i]!;
+      for (let k = 0; k < i; k++) sum -= m[row + k]! * x[k]!;
+      x[i] = sum / m[row + i]!;
+      least -= x[i]! * x[i]!;
     }
+    return least;
   }
 }
 
@@ -168,50 +225,28 @@ interface Affine {
   readonly constant: number;
 }
 
-/** Solves a symmetric positive system in place by Cholesky's method. */
-function solve(matrix: Float64Array, right: Float64Array): Float64Array {
-  const n = right.length;
-  for (let j = 0; j < n; j++) {
-    for (let i = j; i < n; i++) {
-      let sum = matrix[i * n + j]!;
-      for (let k = 0; k < j; k++) sum -= matrix[i * n + k]! * matrix[j * n + k]!;
-      matrix[i * n + j] = i === j ? Math.sqrt(Math.max(sum, 1e-300)) : sum / matrix[j * n + j]!;
-    }
-  }
-  const x = right.slice();
-  for (let i = 0; i < n; i++) {
-    for (let k = 0; k < i; k++) x[i]! -= matrix[i * n + k]! * x[k]!;
-    x[i]! /= matrix[i * n + i]!;
-  }
-  for (let i = n - 1; i >= 0; i--) {
-    for (let k = i + 1; k < n; k++) x[i]! -= matrix[k * n + i]! * x[k]!;
-    x[i]! /= matrix[i * n + i]!;
-  }
-  return x;
-}
-
 /**
- * Solves a chain of strips.
- * @param strips from left to right; neighbours differ
+ * A chain of strips at a number of modes, made once and then solved for any lengths.
+ * @param kinds from left to right; neighbours differ
  * @param walls potentials of full-height walls at the outer ends, null where a strip runs on
  * @param fineness multiplies the number of modes
+ * @returns capacitance per unit length of edge over ε, without the area term of overlap strips,
+ *   for the lengths of the strips
  */
-export function solveChain(
+export function prepareChain(
   cell: Cell,
-  strips: readonly Strip[],
+  kinds: readonly StripKind[],
   walls: readonly [Wall, Wall],
   fineness: number,
-): CrossSection {
-  const fields = strips.map(({ kind }) => fieldOf(cell, kind, fineness));
+): (lengths: readonly number[]) => number {
+  const fields = kinds.map((kind) => fieldOf(cell, kind, fineness));
   const narrowLeft = fields
     .slice(1)
     .map((right, i) => fields[i]!.z1 - fields[i]!.z0 <= right.z1 - right.z0);
   const counts = narrowLeft.map((left, i) => fields[left ? i : i + 1]!.kappa.length);
   const from = counts.map((_, i) => counts.slice(0, i).reduce((a, b) => a + b, 0));
-  const size = counts.reduce((a, b) => a + b, 0);
-  const quadratic = new Quadratic(size);
 
-  /** Coefficient of mode k of strip s at interface i. */
+  /** Coefficients of the modes of strip s at interface i. */
   const coefficients = (s: number, i: number): Affine[] => {
     const own = fields[s]!;
     const isNarrow = narrowLeft[i] ? s === i : s === i + 1;
@@ -223,8 +258,7 @@ export function solveChain(
         return { from: from[i]!, row, constant: 0 };
       });
     }
-    const narrow = fields[narrowLeft[i] ? i : i + 1]!;
-    const { matrix, face } = project(own, narrow);
+    const { matrix, face } = project(own, fields[narrowLeft[i] ? i : i + 1]!);
     return own.kappa.map((_, k) => ({
       from: from[i]!,
       row: matrix.subarray(k * count, (k + 1) * count),
@@ -246,37 +280,46 @@ export function solveChain(
     }));
   };
 
-  const last = strips.length - 1;
-  strips.forEach((strip, s) => {
-    const left = s === 0 ? atWall(s, walls[0]) : coefficients(s, s - 1);
-    const right = s === last ? atWall(s, walls[1]) : coefficients(s, s);
-    fields[s]!.kappa.forEach((kappa, k) => {
-      const runsOn = left === null || right === null;
-      const { own, cross } = ends(kappa, runsOn ? Infinity : strip.length);
-      if (left) quadratic.add(own, left[k]!, left[k]!);
-      if (right) quadratic.add(own, right[k]!, right[k]!);
-      if (left && right) quadratic.add(-2 * cross, left[k]!, right[k]!);
-    });
+  const last = kinds.length - 1;
+  const sides = fields.map((_, s) => ({
+    left: s === 0 ? atWall(s, walls[0]) : coefficients(s, s - 1),
+    right: s === last ? atWall(s, walls[1]) : coefficients(s, s),
+  }));
+  // Strips that run on have no length to change.
+  const always = new Quadratic(counts.reduce((a, b) => a + b, 0));
+  sides.forEach(({ left, right }, s) => {
+    const only = left === null ? right : right === null ? left : null;
+    only?.forEach((form, k) => always.addSquare(fields[s]!.kappa[k]!, form));
   });
 
-  const unknowns = solve(quadratic.matrix, quadratic.right);
-  let energy = quadratic.constant;
-  unknowns.forEach((value, i) => (energy -= quadratic.right[i]! * value));
-
-  return { excess: energy };
+  return (lengths) => {
+    const quadratic = always.copy();
+    sides.forEach(({ left, right }, s) => {
+      if (!left || !right) return;
+      fields[s]!.kappa.forEach((kappa, k) => {
+        const { own, cross } = ends(kappa, lengths[s]!);
+        quadratic.addSquare(own, left[k]!);
+        quadratic.addSquare(own, right[k]!);
+        quadratic.addProduct(-cross, left[k]!, right[k]!);
+      });
+    });
+    return quadratic.least();
+  };
 }
 
 /**
- * {@link solveChain} at two finenesses, extrapolated: the error goes with the square of the
+ * {@link prepareChain} at two finenesses, extrapolated: the error goes with the square of the
  * number of modes.
- * @returns capacitance per unit length of edge over ε, without the area term
  */
 export function edgeGain(
   cell: Cell,
-  strips: readonly Strip[],
+  kinds: readonly StripKind[],
   walls: readonly [Wall, Wall] = [null, null],
-): number {
-  const coarse = solveChain(cell, strips, walls, 1).excess;
-  const fine = solveChain(cell, strips, walls, 2).excess;
-  return fine + (fine - coarse) / 3;
+): (lengths: readonly number[]) => number {
+  const coarse = prepareChain(cell, kinds, walls, 1);
+  const fine = prepareChain(cell, kinds, walls, 2);
+  return (lengths) => {
+    const at = fine(lengths);
+    return at + (at - coarse(lengths)) / 3;
+  };
 }

@@ -4,7 +4,7 @@
  * per gap, over ε, without the area term of the overlap.
  */
 
-import { cellHeight, edgeGain, type Cell, type Strip } from './cross-section';
+import { cellHeight, edgeGain, type Cell, type StripKind } from './cross-section';
 
 export interface EdgeTable {
   readonly rotorThickness: number;
@@ -29,7 +29,7 @@ export interface EdgeTable {
 
 /** Beyond this distance the edges no longer see each other: the fields fall as e^(−πx/height). */
 const FAR = 9;
-const NODES = 20;
+const NODES = 16;
 
 /**
  * A function of x ≥ 0 by cubics through nodes spaced evenly in √x, since it changes fastest
@@ -67,44 +67,17 @@ export function edgeTable(rotorThickness: number, statorThickness: number): Edge
   const cell: Cell = { airGap: 1, rotorThickness, statorThickness };
   const height = cellHeight(cell);
   const on = Infinity;
-  const rotorDeep = edgeGain(cell, [
-    { kind: 'both', length: on },
-    { kind: 'stator', length: on },
-  ]);
-  const statorDeep = edgeGain(cell, [
-    { kind: 'rotor', length: on },
-    { kind: 'both', length: on },
-  ]);
+  const rotorDeep = edgeGain(cell, ['both', 'stator'])([on, on]);
+  const statorDeep = edgeGain(cell, ['rotor', 'both'])([on, on]);
   const reach = 4 * height;
   const rotorSetback =
-    height /
-      edgeGain(
-        cell,
-        [
-          { kind: 'rotor', length: on },
-          { kind: 'open', length: reach },
-        ],
-        [null, 0],
-      ) -
-    reach;
+    height / edgeGain(cell, ['rotor', 'open'], [null, 0])([on, reach]) - reach;
   const statorSetback =
-    height /
-      edgeGain(
-        cell,
-        [
-          { kind: 'open', length: reach },
-          { kind: 'stator', length: on },
-        ],
-        [1, null],
-      ) -
-    reach;
-  const chain =
-    (left: Strip['kind'], middle: Strip['kind'], right: Strip['kind']) => (x: number) =>
-      edgeGain(cell, [
-        { kind: left, length: on },
-        { kind: middle, length: Math.max(x, TOUCHING) },
-        { kind: right, length: on },
-      ]);
+    height / edgeGain(cell, ['open', 'stator'], [1, null])([reach, on]) - reach;
+  const chain = (left: StripKind, middle: StripKind, right: StripKind) => {
+    const gain = edgeGain(cell, [left, middle, right]);
+    return (x: number): number => gain([on, Math.max(x, TOUCHING), on]);
+  };
   const walls = (x: number): number => height / (x + rotorSetback + statorSetback);
   const facing = chain('rotor', 'open', 'stator');
   return {

@@ -23,39 +23,21 @@ export function hubEdges(
   cutoutToHub: number,
   statorSetback: number,
 ): HubEdges {
-  const on = Infinity;
   const height = cellHeight(cell);
   const proud = Math.max(hubOverSpacer, 1e-4);
   const reach = 4 * height;
-  const hubSetback =
-    height /
-      edgeGain(
-        cell,
-        [
-          { kind: 'rotor', length: proud },
-          { kind: 'open', length: reach },
-        ],
-        [1, 0],
-      ) -
-    reach;
+  const hubSetback = height / edgeGain(cell, ['rotor', 'open'], [1, 0])([proud, reach]) - reach;
   const facing = edgeGain(
     cell,
-    [
-      { kind: 'rotor', length: proud },
-      { kind: 'open', length: cutoutToHub },
-      { kind: 'stator', length: on },
-    ],
+    ['rotor', 'open', 'stator'],
     [1, null],
-  );
+  )([proud, cutoutToHub, Infinity]);
   return {
     cutoutUnderBlade: edgeGain(
       cell,
-      [
-        { kind: 'both', length: on },
-        { kind: 'rotor', length: proud + cutoutToHub },
-      ],
+      ['both', 'rotor'],
       [null, 1],
-    ),
+    )([Infinity, proud + cutoutToHub]),
     besideBlade: facing - height / (cutoutToHub + hubSetback + statorSetback),
     hubSetback,
   };

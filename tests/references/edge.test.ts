@@ -2,7 +2,7 @@
  * Gains of plate edges from the kernel's cross-section solver against values from outside.
  */
 import { describe, expect, test } from 'vitest';
-import { solveChain } from '../../geometry/field/cross-section';
+import { prepareChain } from '../../geometry/field/cross-section';
 import { edgeTable } from '../../geometry/field/edge-table';
 
 /**
@@ -78,16 +78,12 @@ test('the tail of opposed edges is that of walls set back by 0.81 of a gap toget
 test('more modes change the extrapolated value by parts in a hundred thousand', () => {
   const cell = { airGap: 1, rotorThickness: 1.6, statorThickness: 0.8 };
   const at = (fineness: number): number =>
-    solveChain(
+    prepareChain(
       cell,
-      [
-        { kind: 'rotor', length: Infinity },
-        { kind: 'open', length: 1.3 },
-        { kind: 'stator', length: Infinity },
-      ],
+      ['rotor', 'open', 'stator'],
       [null, null],
       fineness,
-    ).excess;
+    )([Infinity, 1.3, Infinity]);
   const extrapolated = (coarse: number): number =>
     at(2 * coarse) + (at(2 * coarse) - at(coarse)) / 3;
   expect(Math.abs(extrapolated(1) / extrapolated(4) - 1)).toBeLessThan(5e-5);
