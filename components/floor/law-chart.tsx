@@ -1,17 +1,15 @@
 'use client';
 
-import 'uplot/dist/uPlot.min.css';
 import { useMemo, useRef } from 'react';
 import type { SectionResult } from '@/geometry';
 import { AngleCursor } from './angle-cursor';
 import type { AngleStore } from './angle-store';
 import { INSET_LEFT, INSET_RIGHT } from './insets';
 import { LawLegend } from './law-legend';
-import { errorPlot, lawPlot } from './law-plots';
+import { ErrorPlot, LawPlot } from './law-plots';
 import { lawSeries } from './law-series';
 import { LawTable } from './law-table';
 import { useAngleDrag } from './use-angle-drag';
-import { usePlot } from './use-plot';
 
 /**
  * The law over the travel: capacitance asked and achieved, the error in a strip below, and the
@@ -19,14 +17,9 @@ import { usePlot } from './use-plot';
  */
 export function LawChart({ section, store }: { section: SectionResult; store: AngleStore }) {
   const track = useRef<HTMLDivElement>(null);
-  const lawHost = useRef<HTMLDivElement>(null);
-  const errorHost = useRef<HTMLDivElement>(null);
   const travel = section.law.angle.at(-1)!;
   const series = useMemo(() => lawSeries(section), [section]);
   const drag = useAngleDrag(store, travel, track);
-
-  usePlot(lawHost, lawPlot, series);
-  usePlot(errorHost, errorPlot, series);
 
   return (
     <section aria-label="Law chart" className="bg-panel" data-part="law-chart">
@@ -35,8 +28,10 @@ export function LawChart({ section, store }: { section: SectionResult; store: An
         {...drag}
       >
         <div aria-hidden="true">
-          <div className="relative">
-            <div ref={lawHost} className="h-40" />
+          <div className="relative flow-root">
+            <div className="relative mt-6 mb-1.5 h-32">
+              <LawPlot series={series} />
+            </div>
             <span className="absolute top-1 left-2 text-small text-brass-dark">
               {series.capacitance.unit}
             </span>
@@ -46,8 +41,10 @@ export function LawChart({ section, store }: { section: SectionResult; store: An
               </span>
             )}
           </div>
-          <div className="relative border-t border-line">
-            <div ref={errorHost} className="h-20" />
+          <div className="relative flow-root border-t border-line">
+            <div className="relative mt-6 mb-1.5 h-12">
+              <ErrorPlot series={series} />
+            </div>
             <span className="absolute top-1 left-2 text-small text-bad">error, % of range</span>
           </div>
         </div>
