@@ -59,7 +59,7 @@ for (let i = 0; i < KEYSTROKES; i++) times.push(await keystroke(page, `0.5${i + 
 console.table([
   { what: 'scripts of the list of designs, kB', value: (list / 1000).toFixed(1), goal: '170' },
   {
-    what: 'scripts of the design screen with 3D and worker, kB',
+    what: 'scripts of the design screen, 3D included, the kernel in its worker not, kB',
     value: (screen / 1000).toFixed(1),
     goal: '420',
   },

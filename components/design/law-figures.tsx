@@ -36,7 +36,11 @@ export function LawFigures({ section }: { section: SectionResult }) {
           What these figures leave out
         </summary>
         <ul className="ml-4 flex list-disc flex-col gap-1 pt-1">
-          <li>The two end faces of the stack, which count most with few plates.</li>
+          <li>
+            The two end faces of the stack. They add most with the plates open and with few
+            plates: a third of the open capacitance in the reference stack of three rotor
+            plates.
+          </li>
           <li>Posts, beyond the ears that carry them.</li>
           <li>
             Insulators and frame beyond the allowance, which is yours to set and to measure.
