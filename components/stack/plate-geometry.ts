@@ -19,7 +19,11 @@ function reach(contour: Contour): number {
 }
 
 /** One plate as a body with its middle at z = 0, mm. The caller disposes of it. */
-export function plateGeometry({ outside, holes, thickness }: Plate): BufferGeometry {
+export function plateGeometry({
+  outside,
+  holes,
+  thickness,
+}: Pick<Plate, 'outside' | 'holes' | 'thickness'>): BufferGeometry {
   const sagitta = CHORD_SHARE * reach(outside);
   const rim = corners(outside, sagitta);
   // Holes run the other way round, so that their walls, too, face away from the metal.

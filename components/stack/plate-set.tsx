@@ -1,12 +1,15 @@
 'use client';
 
-import { useThree } from '@react-three/fiber';
-import { useEffect, useLayoutEffect, useMemo, useRef } from 'react';
-import { Matrix4, type InstancedMesh } from 'three';
+import { useMemo } from 'react';
+import type { Matrix4 } from 'three';
 import type { Plate, StackPlate } from '@/geometry';
+import { BodySet } from './body-set';
 import { plateGeometry } from './plate-geometry';
 
-/** All plates of one role in one section: one body, drawn once for each place. */
+const place = (matrix: Matrix4, { z }: StackPlate): void =>
+  void matrix.makeTranslation(0, 0, z);
+
+/** All plates of one role in one section. */
 export function PlateSet({
   plate,
   places,
@@ -16,29 +19,6 @@ export function PlateSet({
   places: readonly StackPlate[];
   colour: string;
 }) {
-  const mesh = useRef<InstancedMesh>(null);
-  const invalidate = useThree((state) => state.invalidate);
   const geometry = useMemo(() => plateGeometry(plate), [plate]);
-  useEffect(() => () => geometry.dispose(), [geometry]);
-
-  useLayoutEffect(() => {
-    const instances = mesh.current;
-    if (!instances) return;
-    const matrix = new Matrix4();
-    places.forEach(({ z }, i) => instances.setMatrixAt(i, matrix.makeTranslation(0, 0, z)));
-    instances.instanceMatrix.needsUpdate = true;
-    instances.computeBoundingSphere();
-    invalidate();
-  }, [places, geometry, invalidate]);
-
-  return (
-    <instancedMesh
-      key={`${geometry.uuid} ${places.length}`}
-      ref={mesh}
-      args={[geometry, undefined, places.length]}
-      userData={{ plates: places.length }}
-    >
-      <meshLambertMaterial color={colour} />
-    </instancedMesh>
-  );
+  return <BodySet geometry={geometry} places={places} place={place} colour={colour} />;
 }

@@ -1,34 +1,25 @@
 'use client';
 
-import { useThree } from '@react-three/fiber';
-import { useEffect, useLayoutEffect, useMemo, useRef } from 'react';
-import { CylinderGeometry, Matrix4, type InstancedMesh } from 'three';
+import { useMemo } from 'react';
+import type { Matrix4 } from 'three';
+import { BodySet } from './body-set';
+import { plateGeometry } from './plate-geometry';
 import type { Rod } from './rods';
 
-/** Round bars along the shaft: one cylinder of radius 1 and length 1, stretched for each. */
+function place(matrix: Matrix4, { x, y, radius, from, to }: Rod): void {
+  matrix.makeScale(radius, radius, to - from).setPosition(x, y, (from + to) / 2);
+}
+
+/** Round bars along the shaft: one of radius 1 and length 1, stretched for each. */
 export function RodSet({ rods, colour }: { rods: readonly Rod[]; colour: string }) {
-  const mesh = useRef<InstancedMesh>(null);
-  const invalidate = useThree((state) => state.invalidate);
-  const geometry = useMemo(() => new CylinderGeometry(1, 1, 1, 40).rotateX(Math.PI / 2), []);
-  useEffect(() => () => geometry.dispose(), [geometry]);
-
-  useLayoutEffect(() => {
-    const instances = mesh.current;
-    if (!instances) return;
-    const matrix = new Matrix4();
-    rods.forEach(({ x, y, radius, from, to }, i) => {
-      matrix.makeScale(radius, radius, to - from).setPosition(x, y, (from + to) / 2);
-      instances.setMatrixAt(i, matrix);
-    });
-    instances.instanceMatrix.needsUpdate = true;
-    instances.computeBoundingSphere();
-    invalidate();
-  }, [rods, geometry, invalidate]);
-
-  if (rods.length === 0) return null;
-  return (
-    <instancedMesh key={rods.length} ref={mesh} args={[geometry, undefined, rods.length]}>
-      <meshLambertMaterial color={colour} />
-    </instancedMesh>
+  const geometry = useMemo(
+    () =>
+      plateGeometry({
+        outside: { kind: 'circle', x: 0, y: 0, radius: 1 },
+        holes: [],
+        thickness: 1,
+      }),
+    [],
   );
+  return <BodySet geometry={geometry} places={rods} place={place} colour={colour} />;
 }
