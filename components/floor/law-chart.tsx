@@ -1,6 +1,7 @@
 'use client';
 
-import { useMemo, useRef } from 'react';
+import dynamic from 'next/dynamic';
+import { useMemo, useRef, useState } from 'react';
 import type { SectionResult } from '@/geometry';
 import { AngleCursor } from './angle-cursor';
 import type { AngleStore } from './angle-store';
@@ -8,8 +9,9 @@ import { INSET_LEFT, INSET_RIGHT } from './insets';
 import { LawLegend } from './law-legend';
 import { ErrorPlot, LawPlot } from './law-plots';
 import { lawSeries } from './law-series';
-import { LawTable } from './law-table';
 import { useAngleDrag } from './use-angle-drag';
+
+const LawTable = dynamic(() => import('./law-table'), { ssr: false });
 
 /**
  * The law over the travel: capacitance asked and achieved, the error in a strip below, and the
@@ -17,6 +19,7 @@ import { useAngleDrag } from './use-angle-drag';
  */
 export function LawChart({ section, store }: { section: SectionResult; store: AngleStore }) {
   const track = useRef<HTMLDivElement>(null);
+  const [opened, setOpened] = useState(false);
   const travel = section.law.angle.at(-1)!;
   const series = useMemo(() => lawSeries(section), [section]);
   const drag = useAngleDrag(store, travel, track);
@@ -57,7 +60,15 @@ export function LawChart({ section, store }: { section: SectionResult; store: An
         </div>
       </div>
       <LawLegend section={section} series={series} />
-      <LawTable section={section} series={series} />
+      <details
+        className="border-t border-line"
+        onToggle={(event) => setOpened(event.currentTarget.open)}
+      >
+        <summary className="cursor-pointer px-3 py-2.5 text-small font-medium max-bench:py-3.5">
+          The chart in figures, every 10°
+        </summary>
+        {opened && <LawTable section={section} series={series} />}
+      </details>
     </section>
   );
 }

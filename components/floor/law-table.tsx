@@ -7,7 +7,13 @@ import type { LawSeries } from './law-series';
 const EVERY = 10;
 
 /** The chart in figures, every 10° and at the end of the travel; in the rests nothing is asked. */
-export function LawTable({ section, series }: { section: SectionResult; series: LawSeries }) {
+export default function LawTable({
+  section,
+  series,
+}: {
+  section: SectionResult;
+  series: LawSeries;
+}) {
   const { law, inductance, totalMax, totalMin } = section;
   const { capacitance, frequency } = series;
   const travel = toDegrees(law.angle.at(-1)!);
@@ -16,58 +22,53 @@ export function LawTable({ section, series }: { section: SectionResult; series: 
   rows.push(travel);
 
   return (
-    <details className="border-t border-line">
-      <summary className="cursor-pointer px-3 py-2.5 text-small font-medium max-bench:py-3.5">
-        The chart in figures, every {EVERY}°
-      </summary>
-      <div
-        role="region"
-        aria-label="The chart in figures"
-        tabIndex={0}
-        className="max-h-72 overflow-auto px-3 pb-3"
-      >
-        <table className="dense w-full max-w-2xl text-right text-small tabular-nums">
-          <thead className="sticky top-0 bg-panel">
-            <tr className="border-b border-line">
-              {[
-                'Shaft angle, °',
-                `Asked, ${capacitance.unit}`,
-                `Achieved, ${capacitance.unit}`,
-                `Area alone, ${capacitance.unit}`,
-                'Error, % of range',
-                ...(frequency ? [`Tunes to, ${frequency.unit}`] : []),
-              ].map((title) => (
-                <th key={title} scope="col" className="py-1.5 pl-3 font-medium first:pl-0">
-                  {title}
+    <div
+      role="region"
+      aria-label="The chart in figures"
+      tabIndex={0}
+      className="max-h-72 overflow-auto px-3 pb-3"
+    >
+      <table className="dense w-full max-w-2xl text-right text-small tabular-nums">
+        <thead className="sticky top-0 bg-panel">
+          <tr className="border-b border-line">
+            {[
+              'Shaft angle, °',
+              `Asked, ${capacitance.unit}`,
+              `Achieved, ${capacitance.unit}`,
+              `Area alone, ${capacitance.unit}`,
+              'Error, % of range',
+              ...(frequency ? [`Tunes to, ${frequency.unit}`] : []),
+            ].map((title) => (
+              <th key={title} scope="col" className="py-1.5 pl-3 font-medium first:pl-0">
+                {title}
+              </th>
+            ))}
+          </tr>
+        </thead>
+        <tbody>
+          {rows.map((degree) => {
+            const angle = toRadians(degree);
+            const achieved = valueAt(law.angle, law.achieved, angle);
+            const target = valueAt(law.angle, law.target, angle);
+            const error = valueAt(law.angle, law.error, angle);
+            return (
+              <tr key={degree} className="border-b border-line/60">
+                <th scope="row" className="py-1 font-normal">
+                  {Number(degree.toFixed(1))}
                 </th>
-              ))}
-            </tr>
-          </thead>
-          <tbody>
-            {rows.map((degree) => {
-              const angle = toRadians(degree);
-              const achieved = valueAt(law.angle, law.achieved, angle);
-              const target = valueAt(law.angle, law.target, angle);
-              const error = valueAt(law.angle, law.error, angle);
-              return (
-                <tr key={degree} className="border-b border-line/60">
-                  <th scope="row" className="py-1 font-normal">
-                    {Number(degree.toFixed(1))}
-                  </th>
-                  <td>{target === null ? '–' : capacitance.write(target)}</td>
-                  <td>{capacitance.write(achieved)}</td>
-                  <td>{capacitance.write(valueAt(law.angle, law.areaOnly, angle))}</td>
-                  <td>{error === null ? '–' : percent(error / (totalMax - totalMin))}</td>
-                  {frequency && (
-                    <td>{frequency.write(resonantFrequency(achieved, inductance!))}</td>
-                  )}
-                </tr>
-              );
-            })}
-          </tbody>
-        </table>
-      </div>
-    </details>
+                <td>{target === null ? '–' : capacitance.write(target)}</td>
+                <td>{capacitance.write(achieved)}</td>
+                <td>{capacitance.write(valueAt(law.angle, law.areaOnly, angle))}</td>
+                <td>{error === null ? '–' : percent(error / (totalMax - totalMin))}</td>
+                {frequency && (
+                  <td>{frequency.write(resonantFrequency(achieved, inductance!))}</td>
+                )}
+              </tr>
+            );
+          })}
+        </tbody>
+      </table>
+    </div>
   );
 }
 

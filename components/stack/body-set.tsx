@@ -42,7 +42,6 @@ export function BodySet<P>({
       key={`${geometry.uuid} ${places.length}`}
       ref={mesh}
       args={[geometry, undefined, places.length]}
-      userData={{ places: places.length }}
     >
       <meshLambertMaterial color={colour} />
     </instancedMesh>
