@@ -1,9 +1,8 @@
 'use client';
 
-import { releaseProxy, wrap, type Remote } from 'comlink';
 import { useCallback, useEffect, useRef, useState } from 'react';
 import type { Derivation, Derived, Design, FieldModel, Finding } from '@/geometry';
-import type { KernelWorker } from './derive.worker';
+import type { Answer, Question } from './derive.worker';
 
 export interface Plates {
   /** The last plates there were; null only when there never were any. */
@@ -29,6 +28,18 @@ function platesAfter(before: Derived | null, derivation: Derivation): Plates {
     : { derived: before, findings: derivation.findings, current: false, broken: false };
 }
 
+/** One question to the worker. Only one is ever on its way, so the next message is its answer. */
+function ask(worker: Worker, question: Question): Promise<Derivation> {
+  return new Promise((resolve, reject) => {
+    worker.onmessage = ({ data }: MessageEvent<Answer>) => {
+      if ('derivation' in data) resolve(data.derivation);
+      else reject(new Error(data.failure));
+    };
+    worker.onerror = ({ message }) => reject(new Error(message));
+    worker.postMessage(question);
+  });
+}
+
 /**
  * Derives in a worker, in two stages: with the edges alone, which is soon there, and then with the
  * plan view. At most one stage is on its way and one design waits: a newer one takes the waiting
@@ -36,7 +47,7 @@ function platesAfter(before: Derived | null, derivation: Derivation): Plates {
  */
 export function useDerivation(first: Derivation): [Plates, (design: Design) => void] {
   const [plates, setPlates] = useState(() => platesAfter(null, first));
-  const kernel = useRef<Remote<KernelWorker> | null>(null);
+  const kernel = useRef<Worker | null>(null);
   const waiting = useRef<Design | null>(null);
   const busy = useRef(false);
 
@@ -44,12 +55,10 @@ export function useDerivation(first: Derivation): [Plates, (design: Design) => v
     const worker = new Worker(new URL('./derive.worker.ts', import.meta.url), {
       type: 'module',
     });
-    const remote = wrap<KernelWorker>(worker);
-    kernel.current = remote;
+    kernel.current = worker;
     return () => {
       kernel.current = null;
       busy.current = false;
-      remote[releaseProxy]();
       worker.terminate();
     };
   }, []);
@@ -59,13 +68,13 @@ export function useDerivation(first: Derivation): [Plates, (design: Design) => v
     if (busy.current) return;
     busy.current = true;
     while (kernel.current && waiting.current) {
-      const remote = kernel.current;
+      const worker = kernel.current;
       const next = waiting.current;
       waiting.current = null;
       try {
         for (const model of STAGES) {
-          const derivation = await remote.derive(next, model);
-          if (kernel.current !== remote) return;
+          const derivation = await ask(worker, { design: next, model });
+          if (kernel.current !== worker) return;
           if (waiting.current && model === 'field') break;
           setPlates((before) => platesAfter(before.derived, derivation));
           // What has no plates with the edges alone gets none from the plan view.

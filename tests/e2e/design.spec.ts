@@ -154,10 +154,10 @@ test('the field one tabs to is never under the help line', async ({ page }) => {
     for (let step = 0; step < 14; step++) {
       await page.keyboard.press('Tab');
       const hit = await page.evaluate(() => {
-        const box = document.activeElement!.getBoundingClientRect();
-        const at = document.elementFromPoint(box.x + box.width / 2, box.y + box.height / 2);
         // A radio's own input is hidden; what is seen of it is its label.
         const shown = document.activeElement!.closest('label') ?? document.activeElement!;
+        const box = shown.getBoundingClientRect();
+        const at = document.elementFromPoint(box.x + box.width / 2, box.y + box.height / 2);
         return shown.contains(at);
       });
       expect(hit, `${size.width} px, ${step + 1} steps`).toBe(true);
