@@ -33,7 +33,7 @@ export function RadioField({ path, parameter }: ChoiceProps) {
           <Radio
             key={option.value}
             value={option.value}
-            className="flex min-h-9 grow cursor-pointer flex-col items-center justify-center gap-0.5 border-l border-line px-1 py-1.5 text-[0.8125rem] first:border-0 hover:bg-page max-bench:min-h-11 data-focus-visible:outline-2 data-focus-visible:-outline-offset-3 data-focus-visible:outline-action data-selected:bg-ink data-selected:text-white data-selected:data-focus-visible:outline-white"
+            className="relative flex min-h-9 grow cursor-pointer flex-col items-center justify-center gap-0.5 border-l border-line px-1 py-1.5 text-[0.8125rem] first:border-0 hover:bg-page max-bench:min-h-11 data-focus-visible:outline-2 data-focus-visible:-outline-offset-3 data-focus-visible:outline-action data-selected:bg-ink data-selected:text-white data-selected:data-focus-visible:outline-white"
           >
             {law && <LawCurve law={option.value} />}
             {option.label}

@@ -24,7 +24,7 @@ export function SectionPicker({
         <Radio
           key={index}
           value={String(index)}
-          className="flex size-9 cursor-pointer items-center justify-center rounded-[3px] border border-edge bg-white max-bench:size-11 data-focus-visible:outline-2 data-focus-visible:outline-action data-selected:bg-ink data-selected:text-white"
+          className="relative flex size-9 cursor-pointer items-center justify-center rounded-[3px] border border-edge bg-white max-bench:size-11 data-focus-visible:outline-2 data-focus-visible:outline-action data-selected:bg-ink data-selected:text-white"
         >
           {index + 1}
         </Radio>
