@@ -29,7 +29,7 @@ export function StartChoice({
         <Radio
           key={entry.file}
           value={entry.file}
-          className="grid min-h-11 grid-cols-[1.25rem_1fr] gap-x-2 rounded-[3px] border border-line bg-white px-3 py-2 data-focus-visible:outline-2 data-focus-visible:outline-action data-selected:border-action data-selected:bg-action-tint"
+          className="relative grid min-h-11 grid-cols-[1.25rem_1fr] gap-x-2 rounded-[3px] border border-line bg-white px-3 py-2 data-focus-visible:outline-2 data-focus-visible:outline-action data-selected:border-action data-selected:bg-action-tint"
         >
           {({ isSelected }) => (
             <>
