@@ -73,12 +73,15 @@ export function nextBlade(problem: BladeProblem, before: Blade, field: CellField
     const meshAngle = phi + edgeAngle(edgeOffset, r0);
     if (meshAngle < problem.from - step / 2 || meshAngle > problem.to + step / 2) continue;
     const within = Math.min(Math.max(meshAngle, problem.from), problem.to);
-    let wanted =
-      problem.wanted(within) - (cutoutUnderBlade - besideBlade) * rc - slopeOfRest(within);
+    let wanted = problem.wanted(within) - slopeOfRest(within);
     const leaving = phi - statorSector;
-    if (leaving > 0) {
-      const out = bladeRadius(before, leaving);
-      wanted += (out * out - rc * rc) / (2 * g) + outerEdge * out;
+    if (leaving <= 0) wanted -= (cutoutUnderBlade - besideBlade) * rc;
+    else {
+      // What leaves was solved some steps ago: it may be of this blade already.
+      const solved = first >= 0 && leaving >= (first + 1) * step;
+      const out = bladeRadius(solved ? { sector: rotorSector, radius } : before, leaving);
+      const outSlope = slope[Math.round(leaving / step)]!;
+      wanted += (out * out - rc * rc) / (2 * g) + outerEdge * Math.hypot(out, outSlope);
     }
     const dr0 = slope[i]!;
     const side = Math.hypot(r0, dr0) || 1;

@@ -18,6 +18,9 @@ const GAPS_AFTER = 2.5;
 /** rad. More than this is not rested unless the design says so. */
 const LONGEST_CHOSEN = (15 * Math.PI) / 180;
 
+/** rad. A rotor wider than its stator by less than this leaves it at the end of the turn. */
+const LEAVES_AT_END = (30 * Math.PI) / 180;
+
 /** Rotor radius by area alone at the beginning (x = 0) or the end (x = 1) of a law, mm. */
 function radiusByArea(design: Design, section: Section, x: 0 | 1): number {
   const target = targetOf(section, 0);
@@ -49,10 +52,14 @@ export function rotorTurn({ direction, meshAtOpen }: Turn, shaftAngle: number): 
 export function turnOf(design: Design): Turn {
   const { travel, rotorSector, statorSector, statorEdgeOffset, sense } = design;
   const meshAtOpen = rotorSector - travel;
-  // An edge that is set in is passed later by that much.
+  // An edge that is set in is passed later where the law begins, and earlier where it ends.
   const later = Math.max(0, statorEdgeOffset) / design.cutoutRadius;
   const before = Math.max(0, -meshAtOpen) + later + angleToClear(design, 0);
-  const after = Math.max(0, rotorSector - statorSector) + angleToClear(design, 1);
+  // Where the leading edge leaves the stator just before the stop, the law ends before it; with
+  // a stator much narrower than the rotor it goes on through that.
+  const leaves = rotorSector - statorSector;
+  const after =
+    (leaves > 0 && leaves < LEAVES_AT_END ? leaves : 0) + later + angleToClear(design, 1);
   return {
     travel,
     lawFrom: design.openRest ?? before,
