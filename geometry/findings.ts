@@ -14,7 +14,7 @@ const LAW_FAIL = 0.01;
 /** The same at the very ends of the law. */
 const LAW_ENDS = 0.005;
 
-/** Overhang in air gaps that the edge formula wants. */
+/** Overhang in air gaps beyond which the rotor's rim sees the stator alone. */
 const DEEP_OVERHANG = 3;
 
 /** Blade over the cut-out in air gaps below which the two edge gains run into each other. */
@@ -179,7 +179,7 @@ function sectionFindings(design: Design, result: SectionResult, index: number): 
       label: 'Stator overhang past the rotor',
       value: design.overhang,
       limit: DEEP_OVERHANG * airGap,
-      change: `The edge gain is less than reckoned below ${DEEP_OVERHANG} gaps: make the overhang ${mm(DEEP_OVERHANG * airGap)}.`,
+      change: `Below ${DEEP_OVERHANG} gaps the rim of the rotor is felt past the stator: make the overhang ${mm(DEEP_OVERHANG * airGap)}.`,
       parameters: ['overhang'],
     }),
     atLeast('cutout-clearance', index, 'fail', {

@@ -22,23 +22,45 @@ function scriptBytes(page: Page): Promise<number> {
   );
 }
 
-/** From a change of the air gap to the first frame with another rotor outline, ms. */
-async function keystroke(page: Page, text: string): Promise<number> {
+interface Redraw {
+  /** From the keystroke to the first frame with another rotor outline, ms. */
+  readonly all: number;
+  /** From the kernel's answer to that outline, ms: what the screen itself takes. */
+  readonly screen: number;
+}
+
+/** Notes when the kernel's worker last answered, from before the page's own scripts run. */
+function noteAnswers(page: Page): Promise<void> {
+  return page.addInitScript(() => {
+    const Plain = window.Worker;
+    window.Worker = class extends Plain {
+      constructor(...args: ConstructorParameters<typeof Worker>) {
+        super(...args);
+        this.addEventListener('message', () => {
+          (window as unknown as { answered: number }).answered = performance.now();
+        });
+      }
+    };
+  });
+}
+
+async function keystroke(page: Page, text: string): Promise<Redraw> {
   await page.evaluate(() => {
     const rotor = document.querySelector('[data-part=rotor]')!;
-    const state = window as unknown as { redrawn: Promise<number> };
+    const state = window as unknown as { redrawn: Promise<Redraw>; answered: number };
     state.redrawn = new Promise((resolve) => {
       let typed = 0;
       document.addEventListener('input', () => (typed = performance.now()), { once: true });
       const observer = new MutationObserver(() => {
         observer.disconnect();
-        requestAnimationFrame(() => resolve(performance.now() - typed));
+        const screen = performance.now() - state.answered;
+        requestAnimationFrame(() => resolve({ all: performance.now() - typed, screen }));
       });
       observer.observe(rotor, { subtree: true, attributes: true, attributeFilter: ['d'] });
     });
   });
   await page.getByRole('textbox', { name: 'Air gap', exact: true }).fill(text);
-  return page.evaluate(() => (window as unknown as { redrawn: Promise<number> }).redrawn);
+  return page.evaluate(() => (window as unknown as { redrawn: Promise<Redraw> }).redrawn);
 }
 
 const browser = await chromium.launch(playwright.use!.launchOptions);
@@ -46,6 +68,7 @@ const page = await browser.newPage({
   baseURL: process.env.BASE_URL ?? 'http://127.0.0.1:3000',
   viewport: { width: 1440, height: 900 },
 });
+await noteAnswers(page);
 await signIn(page, builder);
 await page.goto('/designs');
 await page.waitForLoadState('networkidle');
@@ -54,7 +77,7 @@ await makeDesign(page, 'Bench');
 await page.reload();
 await page.waitForLoadState('networkidle');
 const screen = await scriptBytes(page);
-const times: number[] = [];
+const times: Redraw[] = [];
 for (let i = 0; i < KEYSTROKES; i++) times.push(await keystroke(page, `0.5${i + 10} mm`));
 console.table([
   { what: 'scripts of the list of designs, kB', value: (list / 1000).toFixed(1), goal: '170' },
@@ -64,9 +87,14 @@ console.table([
     goal: '420',
   },
   {
-    what: 'keystroke to redrawn floor, kernel included, ms',
-    value: median(times).toFixed(1),
-    goal: '16.7 besides the kernel',
+    what: 'kernel’s answer to redrawn floor and chart, ms',
+    value: median(times.map(({ screen }) => screen)).toFixed(1),
+    goal: '16.7',
+  },
+  {
+    what: 'keystroke to the frame that shows it, kernel and drawing included, ms',
+    value: median(times.map(({ all }) => all)).toFixed(1),
+    goal: '',
   },
 ]);
 await browser.close();
