@@ -30,8 +30,8 @@ interface Redraw {
 }
 
 /** Notes when the kernel's worker last answered, from before the page's own scripts run. */
-function noteAnswers(page: Page): Promise<void> {
-  return page.addInitScript(() => {
+async function noteAnswers(page: Page): Promise<void> {
+  await page.addInitScript(() => {
     const Plain = window.Worker;
     window.Worker = class extends Plain {
       constructor(...args: ConstructorParameters<typeof Worker>) {
