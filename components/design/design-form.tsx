@@ -1,16 +1,28 @@
 'use client';
 
-import { memo, useState } from 'react';
+import { memo, use, useState, type ComponentProps } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
 import { loadApi } from '@/components/api/load-api';
+import { ChosenContext } from './chosen-values';
 import { ListField, RadioField } from './choice-field';
 import { applies, type Draft } from './draft';
 import { sectionGroups, sharedGroups, type Group, type GroupEntry } from './parameter-groups';
 import { QuantityField } from './quantity-field';
 
+/** A field that may be left empty; only these are drawn anew with what the kernel chose. */
+function OptionalField({
+  name,
+  ...field
+}: { name: string } & Omit<ComponentProps<typeof QuantityField>, 'chosen'>) {
+  return <QuantityField {...field} chosen={use(ChosenContext)[name]} />;
+}
+
 function Field({ entry, prefix }: { entry: GroupEntry; prefix: string }) {
   const { key, parameter } = entry;
   const path = prefix + key;
+  if (parameter.kind === 'optional-number') {
+    return <OptionalField name={key} path={path} parameter={parameter} />;
+  }
   if (parameter.kind !== 'choice') return <QuantityField path={path} parameter={parameter} />;
   return key === 'material' ? (
     <ListField path={path} parameter={parameter} />

@@ -2,6 +2,7 @@
 
 import { SeverityShape, severityWords } from '@/components/ui/severity';
 import { formatQuantity, type Finding } from '@/geometry';
+import { findingSide } from './finding-side';
 
 const colours = { ok: 'text-ok', warn: 'text-warn', fail: 'text-bad' } as const;
 const rank = { fail: 0, warn: 1, ok: 2 } as const;
@@ -11,12 +12,6 @@ function written({ code, quantity }: Finding, value: number): string {
   return code === 'law-held'
     ? `${Number((value * 100).toPrecision(2))} %`
     : formatQuantity(value, quantity, 3);
-}
-
-/** Is the limit an upper or a lower one? It shows in which side a good or a bad value lies on. */
-function side({ severity, value, limit }: Finding): string {
-  const below = severity === 'ok' ? value <= limit : value < limit;
-  return below === (severity === 'ok') ? 'at most' : 'at least';
 }
 
 function FindingBody({ finding, sections }: { finding: Finding; sections: number }) {
@@ -36,7 +31,7 @@ function FindingBody({ finding, sections }: { finding: Finding; sections: number
       <span className="text-right whitespace-nowrap">
         {written(finding, value)}
         <span className="block text-small text-ink-2">
-          {side(finding)} {written(finding, limit)}
+          {findingSide(finding)} {written(finding, limit)}
         </span>
       </span>
       {change !== '' && (

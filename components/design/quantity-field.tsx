@@ -20,17 +20,21 @@ function shown(value: DraftValue, { quantity }: QuantityParameter) {
 export function QuantityField({
   path,
   parameter,
+  chosen,
 }: {
   path: string;
   parameter: QuantityParameter;
+  /** What the kernel takes where the field is left empty, if that is known. */
+  chosen?: number | undefined;
 }) {
   const { control } = useFormContext<Draft>();
   const { field } = useController({ control, name: `design.${path}` });
+  const value = field.value as DraftValue;
   // From the value itself: what came back after a reload is checked as what was typed just now.
-  const message = messageFor(parameter, path, field.value as DraftValue);
+  const message = messageFor(parameter, path, value);
   const [editing, setEditing] = useState<{ text: string; unit: string } | null>(null);
   const latest = useRef('');
-  const written = shown(field.value as DraftValue, parameter);
+  const written = shown(value, parameter);
   const unit = editing?.unit ?? written.unit;
   const text = editing?.text ?? written.number;
   const bare = /^[\s\d./+-]*$/.test(text);
@@ -60,6 +64,7 @@ export function QuantityField({
   }
 
   const { label, help, min, max } = parameter;
+  const hint = chosen === undefined ? null : writeQuantity(chosen, parameter.quantity, 3);
   const low = writeQuantity(min, parameter.quantity);
   const high = writeQuantity(max, parameter.quantity);
   return (
@@ -84,9 +89,13 @@ export function QuantityField({
       <span className="relative">
         <Input
           inputMode="text"
-          placeholder={parameter.kind === 'optional-number' ? 'chosen' : undefined}
+          placeholder={
+            parameter.kind === 'optional-number'
+              ? ['chosen', hint?.number].filter(Boolean).join(' ')
+              : undefined
+          }
           spellCheck={false}
-          className={`min-h-8 w-full rounded-[3px] border border-edge bg-white py-1 pl-2 text-right outline-offset-0 max-bench:min-h-11 data-invalid:border-2 data-invalid:border-bad ${bare && unit ? unitRoom[unit.length] : 'pr-2'}`}
+          className={`min-h-8 w-full rounded-[3px] border border-edge bg-white py-1 pl-2 text-right outline-offset-0 placeholder:text-ink-2 max-bench:min-h-11 data-invalid:border-2 data-invalid:border-bad ${bare && unit ? unitRoom[unit.length] : 'pr-2'}`}
         />
         {bare && unit && (
           <span
@@ -100,7 +109,8 @@ export function QuantityField({
       <Text slot="description" className="sr-only">
         {help} {unit && `In ${unit} unless you write the unit,`} {low.number} {low.unit} to{' '}
         {high.number} {high.unit}
-        {parameter.kind === 'optional-number' ? ', or empty' : ''}.
+        {parameter.kind === 'optional-number' ? ', or empty' : ''}
+        {hint && value === null ? `: now ${hint.number} ${hint.unit} is chosen` : ''}.
       </Text>
       <FieldError className="col-span-2 pt-1 text-small text-bad">{message}</FieldError>
     </TextField>

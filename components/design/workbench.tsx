@@ -5,6 +5,7 @@ import { useEffect, useState } from 'react';
 import type { UseFormReturn } from 'react-hook-form';
 import type { Derivation, Finding } from '@/geometry';
 import type { DesignFiles, DesignRecord } from '@/lib/schemas/api';
+import { ChosenContext, useChosenValues } from './chosen-values';
 import { DesignBar } from './design-bar';
 import { DesignForm } from './design-form';
 import { designOf, parameterAt, type Draft } from './draft';
@@ -42,6 +43,8 @@ export function Workbench({
   const [invalid, setInvalid] = useState<string | null>(null);
   const [section, setSection] = useState(0);
   const store = useAngleStore(plates.derived);
+  // Of plates that are not of this design nothing is said in its fields.
+  const chosen = useChosenValues(plates.current && !invalid ? plates.derived : null);
 
   useEffect(
     () =>
@@ -102,7 +105,9 @@ export function Workbench({
             className="flex min-w-0 flex-col gap-4 px-5 pt-4 bench:order-1 bench:overflow-y-auto"
           >
             <SectionTools section={section} onChange={setSection} />
-            <DesignForm section={section} />
+            <ChosenContext value={chosen}>
+              <DesignForm section={section} />
+            </ChosenContext>
           </section>
           <div className="min-w-0 bench:order-3 bench:flex bench:min-h-0 bench:flex-col">
             <SidePanel plates={plates} section={shownSection} store={store} onPick={pick}>

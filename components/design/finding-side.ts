@@ -1,0 +1,32 @@
+import type { Finding, FindingCode } from '@/geometry';
+
+/**
+ * On which side of its limit each check holds. It is not to be told from value and limit: a law
+ * that rises to its very end has both alike, and so has a blade on its least radius.
+ */
+const sides: Record<Exclude<FindingCode, 'range-infeasible'>, 'at most' | 'at least'> = {
+  'outline-infeasible': 'at least',
+  'plate-counts': 'at most',
+  turn: 'at least',
+  'law-held': 'at most',
+  'law-rises': 'at least',
+  'open-capacitance': 'at most',
+  'blade-narrow': 'at least',
+  radius: 'at most',
+  depth: 'at most',
+  'gap-voltage': 'at most',
+  'post-clearance': 'at least',
+  'ears-crowded': 'at most',
+  'overhang-short': 'at least',
+  'cutout-clearance': 'at least',
+  'spacer-proud': 'at least',
+  'hole-small': 'at least',
+  'web-thin': 'at least',
+};
+
+/** How the limit of a finding is to be read. */
+export function findingSide({ code, value, limit }: Finding): string {
+  if (code !== 'range-infeasible') return sides[code];
+  // Only listed when it fails: what is too large must come below, what is too small above.
+  return value > limit ? 'below' : 'above';
+}
