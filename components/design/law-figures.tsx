@@ -10,7 +10,7 @@ export function LawFigures({ section }: { section: SectionResult }) {
   const { law, model, totalMin, totalMax } = section;
   return (
     <div className="flex flex-col gap-2">
-      <p role="status" className="text-small text-ink-2">
+      <p className="text-small text-ink-2">
         {model === 'field'
           ? 'With edges and plan view.'
           : 'With the edges alone; the plan view is being solved.'}

@@ -9,6 +9,7 @@ import type { AngleStore } from './angle-store';
 import { toDegrees, toRadians, writeDegrees } from './degrees';
 import { INSET_LEFT, INSET_RIGHT } from './insets';
 import { lawReader } from './law-series';
+import { RuleNotes } from './rule-notes';
 import { RuleScale } from './rule-scale';
 import { useAngle } from './use-angle';
 import { useAngleDrag } from './use-angle-drag';
@@ -62,8 +63,9 @@ export function AngleRule({
 
   return (
     <div className="bg-panel select-none" data-part="angle-rule">
-      <div className="flex min-h-10 items-center px-3 py-1">
+      <div className="flex min-h-10 flex-wrap items-center gap-x-5 px-3 py-1">
         <AngleField store={store} travel={travel} />
+        {section && <RuleNotes section={section} />}
       </div>
       <div
         className="relative h-12 overflow-x-clip cursor-ew-resize touch-none border-t border-line has-focus-visible:outline-2 has-focus-visible:-outline-offset-2 has-focus-visible:outline-action"
