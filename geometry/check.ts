@@ -74,7 +74,12 @@ function checkTable(
 ): Record<string, unknown> {
   const checked: Record<string, unknown> = {};
   for (const [key, parameter] of Object.entries(table)) {
-    checked[key] = checkParameter(parameter, prefix + key, input[key]);
+    const missing = input[key] === undefined && parameter.cameLater;
+    checked[key] = checkParameter(
+      parameter,
+      prefix + key,
+      missing ? parameter.default : input[key],
+    );
   }
   return checked;
 }

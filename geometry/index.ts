@@ -41,6 +41,7 @@ export {
   type Vertex,
 } from './outline';
 export {
+  applies,
   sectionParameters,
   sharedParameters,
   type ChoiceParameter,

@@ -2,7 +2,8 @@
 
 import { bladeRadius, type Blade } from './blade';
 import type { LawCheck, LawError, Plate, Turn } from './derived';
-import { gapCapacitance, type PlanShare, type SectionEdges } from './field/cell-field';
+import { stackCapacitance, type SectionEdges } from './field/cell-field';
+import type { PlanShare } from './field/plan-share';
 import type { EdgePlates } from './field/radial-edges';
 import type { Law } from './law';
 import { overlapAt } from './overlap';
@@ -19,11 +20,13 @@ export interface LawCheckInput {
   readonly stator: Pick<Plate, 'outside'>;
   /** The blade as read from the finished rotor. */
   readonly blade: Blade;
-  /** ε·n, F/mm. */
-  readonly permittivityGaps: number;
+  /** F/mm. */
+  readonly permittivity: number;
+  readonly gaps: number;
   readonly edges: SectionEdges;
   readonly plates: EdgePlates;
-  readonly share: PlanShare;
+  /** Without one, the edges alone count. */
+  readonly share: PlanShare | null;
 }
 
 export interface CheckedLaw {
@@ -71,13 +74,15 @@ function worst(
  * and stray alone have more than the target, the error says so all along.
  */
 export function checkLaw(input: LawCheckInput): CheckedLaw {
-  const { law, turn, totalMin, totalMax, fixed, plates, permittivityGaps: scale } = input;
+  const { law, turn, totalMin, totalMax, fixed, edges, plates, share, gaps } = input;
+  const perArea = input.permittivity * gaps;
   const angle = anglesOver(turn);
   const mesh = angle.map((shaft) => shaft + turn.meshAtOpen);
   const curves = { cutoutRadius: plates.cutoutRadius, blade: input.blade };
   const overlaps = overlapAt(input.rotor, input.stator, mesh, curves);
   const plateCapacitance = overlaps.map(
-    (overlap, i) => scale * gapCapacitance(input.edges, plates, input.share, overlap, mesh[i]!),
+    (overlap, i) =>
+      input.permittivity * stackCapacitance(gaps, edges, plates, share, overlap, mesh[i]!),
   );
   const begins = angle.indexOf(turn.lawFrom);
   const ends = begins + LAW_STEPS;
@@ -102,7 +107,7 @@ export function checkLaw(input: LawCheckInput): CheckedLaw {
       target,
       achieved,
       areaOnly: overlaps.map(
-        ({ area }) => totalMin + (scale * (area - overlaps[begins]!.area)) / plates.airGap,
+        ({ area }) => totalMin + (perArea * (area - overlaps[begins]!.area)) / plates.airGap,
       ),
       error,
       from: turn.lawFrom,

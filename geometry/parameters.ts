@@ -15,8 +15,10 @@ export type Quantity =
   | 'count'
   | 'ratio';
 
-/** Which kind of target a parameter belongs to; without one it belongs to both. */
 export type TargetKind = 'terminals' | 'band';
+
+/** Choices of the same table under which a parameter counts; all of them must hold. */
+export type AppliesTo = Readonly<Record<string, readonly string[]>>;
 
 export type ParameterGroup =
   'law' | 'turn' | 'stack' | 'shaft' | 'posts' | 'envelope' | 'sheet';
@@ -31,7 +33,10 @@ export interface NumberParameter {
   readonly min: number;
   readonly max: number;
   readonly default: number;
-  readonly appliesTo?: TargetKind;
+  /** Without it the parameter always counts. */
+  readonly appliesTo?: AppliesTo;
+  /** Designs stored before the parameter came hold its default. */
+  readonly cameLater?: true;
 }
 
 /** A number that may be left empty: `null` lets the kernel choose. */
@@ -47,6 +52,8 @@ export interface ChoiceParameter<V extends string = string> {
   readonly help: string;
   readonly options: readonly { readonly value: V; readonly label: string }[];
   readonly default: V;
+  readonly appliesTo?: AppliesTo;
+  readonly cameLater?: true;
 }
 
 export type Parameter = NumberParameter | OptionalNumberParameter | ChoiceParameter;
@@ -101,6 +108,9 @@ function choice<V extends string>(
 
 const DEGREE = Math.PI / 180;
 
+const TERMINALS: AppliesTo = { targetKind: ['terminals'] };
+const BAND: AppliesTo = { targetKind: ['band'] };
+
 /** Parameters of one section: its law, its target and its plates. */
 export const sectionParameters = {
   law: choice<'capacitance' | 'wavelength' | 'frequency' | 'logarithmic'>('law', {
@@ -129,7 +139,7 @@ export const sectionParameters = {
     min: 0.1e-12,
     max: 20e-9,
     default: 40e-12,
-    appliesTo: 'terminals',
+    appliesTo: TERMINALS,
   }),
   maxCapacitance: capacitance('law', {
     label: 'Capacitance, meshed',
@@ -137,7 +147,7 @@ export const sectionParameters = {
     min: 0.2e-12,
     max: 50e-9,
     default: 400e-12,
-    appliesTo: 'terminals',
+    appliesTo: TERMINALS,
   }),
   bandLow: frequency('law', {
     label: 'Band, low end',
@@ -145,7 +155,7 @@ export const sectionParameters = {
     min: 1e3,
     max: 1e9,
     default: 530e3,
-    appliesTo: 'band',
+    appliesTo: BAND,
   }),
   bandHigh: frequency('law', {
     label: 'Band, high end',
@@ -153,7 +163,7 @@ export const sectionParameters = {
     min: 1e3,
     max: 1e9,
     default: 1700e3,
-    appliesTo: 'band',
+    appliesTo: BAND,
   }),
   inductance: inductance('law', {
     label: 'Coil inductance',
@@ -161,7 +171,7 @@ export const sectionParameters = {
     min: 1e-9,
     max: 1,
     default: 240e-6,
-    appliesTo: 'band',
+    appliesTo: BAND,
   }),
   stray: capacitance('law', {
     label: 'Circuit stray',
@@ -169,7 +179,7 @@ export const sectionParameters = {
     min: 0,
     max: 5e-9,
     default: 18e-12,
-    appliesTo: 'band',
+    appliesTo: BAND,
   }),
   frameAllowance: capacitance('law', {
     label: 'Insulators and frame',
@@ -402,3 +412,13 @@ export const sharedParameters = {
 
 export type SectionKey = keyof typeof sectionParameters;
 export type SharedKey = keyof typeof sharedParameters;
+
+/** Does a parameter count beside these values of its table? */
+export function applies(
+  parameter: Parameter,
+  values: Readonly<Record<string, unknown>>,
+): boolean {
+  return Object.entries(parameter.appliesTo ?? {}).every(([key, choices]) =>
+    choices.some((choice) => choice === values[key]),
+  );
+}

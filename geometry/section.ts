@@ -3,7 +3,7 @@
 import { longestRadius, shortestRadius, type Blade } from './blade';
 import { EPSILON_0 } from './constants';
 import type { Design, Section } from './design';
-import type { FieldModel, Plate, Post, SectionResult, Turn } from './derived';
+import type { FieldModel, Plate, PlateRole, Post, SectionResult, Turn } from './derived';
 import { layOutEars, standPosts } from './post';
 import {
   bladeFinding,
@@ -13,14 +13,8 @@ import {
   postFinding,
   shapeFindings,
 } from './feasibility';
-import {
-  cellField,
-  sectionEdges,
-  type EdgeCache,
-  type PlanShare,
-  type SectionEdges,
-} from './field/cell-field';
-import { planShare } from './field/plan-share';
+import { cellField, sectionEdges, type EdgeCache, type SectionEdges } from './field/cell-field';
+import { planShare, type PlanShare } from './field/plan-share';
 import type { EdgePlates } from './field/radial-edges';
 import type { Finding } from './finding';
 import { flatten } from './flatten';
@@ -28,10 +22,11 @@ import { lawBetween, type Law } from './law';
 import { checkLaw, edgePlates } from './law-check';
 import { sheetMaterials } from './material';
 import { contourArea, contourLength } from './measure';
+import { polar } from './polar';
 import { mirrorCircle, mirrorPath, mirrorPoint } from './mirror';
 import { bladeOf, rotorOutline } from './rotor';
 import { BLADE_STEPS, firstBlade, nextBlade, type BladeProblem } from './solve-blade';
-import { rotorSpacerLength, statorSpacerLength } from './stack';
+import { endPlatesOf, rotorSpacerLength, statorSpacerLength } from './stack';
 import { statorFormOf, statorOutline, statorRadius, type StatorForm } from './stator';
 import { targetOf } from './target';
 
@@ -77,6 +72,8 @@ interface Setting {
   readonly form: StatorForm;
   readonly edges: SectionEdges;
   readonly airGap: number;
+  readonly gaps: number;
+  readonly endPlates: readonly [PlateRole, PlateRole];
 }
 
 function platesOf({ design, form, airGap }: Setting, blade: Blade): EdgePlates {
@@ -104,8 +101,8 @@ function outlinesOf({ design, turn, form }: Setting, blade: Blade) {
 
 type Outlines = Exclude<ReturnType<typeof outlinesOf>, Finding>;
 
-function shareOf(setting: Setting, blade: Blade, { rotor, stator }: Outlines) {
-  const { design, turn, edges } = setting;
+function shareOf(setting: Setting, blade: Blade, { rotor, stator, ears }: Outlines) {
+  const { design, turn, edges, gaps, endPlates } = setting;
   return planShare(
     {
       plates: platesOf(setting, blade),
@@ -113,6 +110,12 @@ function shareOf(setting: Setting, blade: Blade, { rotor, stator }: Outlines) {
       stator: flatten(stator.outside, PLAN_SAGITTA),
       hubRadius: design.hubRadius,
       sweepRadius: longestRadius(blade),
+      gaps,
+      endPlates,
+      posts: ears.map(({ angle, circleRadius }) => ({
+        ...polar(circleRadius, angle),
+        radius: design.postSpacerRadius,
+      })),
     },
     edges.table,
     edges.hub,
@@ -129,20 +132,20 @@ const refused = (...findings: Finding[]): SectionOutcome => ({ ok: false, findin
 interface Solved {
   readonly blade: Blade;
   readonly outlines: Outlines;
-  readonly share: PlanShare;
+  readonly share: PlanShare | null;
 }
 
 function nextOf(
   setting: Setting,
   problem: BladeProblem,
-  share: PlanShare,
+  share: PlanShare | null,
   blade: Blade,
 ): Blade {
   const range = [problem.from, problem.to] as const;
   return nextBlade(
     problem,
     blade,
-    cellField(setting.edges, platesOf(setting, blade), share, range),
+    cellField(setting.gaps, setting.edges, platesOf(setting, blade), share, range),
   );
 }
 
@@ -178,7 +181,7 @@ function solveBlade(
   check: (blade: Blade) => Finding | null,
 ): Solved | Finding {
   let blade = bladeWithEdges(setting, problem);
-  let share: PlanShare = null;
+  let share: PlanShare | null = null;
   let wrong = check(blade);
   for (let round = 0; round < PLAN_ROUNDS && model === 'field' && !wrong; round++) {
     const outlines = outlinesOf(setting, blade);
@@ -234,7 +237,15 @@ export function deriveSection(
   const permittivityGaps = EPSILON_0 * section.permittivity * gaps;
   const edges = sectionEdges({ ...design, ...section }, cache);
   const form = statorFormOf(section);
-  const setting: Setting = { design, turn, form, edges, airGap: section.airGap };
+  const setting: Setting = {
+    design,
+    turn,
+    form,
+    edges,
+    airGap: section.airGap,
+    gaps,
+    endPlates: endPlatesOf(section),
+  };
   const problem = problemOf(setting, section, law, permittivityGaps);
   const solved = solveBlade(
     setting,
@@ -274,7 +285,8 @@ export function deriveSection(
     rotor,
     stator,
     blade: cutBlade,
-    permittivityGaps,
+    permittivity: EPSILON_0 * section.permittivity,
+    gaps,
     edges,
     plates: platesOf(setting, cutBlade),
     share: share && shareOf(setting, cutBlade, outlines),

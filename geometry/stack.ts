@@ -14,10 +14,17 @@ export function statorSpacerLength(section: Section): number {
   return 2 * section.airGap + section.rotorThickness;
 }
 
+/** The outermost plates of a section, first and last. */
+export function endPlatesOf({ rotorPlates, statorPlates }: Section): [PlateRole, PlateRole] {
+  const first: PlateRole = statorPlates >= rotorPlates ? 'stator' : 'rotor';
+  const last: PlateRole = rotorPlates >= statorPlates ? 'rotor' : 'stator';
+  return [first, last];
+}
+
 function sectionPlates(section: Section, index: number, start: number): StackPlate[] {
   const plates: StackPlate[] = [];
   let z = start;
-  let role: PlateRole = section.statorPlates >= section.rotorPlates ? 'stator' : 'rotor';
+  let [role] = endPlatesOf(section);
   for (let i = 0; i < section.rotorPlates + section.statorPlates; i++) {
     const thickness = role === 'rotor' ? section.rotorThickness : section.statorThickness;
     plates.push({ role, section: index, z: z + thickness / 2, thickness });

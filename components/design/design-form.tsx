@@ -5,8 +5,16 @@ import { useFormContext, useWatch } from 'react-hook-form';
 import { loadApi } from '@/components/api/load-api';
 import { ChosenContext } from './chosen-values';
 import { ListField, RadioField } from './choice-field';
-import { applies, type Draft } from './draft';
-import { sectionGroups, sharedGroups, type Group, type GroupEntry } from './parameter-groups';
+import { applies } from '@/geometry';
+import type { Draft } from './draft';
+import {
+  sectionDeciding,
+  sectionGroups,
+  sharedDeciding,
+  sharedGroups,
+  type Group,
+  type GroupEntry,
+} from './parameter-groups';
 import { QuantityField } from './quantity-field';
 
 /** A field that may be left empty; only these are drawn anew with what the kernel chose. */
@@ -42,10 +50,18 @@ function Fields({ group, prefix }: { group: Group; prefix: string }) {
   );
 }
 
+/** The form's values of some keys; the form is drawn anew only when one of them changes. */
+function useDeciding(prefix: string, keys: readonly string[]): Record<string, unknown> {
+  const { control } = useFormContext<Draft>();
+  const names = keys.map((key) => `${prefix}${key}` as 'design.travel');
+  const values = useWatch({ control, name: names });
+  return Object.fromEntries(keys.map((key, i) => [key, values[i]]));
+}
+
 /** All parameters of one section and those that the sections share, made from the kernel's table. */
 export const DesignForm = memo(function DesignForm({ section }: { section: number }) {
-  const { control } = useFormContext<Draft>();
-  const targetKind = useWatch({ control, name: `design.sections.${section}.targetKind` });
+  const ofSection = useDeciding(`design.sections.${section}.`, sectionDeciding);
+  const ofDesign = useDeciding('design.', sharedDeciding);
   const prefix = `sections.${section}.`;
   const [help, setHelp] = useState('');
 
@@ -68,12 +84,19 @@ export const DesignForm = memo(function DesignForm({ section }: { section: numbe
           prefix={prefix}
           group={{
             ...group,
-            entries: group.entries.filter(({ parameter }) => applies(parameter, targetKind)),
+            entries: group.entries.filter(({ parameter }) => applies(parameter, ofSection)),
           }}
         />
       ))}
       {sharedGroups.map((group) => (
-        <Fields key={group.group} prefix="" group={group} />
+        <Fields
+          key={group.group}
+          prefix=""
+          group={{
+            ...group,
+            entries: group.entries.filter(({ parameter }) => applies(parameter, ofDesign)),
+          }}
+        />
       ))}
       <p
         aria-hidden="true"

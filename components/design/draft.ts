@@ -1,4 +1,5 @@
 import {
+  applies,
   checkDesign,
   checkParameter,
   formatQuantity,
@@ -48,15 +49,6 @@ export function parameterAt(path: string): Parameter | undefined {
   return parts.length === 1 ? sharedTable[key] : sectionTable[key];
 }
 
-/** Does the parameter count for a section with this kind of target? */
-export function applies(parameter: Parameter, targetKind: DraftValue | undefined): boolean {
-  return (
-    parameter.kind === 'choice' ||
-    parameter.appliesTo === undefined ||
-    parameter.appliesTo === targetKind
-  );
-}
-
 const quantityWords: Record<NumberParameter['quantity'], string> = {
   length: 'a length',
   angle: 'an angle',
@@ -91,7 +83,7 @@ function settle(section: DraftSection, index: number): DraftSection {
   return Object.fromEntries(
     Object.entries(section).map(([key, value]) => {
       const parameter = sectionTable[key];
-      const dormant = parameter && !applies(parameter, section.targetKind);
+      const dormant = parameter && !applies(parameter, section);
       return dormant && messageFor(parameter, `sections.${index}.${key}`, value)
         ? [key, parameter.default]
         : [key, value];

@@ -37,11 +37,9 @@ export function LawFigures({ section }: { section: SectionResult }) {
         </summary>
         <ul className="ml-4 flex list-disc flex-col gap-1 pt-1">
           <li>
-            The two end faces of the stack. They add most with the plates open and with few
-            plates: a third of the open capacitance in the reference stack of three rotor
-            plates.
+            What stands near the end faces of the stack: frame plates, a neighbouring section,
+            the shaft beyond the plates. The open end faces themselves are counted.
           </li>
-          <li>Posts, beyond the ears that carry them.</li>
           <li>
             Insulators and frame beyond the allowance, which is yours to set and to measure.
           </li>

@@ -45,5 +45,15 @@ function groupsOf(table: Record<string, Parameter>): Group[] {
   return groups;
 }
 
+/** The choices on which it depends which parameters of a table count. */
+function decidingKeys(table: Record<string, Parameter>): string[] {
+  return [
+    ...new Set(Object.values(table).flatMap(({ appliesTo }) => Object.keys(appliesTo ?? {}))),
+  ];
+}
+
+export const sectionDeciding = decidingKeys(sectionParameters);
+export const sharedDeciding = decidingKeys(sharedParameters);
+
 export const sectionGroups = groupsOf(sectionParameters);
 export const sharedGroups = groupsOf(sharedParameters);

@@ -1,5 +1,4 @@
-import { formatQuantity, type Design } from '@/geometry';
-import { applies } from './draft';
+import { applies, formatQuantity, type Design } from '@/geometry';
 import { Figures } from './figures';
 import { sectionGroups, sharedGroups, type Group, type GroupEntry } from './parameter-groups';
 
@@ -15,7 +14,7 @@ function written({ key, parameter }: GroupEntry, values: Record<string, unknown>
 
 function GroupFigures({ group, values }: { group: Group; values: Record<string, unknown> }) {
   const rows = group.entries
-    .filter(({ parameter }) => applies(parameter, values.targetKind as string | undefined))
+    .filter(({ parameter }) => applies(parameter, values))
     .map((entry) => [entry.parameter.label, written(entry, values)] as const);
   return (
     <section className="flex flex-col gap-1.5">

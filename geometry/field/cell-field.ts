@@ -1,16 +1,19 @@
 /**
- * The field of one gap, from mid-plane to mid-plane of neighbouring plates, put together:
+ * The field of a stack, put together: each gap, from mid-plane to mid-plane of neighbouring
+ * plates, has
  *
  *   C/ε = A/g + Fo·(outer edge over the stator) + Fc·(cut-out under the blade)
- *       + Fh·(cut-out beside the blade) + radial edges + Z·(plan view)
+ *       + Fh·(cut-out beside the blade) + radial edges + Z·(open space in plan)
  *
- * Edges: geometry/field/edge-table.ts and hub-edges.ts; radial edges: radial-edges.ts; plan view:
- * plan-share.ts. The composite is this project's own; what it is held against is in tests/field.
- * Left out: the end faces of the stack, insulators and frame.
+ * and the stack its end faces besides. Edges: geometry/field/edge-table.ts and hub-edges.ts;
+ * radial edges: radial-edges.ts; open space and end faces: plan-share.ts. The composite is this
+ * project's own; what it is held against is in tests/field. Left out: insulators, frame and what
+ * stands near the end faces.
  */
 
 import { edgeTable, type EdgeTable } from './edge-table';
 import { hubEdges, type HubEdges } from './hub-edges';
+import type { PlanShare } from './plan-share';
 import { coveredRadius, radialEdges, type EdgePlates } from './radial-edges';
 
 /** Sizes that the edges of a section depend on, mm. */
@@ -88,14 +91,11 @@ export interface OverlapSizes {
   readonly cutoutEdge: number;
 }
 
-/** The plan view's share at a mesh angle; null while only the edges are known. */
-export type PlanShare = ((meshAngle: number) => number) | null;
-
-/** Capacitance of one gap at a mesh angle over ε, mm. */
+/** Capacitance of one gap at a mesh angle over ε, mm; without a share, the edges alone. */
 export function gapCapacitance(
   edges: SectionEdges,
   plates: EdgePlates,
-  share: PlanShare,
+  share: PlanShare | null,
   { area, rotorEdge, cutoutEdge }: OverlapSizes,
   meshAngle: number,
 ): number {
@@ -106,8 +106,21 @@ export function gapCapacitance(
     edges.hub.cutoutUnderBlade * cutoutEdge +
     edges.hub.besideBlade * beside +
     radialEdges(plates, edges.table, meshAngle) +
-    (share ? edges.height * share(meshAngle) : 0)
+    (share ? edges.height * share.openSpace(meshAngle) : 0)
   );
+}
+
+/** Capacitance of all gaps and both end faces at a mesh angle over ε, mm. */
+export function stackCapacitance(
+  gaps: number,
+  edges: SectionEdges,
+  plates: EdgePlates,
+  share: PlanShare | null,
+  overlap: OverlapSizes,
+  meshAngle: number,
+): number {
+  const inGaps = gaps * gapCapacitance(edges, plates, share, overlap, meshAngle);
+  return inGaps + (share ? share.endFaces(meshAngle) : 0);
 }
 
 /** What the inverse needs to know of the field of a blade, mm and mm/rad, over ε and per gap. */
@@ -117,7 +130,7 @@ export interface CellField {
   readonly besideBlade: number;
   /** Gain of the stator's first edge where the rotor covers it beyond the leading edge. */
   readonly coveredEdge: number;
-  /** d/dθ of radial edges and plan view, without the covered edge's part in r'. */
+  /** d/dθ of radial edges, open space and end faces, without the covered edge's part in r'. */
   readonly slopeOfRest: (meshAngle: number) => number;
 }
 
@@ -128,9 +141,10 @@ const SLOPE_STEPS = 180;
  * @param range mesh angles between which slopes are wanted, rad
  */
 export function cellField(
+  gaps: number,
   edges: SectionEdges,
   plates: EdgePlates,
-  share: PlanShare,
+  share: PlanShare | null,
   [from, to]: readonly [number, number],
 ): CellField {
   const { table, hub, outerEdge, height } = edges;
@@ -138,7 +152,7 @@ export function cellField(
   const rest = Float64Array.from({ length: SLOPE_STEPS + 3 }, (_, i) => {
     const angle = from + (i - 1) * step;
     const covered = angle > 0 ? coveredRadius(plates, angle) : plates.rotorRadius(0);
-    const plan = share ? height * share(angle) : 0;
+    const plan = share ? height * share.openSpace(angle) + share.endFaces(angle) / gaps : 0;
     return radialEdges(plates, table, angle) - table.statorDeep * covered + plan;
   });
   return {

@@ -1,23 +1,53 @@
 /**
- * The plan view's share of the capacitance over the whole turn, without the open wedges that
- * facing radial edges would have by themselves: what is left changes slowly with the angle, so
- * that a few solutions carry it.
+ * What the plan view adds to the capacitance over the whole turn: the open space between the
+ * plates of each gap, without the open wedges that facing radial edges would have by themselves,
+ * and the end faces of the stack. Both change slowly with the angle, so that a few solutions
+ * carry them.
  */
 
 import type { EdgeTable } from './edge-table';
 import type { HubEdges } from './hub-edges';
-import { planCapacitance } from './plan-view';
-import { planWalls, type Polygon, type Wall, type WallOptions } from './plan-walls';
+import { endEdgeRadius, endFaceCapacitance, type EndPlate } from './end-face';
+import { planField } from './plan-view';
+import {
+  piecesBeside,
+  planWalls,
+  sidesOf,
+  type Piece,
+  type Polygon,
+  type Wall,
+  type WallKind,
+} from './plan-walls';
 import { openWedges, type EdgePlates } from './radial-edges';
+
+/** A post with its spacers, as a round column over the height of the stack, mm. */
+export interface PlanPost {
+  readonly x: number;
+  readonly y: number;
+  readonly radius: number;
+}
 
 export interface PlanShape {
   readonly plates: EdgePlates;
   /** Rotor at mesh angle 0 and stator where it stands, hub and ears included. */
   readonly rotor: Polygon;
   readonly stator: Polygon;
+  /** Inside the stator's ears or beside it. */
+  readonly posts: readonly PlanPost[];
   readonly hubRadius: number;
   /** Longest radius of the rotor, mm. */
   readonly sweepRadius: number;
+  readonly gaps: number;
+  /** The outermost plate at either end of the stack. */
+  readonly endPlates: readonly [EndPlate, EndPlate];
+}
+
+/** What the plan view adds at a mesh angle, over ε. */
+export interface PlanShare {
+  /** Per gap and unit height. */
+  readonly openSpace: (meshAngle: number) => number;
+  /** All end faces of the stack together, mm. */
+  readonly endFaces: (meshAngle: number) => number;
 }
 
 /** Solutions over the turn. */
@@ -52,11 +82,11 @@ function wrapped(angle: number): number {
  * one half as the edges close up, with the slowest mode of the strip between them.
  */
 function wallsAt(
-  { plates, hubRadius }: PlanShape,
+  { plates, hubRadius, posts }: PlanShape,
   table: EdgeTable,
   hub: HubEdges,
   meshAngle: number,
-): (kind: 'rotor' | 'stator', x: number, y: number) => Wall {
+): (kind: WallKind, x: number, y: number) => Wall {
   const { airGap: g, rotorSector, statorSector, edgeOffset, cutoutRadius } = plates;
   const leading = plates.rotorRadius(0);
   // The strip beside a plate reaches from its face to the other's mid-plane.
@@ -64,7 +94,14 @@ function wallsAt(
     (2 * (table.height - ownThickness / 2) * g) / Math.PI;
   const shared = (apart: number, reach: number): number =>
     apart < 0 ? 0 : Math.exp(-apart / reach) / 2;
+  /** A post just behind the edge is itself the wall. */
+  const toPost = (x: number, y: number): number =>
+    posts.reduce((least, post) => {
+      const apart = Math.hypot(x - post.x, y - post.y) - post.radius;
+      return Math.min(least, Math.max(0, apart));
+    }, Infinity);
   return (kind, x, y) => {
+    if (kind === 'post') return { potential: 0, setback: 0 };
     const radius = Math.hypot(x, y);
     const bearing = Math.atan2(y, x);
     if (kind === 'rotor') {
@@ -77,7 +114,7 @@ function wallsAt(
       const apart = radius * Math.sin(behind) + edgeOffset;
       return { potential: 1 - shared(apart, strip(table.rotorThickness)), setback };
     }
-    const setback = table.statorSetback * g;
+    const setback = Math.min(table.statorSetback * g, toPost(x, y));
     const short = statorSector - meshAngle;
     const line = statorSector - (edgeOffset === 0 ? 0 : Math.asin(edgeOffset / radius));
     const last = Math.abs(wrapped(bearing - line)) < ON_LINE;
@@ -107,39 +144,125 @@ function nodesBetween(
   });
 }
 
-/**
- * @param from first and last mesh angle wanted, rad
- * @returns share at a mesh angle, over ε and per unit height
- */
-export function planShare(
-  shape: PlanShape,
-  table: EdgeTable,
-  hub: HubEdges,
-  [from, to]: readonly [number, number],
-): (meshAngle: number) => number {
-  const { plates, sweepRadius } = shape;
-  const { airGap: g, rotorSector, statorSector } = plates;
-  const options: WallOptions = { shortest: g, longest: sweepRadius / 4, grading: 1.5 };
-  const flush = [0, rotorSector, statorSector, rotorSector + statorSector - 2 * Math.PI];
-  const nodes = nodesBetween(from, to, flush, (CLEAR_OF_FLUSH * g) / sweepRadius);
-  const values = nodes.map((angle) => {
-    const wallAt = wallsAt(shape, table, hub, angle);
-    const walls = planWalls(turned(shape.rotor, angle), shape.stator, wallAt, options);
-    return planCapacitance(walls) - openWedges(plates, table, angle);
-  });
+/** Area inside a polygon, mm². */
+function areaOf(polygon: Polygon): number {
+  let sum = 0;
+  const n = polygon.length;
+  for (let i = 0; i < n; i += 2) {
+    sum += polygon[i]! * polygon[(i + 3) % n]! - polygon[(i + 2) % n]! * polygon[i + 1]!;
+  }
+  return sum / 2;
+}
+
+/** Values between the nodes, by the polynomial through them (barycentric form). */
+function through(nodes: readonly number[], values: readonly number[]): (at: number) => number {
+  const span = (nodes[NODES - 1]! - nodes[0]!) / 4;
   // Barycentric weights of the nodes as they came to lie.
   const weights = nodes.map((node, i) =>
-    nodes.reduce((w, other, j) => (j === i ? w : (w * (to - from)) / 4 / (node - other)), 1),
+    nodes.reduce((w, other, j) => (j === i ? w : (w * span) / (node - other)), 1),
   );
-  return (angle) => {
+  return (at) => {
     let above = 0;
     let below = 0;
     for (let i = 0; i < NODES; i++) {
-      const apart = angle - nodes[i]!;
+      const apart = at - nodes[i]!;
       if (Math.abs(apart) < 1e-12) return values[i]!;
       above += (weights[i]! / apart) * values[i]!;
       below += weights[i]! / apart;
     }
     return above / below;
+  };
+}
+
+/** Sides of the polygon that stands for a post. */
+const POST_SIDES = 12;
+
+/** A regular polygon of the post's area, so that it has about the post's capacitance. */
+function postPolygon({ x, y, radius }: PlanPost): Polygon {
+  const corner =
+    radius * Math.sqrt((2 * Math.PI) / (POST_SIDES * Math.sin((2 * Math.PI) / POST_SIDES)));
+  return Array.from({ length: POST_SIDES }, (_, i) => (2 * Math.PI * i) / POST_SIDES).flatMap(
+    (angle) => [x + corner * Math.cos(angle), y + corner * Math.sin(angle)],
+  );
+}
+
+/** What does not turn: the stator beside its posts, and the posts beside it. */
+interface Standing {
+  readonly stator: readonly Piece[];
+  readonly post: readonly Piece[];
+}
+
+function standingOf({ stator, posts }: PlanShape): Standing {
+  const columns = posts.map(postPolygon);
+  return {
+    stator: columns.reduce(
+      (pieces, column) => piecesBeside(pieces, column, 'outside'),
+      sidesOf(stator),
+    ),
+    post: columns.flatMap((column) => piecesBeside(sidesOf(column), stator, 'outside')),
+  };
+}
+
+function planAt(
+  shape: PlanShape,
+  standing: Standing,
+  table: EdgeTable,
+  hub: HubEdges,
+  meshAngle: number,
+): { openSpace: number; endFaces: number } {
+  const { plates, stator, sweepRadius, endPlates } = shape;
+  const { airGap: g } = plates;
+  const rotor = turned(shape.rotor, meshAngle);
+  const pieces = {
+    rotor: piecesBeside(sidesOf(rotor), stator, 'outside'),
+    stator: piecesBeside(standing.stator, rotor, 'outside'),
+    post: standing.post,
+  };
+  const walls = planWalls(pieces, wallsAt(shape, table, hub, meshAngle), {
+    shortest: g,
+    longest: sweepRadius / 4,
+    grading: 1.5,
+  });
+  const field = planField(walls);
+  const height = shape.gaps * table.height * g;
+  const radius = Math.sqrt((areaOf(rotor) + areaOf(stator)) / Math.PI);
+  const faceUnder = (outermost: EndPlate): number => {
+    const [thickness, deep] =
+      outermost === 'rotor'
+        ? [table.rotorThickness, table.rotorDeep]
+        : [table.statorThickness, table.statorDeep];
+    const edgeRadius = g * endEdgeRadius(thickness, deep);
+    const sizes = { edgeRadius, height, radius };
+    return endFaceCapacitance(outermost, rotor, stator, walls, field, sizes);
+  };
+  const [first, last] = endPlates;
+  const firstFace = faceUnder(first);
+  return {
+    openSpace: field.capacitance - openWedges(plates, table, meshAngle),
+    endFaces: firstFace + (last === first ? firstFace : faceUnder(last)),
+  };
+}
+
+/** @param range first and last mesh angle wanted, rad */
+export function planShare(
+  shape: PlanShape,
+  table: EdgeTable,
+  hub: HubEdges,
+  [from, to]: readonly [number, number],
+): PlanShare {
+  const { airGap: g, rotorSector, statorSector } = shape.plates;
+  const flush = [0, rotorSector, statorSector, rotorSector + statorSector - 2 * Math.PI];
+  const nodes = nodesBetween(from, to, flush, (CLEAR_OF_FLUSH * g) / shape.sweepRadius);
+  const standing = standingOf(shape);
+  const values = nodes.map((angle) => planAt(shape, standing, table, hub, angle));
+  return {
+    openSpace: through(
+      nodes,
+      values.map((value) => value.openSpace),
+    ),
+    endFaces: through(
+      nodes,
+      values.map((value) => value.endFaces),
+    ),
   };
 }

@@ -51,11 +51,18 @@ function solveDense(matrix: Float64Array, right: Float64Array): void {
   }
 }
 
-/**
- * Capacitance over ε, per unit height, between the walls at potential 1 and those at 0, in the
- * unbounded plane. Walls in between count by their potential.
- */
-export function planCapacitance(elements: readonly WallElement[]): number {
+export interface PlanField {
+  /**
+   * Capacitance over ε, per unit height, between the walls at potential 1 and those at 0. Walls
+   * in between count by their potential.
+   */
+  readonly capacitance: number;
+  /** Flux that leaves each element into the open space, per length, 1/mm. */
+  readonly flux: Float64Array;
+}
+
+/** Solves the open space in the unbounded plane. */
+export function planField(elements: readonly WallElement[]): PlanField {
   const n = elements.length;
   const size = n + 1;
   const matrix = new Float64Array(size * size);
@@ -102,5 +109,5 @@ export function planCapacitance(elements: readonly WallElement[]): number {
   solveDense(matrix, right);
   let capacitance = 0;
   for (let i = 0; i < n; i++) capacitance += elements[i]!.potential * right[i]! * lengths[i]!;
-  return capacitance;
+  return { capacitance, flux: right.subarray(0, n) };
 }

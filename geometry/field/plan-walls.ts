@@ -5,7 +5,7 @@ import type { WallElement } from './plan-view';
 /** A plate as a polygon, counter-clockwise: x, y, x, y, … mm. */
 export type Polygon = readonly number[];
 
-interface Piece {
+export interface Piece {
   readonly ax: number;
   readonly ay: number;
   readonly bx: number;
@@ -26,24 +26,36 @@ function inside(polygon: Polygon, x: number, y: number): boolean {
   return odd;
 }
 
-/** The parts of a polygon's sides that lie outside another polygon. */
-function uncovered(polygon: Polygon, other: Polygon): Piece[] {
-  const pieces: Piece[] = [];
+export function sidesOf(polygon: Polygon): Piece[] {
   const n = polygon.length;
-  const m = other.length;
-  for (let i = 0; i < n; i += 2) {
-    const ax = polygon[i]!;
-    const ay = polygon[i + 1]!;
-    const bx = polygon[(i + 2) % n]!;
-    const by = polygon[(i + 3) % n]!;
+  return Array.from({ length: n / 2 }, (_, side) => ({
+    ax: polygon[2 * side]!,
+    ay: polygon[2 * side + 1]!,
+    bx: polygon[(2 * side + 2) % n]!,
+    by: polygon[(2 * side + 3) % n]!,
+  }));
+}
+
+/** mm. Shorter pieces are left out. */
+const SHORTEST_PIECE = 1e-9;
+
+/** The parts of straight pieces that lie outside, or inside, a polygon. */
+export function piecesBeside(
+  pieces: readonly Piece[],
+  polygon: Polygon,
+  side: 'outside' | 'inside',
+): Piece[] {
+  const parts: Piece[] = [];
+  const m = polygon.length;
+  for (const { ax, ay, bx, by } of pieces) {
     const dx = bx - ax;
     const dy = by - ay;
     const cuts = [0, 1];
     for (let j = 0; j < m; j += 2) {
-      const cx = other[j]!;
-      const cy = other[j + 1]!;
-      const ex = other[(j + 2) % m]! - cx;
-      const ey = other[(j + 3) % m]! - cy;
+      const cx = polygon[j]!;
+      const cy = polygon[j + 1]!;
+      const ex = polygon[(j + 2) % m]! - cx;
+      const ey = polygon[(j + 3) % m]! - cy;
       const cross = dx * ey - dy * ex;
       if (cross === 0) continue;
       const t = ((cx - ax) * ey - (cy - ay) * ex) / cross;
@@ -55,8 +67,9 @@ function uncovered(polygon: Polygon, other: Polygon): Piece[] {
       const from = cuts[k - 1]!;
       const to = cuts[k]!;
       const middle = (from + to) / 2;
-      if (to - from < 1e-9 || inside(other, ax + dx * middle, ay + dy * middle)) continue;
-      pieces.push({
+      if (to - from < SHORTEST_PIECE) continue;
+      if (inside(polygon, ax + dx * middle, ay + dy * middle) !== (side === 'inside')) continue;
+      parts.push({
         ax: ax + dx * from,
         ay: ay + dy * from,
         bx: ax + dx * to,
@@ -64,7 +77,7 @@ function uncovered(polygon: Polygon, other: Polygon): Piece[] {
       });
     }
   }
-  return pieces;
+  return parts;
 }
 
 function distanceTo(x: number, y: number, pieces: readonly Piece[]): number {
@@ -89,26 +102,32 @@ export interface WallOptions {
   readonly grading: number;
 }
 
+/** What stands behind a wall; posts belong to the stator. */
+export type WallKind = 'rotor' | 'stator' | 'post';
+
 /** How a stack bounds the open space: its potential, and how far behind its edge it acts, mm. */
 export type Wall = Pick<WallElement, 'potential' | 'setback'>;
 
-/**
- * @param rotor turned to its mesh angle
- * @param wallAt what a wall is whose middle is at a point
- */
+export interface PlanWall extends WallElement {
+  readonly kind: WallKind;
+}
+
+/** What of the outlines bounds the open space. */
+export interface PlanPieces {
+  /** Turned to its mesh angle. */
+  readonly rotor: readonly Piece[];
+  readonly stator: readonly Piece[];
+  readonly post: readonly Piece[];
+}
+
+/** @param wallAt what a wall is whose middle is at a point */
 export function planWalls(
-  rotor: Polygon,
-  stator: Polygon,
-  wallAt: (kind: 'rotor' | 'stator', x: number, y: number) => Wall,
+  { rotor, stator, post }: PlanPieces,
+  wallAt: (kind: WallKind, x: number, y: number) => Wall,
   { shortest, longest, grading }: WallOptions,
-): WallElement[] {
-  const kinds = [
-    { kind: 'rotor', pieces: uncovered(rotor, stator) },
-    { kind: 'stator', pieces: uncovered(stator, rotor) },
-  ] as const;
-  const elements: WallElement[] = [];
-  kinds.forEach(({ kind, pieces }, k) => {
-    const others = kinds[1 - k]!.pieces;
+): PlanWall[] {
+  const elements: PlanWall[] = [];
+  const add = (kind: WallKind, pieces: readonly Piece[], others: readonly Piece[]): void => {
     const split = ({ ax, ay, bx, by }: Piece): void => {
       const length = Math.hypot(bx - ax, by - ay);
       const mx = (ax + bx) / 2;
@@ -121,9 +140,13 @@ export function planWalls(
         split({ ax: mx, ay: my, bx, by });
         return;
       }
-      elements.push({ ax, ay, bx, by, ...wallAt(kind, mx, my) });
+      elements.push({ ax, ay, bx, by, kind, ...wallAt(kind, mx, my) });
     };
     pieces.forEach(split);
-  });
+  };
+  const standing = [...stator, ...post];
+  add('rotor', rotor, standing);
+  add('stator', stator, rotor);
+  add('post', post, rotor);
   return elements;
 }

@@ -7,7 +7,7 @@ import { builder, signIn } from '../support/sign-ins';
 test('designs are found, sorted, duplicated and deleted', async ({ page }) => {
   await signIn(page, builder);
   const name = `List ${Date.now()}`;
-  await makeDesign(page, name, 'Panel trimmer, 2.2 to 14 pF');
+  await makeDesign(page, name, 'Panel trimmer, 2.6 to 14 pF');
   await page.goto('/designs');
   await page.getByLabel('Search').fill(name);
   const rows = page.getByRole('row').filter({ has: page.getByRole('link') });

@@ -1,6 +1,6 @@
 /** The plan view's boundary elements against exact capacitances of two conductors, over ε. */
 import { describe, expect, test } from 'vitest';
-import { planCapacitance, type WallElement } from '../../geometry/field/plan-view';
+import { planField, type WallElement } from '../../geometry/field/plan-view';
 
 /** Straight elements from corner to corner, `count` to a side, metal on the left. */
 function walls(
@@ -40,7 +40,7 @@ const square = (half: number): [number, number][] => [
 const around = (corners: readonly (readonly [number, number])[]) => [...corners].reverse();
 
 test('two parallel cylinders, radius 1, axes 4 apart: π/arcosh 2 (textbook, exact)', () => {
-  const capacitance = planCapacitance([
+  const { capacitance } = planField([
     ...walls(ring(-2, 1, 160), 1, 1),
     ...walls(ring(2, 1, 160), 1, 0),
   ]);
@@ -53,7 +53,7 @@ describe.each([
   [3, 6.2155472848594],
 ])('concentric squares 1 : %i', (ratio, exact) => {
   test(`C/ε = ${exact}`, () => {
-    const capacitance = planCapacitance([
+    const { capacitance } = planField([
       ...walls(square(1), 40, 1),
       ...walls(around(square(ratio)), 40, 0),
     ]);
@@ -62,7 +62,7 @@ describe.each([
 });
 
 test('walls set back by s and S round a shaft: 2π/(ln 2 + s/1 + S/2)', () => {
-  const capacitance = planCapacitance([
+  const { capacitance } = planField([
     ...walls(ring(0, 1, 120), 1, 1, 0.1),
     ...walls(around(ring(0, 2, 120)), 1, 0, 0.2),
   ]);

@@ -5,6 +5,7 @@ import {
   createEdgeCache,
   gapCapacitance,
   sectionEdges,
+  stackCapacitance,
   type OverlapSizes,
 } from '../../geometry/field/cell-field';
 import { planShare } from '../../geometry/field/plan-share';
@@ -52,8 +53,18 @@ function statorPath(shape: StackShape, sides: number): Path {
 
 const flat = (path: Path): number[] => path.vertices.flatMap(({ x, y }) => [x, y]);
 
-/** Capacitance of half a cell over ε, mm, at fractions of the travel. */
-export function compositeOf(shape: StackShape, fractions: readonly number[]): number[] {
+/** Gaps of the short stack: three rotor plates between four stator plates. */
+const SHORT_STACK_GAPS = 6;
+
+interface Composite {
+  /** Capacitance of half a cell of the endless stack over ε, mm, at fractions of the travel. */
+  readonly halfCell: number[];
+  /** The same of the whole short stack. */
+  readonly shortStack: number[];
+}
+
+/** What the field model makes of a reference shape. */
+export function compositeOf(shape: StackShape, fractions: readonly number[]): Composite {
   const { gap: g, travel } = shape;
   const middle = travel / 2;
   const edges = sectionEdges(
@@ -87,6 +98,12 @@ export function compositeOf(shape: StackShape, fractions: readonly number[]): nu
       stator: flat(statorPath(shape, 45)),
       hubRadius: shape.hubRadius,
       sweepRadius: shape.rotor.radius,
+      gaps: SHORT_STACK_GAPS,
+      endPlates: ['stator', 'stator'],
+      posts: (shape.posts?.angles ?? []).map((angle) => ({
+        ...polar(shape.posts!.at, angle),
+        radius: shape.posts!.radius,
+      })),
     },
     edges.table,
     edges.hub,
@@ -99,5 +116,12 @@ export function compositeOf(shape: StackShape, fractions: readonly number[]): nu
     angles,
     { cutoutRadius: shape.cutoutRadius, blade },
   );
-  return angles.map((angle, i) => gapCapacitance(edges, plates, share, overlaps[i]!, angle));
+  return {
+    halfCell: angles.map((angle, i) =>
+      gapCapacitance(edges, plates, share, overlaps[i]!, angle),
+    ),
+    shortStack: angles.map((angle, i) =>
+      stackCapacitance(SHORT_STACK_GAPS, edges, plates, share, overlaps[i]!, angle),
+    ),
+  };
 }
