@@ -178,7 +178,7 @@ export const sectionParameters = {
     help: 'Coil, wiring and valve or transistor capacitance across the section, without the section itself.',
     min: 0,
     max: 5e-9,
-    default: 18e-12,
+    default: 15e-12,
     appliesTo: BAND,
   }),
   frameAllowance: capacitance('law', {

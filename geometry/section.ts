@@ -101,7 +101,12 @@ function outlinesOf({ design, turn, form }: Setting, blade: Blade) {
 
 type Outlines = Exclude<ReturnType<typeof outlinesOf>, Finding>;
 
-function shareOf(setting: Setting, blade: Blade, { rotor, stator, ears }: Outlines) {
+function shareOf(
+  setting: Setting,
+  blade: Blade,
+  { rotor, stator, ears }: Outlines,
+  near: PlanShare | null,
+): PlanShare {
   const { design, turn, edges, gaps, endPlates } = setting;
   return planShare(
     {
@@ -120,6 +125,7 @@ function shareOf(setting: Setting, blade: Blade, { rotor, stator, ears }: Outlin
     edges.table,
     edges.hub,
     [turn.meshAtOpen, turn.meshAtOpen + turn.travel],
+    near,
   );
 }
 
@@ -186,7 +192,7 @@ function solveBlade(
   for (let round = 0; round < PLAN_ROUNDS && model === 'field' && !wrong; round++) {
     const outlines = outlinesOf(setting, blade);
     if ('code' in outlines) return outlines;
-    share = shareOf(setting, blade, outlines);
+    share = shareOf(setting, blade, outlines, share);
     for (let i = 0; i < STEPS_PER_ROUND; i++) blade = nextOf(setting, problem, share, blade);
     wrong = check(blade);
   }
@@ -289,7 +295,7 @@ export function deriveSection(
     gaps,
     edges,
     plates: platesOf(setting, cutBlade),
-    share: share && shareOf(setting, cutBlade, outlines),
+    share: share && shareOf(setting, cutBlade, outlines, share),
   });
   const posts = standPosts(design, turn, outlines.ears, blade);
   const clockwise = turn.direction < 0;

@@ -4,7 +4,8 @@
  *   T'(θ) = (r² − rc²)/(2g) + Fo·√(r² + r'²) + (Fc − Fh)·rc + d/dθ[radial edges + Z·plan view]
  *
  * with r taken where the rotor's curve crosses the stator's first edge, and less what leaves over
- * its last. T is the law over ε and per gap. Everything that depends weakly on the blade is taken
+ * its last. Where the edges are set in, the crossing runs along the curve faster or slower than
+ * the shaft turns, which the terms in √(r² + r'²) and in r' feel. T is the law over ε and per gap. Everything that depends weakly on the blade is taken
  * from the blade before; r' enters implicitly, since an explicit step would amplify ripples.
  */
 
@@ -46,6 +47,13 @@ function edgeAngle(offset: number, radius: number): number {
     : Math.asin(Math.min(1, Math.max(-1, offset / Math.max(radius, 1e-9))));
 }
 
+/** How fast a crossing with an edge set in by an offset runs along the curve, per shaft angle. */
+function crossingRate(offset: number, radius: number, slope: number): number {
+  if (offset === 0) return 1;
+  const along = Math.sqrt(Math.max(radius * radius - offset * offset, 1e-9));
+  return 1 / Math.max(0.2, 1 - (offset * slope) / (radius * along));
+}
+
 /** Blade of the textbook: area and outer edge alone, to start from. */
 export function firstBlade(problem: BladeProblem, outerEdge: number): Blade {
   const { airGap, cutoutRadius: rc, rotorSector, from, to } = problem;
@@ -74,20 +82,24 @@ export function nextBlade(problem: BladeProblem, before: Blade, field: CellField
     if (meshAngle < problem.from - step / 2 || meshAngle > problem.to + step / 2) continue;
     const within = Math.min(Math.max(meshAngle, problem.from), problem.to);
     let wanted = problem.wanted(within) - slopeOfRest(within);
-    const leaving = phi - statorSector;
+    const leading = before.radius[0]!;
+    const leaving = meshAngle - statorSector + edgeAngle(edgeOffset, leading);
     if (leaving <= 0) wanted -= (cutoutUnderBlade - besideBlade) * rc;
     else {
       // What leaves was solved some steps ago: it may be of this blade already.
       const solved = first >= 0 && leaving >= (first + 1) * step;
       const out = bladeRadius(solved ? { sector: rotorSector, radius } : before, leaving);
-      const outSlope = slope[Math.round(leaving / step)]!;
-      wanted += (out * out - rc * rc) / (2 * g) + outerEdge * Math.hypot(out, outSlope);
+      const outSlope = slope[Math.min(Math.round(leaving / step), BLADE_STEPS)]!;
+      const outRate = crossingRate(-edgeOffset, out, outSlope);
+      wanted +=
+        (out * out - rc * rc) / (2 * g) + outerEdge * outRate * Math.hypot(out, outSlope);
     }
     const dr0 = slope[i]!;
     const side = Math.hypot(r0, dr0) || 1;
     // Length of the outer edge, linear about the blade before: (r0·r + r0'·r')/side.
-    const perSlope = coveredEdge + (outerEdge * dr0) / side;
-    const perRadius = (outerEdge * r0) / side;
+    const rate = crossingRate(edgeOffset, r0, dr0);
+    const perSlope = rate * (coveredEdge + (outerEdge * dr0) / side);
+    const perRadius = (rate * outerEdge * r0) / side;
     const known = wanted + (rc * rc) / (2 * g);
     if (first < 0 || perSlope <= 0) {
       if (first < 0) first = i;

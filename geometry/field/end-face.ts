@@ -20,50 +20,111 @@ import { piecesBeside, sidesOf, type PlanWall, type Polygon } from './plan-walls
 
 /** A straight piece of a line in plan, with what the potential does there. */
 interface Layer {
+  /** Its middle, and the way from its beginning to its end, mm. */
   readonly x: number;
   readonly y: number;
-  /** Half of the piece, as a vector. */
-  readonly hx: number;
-  readonly hy: number;
-  /** Length, mm. */
-  readonly length: number;
-  /** Flux that leaves the line, per length. */
+  readonly dx: number;
+  readonly dy: number;
+  /** Flux that leaves the piece. */
   readonly flux: number;
   /** Potential on the left going along the piece, less that on the right. */
   readonly step: number;
 }
 
-/** Pieces are halved until they are shorter than this times their distance. */
-const NEAR = 1;
-
+/** Sum over two pieces, the longer of which is halved until it is shorter than their distance. */
 function pairSum(a: Layer, b: Layer, square: number): number {
-  const dx = b.x - a.x;
-  const dy = b.y - a.y;
-  const rho2 = dx * dx + dy * dy + square;
-  const longer = a.length > b.length ? a : b;
-  if (longer.length * longer.length > NEAR * NEAR * rho2) {
-    const half = { ...longer, hx: longer.hx / 2, hy: longer.hy / 2, length: longer.length / 2 };
-    const low = { ...half, x: longer.x - half.hx, y: longer.y - half.hy };
-    const high = { ...half, x: longer.x + half.hx, y: longer.y + half.hy };
-    return longer === a
-      ? pairSum(low, b, square) + pairSum(high, b, square)
-      : pairSum(a, low, square) + pairSum(a, high, square);
+  return sumOf(
+    a.x,
+    a.y,
+    a.dx,
+    a.dy,
+    a.flux,
+    a.step,
+    b.x,
+    b.y,
+    b.dx,
+    b.dy,
+    b.flux,
+    b.step,
+    square,
+  );
+}
+
+// Bare numbers: this runs some hundred thousand times for each design.
+function sumOf(
+  ax: number,
+  ay: number,
+  adx: number,
+  ady: number,
+  aFlux: number,
+  aStep: number,
+  bx: number,
+  by: number,
+  bdx: number,
+  bdy: number,
+  bFlux: number,
+  bStep: number,
+  square: number,
+): number {
+  const x = bx - ax;
+  const y = by - ay;
+  const rho2 = x * x + y * y + square;
+  const a2 = adx * adx + ady * ady;
+  const b2 = bdx * bdx + bdy * bdy;
+  if (a2 > rho2 && a2 >= b2) {
+    const hx = adx / 2;
+    const hy = ady / 2;
+    const half = aFlux / 2;
+    return (
+      sumOf(
+        ax - hx / 2,
+        ay - hy / 2,
+        hx,
+        hy,
+        half,
+        aStep,
+        bx,
+        by,
+        bdx,
+        bdy,
+        bFlux,
+        bStep,
+        square,
+      ) +
+      sumOf(
+        ax + hx / 2,
+        ay + hy / 2,
+        hx,
+        hy,
+        half,
+        aStep,
+        bx,
+        by,
+        bdx,
+        bdy,
+        bFlux,
+        bStep,
+        square,
+      )
+    );
+  }
+  if (b2 > rho2) {
+    return sumOf(bx, by, bdx, bdy, bFlux, bStep, ax, ay, adx, ady, aFlux, aStep, square);
   }
   const rho = Math.sqrt(rho2);
-  const area = a.length * b.length;
-  let sum = -a.flux * b.flux * area * rho;
-  if (a.step !== 0 || b.step !== 0) {
-    // Tangents times length; normals point to the left.
-    const ax = 2 * a.hx;
-    const ay = 2 * a.hy;
-    const bx = 2 * b.hx;
-    const by = 2 * b.hy;
-    const along = (ax * dx + ay * dy) * (bx * dx + by * dy);
-    sum += (a.step * b.step * (along + square * (ax * bx + ay * by))) / (rho2 * rho);
-    sum -= (a.flux * a.length * b.step * (bx * dy - by * dx)) / rho;
-    sum += (b.flux * b.length * a.step * (ax * dy - ay * dx)) / rho;
-  }
-  return sum;
+  const along = (adx * x + ady * y) * (bdx * x + bdy * y);
+  const across = aStep * bStep * (along + square * (adx * bdx + ady * bdy));
+  // Normals point to the left.
+  const mixed = bFlux * aStep * (adx * y - ady * x) - aFlux * bStep * (bdx * y - bdy * x);
+  return across / (rho2 * rho) + mixed / rho - aFlux * bFlux * rho;
+}
+
+/** Sum over a piece with itself: exact in its step, nearly so in its flux. */
+function selfSum({ dx, dy, flux, step }: Layer, radius: number): number {
+  const length = Math.hypot(dx, dy);
+  const rho = Math.hypot(length, radius);
+  const stepped = 2 * (length * Math.asinh(length / radius) - rho + radius);
+  return step * step * stepped - flux * flux * Math.hypot(length / 3, radius);
 }
 
 /** C/ε of the field over a plane whose potential has these layers, mm. */
@@ -71,19 +132,27 @@ function overPlane(layers: readonly Layer[], radius: number): number {
   const square = radius * radius;
   let sum = 0;
   for (let i = 0; i < layers.length; i++) {
-    sum += pairSum(layers[i]!, layers[i]!, square);
-    for (let j = i + 1; j < layers.length; j++)
-      sum += 2 * pairSum(layers[i]!, layers[j]!, square);
+    const own = layers[i]!;
+    sum += selfSum(own, radius);
+    for (let j = i + 1; j < layers.length; j++) sum += 2 * pairSum(own, layers[j]!, square);
   }
   return sum / TWO_PI;
 }
 
 type Line = Pick<PlanWall, 'ax' | 'ay' | 'bx' | 'by'>;
 
+/** @param flux per length */
 function layerOf({ ax, ay, bx, by }: Line, flux: number, step: number): Layer {
-  const hx = (bx - ax) / 2;
-  const hy = (by - ay) / 2;
-  return { x: ax + hx, y: ay + hy, hx, hy, length: 2 * Math.hypot(hx, hy), flux, step };
+  const dx = bx - ax;
+  const dy = by - ay;
+  return {
+    x: (ax + bx) / 2,
+    y: (ay + by) / 2,
+    dx,
+    dy,
+    flux: flux * Math.hypot(dx, dy),
+    step,
+  };
 }
 
 /** Which plate lies outermost at an end of the stack. */
@@ -136,7 +205,7 @@ export function endFaceCapacitance(
   let stepped = 0;
   for (const piece of piecesBeside(sidesOf(above), below, 'inside')) {
     const layer = layerOf(piece, 0, step);
-    stepped += layer.length;
+    stepped += Math.hypot(layer.dx, layer.dy);
     layers.push(layer);
   }
   const whole = overPlane(layers, edgeRadius);

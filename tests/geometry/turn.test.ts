@@ -57,14 +57,31 @@ test('rests can be set', () => {
   expect(turn.lawTo).toBeCloseTo(168 * DEGREE, 12);
 });
 
-// Two gaps in and two out; four gaps miss by 0.14 %, six by 0.21 %, which the checks then say.
-test.each([1, -1])('stator edges set in by %f mm: the law is held', (offset) => {
+// Up to six gaps in and two out.
+test.each([
+  ['frequency', 1],
+  ['frequency', 2],
+  ['logarithmic', 1],
+  ['logarithmic', 3],
+  ['wavelength', 1],
+  ['wavelength', -1],
+] as const)('law %s, stator edges set in by %f mm: the law is held', (law, offset) => {
   const { sections } = derived((design) => {
     design.statorEdgeOffset = offset;
-    design.sections[0]!.law = 'wavelength';
+    design.sections[0]!.law = law;
   });
   expect(sections[0]!.law.largestInner.fraction).toBeLessThan(1e-3);
 });
+
+test.each(['capacitance', 'wavelength', 'frequency', 'logarithmic'] as const)(
+  'law %s with everything else as a new design has it: held, and nothing fails',
+  (law) => {
+    const { sections, findings } = derived((design) => (design.sections[0]!.law = law));
+    expect(sections[0]!.law.largestInner.fraction).toBeLessThan(1e-3);
+    expect(sections[0]!.law.fallsAt).toBeNull();
+    expect(findings.filter(({ severity }) => severity === 'fail')).toEqual([]);
+  },
+);
 
 test('clockwise plates are the anticlockwise ones, mirrored', () => {
   const one = derived(() => undefined);
