@@ -28,7 +28,7 @@ export function shapeFindings(design: Design, section: Section, index: number): 
       section: index,
       label: 'Rotor and stator plates alternate',
       value: statorPlates,
-      limit: rotorPlates + 1,
+      limit: statorPlates > rotorPlates ? rotorPlates + 1 : Math.max(1, rotorPlates - 1),
       quantity: 'count',
       change: `Take ${Math.max(1, rotorPlates - 1)} to ${rotorPlates + 1} stator plates for ${rotorPlates} rotor plates.`,
       parameters: ['statorPlates', 'rotorPlates'],
