@@ -29,6 +29,8 @@ export interface Plate {
 }
 
 export interface Post {
+  /** Which stator of the section it carries. */
+  readonly stator: number;
   readonly x: number;
   readonly y: number;
   readonly holeRadius: number;
@@ -62,6 +64,8 @@ export interface LawCheck {
   readonly largestError: LawError;
   /** The same between 5 % and 95 % of the law. */
   readonly largestInner: LawError;
+  /** Capacitance to the second stator with its frame allowance, F, where there is one. */
+  readonly other: readonly number[] | null;
   /** First shaft angle within the law at which the capacitance does not rise, or null. */
   readonly fallsAt: number | null;
 }
@@ -92,8 +96,16 @@ export interface SectionResult {
   readonly trimmer: number;
   /** Coil inductance when a band is given, H. */
   readonly inductance: number | null;
-  /** Gaps between facing plates. */
+  /** Gaps between facing plates of one blade and its stator. */
   readonly gaps: number;
+  /** Where the stators stand in plan, rad from the one that is drawn. */
+  readonly statorAngles: readonly number[];
+  /** Between what the capacitance is counted. */
+  readonly terminals: string;
+  /** mm */
+  readonly airGap: number;
+  /** Air gap that has the capacitance of the gap with its film or disc, mm. */
+  readonly electricalGap: number;
   readonly model: FieldModel;
   readonly statorForm: 'even' | 'following';
   readonly rotor: Plate;
@@ -111,6 +123,10 @@ export interface SectionResult {
 export interface StackPlate {
   readonly role: PlateRole;
   readonly section: number;
+  /** Which set of plates of its section. */
+  readonly pack: number;
+  /** How far it is turned from the plate as drawn, rad. */
+  readonly angle: number;
   /** Middle of the plate along the shaft, mm, from the first face of the stack. */
   readonly z: number;
   readonly thickness: number;
@@ -119,6 +135,7 @@ export interface StackPlate {
 export interface StackSpacer {
   readonly role: PlateRole;
   readonly section: number;
+  readonly pack: number;
   readonly z: number;
   readonly length: number;
 }

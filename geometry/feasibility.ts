@@ -1,5 +1,6 @@
 /** Checks before cutting: what leaves no plate at all. Each says what to change, by how much. */
 
+import { arrangementOf } from './arrangement';
 import { longestRadius, type Blade } from './blade';
 import type { Turn } from './derived';
 import type { Design, Section } from './design';
@@ -13,6 +14,9 @@ const mm = (value: number): string => formatQuantity(value, 'length', 4);
 
 /** mm. Plates beyond this are not drawn: twice the largest radius that a design may ask for. */
 const LARGEST_DRAWN = 600;
+
+/** rad. Two blades or two stators leave at least this between them. */
+const LEAST_BETWEEN = (4 * Math.PI) / 180;
 
 /** rad. A law over less than this is not one to cut plates for. */
 const LEAST_LAW = (20 * Math.PI) / 180;
@@ -32,6 +36,33 @@ export function shapeFindings(design: Design, section: Section, index: number): 
       quantity: 'count',
       change: `Take ${Math.max(1, rotorPlates - 1)} to ${rotorPlates + 1} stator plates for ${rotorPlates} rotor plates.`,
       parameters: ['statorPlates', 'rotorPlates'],
+    });
+  }
+  const { dielectric, filmThickness, airGap } = section;
+  if (dielectric === 'film' && filmThickness >= airGap) {
+    findings.push({
+      code: 'web-thin',
+      severity: 'fail',
+      section: index,
+      label: 'Air left beside the film',
+      value: airGap - filmThickness,
+      limit: 0,
+      quantity: 'length',
+      change: `Take a film thinner than the air gap of ${mm(airGap)}, or a solid disc.`,
+      parameters: ['filmThickness', 'airGap'],
+    });
+  }
+  if (dielectric === 'disc' && rotorPlates + statorPlates > 2) {
+    findings.push({
+      code: 'plate-counts',
+      severity: 'fail',
+      section: index,
+      label: 'One rotor and one stator plate on the disc',
+      value: rotorPlates + statorPlates,
+      limit: 2,
+      quantity: 'count',
+      change: 'A solid disc lies between one rotor and one stator plate: take one of each.',
+      parameters: ['rotorPlates', 'statorPlates'],
     });
   }
   const shaft = design.shaftDiameter / 2;
@@ -123,15 +154,39 @@ export function turnFindings(design: Design, turn: Turn): Finding[] {
       }),
     );
   }
-  // At the open stop the trailing edge must not have reached the stator's last edge.
-  const apart = 2 * Math.PI - travel - statorSector;
-  if (apart < -1e-9) {
+  const { lobes, stators, passesOn } = arrangementOf(design);
+  const pitch = (2 * Math.PI) / lobes;
+  if (lobes > 1 && rotorSector >= pitch - LEAST_BETWEEN) {
+    findings.push(
+      finding({
+        label: 'Rotor sector, with two blades',
+        value: rotorSector,
+        limit: pitch / 2,
+        change: `Two blades take a quarter turn each: make rotor and stator sector about ${degrees(0.47 * pitch)} and the travel about ${degrees(0.49 * pitch)}.`,
+        parameters: ['rotorSector', 'statorSector', 'travel'],
+      }),
+    );
+  }
+  if (stators.length > 1 && statorSector > Math.PI - LEAST_BETWEEN) {
+    findings.push(
+      finding({
+        label: 'Stator sector, with two stators',
+        value: statorSector,
+        limit: Math.PI - LEAST_BETWEEN,
+        change: `Two stators share the turn: make the stator sector at most ${degrees(Math.PI - LEAST_BETWEEN)}.`,
+        parameters: ['statorSector'],
+      }),
+    );
+  }
+  // At the open stop the trailing edge must not have reached the last edge of the next stator.
+  const apart = pitch - travel - statorSector;
+  if (apart < -1e-9 && !passesOn) {
     findings.push(
       finding({
         label: 'Room behind the rotor at the open stop',
         value: apart,
         limit: 0,
-        change: `Make the stator sector at most ${degrees(2 * Math.PI - travel)} for this travel.`,
+        change: `Make the stator sector at most ${degrees(pitch - travel)} for this travel.`,
         parameters: ['statorSector', 'travel'],
       }),
     );

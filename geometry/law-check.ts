@@ -27,6 +27,14 @@ export interface LawCheckInput {
   readonly plates: EdgePlates;
   /** Without one, the edges alone count. */
   readonly share: PlanShare | null;
+  /** Allowance for insulators and frame, F: all that the second stator has besides its plates. */
+  readonly frame: number;
+  /** The second stator of a rotor that passes on. */
+  readonly farSide: {
+    readonly plates: EdgePlates;
+    readonly share: PlanShare | null;
+    readonly meshAngle: (meshAngle: number) => number;
+  } | null;
 }
 
 export interface CheckedLaw {
@@ -65,6 +73,22 @@ function worst(
   });
   const capacitance = error[at]!;
   return { fraction: Math.abs(capacitance) / range, capacitance, angle: angle[at]! };
+}
+
+/** Capacitance to the second stator, which stands half a turn on, F. */
+function toSecondStator(
+  { farSide, frame, permittivity, gaps, edges, rotor, stator }: LawCheckInput,
+  mesh: readonly number[],
+  curves: Parameters<typeof overlapAt>[3],
+): number[] | null {
+  if (!farSide) return null;
+  const { plates, share, meshAngle } = farSide;
+  const seen = mesh.map((angle) => angle - Math.PI);
+  return overlapAt(rotor, stator, seen, curves).map(
+    (overlap, i) =>
+      frame +
+      permittivity * stackCapacitance(gaps, edges, plates, share, overlap, meshAngle(mesh[i]!)),
+  );
 }
 
 /**
@@ -110,6 +134,7 @@ export function checkLaw(input: LawCheckInput): CheckedLaw {
         ({ area }) => totalMin + (perArea * (area - overlaps[begins]!.area)) / plates.airGap,
       ),
       error,
+      other: toSecondStator(input, mesh, curves),
       from: turn.lawFrom,
       to: turn.lawTo,
       largestError: worst(error, angle, range, [turn.lawFrom, turn.lawTo]),

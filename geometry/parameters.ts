@@ -235,10 +235,39 @@ export const sectionParameters = {
   }),
   permittivity: ratio('stack', {
     label: 'Relative permittivity',
-    help: 'Of what fills the gap. Dry air at 20 °C and 1013 hPa: 1.000537.',
+    help: 'Of the air or other gas or liquid in the gap. Dry air at 20 °C and 1013 hPa: 1.000537.',
     min: 1,
     max: 100,
     default: 1.000537,
+  }),
+  dielectric: choice<'air' | 'film' | 'disc'>('stack', {
+    label: 'Between the plates',
+    help: 'Air; a film in each gap with air beside it; or one solid disc that fills the gap between one rotor and one stator plate.',
+    options: [
+      { value: 'air', label: 'air' },
+      { value: 'film', label: 'film and air' },
+      { value: 'disc', label: 'solid disc' },
+    ],
+    default: 'air',
+    cameLater: true,
+  }),
+  filmThickness: length('stack', {
+    label: 'Film thickness',
+    help: 'Of the film in each gap; air fills the rest.',
+    min: 0.005,
+    max: 10,
+    default: 0.05,
+    appliesTo: { dielectric: ['film'] },
+    cameLater: true,
+  }),
+  filmPermittivity: ratio('stack', {
+    label: 'Permittivity of film or disc',
+    help: 'Relative. Handbook ranges: mica 5.4, PTFE 2.1, polyethylene 2.25 to 2.3, polystyrene 2.5 to 2.6. Ceramics: as their maker says.',
+    min: 1,
+    max: 5000,
+    default: 2.1,
+    appliesTo: { dielectric: ['film', 'disc'] },
+    cameLater: true,
   }),
   workingVoltage: voltage('stack', {
     label: 'Working voltage, peak',
@@ -251,6 +280,18 @@ export const sectionParameters = {
 
 /** Parameters that all sections on the shaft share. */
 export const sharedParameters = {
+  arrangement: choice<'single' | 'differential' | 'split-stator' | 'butterfly'>('turn', {
+    label: 'Arrangement',
+    help: 'One stator; one rotor that passes from a stator into another; two equal sets of plates in series, stator to stator; or two blades and two stators in series, on a quarter turn.',
+    options: [
+      { value: 'single', label: 'single' },
+      { value: 'differential', label: 'differential' },
+      { value: 'split-stator', label: 'split stator' },
+      { value: 'butterfly', label: 'butterfly' },
+    ],
+    default: 'single',
+    cameLater: true,
+  }),
   travel: angle('turn', {
     label: 'Travel',
     help: 'Shaft rotation from the open to the meshed stop.',

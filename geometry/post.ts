@@ -1,21 +1,14 @@
 /** Posts that carry the stator: where they stand and how far the rotor stays from them. */
 
+import { arrangementOf, passesOf } from './arrangement';
 import { bladeRadius, type Blade } from './blade';
 import type { Design } from './design';
 import type { Post, Turn } from './derived';
 import type { EarShape } from './ear';
 import { polar } from './polar';
 
-/**
- * Smallest distance from a point in the stator's frame to the rotor's sweep, mm; negative inside
- * it. Each point of the blade sweeps an arc, from its place at the open stop to the meshed.
- */
-export function distanceToSweep(
-  blade: Blade,
-  turn: Turn,
-  radius: number,
-  angle: number,
-): number {
+/** Distance from a point to the sweep of one blade, mm; negative inside it. */
+function distanceToBlade(blade: Blade, turn: Turn, radius: number, angle: number): number {
   const last = blade.radius.length - 1;
   let nearest = Infinity;
   let covered = 0;
@@ -38,11 +31,35 @@ export function distanceToSweep(
   return radius <= covered ? -nearest : nearest;
 }
 
+/**
+ * Smallest distance from a point in the stator's frame to the rotor's sweep, mm; negative inside
+ * it. Each point of the blade sweeps an arc, from its place at the open stop to the meshed.
+ * @param passes angles apart at which a blade passes: with two blades or two stators also half a
+ *   turn away
+ */
+export function distanceToSweep(
+  blade: Blade,
+  turn: Turn,
+  passes: readonly number[],
+  radius: number,
+  angle: number,
+): number {
+  return Math.min(
+    ...passes.map((apart) => distanceToBlade(blade, turn, radius, angle + apart)),
+  );
+}
+
 /** Nearest distance of a post from the shaft that keeps a clearance from the sweep, mm. */
-function nearestRadius(blade: Blade, turn: Turn, angle: number, clearance: number): number {
+function nearestRadius(
+  blade: Blade,
+  turn: Turn,
+  passes: readonly number[],
+  angle: number,
+  clearance: number,
+): number {
   let radius = bladeRadius(blade, blade.sector - angle) + clearance;
   for (let pass = 0; pass < 30; pass++) {
-    const short = clearance - distanceToSweep(blade, turn, radius, angle);
+    const short = clearance - distanceToSweep(blade, turn, passes, radius, angle);
     if (short <= 1e-9) break;
     radius += short;
   }
@@ -67,7 +84,8 @@ export function layOutEars(
     { length: postCount },
     (_, i) => (statorSector * (i + 0.5)) / postCount,
   );
-  const own = angles.map((angle) => nearestRadius(blade, turn, angle, clearance));
+  const passes = passesOf(arrangementOf(design));
+  const own = angles.map((angle) => nearestRadius(blade, turn, passes, angle, clearance));
   const furthest = Math.max(...own);
   return angles.map((angle, i) => ({
     angle,
@@ -76,16 +94,23 @@ export function layOutEars(
   }));
 }
 
+/** The posts of all stators. */
 export function standPosts(
   design: Design,
   turn: Turn,
   ears: readonly EarShape[],
   blade: Blade,
 ): Post[] {
-  return ears.map(({ angle, circleRadius }) => ({
-    ...polar(circleRadius, angle),
-    holeRadius: design.postHoleDiameter / 2,
-    spacerRadius: design.postSpacerRadius,
-    clearance: distanceToSweep(blade, turn, circleRadius, angle) - design.postSpacerRadius,
-  }));
+  const arrangement = arrangementOf(design);
+  const passes = passesOf(arrangement);
+  return arrangement.stators.flatMap((standsAt, stator) =>
+    ears.map(({ angle, circleRadius }) => ({
+      ...polar(circleRadius, angle + standsAt),
+      stator,
+      holeRadius: design.postHoleDiameter / 2,
+      spacerRadius: design.postSpacerRadius,
+      clearance:
+        distanceToSweep(blade, turn, passes, circleRadius, angle) - design.postSpacerRadius,
+    })),
+  );
 }

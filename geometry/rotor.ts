@@ -5,6 +5,12 @@ import type { Circle, Path, Vertex } from './outline';
 import { arcVertices, polar } from './polar';
 import { CURVE_READING, FIT_AT_SAMPLES } from './tolerances';
 
+function turnVertex({ x, y, bulge }: Vertex, angle: number): Vertex {
+  const cos = Math.cos(angle);
+  const sin = Math.sin(angle);
+  return { x: x * cos - y * sin, y: x * sin + y * cos, bulge };
+}
+
 export interface RotorOutline {
   readonly outside: Path;
   readonly holes: readonly Circle[];
@@ -39,6 +45,7 @@ function curveInPlan(blade: Blade): CurveSamples {
 /**
  * The rotor plate at mesh angle 0: leading edge along +x, blade behind it, hub all round.
  *
+ * @param lobes equal blades, evenly round the shaft
  * @param blade radius over the hub radius everywhere, mm
  * @param hubRadius mm
  * @param shaftDiameter mm
@@ -47,13 +54,21 @@ export function rotorOutline(
   blade: Blade,
   hubRadius: number,
   shaftDiameter: number,
+  lobes: 1 | 2,
 ): RotorOutline {
   const fitted = fitArcs(curveInPlan(blade), FIT_AT_SAMPLES);
   const tip: Vertex = { x: blade.radius[0]!, y: 0, bulge: 0 };
-  const hub = arcVertices(hubRadius, 0, 2 * Math.PI - blade.sector);
+  const pitch = (2 * Math.PI) / lobes;
+  const hub = arcVertices(hubRadius, 0, pitch - blade.sector);
   const root: Vertex = { ...polar(hubRadius, -blade.sector), bulge: 0 };
+  const lobe = [...fitted.vertices, tip, ...hub];
+  // From the first lobe round to the next one's trailing edge; the last closes at the first's.
+  const vertices: Vertex[] =
+    lobes === 1
+      ? [...lobe, root]
+      : [...lobe, turnVertex(root, Math.PI), ...lobe.map((v) => turnVertex(v, Math.PI)), root];
   return {
-    outside: { kind: 'path', vertices: [...fitted.vertices, tip, ...hub, root] },
+    outside: { kind: 'path', vertices },
     holes: [{ kind: 'circle', x: 0, y: 0, radius: shaftDiameter / 2 }],
     fitDeviation: fitted.deviation,
   };

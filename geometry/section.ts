@@ -1,42 +1,39 @@
 /** Derives one section: target, blade, both plates, posts and the back-check. */
 
+import { arrangementOf, gapsOf } from './arrangement';
 import { longestRadius, shortestRadius, type Blade } from './blade';
 import { EPSILON_0 } from './constants';
-import type { Design, Section } from './design';
-import type { FieldModel, Plate, PlateRole, Post, SectionResult, Turn } from './derived';
-import { layOutEars, standPosts } from './post';
-import {
-  bladeFinding,
-  earFinding,
-  hugeFinding,
-  ON_LEAST_RADIUS,
-  postFinding,
-  shapeFindings,
-} from './feasibility';
-import { cellField, sectionEdges, type EdgeCache, type SectionEdges } from './field/cell-field';
-import { planShare, type PlanShare } from './field/plan-share';
-import type { EdgePlates } from './field/radial-edges';
+import type { FieldModel, Plate, Post, SectionResult, Turn } from './derived';
+import type { Design } from './design';
+import { electricalGap } from './dielectric';
+import { bladeFinding, hugeFinding, ON_LEAST_RADIUS, shapeFindings } from './feasibility';
+import { cellField, sectionEdges, type EdgeCache } from './field/cell-field';
+import type { PlanShare } from './field/plan-share';
 import type { Finding } from './finding';
-import { flatten } from './flatten';
 import { lawBetween, type Law } from './law';
-import { checkLaw, edgePlates } from './law-check';
+import { checkLaw } from './law-check';
 import { sheetMaterials } from './material';
 import { contourArea, contourLength } from './measure';
-import { polar } from './polar';
 import { mirrorCircle, mirrorPath, mirrorPoint } from './mirror';
-import { bladeOf, rotorOutline } from './rotor';
+import { standPosts } from './post';
+import { bladeOf } from './rotor';
+import {
+  farSideOf,
+  outlinesOf,
+  platesOf,
+  shareOf,
+  type Outlines,
+  type Setting,
+} from './setting';
 import { BLADE_STEPS, firstBlade, nextBlade, type BladeProblem } from './solve-blade';
 import { endPlatesOf, rotorSpacerLength, statorSpacerLength } from './stack';
-import { statorFormOf, statorOutline, statorRadius, type StatorForm } from './stator';
+import { statorFormOf } from './stator';
 import { targetOf } from './target';
 
 /** Steps of the inverse with the edges alone, then rounds with the plan view, and steps in each. */
 const EDGE_STEPS = 5;
 const PLAN_ROUNDS = 1;
 const STEPS_PER_ROUND = 2;
-
-/** mm. Sagitta of the polygons on which the plan view is solved. */
-const PLAN_SAGITTA = 0.1;
 
 type Cut = Pick<
   Plate,
@@ -63,70 +60,6 @@ function mirrored(plate: Plate): Plate {
     outside: outside.kind === 'path' ? mirrorPath(outside) : mirrorCircle(outside),
     holes: holes.map(mirrorCircle),
   };
-}
-
-/** What stays the same while the blade is solved. */
-interface Setting {
-  readonly design: Design;
-  readonly turn: Turn;
-  readonly form: StatorForm;
-  readonly edges: SectionEdges;
-  readonly airGap: number;
-  readonly gaps: number;
-  readonly endPlates: readonly [PlateRole, PlateRole];
-}
-
-function platesOf({ design, form, airGap }: Setting, blade: Blade): EdgePlates {
-  const radiusAt = statorRadius(form, blade, design.overhang);
-  return edgePlates(blade, {
-    statorFirst: radiusAt(0),
-    statorLast: radiusAt(design.statorSector),
-    statorSector: design.statorSector,
-    cutoutRadius: design.cutoutRadius,
-    edgeOffset: design.statorEdgeOffset,
-    airGap,
-  });
-}
-
-/** Both outlines for a blade, or the finding that says why there is none. */
-function outlinesOf({ design, turn, form }: Setting, blade: Blade) {
-  const radiusAt = statorRadius(form, blade, design.overhang);
-  const ears = layOutEars(design, turn, blade, form);
-  const crowded = postFinding(design, ears) ?? earFinding(design, ears, radiusAt);
-  if (crowded) return crowded;
-  const stator = statorOutline(design, ears, radiusAt);
-  if (!stator) return earFinding(design, ears, radiusAt, true)!;
-  return { rotor: rotorOutline(blade, design.hubRadius, design.shaftDiameter), stator, ears };
-}
-
-type Outlines = Exclude<ReturnType<typeof outlinesOf>, Finding>;
-
-function shareOf(
-  setting: Setting,
-  blade: Blade,
-  { rotor, stator, ears }: Outlines,
-  near: PlanShare | null,
-): PlanShare {
-  const { design, turn, edges, gaps, endPlates } = setting;
-  return planShare(
-    {
-      plates: platesOf(setting, blade),
-      rotor: flatten(rotor.outside, PLAN_SAGITTA),
-      stator: flatten(stator.outside, PLAN_SAGITTA),
-      hubRadius: design.hubRadius,
-      sweepRadius: longestRadius(blade),
-      gaps,
-      endPlates,
-      posts: ears.map(({ angle, circleRadius }) => ({
-        ...polar(circleRadius, angle),
-        radius: design.postSpacerRadius,
-      })),
-    },
-    edges.table,
-    edges.hub,
-    [turn.meshAtOpen, turn.meshAtOpen + turn.travel],
-    near,
-  );
 }
 
 export type SectionOutcome =
@@ -201,25 +134,21 @@ function solveBlade(
   return 'code' in outlines ? outlines : { blade, outlines, share };
 }
 
-function problemOf(
-  setting: Setting,
-  section: Section,
-  law: Law,
-  permittivityGaps: number,
-): BladeProblem {
-  const { design, turn } = setting;
+/** @param scale of the law's capacitance to what one blade has per gap, over ε, F/mm */
+function problemOf(setting: Setting, law: Law, scale: number): BladeProblem {
+  const { design, turn, airGap } = setting;
   const from = turn.meshAtOpen + turn.lawFrom;
   const to = turn.meshAtOpen + turn.lawTo;
   return {
-    wanted: (angle) => law.slope((angle - from) / (to - from)) / (to - from) / permittivityGaps,
+    wanted: (angle) => law.slope((angle - from) / (to - from)) / (to - from) / scale,
     from,
     to,
     rotorSector: design.rotorSector,
     statorSector: design.statorSector,
-    airGap: section.airGap,
+    airGap,
     cutoutRadius: design.cutoutRadius,
     edgeOffset: design.statorEdgeOffset,
-    leastRadius: design.cutoutRadius + section.airGap / 2,
+    leastRadius: design.cutoutRadius + airGap / 2,
   };
 }
 
@@ -238,21 +167,25 @@ export function deriveSection(
   if (blocked.length > 0) return refused(...blocked);
 
   const { totalMin, totalMax, stray, inductance } = target;
-  const gaps = section.rotorPlates + section.statorPlates - 1;
+  const arrangement = arrangementOf(design);
+  const gaps = gapsOf(section);
+  const airGap = electricalGap(section);
   const law = lawBetween(section.law, totalMin, totalMax);
-  const permittivityGaps = EPSILON_0 * section.permittivity * gaps;
-  const edges = sectionEdges({ ...design, ...section }, cache);
-  const form = statorFormOf(section);
+  const edges = sectionEdges({ ...design, ...section, airGap }, cache);
+  const form = statorFormOf(section, arrangement);
   const setting: Setting = {
     design,
+    section,
+    arrangement,
     turn,
     form,
     edges,
-    airGap: section.airGap,
+    airGap,
     gaps,
     endPlates: endPlatesOf(section),
   };
-  const problem = problemOf(setting, section, law, permittivityGaps);
+  const permittivity = EPSILON_0 * section.permittivity * arrangement.share;
+  const problem = problemOf(setting, law, permittivity * gaps);
   const solved = solveBlade(
     setting,
     problem,
@@ -271,7 +204,7 @@ export function deriveSection(
     holes: outlines.rotor.holes,
     fitDeviation: outlines.rotor.fitDeviation,
     thickness: section.rotorThickness,
-    quantity: section.rotorPlates,
+    quantity: section.rotorPlates * arrangement.packs,
   });
   const stator = plateOf(design, index, {
     role: 'stator',
@@ -279,7 +212,7 @@ export function deriveSection(
     holes: outlines.stator.holes,
     fitDeviation: outlines.stator.fitDeviation,
     thickness: section.statorThickness,
-    quantity: section.statorPlates,
+    quantity: section.statorPlates * arrangement.packs * arrangement.stators.length,
   });
   const cutBlade = bladeOf(outlines.rotor.outside, design.rotorSector, BLADE_STEPS);
   const checked = checkLaw({
@@ -291,11 +224,15 @@ export function deriveSection(
     rotor,
     stator,
     blade: cutBlade,
-    permittivity: EPSILON_0 * section.permittivity,
+    permittivity,
     gaps,
     edges,
     plates: platesOf(setting, cutBlade),
     share: share && shareOf(setting, cutBlade, outlines, share),
+    frame: section.frameAllowance,
+    farSide: arrangement.passesOn
+      ? farSideOf(setting, cutBlade, outlines, model === 'field')
+      : null,
   });
   const posts = standPosts(design, turn, outlines.ears, blade);
   const clockwise = turn.direction < 0;
@@ -313,6 +250,10 @@ export function deriveSection(
       trimmer: checked.trimmer,
       inductance,
       gaps,
+      statorAngles: arrangement.stators,
+      terminals: arrangement.terminals,
+      airGap: section.airGap,
+      electricalGap: airGap,
       model,
       statorForm: form,
       rotor: clockwise ? mirrored(rotor) : rotor,

@@ -1,5 +1,6 @@
 /** The plates of all sections along the shaft. */
 
+import { arrangementOf, type Arrangement } from './arrangement';
 import type { Design, Section } from './design';
 import type { PlateRole, SectionResult, Stack, StackPlate, StackSpacer } from './derived';
 import { contourReach } from './measure';
@@ -21,13 +22,20 @@ export function endPlatesOf({ rotorPlates, statorPlates }: Section): [PlateRole,
   return [first, last];
 }
 
-function sectionPlates(section: Section, index: number, start: number): StackPlate[] {
+function packPlates(
+  section: Section,
+  { stators }: Arrangement,
+  index: number,
+  pack: number,
+  start: number,
+): StackPlate[] {
   const plates: StackPlate[] = [];
   let z = start;
   let [role] = endPlatesOf(section);
   for (let i = 0; i < section.rotorPlates + section.statorPlates; i++) {
     const thickness = role === 'rotor' ? section.rotorThickness : section.statorThickness;
-    plates.push({ role, section: index, z: z + thickness / 2, thickness });
+    const place = { role, section: index, pack, z: z + thickness / 2, thickness };
+    for (const angle of role === 'rotor' ? [0] : stators) plates.push({ ...place, angle });
     z += thickness + section.airGap;
     role = role === 'rotor' ? 'stator' : 'rotor';
   }
@@ -35,11 +43,17 @@ function sectionPlates(section: Section, index: number, start: number): StackPla
 }
 
 function spacersBetween(plates: readonly StackPlate[], role: PlateRole): StackSpacer[] {
-  const own = plates.filter((plate) => plate.role === role);
+  const own = plates.filter((plate) => plate.role === role && plate.angle === 0);
   return own.slice(1).map((plate, i) => {
     const from = own[i]!.z + own[i]!.thickness / 2;
     const to = plate.z - plate.thickness / 2;
-    return { role, section: plate.section, z: (from + to) / 2, length: to - from };
+    return {
+      role,
+      section: plate.section,
+      pack: plate.pack,
+      z: (from + to) / 2,
+      length: to - from,
+    };
   });
 }
 
@@ -49,13 +63,16 @@ export function stackOf(design: Design, sections: readonly SectionResult[]): Sta
   const spacers: StackSpacer[] = [];
   let start = 0;
   let depth = 0;
+  const arrangement = arrangementOf(design);
   design.sections.forEach((section, index) => {
-    const own = sectionPlates(section, index, start);
-    plates.push(...own);
-    spacers.push(...spacersBetween(own, 'rotor'), ...spacersBetween(own, 'stator'));
-    const last = own[own.length - 1]!;
-    depth = last.z + last.thickness / 2;
-    start = depth + design.sectionSpacing;
+    for (let pack = 0; pack < arrangement.packs; pack++) {
+      const own = packPlates(section, arrangement, index, pack, start);
+      plates.push(...own);
+      spacers.push(...spacersBetween(own, 'rotor'), ...spacersBetween(own, 'stator'));
+      const last = own[own.length - 1]!;
+      depth = last.z + last.thickness / 2;
+      start = depth + design.sectionSpacing;
+    }
   });
   const allPlates = sections.flatMap(({ rotor, stator }) => [rotor, stator]);
   const sum = (of: 'mass' | 'cutLength'): number =>

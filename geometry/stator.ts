@@ -1,5 +1,6 @@
 /** The stator plate: a sector with a cut-out round the shaft and an ear for each post. */
 
+import type { Arrangement } from './arrangement';
 import { bladeRadius, bladeSlope, type Blade } from './blade';
 import type { Design, Section } from './design';
 import { withEar, type Chain, type EarShape } from './ear';
@@ -10,8 +11,15 @@ import { FIT_AT_SAMPLES } from './tolerances';
 
 export type StatorForm = 'even' | 'following';
 
-/** The form a section's stator takes: laws that begin slowly want a small far side. */
-export function statorFormOf({ statorForm, law }: Section): StatorForm {
+/**
+ * The form a section's stator takes: laws that begin slowly want a small far side. Where the rotor
+ * passes from one stator into another, its longest radius sweeps all of both.
+ */
+export function statorFormOf(
+  { statorForm, law }: Section,
+  { passesOn }: Arrangement,
+): StatorForm {
+  if (passesOn) return 'even';
   if (statorForm !== 'by-law') return statorForm;
   return law === 'capacitance' ? 'even' : 'following';
 }

@@ -1,8 +1,10 @@
 /** Where the shaft stands: from the stops to the law, and from shaft angle to mesh angle. */
 
+import { arrangementOf, gapsOf } from './arrangement';
 import { EPSILON_0 } from './constants';
 import type { Turn } from './derived';
 import type { Design, Section } from './design';
+import { electricalGap } from './dielectric';
 import { lawBetween } from './law';
 import { targetOf } from './target';
 
@@ -28,9 +30,9 @@ function radiusByArea(design: Design, section: Section, x: 0 | 1): number {
   if ('code' in target) return rc;
   const slope =
     lawBetween(section.law, target.totalMin, target.totalMax).slope(x) / design.travel;
-  const gaps = Math.max(1, section.rotorPlates + section.statorPlates - 1);
+  const gaps = arrangementOf(design).share * Math.max(1, gapsOf(section));
   return Math.sqrt(
-    rc * rc + (2 * section.airGap * slope) / (EPSILON_0 * section.permittivity * gaps),
+    rc * rc + (2 * electricalGap(section) * slope) / (EPSILON_0 * section.permittivity * gaps),
   );
 }
 

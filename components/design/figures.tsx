@@ -35,7 +35,7 @@ export function StackFigures({ derived, section }: { derived: Derived; section: 
         ['Outer radius', millimetres(stack.outerRadius)],
         ['Rotor spacer length', millimetres(result.rotorSpacer)],
         ['Stator spacer length', millimetres(result.statorSpacer)],
-        ['Gaps between plates', result.gaps],
+        ['Gaps, one blade and stator', result.gaps],
         ['Mass of all plates', mass(stack.mass)],
         ['Cut length, all plates', `${(stack.cutLength / 1000).toPrecision(3)} m`],
         ['Stator form', result.statorForm === 'even' ? 'even radius' : 'follows the rotor'],

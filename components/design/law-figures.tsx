@@ -26,6 +26,7 @@ export function LawFigures({ section }: { section: SectionResult }) {
             'Over the whole law',
             `${share(law.largestError)} at ${degrees(law.largestError.angle)}`,
           ],
+          ['Counted from', section.terminals],
           ['Law begins and ends', `${degrees(law.from)} to ${degrees(law.to)}`],
           ['Total where it begins', formatQuantity(totalMin, 'capacitance', 4)],
           ['Total where it ends', formatQuantity(totalMax, 'capacitance', 4)],
@@ -43,6 +44,12 @@ export function LawFigures({ section }: { section: SectionResult }) {
           <li>
             Insulators and frame beyond the allowance, which is yours to set and to measure.
           </li>
+          {section.statorAngles.length > 1 && (
+            <li>What the two stators have directly to each other past the rotor.</li>
+          )}
+          {section.electricalGap !== section.airGap && (
+            <li>At the edges a film or disc is counted by the gap it stands for.</li>
+          )}
           <li>What sheet, cutting and assembly add by their tolerances.</li>
         </ul>
       </details>

@@ -1,8 +1,9 @@
 import type { SectionResult } from '@/geometry';
+import { toDegrees } from './degrees';
 import { svgPath } from './svg-path';
 import type { useRotorDrag } from './use-rotor-drag';
 
-/** Stator of a section, hatched with a steel edge, its posts with it. Drawn with y up. */
+/** Stators of a section, hatched with a steel edge, its posts with them. Drawn with y up. */
 export function StatorPlate({
   section,
   hatch,
@@ -11,17 +12,22 @@ export function StatorPlate({
   /** Id of the hatch pattern. */
   hatch: string;
 }) {
-  const { stator, posts } = section;
+  const { stator, statorAngles, posts } = section;
+  const path = svgPath([stator.outside, ...stator.holes]);
   return (
     <g data-part="stator">
-      <path
-        d={svgPath([stator.outside, ...stator.holes])}
-        fillRule="evenodd"
-        fill={`url(#${hatch})`}
-        className="stroke-steel"
-        strokeWidth="1.75"
-        vectorEffect="non-scaling-stroke"
-      />
+      {statorAngles.map((angle) => (
+        <path
+          key={angle}
+          d={path}
+          transform={`rotate(${toDegrees(angle)})`}
+          fillRule="evenodd"
+          fill={`url(#${hatch})`}
+          className="stroke-steel"
+          strokeWidth="1.75"
+          vectorEffect="non-scaling-stroke"
+        />
+      ))}
       {posts.map((post) => (
         <circle
           key={`${post.x} ${post.y}`}

@@ -136,12 +136,12 @@ function Hatch({ id, size }: { id: string; size: number }) {
 }
 
 function describe(
-  { rotor, stator, posts, sweepRadius }: Derived['sections'][number],
+  { rotor, stator, statorAngles, posts, sweepRadius }: Derived['sections'][number],
   limit: string,
 ) {
   return (
     `${rotor.quantity} rotor plates that sweep ${formatQuantity(sweepRadius, 'length', 4)} from the shaft, ` +
-    `${stator.quantity} stator plates on ${posts.length} posts; ${limit}. ` +
+    `${stator.quantity} stator plates${statorAngles.length > 1 ? ' in two stators' : ''} on ${posts.length} posts; ${limit}. ` +
     'The rotor is drawn at the shaft angle of the angle rule.'
   );
 }

@@ -13,7 +13,7 @@ function Sample({ className, dash }: { className: string; dash?: string }) {
 
 /** What the lines are, over which range, and the largest law error with its place. */
 export function LawLegend({ section, series }: { section: SectionResult; series: LawSeries }) {
-  const { capacitance, frequency, tuned } = series;
+  const { capacitance, frequency, other, tuned } = series;
   const { largestInner, largestError, achieved } = section.law;
   return (
     <ul className="flex flex-wrap items-center gap-x-5 gap-y-1 px-3 py-2 text-small text-ink-2">
@@ -25,6 +25,12 @@ export function LawLegend({ section, series }: { section: SectionResult; series:
           {capacitance.unit}
         </span>
       </li>
+      {other && (
+        <li className="flex items-center gap-2">
+          <Sample className="stroke-steel-dark" />
+          <span>to the second stator</span>
+        </li>
+      )}
       <li className="flex items-center gap-2">
         <Sample className="stroke-ink" dash="2 4" />
         <span>asked by the law</span>

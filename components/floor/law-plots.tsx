@@ -12,8 +12,8 @@ function signed(value: number): string {
 
 /** Capacitance asked, achieved and of the area alone, with the frequency when there is a coil. */
 export function LawPlot({ series }: { series: LawSeries }) {
-  const { angle, achieved, areaOnly, target, tuned } = series;
-  const range = withRoom([...achieved, ...areaOnly]);
+  const { angle, achieved, areaOnly, other, target, tuned } = series;
+  const range = withRoom([...achieved, ...areaOnly, ...(other ?? [])]);
   const scales: PlotScale[] = [
     {
       side: 'left',
@@ -23,6 +23,7 @@ export function LawPlot({ series }: { series: LawSeries }) {
       className: 'text-ink-2',
       lines: [
         { values: areaOnly, className: 'stroke-steel-dark stroke-1', dash: '6 3' },
+        ...(other ? [{ values: other, className: 'stroke-steel-dark stroke-2' }] : []),
         { values: achieved, className: 'stroke-brass-dark stroke-[2.5]' },
         { values: target, className: 'stroke-ink stroke-[1.5]', dash: '2 5' },
       ],

@@ -13,6 +13,8 @@ export interface LawSeries {
   readonly achieved: number[];
   /** What the area of the overlap alone would give. */
   readonly areaOnly: number[];
+  /** To the second stator, where there is one. */
+  readonly other: number[] | null;
   /** Achieved less target, percent of the capacitance range. */
   readonly error: (number | null)[];
   /** Where the error is largest, degrees, and its value there. */
@@ -43,6 +45,7 @@ export function lawSeries(section: SectionResult): LawSeries {
     target: law.target.map((total) => (total === null ? null : capacitance.scale(total))),
     achieved: law.achieved.map(capacitance.scale),
     areaOnly: law.areaOnly.map(capacitance.scale),
+    other: law.other && law.other.map(capacitance.scale),
     error: law.error.map((error) => (error === null ? null : (100 * error) / range)),
     largest: {
       angle: toDegrees(angle),

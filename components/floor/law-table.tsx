@@ -36,6 +36,7 @@ export default function LawTable({
               `Asked, ${capacitance.unit}`,
               `Achieved, ${capacitance.unit}`,
               `Area alone, ${capacitance.unit}`,
+              ...(law.other ? [`Second stator, ${capacitance.unit}`] : []),
               'Error, % of range',
               ...(frequency ? [`Tunes to, ${frequency.unit}`] : []),
             ].map((title) => (
@@ -59,6 +60,9 @@ export default function LawTable({
                 <td>{target === null ? '–' : capacitance.write(target)}</td>
                 <td>{capacitance.write(achieved)}</td>
                 <td>{capacitance.write(valueAt(law.angle, law.areaOnly, angle))}</td>
+                {law.other && (
+                  <td>{capacitance.write(valueAt(law.angle, law.other, angle))}</td>
+                )}
                 <td>{error === null ? '–' : percent(error / (totalMax - totalMin))}</td>
                 {frequency && (
                   <td>{frequency.write(resonantFrequency(achieved, inductance!))}</td>

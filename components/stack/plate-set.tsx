@@ -6,8 +6,8 @@ import type { Plate, StackPlate } from '@/geometry';
 import { BodySet } from './body-set';
 import { plateGeometry } from './plate-geometry';
 
-const place = (matrix: Matrix4, { z }: StackPlate): void =>
-  void matrix.makeTranslation(0, 0, z);
+const place = (matrix: Matrix4, { z, angle }: StackPlate): void =>
+  void matrix.makeRotationZ(angle).setPosition(0, 0, z);
 
 /** All plates of one role in one section. */
 export function PlateSet({

@@ -20,7 +20,7 @@ export interface StackRods {
   readonly posts: readonly Rod[];
 }
 
-/** Every round part of the stack. The kernel gives spacers and plates; posts span their section. */
+/** Every round part of the stack. The kernel gives spacers and plates; posts span their set of plates. */
 export function stackRods({ design, stack, sections }: Derived): StackRods {
   const out = SHAFT_OUT * stack.outerRadius;
   const rotorSpacers: Rod[] = [];
@@ -37,17 +37,22 @@ export function stackRods({ design, stack, sections }: Derived): StackRods {
     }
   }
   const posts = sections.flatMap((section, index) => {
-    const faces = stack.plates
-      .filter((plate) => plate.role === 'stator' && plate.section === index)
-      .flatMap(({ z, thickness }) => [z - thickness / 2, z + thickness / 2]);
+    const stators = stack.plates.filter(
+      (plate) => plate.role === 'stator' && plate.section === index,
+    );
     const end = POST_OUT * stack.outerRadius;
-    return section.posts.map(({ x, y, holeRadius }) => ({
-      x,
-      y,
-      radius: holeRadius,
-      from: Math.min(...faces) - end,
-      to: Math.max(...faces) + end,
-    }));
+    return [...new Set(stators.map(({ pack }) => pack))].flatMap((pack) => {
+      const faces = stators
+        .filter((plate) => plate.pack === pack)
+        .flatMap(({ z, thickness }) => [z - thickness / 2, z + thickness / 2]);
+      return section.posts.map(({ x, y, holeRadius }) => ({
+        x,
+        y,
+        radius: holeRadius,
+        from: Math.min(...faces) - end,
+        to: Math.max(...faces) + end,
+      }));
+    });
   });
   return {
     shaft: {

@@ -15,6 +15,7 @@
  */
 
 import { TWO_PI } from '../constants';
+import type { EndPlate, Potentials } from './plan-shape';
 import type { PlanField } from './plan-view';
 import { piecesBeside, sidesOf, type PlanWall, type Polygon } from './plan-walls';
 
@@ -155,9 +156,6 @@ function layerOf({ ax, ay, bx, by }: Line, flux: number, step: number): Layer {
   };
 }
 
-/** Which plate lies outermost at an end of the stack. */
-export type EndPlate = 'rotor' | 'stator';
-
 /**
  * The radius that stands for a thick edge over the plate below, from Kirchhoff's disc over a
  * plane less what the gap's own edge has.
@@ -191,23 +189,28 @@ export interface EndSizes {
 export function endFaceCapacitance(
   outermost: EndPlate,
   rotor: Polygon,
-  stator: Polygon,
+  stators: readonly Polygon[],
+  potentials: Potentials,
   walls: readonly PlanWall[],
   { flux }: PlanField,
   { edgeRadius, height, radius }: EndSizes,
 ): number {
   const layers = walls.map((wall, i) => {
-    const visible = wall.kind === 'rotor' ? 1 : 0;
+    const visible = wall.kind === 'rotor' ? potentials.rotor : potentials.stators[wall.stator]!;
     return layerOf(wall, flux[i]!, visible - wall.potential + wall.setback * flux[i]!);
   });
-  const [above, below] = outermost === 'rotor' ? [rotor, stator] : [stator, rotor];
-  const step = outermost === 'rotor' ? 1 : -1;
+  // Steps along edges that lie over the other kind, their squares counted by length.
   let stepped = 0;
-  for (const piece of piecesBeside(sidesOf(above), below, 'inside')) {
-    const layer = layerOf(piece, 0, step);
-    stepped += Math.hypot(layer.dx, layer.dy);
-    layers.push(layer);
-  }
+  stators.forEach((stator, i) => {
+    const [above, below] = outermost === 'rotor' ? [rotor, stator] : [stator, rotor];
+    const apart = potentials.rotor - potentials.stators[i]!;
+    const step = outermost === 'rotor' ? apart : -apart;
+    for (const piece of piecesBeside(sidesOf(above), below, 'inside')) {
+      const layer = layerOf(piece, 0, step);
+      stepped += step * step * Math.hypot(layer.dx, layer.dy);
+      layers.push(layer);
+    }
+  });
   const whole = overPlane(layers, edgeRadius);
   const sharp = (stepped / Math.PI) * Math.log((SPREAD * radius) / edgeRadius);
   return whole - yielding(height / radius) * (whole - sharp);

@@ -6,41 +6,12 @@
  */
 
 import type { EdgeTable } from './edge-table';
+import { endEdgeRadius, endFaceCapacitance } from './end-face';
 import type { HubEdges } from './hub-edges';
-import { endEdgeRadius, endFaceCapacitance, type EndPlate } from './end-face';
 import { planField } from './plan-view';
-import {
-  piecesBeside,
-  planWalls,
-  sidesOf,
-  type Piece,
-  type Polygon,
-  type Wall,
-  type WallKind,
-} from './plan-walls';
-import { openWedges, type EdgePlates } from './radial-edges';
-
-/** A post with its spacers, as a round column over the height of the stack, mm. */
-export interface PlanPost {
-  readonly x: number;
-  readonly y: number;
-  readonly radius: number;
-}
-
-export interface PlanShape {
-  readonly plates: EdgePlates;
-  /** Rotor at mesh angle 0 and stator where it stands, hub and ears included. */
-  readonly rotor: Polygon;
-  readonly stator: Polygon;
-  /** Inside the stator's ears or beside it. */
-  readonly posts: readonly PlanPost[];
-  readonly hubRadius: number;
-  /** Longest radius of the rotor, mm. */
-  readonly sweepRadius: number;
-  readonly gaps: number;
-  /** The outermost plate at either end of the stack. */
-  readonly endPlates: readonly [EndPlate, EndPlate];
-}
+import { piecesBeside, planWalls, sidesOf, type Polygon, type Standing } from './plan-walls';
+import { turned, wallRule, type EndPlate, type PlanShape, type Potentials } from './plan-shape';
+import { openWedges } from './radial-edges';
 
 /** What the plan view adds at a mesh angle, over ε. */
 export interface PlanShare {
@@ -55,75 +26,6 @@ const NODES = 11;
 
 /** A solution is kept this many gaps of rim away from angles at which edges lie on one another. */
 const CLEAR_OF_FLUSH = 0.4;
-
-function turned(polygon: Polygon, angle: number): number[] {
-  const cos = Math.cos(angle);
-  const sin = Math.sin(angle);
-  const out: number[] = [];
-  for (let i = 0; i < polygon.length; i += 2) {
-    const x = polygon[i]!;
-    const y = polygon[i + 1]!;
-    out.push(x * cos - y * sin, x * sin + y * cos);
-  }
-  return out;
-}
-
-/** rad. A wall this near a radial line lies on it. */
-const ON_LINE = 1e-3;
-
-/** Angle brought to −π … π. */
-function wrapped(angle: number): number {
-  return angle - 2 * Math.PI * Math.round(angle / (2 * Math.PI));
-}
-
-/**
- * What the walls are at a mesh angle. A stack acts with its own potential, but beside a radial
- * edge behind which the other stack's edge lies flush, both share the wall: its potential goes to
- * one half as the edges close up, with the slowest mode of the strip between them.
- */
-function wallsAt(
-  { plates, hubRadius, posts }: PlanShape,
-  table: EdgeTable,
-  hub: HubEdges,
-  meshAngle: number,
-): (kind: WallKind, x: number, y: number) => Wall {
-  const { airGap: g, rotorSector, statorSector, edgeOffset, cutoutRadius } = plates;
-  const leading = plates.rotorRadius(0);
-  // The strip beside a plate reaches from its face to the other's mid-plane.
-  const strip = (ownThickness: number): number =>
-    (2 * (table.height - ownThickness / 2) * g) / Math.PI;
-  const shared = (apart: number, reach: number): number =>
-    apart < 0 ? 0 : Math.exp(-apart / reach) / 2;
-  /** A post just behind the edge is itself the wall. */
-  const toPost = (x: number, y: number): number =>
-    posts.reduce((least, post) => {
-      const apart = Math.hypot(x - post.x, y - post.y) - post.radius;
-      return Math.min(least, Math.max(0, apart));
-    }, Infinity);
-  return (kind, x, y) => {
-    if (kind === 'post') return { potential: 0, setback: 0 };
-    const radius = Math.hypot(x, y);
-    const bearing = Math.atan2(y, x);
-    if (kind === 'rotor') {
-      if (radius < hubRadius * 1.02) return { potential: 1, setback: hub.hubSetback * g };
-      const setback = table.rotorSetback * g;
-      const behind = rotorSector - meshAngle;
-      const trails = Math.abs(wrapped(bearing + behind)) < ON_LINE;
-      if (!trails || radius < cutoutRadius || behind > Math.PI / 2)
-        return { potential: 1, setback };
-      const apart = radius * Math.sin(behind) + edgeOffset;
-      return { potential: 1 - shared(apart, strip(table.rotorThickness)), setback };
-    }
-    const setback = Math.min(table.statorSetback * g, toPost(x, y));
-    const short = statorSector - meshAngle;
-    const line = statorSector - (edgeOffset === 0 ? 0 : Math.asin(edgeOffset / radius));
-    const last = Math.abs(wrapped(bearing - line)) < ON_LINE;
-    if (!last || radius > leading || Math.abs(short) > Math.PI / 2)
-      return { potential: 0, setback };
-    const apart = radius * Math.sin(short) - edgeOffset;
-    return { potential: shared(apart, strip(table.statorThickness)), setback };
-  };
-}
 
 /** Chebyshev points of the second kind on an interval, kept away from the flush angles. */
 function nodesBetween(
@@ -179,54 +81,76 @@ function through(nodes: readonly number[], values: readonly number[]): (at: numb
 const POST_SIDES = 12;
 
 /** A regular polygon of the post's area, so that it has about the post's capacitance. */
-function postPolygon({ x, y, radius }: PlanPost): Polygon {
-  const corner =
-    radius * Math.sqrt((2 * Math.PI) / (POST_SIDES * Math.sin((2 * Math.PI) / POST_SIDES)));
-  return Array.from({ length: POST_SIDES }, (_, i) => (2 * Math.PI * i) / POST_SIDES).flatMap(
-    (angle) => [x + corner * Math.cos(angle), y + corner * Math.sin(angle)],
-  );
+function postPolygon({ x, y, radius }: PlanShape['posts'][number]): Polygon {
+  const side = (2 * Math.PI) / POST_SIDES;
+  const corner = radius * Math.sqrt(side / Math.sin(side));
+  return Array.from({ length: POST_SIDES }, (_, i) => i * side).flatMap((angle) => [
+    x + corner * Math.cos(angle),
+    y + corner * Math.sin(angle),
+  ]);
 }
 
-/** What does not turn: the stator beside its posts, and the posts beside it. */
-interface Standing {
-  readonly stator: readonly Piece[];
-  readonly post: readonly Piece[];
+/** What does not turn: the stators beside their posts, and the posts beside them. */
+function standingOf({ stators, posts }: PlanShape): Standing[] {
+  const columns = posts.map((post) => ({ stator: post.stator, polygon: postPolygon(post) }));
+  return [
+    ...stators.map((polygon, stator): Standing => ({
+      kind: 'stator',
+      stator,
+      pieces: columns.reduce(
+        (pieces, column) => piecesBeside(pieces, column.polygon, 'outside'),
+        sidesOf(polygon),
+      ),
+    })),
+    ...columns.map(({ stator, polygon }): Standing => ({
+      kind: 'post',
+      stator,
+      pieces: piecesBeside(sidesOf(polygon), stators[stator]!, 'outside'),
+    })),
+  ];
 }
 
-function standingOf({ stator, posts }: PlanShape): Standing {
-  const columns = posts.map(postPolygon);
-  return {
-    stator: columns.reduce(
-      (pieces, column) => piecesBeside(pieces, column, 'outside'),
-      sidesOf(stator),
-    ),
-    post: columns.flatMap((column) => piecesBeside(sidesOf(column), stator, 'outside')),
-  };
+interface Energies {
+  /** Twice the field's energy, over ε and the square of the potential: per gap and unit height. */
+  readonly openSpace: number;
+  /** The same of all end faces, mm; computed when asked for. */
+  readonly endFaces: () => number;
 }
 
-function planAt(
+function energiesAt(
   shape: PlanShape,
-  standing: Standing,
+  standing: readonly Standing[],
   table: EdgeTable,
   hub: HubEdges,
   meshAngle: number,
-): { openSpace: number; endFaces: () => number } {
-  const { plates, stator, sweepRadius, endPlates } = shape;
-  const { airGap: g } = plates;
+  potentials: Potentials,
+): Energies {
+  const { stators, sweepRadius, endPlates } = shape;
+  const { airGap: g } = shape.plates;
   const rotor = turned(shape.rotor, meshAngle);
-  const pieces = {
-    rotor: piecesBeside(sidesOf(rotor), stator, 'outside'),
-    stator: piecesBeside(standing.stator, rotor, 'outside'),
-    post: standing.post,
+  const rotorStanding: Standing = {
+    kind: 'rotor',
+    stator: -1,
+    pieces: stators.reduce(
+      (pieces, stator) => piecesBeside(pieces, stator, 'outside'),
+      sidesOf(rotor),
+    ),
   };
-  const walls = planWalls(pieces, wallsAt(shape, table, hub, meshAngle), {
+  const others = standing.map((part) =>
+    part.kind === 'post'
+      ? part
+      : { ...part, pieces: piecesBeside(part.pieces, rotor, 'outside') },
+  );
+  const rule = wallRule(shape, table, hub, meshAngle, potentials);
+  const walls = planWalls(rotorStanding, others, rule, {
     shortest: g,
     longest: sweepRadius / 4,
     grading: 1.5,
   });
   const field = planField(walls);
   const height = shape.gaps * table.height * g;
-  const radius = Math.sqrt((areaOf(rotor) + areaOf(stator)) / Math.PI);
+  const area = stators.reduce((sum, stator) => sum + areaOf(stator), areaOf(rotor));
+  const radius = Math.sqrt(area / Math.PI);
   const faceUnder = (outermost: EndPlate): number => {
     const [thickness, deep] =
       outermost === 'rotor'
@@ -234,11 +158,11 @@ function planAt(
         : [table.statorThickness, table.statorDeep];
     const edgeRadius = g * endEdgeRadius(thickness, deep);
     const sizes = { edgeRadius, height, radius };
-    return endFaceCapacitance(outermost, rotor, stator, walls, field, sizes);
+    return endFaceCapacitance(outermost, rotor, stators, potentials, walls, field, sizes);
   };
   const [first, last] = endPlates;
   return {
-    openSpace: field.capacitance - openWedges(plates, table, meshAngle),
+    openSpace: field.energy,
     endFaces: () => {
       const firstFace = faceUnder(first);
       return firstFace + (last === first ? firstFace : faceUnder(last));
@@ -247,7 +171,15 @@ function planAt(
 }
 
 /**
+ * A capacitance as a sum of energies, each with the weight it counts by: between two conductors
+ * that are all there is, one energy; with a third, C₁₂ = (E₁ + E₂ − E₃)/2, with Eₖ the energy
+ * where only k has potential.
+ */
+export type EnergySum = readonly { readonly weight: number; readonly potentials: Potentials }[];
+
+/**
  * @param range first and last mesh angle wanted, rad
+ * @param sum the capacitance asked for, per blade
  * @param near the share of nearly the same plates: what has changed since is carried by every
  *   second solution
  */
@@ -256,15 +188,32 @@ export function planShare(
   table: EdgeTable,
   hub: HubEdges,
   [from, to]: readonly [number, number],
+  sum: EnergySum,
   near: PlanShare | null = null,
 ): PlanShare {
-  const { airGap: g, rotorSector, statorSector } = shape.plates;
-  const flush = [0, rotorSector, statorSector, rotorSector + statorSector - 2 * Math.PI];
+  const { plates } = shape;
+  const { airGap: g, rotorSector, statorSector } = plates;
+  const flush = [0, rotorSector, statorSector];
+  if (plates.toNextStator !== null)
+    flush.push(rotorSector + statorSector - plates.toNextStator);
+  else flush.push(rotorSector - Math.PI, rotorSector + statorSector - Math.PI);
   const nodes = nodesBetween(from, to, flush, (CLEAR_OF_FLUSH * g) / shape.sweepRadius);
   const few = nodes.filter((_, i) => i % 2 === 0);
   const standing = standingOf(shape);
   const solved = new Map(
-    (near ? few : nodes).map((angle) => [angle, planAt(shape, standing, table, hub, angle)]),
+    (near ? few : nodes).map((angle) => {
+      const parts = sum.map(({ weight, potentials }) => ({
+        weight,
+        energies: energiesAt(shape, standing, table, hub, angle, potentials),
+      }));
+      const openSpace = parts.reduce(
+        (total, { weight, energies }) => total + weight * energies.openSpace,
+        -openWedges(plates, table, angle),
+      );
+      const endFaces = (): number =>
+        parts.reduce((total, { weight, energies }) => total + weight * energies.endFaces(), 0);
+      return [angle, { openSpace, endFaces }];
+    }),
   );
   const endFaces = through(
     few,

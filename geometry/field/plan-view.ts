@@ -53,10 +53,10 @@ function solveDense(matrix: Float64Array, right: Float64Array): void {
 
 export interface PlanField {
   /**
-   * Capacitance over ε, per unit height, between the walls at potential 1 and those at 0. Walls
-   * in between count by their potential.
+   * Twice the field's energy over ε, per unit height: the capacitance, where walls have potential
+   * 1 or 0.
    */
-  readonly capacitance: number;
+  readonly energy: number;
   /** Flux that leaves each element into the open space, per length, 1/mm. */
   readonly flux: Float64Array;
 }
@@ -107,7 +107,7 @@ export function planField(elements: readonly WallElement[]): PlanField {
     matrix[n * size + i] = lengths[i]!;
   }
   solveDense(matrix, right);
-  let capacitance = 0;
-  for (let i = 0; i < n; i++) capacitance += elements[i]!.potential * right[i]! * lengths[i]!;
-  return { capacitance, flux: right.subarray(0, n) };
+  let energy = 0;
+  for (let i = 0; i < n; i++) energy += elements[i]!.potential * right[i]! * lengths[i]!;
+  return { energy, flux: right.subarray(0, n) };
 }

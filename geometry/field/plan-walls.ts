@@ -102,51 +102,56 @@ export interface WallOptions {
   readonly grading: number;
 }
 
-/** What stands behind a wall; posts belong to the stator. */
-export type WallKind = 'rotor' | 'stator' | 'post';
-
 /** How a stack bounds the open space: its potential, and how far behind its edge it acts, mm. */
 export type Wall = Pick<WallElement, 'potential' | 'setback'>;
 
+/** A part of the plan that bounds the open space with one potential behind it. */
+export interface Standing {
+  readonly kind: 'rotor' | 'stator' | 'post';
+  /** Which of the stators, or whose post; nothing for the rotor. */
+  readonly stator: number;
+  readonly pieces: readonly Piece[];
+}
+
 export interface PlanWall extends WallElement {
-  readonly kind: WallKind;
+  readonly kind: Standing['kind'];
+  readonly stator: number;
 }
 
-/** What of the outlines bounds the open space. */
-export interface PlanPieces {
-  /** Turned to its mesh angle. */
-  readonly rotor: readonly Piece[];
-  readonly stator: readonly Piece[];
-  readonly post: readonly Piece[];
-}
-
-/** @param wallAt what a wall is whose middle is at a point */
+/**
+ * @param rotor the rotor's part, turned to its mesh angle
+ * @param others stators and posts
+ * @param wallAt what a wall is whose middle is at a point
+ */
 export function planWalls(
-  { rotor, stator, post }: PlanPieces,
-  wallAt: (kind: WallKind, x: number, y: number) => Wall,
+  rotor: Standing,
+  others: readonly Standing[],
+  wallAt: (standing: Standing, x: number, y: number) => Wall,
   { shortest, longest, grading }: WallOptions,
 ): PlanWall[] {
   const elements: PlanWall[] = [];
-  const add = (kind: WallKind, pieces: readonly Piece[], others: readonly Piece[]): void => {
+  const add = (standing: Standing, facing: readonly Piece[]): void => {
+    const { kind, stator } = standing;
     const split = ({ ax, ay, bx, by }: Piece): void => {
       const length = Math.hypot(bx - ax, by - ay);
       const mx = (ax + bx) / 2;
       const my = (ay + by) / 2;
       if (
         length > longest ||
-        (length > 2 * shortest && length > grading * distanceTo(mx, my, others))
+        (length > 2 * shortest && length > grading * distanceTo(mx, my, facing))
       ) {
         split({ ax, ay, bx: mx, by: my });
         split({ ax: mx, ay: my, bx, by });
         return;
       }
-      elements.push({ ax, ay, bx, by, kind, ...wallAt(kind, mx, my) });
+      elements.push({ ax, ay, bx, by, kind, stator, ...wallAt(standing, mx, my) });
     };
-    pieces.forEach(split);
+    standing.pieces.forEach(split);
   };
-  const standing = [...stator, ...post];
-  add('rotor', rotor, standing);
-  add('stator', stator, rotor);
-  add('post', post, rotor);
+  add(
+    rotor,
+    others.flatMap(({ pieces }) => pieces),
+  );
+  for (const standing of others) add(standing, rotor.pieces);
   return elements;
 }

@@ -18,6 +18,12 @@ export interface EdgePlates {
   /** How far both stator edges are moved into the stator, parallel to themselves. */
   readonly edgeOffset: number;
   readonly airGap: number;
+  /**
+   * From the stator's first edge round to the first edge of the stator whose last edge the
+   * trailing edge faces: a whole turn, half of one with two blades; null where another stator
+   * stands between.
+   */
+  readonly toNextStator: number | null;
 }
 
 /** Abscissae and weights of Gauss and Legendre's rule of ten points on −1 to 1, one half. */
@@ -97,10 +103,12 @@ export function coveredRadius(plates: EdgePlates, meshAngle: number): number {
 export function openWedges(plates: EdgePlates, table: EdgeTable, meshAngle: number): number {
   const { airGap: g, cutoutRadius: rc, rotorSector, statorSector, edgeOffset: off } = plates;
   const setbacks = (table.rotorSetback + table.statorSetback) * g;
-  const tail = 2 * Math.PI + meshAngle - rotorSector - statorSector;
   const first = Math.min(plates.rotorRadius(0), plates.statorFirst);
   const last = Math.min(plates.rotorRadius(rotorSector), plates.statorLast);
-  return wedge(rc, last, tail, off, setbacks) + wedge(rc, first, -meshAngle, off, setbacks);
+  const leading = wedge(rc, first, -meshAngle, off, setbacks);
+  if (plates.toNextStator === null) return leading;
+  const tail = plates.toNextStator + meshAngle - rotorSector - statorSector;
+  return leading + wedge(rc, last, tail, off, setbacks);
 }
 
 /**
@@ -116,11 +124,14 @@ export function radialEdges(plates: EdgePlates, table: EdgeTable, meshAngle: num
   const opposed = (x: number): number => (x > 0 ? table.overlapping(x) : table.apart(-x));
 
   let sum = table.height * g * openWedges(plates, table, meshAngle);
-  const tail = 2 * Math.PI + meshAngle - rotorSector - statorSector;
-  const tailApart = apartPerRadius(tail);
-  sum += along(rc, Math.min(trailing, plates.statorLast), (radius) =>
-    opposed(-(radius * tailApart + off) / g),
-  );
+  if (plates.toNextStator !== null) {
+    const tailApart = apartPerRadius(
+      plates.toNextStator + meshAngle - rotorSector - statorSector,
+    );
+    sum += along(rc, Math.min(trailing, plates.statorLast), (radius) =>
+      opposed(-(radius * tailApart + off) / g),
+    );
+  }
   const firstApart = apartPerRadius(meshAngle);
   const first = (radius: number): number => (radius * firstApart - off) / g;
   if (meshAngle <= 0) {

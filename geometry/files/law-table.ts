@@ -15,6 +15,7 @@ export function lawTable(section: SectionResult): string {
     'error_pF',
     'error_percent_of_range',
   ];
+  if (law.other) head.push('second_stator_pF');
   if (inductance !== null) head.push('target_kHz', 'achieved_kHz');
   // Outside the law there is no target: those cells stay empty.
   const cell = (value: number | null, scale: number, digits: number): string =>
@@ -35,6 +36,7 @@ export function lawTable(section: SectionResult): string {
       cell(error, PICO, 4),
       cell(error, 100 / (totalMax - totalMin), 4),
     ];
+    if (law.other) row.push(cell(law.other[i]!, PICO, 4));
     if (inductance !== null) row.push(kilohertz(target), kilohertz(achieved));
     return row.join(',');
   });

@@ -40,7 +40,7 @@ const square = (half: number): [number, number][] => [
 const around = (corners: readonly (readonly [number, number])[]) => [...corners].reverse();
 
 test('two parallel cylinders, radius 1, axes 4 apart: π/arcosh 2 (textbook, exact)', () => {
-  const { capacitance } = planField([
+  const { energy: capacitance } = planField([
     ...walls(ring(-2, 1, 160), 1, 1),
     ...walls(ring(2, 1, 160), 1, 0),
   ]);
@@ -53,7 +53,7 @@ describe.each([
   [3, 6.2155472848594],
 ])('concentric squares 1 : %i', (ratio, exact) => {
   test(`C/ε = ${exact}`, () => {
-    const { capacitance } = planField([
+    const { energy: capacitance } = planField([
       ...walls(square(1), 40, 1),
       ...walls(around(square(ratio)), 40, 0),
     ]);
@@ -62,7 +62,7 @@ describe.each([
 });
 
 test('walls set back by s and S round a shaft: 2π/(ln 2 + s/1 + S/2)', () => {
-  const { capacitance } = planField([
+  const { energy: capacitance } = planField([
     ...walls(ring(0, 1, 120), 1, 1, 0.1),
     ...walls(around(ring(0, 2, 120)), 1, 0, 0.2),
   ]);

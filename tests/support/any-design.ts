@@ -41,6 +41,9 @@ export const anyDesign = fc
   )
   .map(([shared, sections]) => ({ ...shared, sections }) as unknown as Design);
 
+/** Choices that need other sectors, counts or films beside them. */
+const DECIDING = ['arrangement', 'dielectric'];
+
 /** A design near a given one: each number within a fifth of it, so that most give plates. */
 export function designNear(base: Design): fc.Arbitrary<Design> {
   const near = (table: Record<string, Parameter>, values: Record<string, unknown>) =>
@@ -48,6 +51,7 @@ export function designNear(base: Design): fc.Arbitrary<Design> {
       Object.fromEntries(
         Object.entries(table).map(([key, parameter]) => {
           const value = values[key];
+          if (DECIDING.includes(key)) return [key, fc.constant(value)];
           if (parameter.kind === 'choice') return [key, anyValue(parameter)];
           if (typeof value !== 'number' || parameter.quantity === 'count') {
             return [key, fc.constant(value)];
@@ -91,15 +95,18 @@ export const buildableDesign = fc
   )
   .map(([design, fix]): Design => {
     const hubRadius = fix.shaft / 2 + fix.web;
+    const travel =
+      design.arrangement === 'butterfly' ? Math.max(1.1, fix.travel / 2) : fix.travel;
+    const sector = Math.min(travel - fix.short, (170 * Math.PI) / 180);
     return {
       ...design,
       shaftDiameter: fix.shaft,
       spacerRadius: hubRadius,
       hubRadius,
       cutoutRadius: Math.max(1.5, hubRadius + fix.clear),
-      travel: fix.travel,
-      rotorSector: fix.travel - fix.short,
-      statorSector: fix.travel - fix.short,
+      travel,
+      rotorSector: sector,
+      statorSector: sector,
       openRest: null,
       meshedRest: null,
       statorEdgeOffset: 0,
@@ -114,8 +121,10 @@ export const buildableDesign = fc
         maxCapacitance: fix.open * fix.ratio,
         permittivity: Math.min(section.permittivity, 3),
         airGap: fix.gap,
-        rotorPlates: fix.rotors,
-        statorPlates: fix.rotors + fix.more,
+        filmThickness: Math.min(section.filmThickness, fix.gap / 2),
+        filmPermittivity: Math.min(section.filmPermittivity, 10),
+        rotorPlates: section.dielectric === 'disc' ? 1 : fix.rotors,
+        statorPlates: section.dielectric === 'disc' ? 1 : fix.rotors + fix.more,
       })),
     };
   });

@@ -90,12 +90,15 @@ export function compositeOf(shape: StackShape, fractions: readonly number[]): Co
     cutoutRadius: shape.cutoutRadius,
     edgeOffset: shape.edgeOffset,
     airGap: g,
+    toNextStator: 2 * Math.PI,
   });
   const share = planShare(
     {
       plates,
       rotor: flat(rotorPath(shape, 45)),
-      stator: flat(statorPath(shape, 45)),
+      stators: [flat(statorPath(shape, 45))],
+      statorAngles: [0],
+      lobeAngles: [0],
       hubRadius: shape.hubRadius,
       sweepRadius: shape.rotor.radius,
       gaps: SHORT_STACK_GAPS,
@@ -103,11 +106,13 @@ export function compositeOf(shape: StackShape, fractions: readonly number[]): Co
       posts: (shape.posts?.angles ?? []).map((angle) => ({
         ...polar(shape.posts!.at, angle),
         radius: shape.posts!.radius,
+        stator: 0,
       })),
     },
     edges.table,
     edges.hub,
     [0, travel],
+    [{ weight: 1, potentials: { rotor: 1, stators: [0] } }],
   );
   const angles = fractions.map((fraction) => fraction * travel);
   const overlaps: OverlapSizes[] = overlapAt(
