@@ -18,6 +18,9 @@ const LARGEST_DRAWN = 600;
 /** rad. Two blades or two stators leave at least this between them. */
 const LEAST_BETWEEN = (4 * Math.PI) / 180;
 
+/** Of half a turn, what each of two blades may well take. */
+const LOBE_SECTOR = 85 / 180;
+
 /** rad. A law over less than this is not one to cut plates for. */
 const LEAST_LAW = (20 * Math.PI) / 180;
 
@@ -156,13 +159,14 @@ export function turnFindings(design: Design, turn: Turn): Finding[] {
   }
   const { lobes, stators, passesOn } = arrangementOf(design);
   const pitch = (2 * Math.PI) / lobes;
-  if (lobes > 1 && rotorSector >= pitch - LEAST_BETWEEN) {
+  const crowded = lobes > 1 && rotorSector + statorSector > pitch - LEAST_BETWEEN;
+  if (crowded) {
     findings.push(
       finding({
-        label: 'Rotor sector, with two blades',
-        value: rotorSector,
-        limit: pitch / 2,
-        change: `Two blades take a quarter turn each: make rotor and stator sector about ${degrees(0.47 * pitch)} and the travel about ${degrees(0.49 * pitch)}.`,
+        label: 'Rotor and stator sector together, with two blades',
+        value: rotorSector + statorSector,
+        limit: pitch - LEAST_BETWEEN,
+        change: `Two blades take a quarter turn each: make rotor and stator sector about ${degrees(LOBE_SECTOR * pitch)} and the travel ${degrees(pitch / 2)}.`,
         parameters: ['rotorSector', 'statorSector', 'travel'],
       }),
     );
@@ -180,7 +184,7 @@ export function turnFindings(design: Design, turn: Turn): Finding[] {
   }
   // At the open stop the trailing edge must not have reached the last edge of the next stator.
   const apart = pitch - travel - statorSector;
-  if (apart < -1e-9 && !passesOn) {
+  if (apart < -1e-9 && !passesOn && !crowded) {
     findings.push(
       finding({
         label: 'Room behind the rotor at the open stop',
