@@ -1,6 +1,6 @@
 /** One section while its blade is solved: what stays the same, and the plates that a blade makes. */
 
-import { arrangementOf, type Arrangement } from './arrangement';
+import type { Arrangement } from './arrangement';
 import { longestRadius, type Blade } from './blade';
 import type { PlateRole, Turn } from './derived';
 import type { Design, Section } from './design';

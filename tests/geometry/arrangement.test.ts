@@ -53,10 +53,10 @@ function sectorRange({ design, sections }: Derived, share: number): number {
   const { law, rotor, gaps } = section;
   const lobes = design.arrangement === 'butterfly' ? 2 : 1;
   const pitch = (2 * Math.PI) / lobes;
-  const blade =
+  const blade: number =
     contourArea(rotor.outside) / lobes -
     ((pitch - design.rotorSector) / 2) * design.hubRadius ** 2;
-  const meanSquare = (2 * blade) / design.rotorSector;
+  const meanSquare: number = (2 * blade) / design.rotorSector;
   const epsilon = 8.8541878188e-15 * design.sections[0]!.permittivity;
   return (
     (share *
