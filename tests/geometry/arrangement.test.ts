@@ -69,10 +69,10 @@ function sectorRange({ design, sections }: Derived, share: number): number {
 }
 
 describe.each([
-  ['split-stator', 0.5, (design: Design) => void (design.arrangement = 'split-stator')],
+  ['split-stator', 0.5, (design: Design): void => void (design.arrangement = 'split-stator')],
   ['butterfly', 0.5, quarterTurn],
-  ['differential', 1, (design: Design) => void (design.arrangement = 'differential')],
-] as const)('%s', (_name, share, edit) => {
+  ['differential', 1, (design: Design): void => void (design.arrangement = 'differential')],
+] as const)('%s', (_name: string, share: number, edit: (design: Design) => void) => {
   const result = derived(edit);
   const section = result.sections[0]!;
 
