@@ -21,7 +21,7 @@ export type TargetKind = 'terminals' | 'band';
 export type AppliesTo = Readonly<Record<string, readonly string[]>>;
 
 export type ParameterGroup =
-  'law' | 'turn' | 'stack' | 'shaft' | 'posts' | 'envelope' | 'sheet';
+  'law' | 'turn' | 'stack' | 'shaft' | 'posts' | 'envelope' | 'sheet' | 'frame';
 
 export interface NumberParameter {
   readonly kind: 'number';
@@ -110,6 +110,7 @@ const DEGREE = Math.PI / 180;
 
 const TERMINALS: AppliesTo = { targetKind: ['terminals'] };
 const BAND: AppliesTo = { targetKind: ['band'] };
+const FRAMED: AppliesTo = { frame: ['end-plates'] };
 
 /** Parameters of one section: its law, its target and its plates. */
 export const sectionParameters = {
@@ -448,6 +449,120 @@ export const sharedParameters = {
       { value: 'steel', label: 'Steel DC01' },
     ],
     default: 'brass',
+  }),
+  spacerMake: choice<'turned' | 'cut'>('frame', {
+    label: 'Spacers',
+    help: 'Turned to length, or rings cut from sheet of just that thickness.',
+    options: [
+      { value: 'turned', label: 'turned' },
+      { value: 'cut', label: 'cut rings' },
+    ],
+    default: 'turned',
+    cameLater: true,
+  }),
+  endSlots: count('frame', {
+    label: 'Slots in end rotor plates',
+    help: 'Divide the first and the last rotor plate of a section into segments that are bent to trim the law. 0 for none.',
+    min: 0,
+    max: 12,
+    default: 0,
+    cameLater: true,
+  }),
+  endSlotWidth: length('frame', {
+    label: 'Slot width',
+    help: 'One sheet thickness or more can be cut safely (common practice).',
+    min: 0.2,
+    max: 5,
+    default: 0.8,
+    cameLater: true,
+  }),
+  frame: choice<'end-plates' | 'none'>('frame', {
+    label: 'Frame',
+    help: 'Two end plates that carry shaft, posts and pillars, or none: plates and spacers alone.',
+    options: [
+      { value: 'end-plates', label: 'end plates' },
+      { value: 'none', label: 'none' },
+    ],
+    default: 'end-plates',
+    cameLater: true,
+  }),
+  frameMaterial: choice<'aluminium' | 'brass' | 'steel' | 'insulator'>('frame', {
+    label: 'Frame sheet',
+    help: 'What the end plates are cut from.',
+    options: [
+      { value: 'aluminium', label: 'aluminium' },
+      { value: 'brass', label: 'brass' },
+      { value: 'steel', label: 'steel' },
+      { value: 'insulator', label: 'insulator' },
+    ],
+    default: 'aluminium',
+    appliesTo: FRAMED,
+    cameLater: true,
+  }),
+  frameThickness: length('frame', {
+    label: 'Frame thickness',
+    help: 'Thickness of an end plate.',
+    min: 0.5,
+    max: 20,
+    default: 2,
+    appliesTo: FRAMED,
+    cameLater: true,
+  }),
+  frameClearance: length('frame', {
+    label: 'Plates to frame',
+    help: 'Clear distance along the shaft from the outermost plate to an end plate. What the frame adds to the capacitance is in the allowance.',
+    min: 1,
+    max: 100,
+    default: 5,
+    appliesTo: FRAMED,
+    cameLater: true,
+  }),
+  bearingDiameter: length('frame', {
+    label: 'Bearing hole',
+    help: 'Hole in the end plates for the bush or bearing of the shaft.',
+    min: 1,
+    max: 60,
+    default: 10,
+    appliesTo: FRAMED,
+    cameLater: true,
+  }),
+  bushFlange: length('frame', {
+    label: 'Insulating bush, flange',
+    help: 'Thickness of the flange of the bush that holds a post in the frame, on either face of the end plate.',
+    min: 0.5,
+    max: 20,
+    default: 2,
+    appliesTo: FRAMED,
+    cameLater: true,
+  }),
+  pillarDiameter: length('frame', {
+    label: 'Frame pillar',
+    help: 'Diameter of the pillars that hold the end plates apart, away from the stator.',
+    min: 2,
+    max: 40,
+    default: 6,
+    appliesTo: FRAMED,
+    cameLater: true,
+  }),
+  shaftFront: length('frame', {
+    label: 'Shaft beyond the front',
+    help: 'Length of shaft that stands out in front of the front plate.',
+    min: 0,
+    max: 200,
+    default: 20,
+    appliesTo: FRAMED,
+    cameLater: true,
+  }),
+  bracket: choice<'none' | 'panel'>('frame', {
+    label: 'Panel bracket',
+    help: 'A flat plate on the front pillars to screw the capacitor to a panel.',
+    options: [
+      { value: 'none', label: 'none' },
+      { value: 'panel', label: 'panel plate' },
+    ],
+    default: 'none',
+    appliesTo: FRAMED,
+    cameLater: true,
   }),
 } as const satisfies Record<string, Parameter>;
 

@@ -13,6 +13,7 @@ export const groupTitles: Record<ParameterGroup, string> = {
   posts: 'Stator posts',
   envelope: 'Room allowed',
   sheet: 'Sheet',
+  frame: 'Spacers, slots and frame',
 };
 
 export interface GroupEntry {
