@@ -517,12 +517,11 @@ export const sharedParameters = {
     appliesTo: FRAMED,
     cameLater: true,
   }),
-  bearingDiameter: length('frame', {
+  bearingDiameter: optional('length', 'frame', {
     label: 'Bearing hole',
-    help: 'Hole in the end plates for the bush or bearing of the shaft.',
+    help: 'Hole in the end plates for the bush or bearing of the shaft. Left empty: 4 mm more than the shaft.',
     min: 1,
     max: 60,
-    default: 10,
     appliesTo: FRAMED,
     cameLater: true,
   }),

@@ -26,7 +26,14 @@ const ARM_WIDTH = 6;
 const ARM_BEHIND = 0.5;
 const ARM_THICKNESS = 2;
 
+/** mm. More than the shaft, where the design leaves the bearing to the kernel. */
+const BEARING_OVER_SHAFT = 4;
+
 export interface FrameLayout {
+  /** Diameter of the bearing holes, mm. */
+  readonly bearing: number;
+  /** Face of the stop's arm that is turned to the back plate, along the shaft, mm. */
+  readonly armFace: number;
   /** Inner faces of the end plates along the shaft, mm. */
   readonly back: number;
   readonly front: number;
@@ -39,6 +46,11 @@ export interface FrameLayout {
   /** Radius of the discs round which the end plates' outline runs. */
   readonly corner: number;
   readonly posts: readonly Point[];
+}
+
+/** mm. Nut and washer on a post (ISO 4032 nuts are about 0.8 diameters high; from memory). */
+export function nutHeight(diameter: number): number {
+  return 0.8 * diameter + 1;
 }
 
 /** Every place at which posts stand, each once. */
@@ -70,14 +82,23 @@ function pillarPlaces({ design, stack, turn }: Derived): Point[] {
 export function frameLayout(derived: Derived): FrameLayout | null {
   const { design, stack, turn } = derived;
   if (design.frame === 'none') return null;
-  const pinRadius = design.bearingDiameter / 2 + PIN + RIM;
+  const bearing = design.bearingDiameter ?? design.shaftDiameter + BEARING_OVER_SHAFT;
+  const pinRadius = bearing / 2 + PIN + RIM;
   // An arm's middle stays this far from a pin it touches.
   const short = Math.asin((ARM_WIDTH + PIN) / 2 / pinRadius);
   const pitch = (2 * Math.PI) / arrangementOf(design).lobes;
   const armAngle = turn.direction * ((pitch - design.rotorSector) / 2);
   const pinAt = (mesh: number, beyond: number): Point =>
     polar(pinRadius, armAngle + turn.direction * (mesh + beyond));
+  const posts = postPlaces(derived);
+  // Where bushes and nuts are in the arm's way it stands behind them.
+  const nearest = Math.min(...posts.map(({ x, y }) => Math.hypot(x, y)));
+  const onPost = design.postSpacerRadius + design.postHoleDiameter;
+  const clear = pinRadius + PIN + onPost < nearest;
+  const behind = clear ? 0 : design.bushFlange + nutHeight(design.postHoleDiameter);
   return {
+    bearing,
+    armFace: -design.frameClearance - design.frameThickness - behind - ARM_BEHIND,
     back: -design.frameClearance,
     front: stack.depth + design.frameClearance,
     thickness: design.frameThickness,
@@ -87,21 +108,21 @@ export function frameLayout(derived: Derived): FrameLayout | null {
     pinRadius,
     corner:
       RIM + Math.max(design.postSpacerRadius, design.pillarDiameter / 2, PIN / 2 + RIM / 2),
-    posts: postPlaces(derived),
+    posts,
   };
 }
 
 function addEndPlates(collection: Collection, derived: Derived, layout: FrameLayout): void {
   const { design } = derived;
-  const { back, front, thickness, pillars, pins, posts, corner } = layout;
-  const bearingRim = design.bearingDiameter / 2 + RIM - corner;
+  const { bearing, back, front, thickness, pillars, pins, posts, corner } = layout;
+  const bearingRim = bearing / 2 + RIM - corner;
   // The bearing asks for more room than a corner: a square of corners stands for it.
   const aboutShaft = [45, 135, 225, 315].map((degrees) =>
     polar(Math.max(bearingRim, 0) * Math.SQRT2, (degrees * Math.PI) / 180),
   );
   const outside = roundedHull([...posts, ...pillars, ...pins, ...aboutShaft], corner);
   const holes = [
-    circle(design.bearingDiameter / 2),
+    circle(bearing / 2),
     ...posts.map((post) => circle(design.postHoleDiameter / 2 + SHOULDER, post)),
     ...pillars.map((pillar) => circle(clearanceHole(PILLAR_THREAD) / 2, pillar)),
   ];
@@ -135,8 +156,7 @@ function addEndPlates(collection: Collection, derived: Derived, layout: FrameLay
 
 function addStop(collection: Collection, derived: Derived, layout: FrameLayout): void {
   const { design } = derived;
-  const { back, thickness, pins, pinRadius, armAngle } = layout;
-  const to = back - thickness - ARM_BEHIND;
+  const { armFace: to, back, pins, pinRadius, armAngle } = layout;
   addCut(
     collection,
     {
@@ -155,7 +175,7 @@ function addStop(collection: Collection, derived: Derived, layout: FrameLayout):
     },
     [{ x: 0, y: 0, from: to - ARM_THICKNESS, to, angle: armAngle, turns: true }],
   );
-  const length = thickness + ARM_BEHIND + ARM_THICKNESS;
+  const length = back - to + ARM_THICKNESS;
   addBought(
     collection,
     {
@@ -178,7 +198,7 @@ function addStop(collection: Collection, derived: Derived, layout: FrameLayout):
 
 export function addFrame(collection: Collection, derived: Derived, layout: FrameLayout): void {
   const { design } = derived;
-  const { back, front, thickness, pillars, posts } = layout;
+  const { bearing, back, front, thickness, pillars, posts } = layout;
   const upright = { angle: 0, turns: false };
   addEndPlates(collection, derived, layout);
   addStop(collection, derived, layout);
@@ -240,7 +260,7 @@ export function addFrame(collection: Collection, derived: Derived, layout: Frame
       key: 'shaft-bush',
       label: 'Bush or bearing for the shaft',
       section: null,
-      size: `bore ${design.shaftDiameter}, outside ${design.bearingDiameter}`,
+      size: `bore ${design.shaftDiameter}, outside ${bearing}`,
       note: 'Rotor earthed through it or through a wiper, as the circuit asks',
     },
     2,
@@ -250,7 +270,7 @@ export function addFrame(collection: Collection, derived: Derived, layout: Frame
 
 function addPanelPlate(collection: Collection, derived: Derived, layout: FrameLayout): void {
   const { design } = derived;
-  const { front, thickness, pillars, posts, corner } = layout;
+  const { bearing, front, thickness, pillars, posts, corner } = layout;
   const all = [...pillars, ...posts];
   const [xs, ys] = [all.map(({ x }) => x), all.map(({ y }) => y)];
   const middle = {
@@ -269,7 +289,7 @@ function addPanelPlate(collection: Collection, derived: Derived, layout: FrameLa
     })),
   );
   // In front of the posts' outer bushes and nuts.
-  const from = front + thickness + design.bushFlange + design.postHoleDiameter + 2;
+  const from = front + thickness + design.bushFlange + nutHeight(design.postHoleDiameter) + 1;
   addCut(
     collection,
     {
@@ -281,7 +301,7 @@ function addPanelPlate(collection: Collection, derived: Derived, layout: FrameLa
       note: `Stands ${(from - front - thickness).toFixed(1)} before the front plate on longer pillar screws with tubes`,
       outside: roundedRectangle(middle, width, height, RIM),
       holes: [
-        circle(design.bearingDiameter / 2 + 1),
+        circle(bearing / 2 + 1),
         ...pillars.map((pillar) => circle(clearanceHole(PILLAR_THREAD) / 2, pillar)),
         ...corners.map((at) => circle(screw / 2, at)),
       ],
@@ -290,5 +310,7 @@ function addPanelPlate(collection: Collection, derived: Derived, layout: FrameLa
   );
 }
 
-/** How far the shaft reaches behind the back plate for the stop, mm. */
-export const SHAFT_BEHIND = ARM_BEHIND + ARM_THICKNESS + 3;
+/** Where the shaft ends behind the arm of the stop, mm. */
+export function shaftBack({ armFace }: FrameLayout): number {
+  return armFace - ARM_THICKNESS - 3;
+}

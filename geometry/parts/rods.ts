@@ -2,7 +2,7 @@
 
 import type { Derived } from '../derived';
 import { addBought, type Collection } from './collection';
-import { postPlaces, SHAFT_BEHIND, type FrameLayout } from './frame';
+import { nutHeight, postPlaces, shaftBack, type FrameLayout } from './frame';
 import { threadThrough } from './thread';
 
 /** mm. Without a frame shaft and posts stand out this far at either end. */
@@ -18,7 +18,7 @@ export function addRods(
   const { design, stack } = derived;
   const shaft = layout
     ? {
-        from: layout.back - layout.thickness - SHAFT_BEHIND,
+        from: shaftBack(layout),
         to: layout.front + layout.thickness + design.shaftFront,
       }
     : { from: -OUT, to: stack.depth + OUT };
@@ -34,8 +34,9 @@ export function addRods(
     [{ x: 0, y: 0, ...shaft, angle: 0, turns: true }],
   );
   const thread = threadThrough(design.postHoleDiameter);
-  const nut = 0.8 * design.postHoleDiameter + 1;
-  const beyond = layout ? layout.thickness + design.bushFlange + nut : OUT;
+  const beyond = layout
+    ? layout.thickness + design.bushFlange + nutHeight(design.postHoleDiameter)
+    : OUT;
   const post = layout
     ? { from: layout.back - beyond, to: layout.front + beyond }
     : { from: -beyond, to: stack.depth + beyond };
