@@ -2,6 +2,8 @@
 
 import type { Derived } from '../derived';
 import { formatQuantity } from '../quantity';
+import { partsOf } from '../parts/assembly';
+import { billTable } from './bill-table';
 import type { CutFile } from './cut-file';
 import { dxfOf } from './dxf';
 import { allPlatesFileName, plateFileName, slugOf } from './file-name';
@@ -51,6 +53,13 @@ export function cutFiles(designName: string, derived: Derived): CutFile[] {
       mediaType: 'text/csv; charset=utf-8',
       text: lawTable(section),
     })),
+    {
+      name: `${slug}_parts.csv`,
+      label: 'Bill of materials: all parts with size, mass and sheet',
+      kind: 'csv',
+      mediaType: 'text/csv; charset=utf-8',
+      text: billTable(partsOf(derived)),
+    },
     {
       name: `${slug}_design.json`,
       label: 'The design itself, to derive it again',
