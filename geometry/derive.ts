@@ -1,10 +1,11 @@
 import { checkDesign } from './check';
-import type { Derivation, FieldModel, SectionResult } from './derived';
+import type { Derivation, Derived, FieldModel, SectionResult } from './derived';
 import type { Design } from './design';
 import { turnFindings } from './feasibility';
 import { createEdgeCache, type EdgeCache } from './field/cell-field';
 import type { Finding } from './finding';
 import { findingsOf } from './findings';
+import { fitFindings } from './parts/fit';
 import { deriveSection } from './section';
 import { stackOf } from './stack';
 import { turnOf } from './turn';
@@ -40,15 +41,16 @@ export function derive(
   });
   if (blocking.length > 0) return { ok: false, findings: blocking };
   const stack = stackOf(design, sections);
+  const plates: Derived = {
+    kernel: KERNEL_VERSION,
+    design,
+    turn,
+    sections,
+    stack,
+    findings: findingsOf(design, sections, stack),
+  };
   return {
     ok: true,
-    derived: {
-      kernel: KERNEL_VERSION,
-      design,
-      turn,
-      sections,
-      stack,
-      findings: findingsOf(design, sections, stack),
-    },
+    derived: { ...plates, findings: [...plates.findings, ...fitFindings(plates)] },
   };
 }

@@ -20,7 +20,9 @@ export type FindingCode =
   | 'cutout-clearance'
   | 'spacer-proud'
   | 'hole-small'
-  | 'web-thin';
+  | 'web-thin'
+  | 'slots'
+  | 'frame';
 
 /**
  * One thing the kernel checked. `value` and `limit` are in kernel units of `quantity`;

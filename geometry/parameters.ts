@@ -423,7 +423,7 @@ export const sharedParameters = {
     help: 'From the shaft to the furthest part, stator ears and sweep included.',
     min: 4,
     max: 300,
-    default: 60,
+    default: 65,
   }),
   largestDepth: length('envelope', {
     label: 'Largest depth allowed',

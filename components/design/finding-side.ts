@@ -22,10 +22,13 @@ const sides: Record<Exclude<FindingCode, 'range-infeasible'>, 'at most' | 'at le
   'spacer-proud': 'at least',
   'hole-small': 'at least',
   'web-thin': 'at least',
+  slots: 'at least',
+  frame: 'at least',
 };
 
 /** How the limit of a finding is to be read. */
-export function findingSide({ code, value, limit }: Finding): string {
+export function findingSide({ code, value, limit, parameters }: Finding): string {
+  if (code === 'frame' && parameters[0] !== 'frameClearance') return 'at most';
   if (code !== 'range-infeasible') return sides[code];
   // Only listed when it fails: what is too large must come below, what is too small above.
   return value > limit ? 'below' : 'above';
