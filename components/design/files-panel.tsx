@@ -82,6 +82,9 @@ export function FilesPanel({
           ? `Of saved version ${version}. The screen has unsaved changes that are not in these files.`
           : `Of version ${version}, in millimetres, at nominal size: no kerf is allowed for.`}
       </p>
+      <p>
+        <a href={`/designs/${id}/parts`}>All parts, with spacers and frame</a>
+      </p>
       {query.isPending && <p>Making the list of files</p>}
       {query.isError && <p className="text-bad">{query.error.message}</p>}
       <ul className="flex flex-col">

@@ -1,0 +1,46 @@
+import type { Metadata } from 'next';
+import Link from 'next/link';
+import { notFound } from 'next/navigation';
+import { Cautions } from '@/components/design/cautions';
+import { PartsTable } from '@/components/parts/parts-table';
+import { partsOf } from '@/geometry/parts/assembly';
+import { requirePageMember } from '@/lib/access';
+import { describeFailure } from '@/lib/assess-design';
+import { deriveDesign } from '@/lib/derive-design';
+import { findDesign } from '@/lib/queries';
+
+type Props = { params: Promise<{ id: string }> };
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const record = await findDesign(await requirePageMember(), (await params).id);
+  return { title: record ? `Parts of ${record.name}` : 'Nothing here' };
+}
+
+export default async function PartsPage({ params }: Props) {
+  const viewer = await requirePageMember();
+  const record = await findDesign(viewer, (await params).id);
+  if (!record) notFound();
+  const derivation = deriveDesign(record.design);
+  return (
+    <main id="main" className="mx-auto flex w-full max-w-6xl flex-col gap-4 px-5 py-5">
+      <h1 className="wide-letter text-title font-semibold">Parts of {record.name}</h1>
+      <p>
+        <Link href={`/designs/${record.id}`}>Back to the design</Link>, saved version{' '}
+        {record.version}
+      </p>
+      {derivation.ok ? (
+        <PartsTable
+          parts={partsOf(derivation.derived)}
+          depth={derivation.derived.stack.depth}
+        />
+      ) : (
+        <ul className="text-bad">
+          {derivation.findings.map((finding) => (
+            <li key={finding.label}>{describeFailure(finding)}</li>
+          ))}
+        </ul>
+      )}
+      <Cautions />
+    </main>
+  );
+}
