@@ -4,6 +4,7 @@ import { TWO_PI } from '../constants';
 import { contourArea } from '../measure';
 import { arcOf, type Arc, type Contour, type Path, type Point, type Vertex } from '../outline';
 import { polar } from '../polar';
+import { STRAIGHT } from '../tolerances';
 
 export interface LineSide {
   readonly kind: 'line';
@@ -25,7 +26,7 @@ export const SHORTEST = 1e-6;
 function sideOf(a: Vertex, b: Point): Side {
   const from = { x: a.x, y: a.y };
   const to = { x: b.x, y: b.y };
-  if (a.bulge === 0) return { kind: 'line', from, to };
+  if (Math.abs(a.bulge) < STRAIGHT) return { kind: 'line', from, to };
   return { kind: 'arc', from, to, ...arcOf(a, b, a.bulge) };
 }
 

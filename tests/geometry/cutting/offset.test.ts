@@ -6,6 +6,7 @@
 import { EndType, inflatePaths, JoinType } from 'clipper2-ts';
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
+import { meetings } from '../../../geometry/cutting/meet';
 import { offsetContour } from '../../../geometry/cutting/offset';
 import { distanceToSides, pointAt, sidesOf } from '../../../geometry/cutting/side';
 import { flatten } from '../../../geometry/flatten';
@@ -35,9 +36,9 @@ const slotted = (width: number): Path =>
   );
 
 /** Area of the polygon, inflated by clipper2-ts with round corners; largest outline alone. */
-function inflatedArea(contour: Contour, distance: number): number {
+function inflatedArea(contour: Contour, distance: number, sagitta = 1e-5): number {
   const unit = 1e-5;
-  const flat = flatten(contour, 1e-4);
+  const flat = flatten(contour, sagitta);
   const points = [];
   for (let i = 0; i < flat.length; i += 2) {
     points.push({ x: Math.round(flat[i]! / unit), y: Math.round(flat[i + 1]! / unit), z: 0 });
@@ -127,11 +128,25 @@ describe('the plates of the worked designs', () => {
   );
 });
 
+/** Does the contour cross itself? Two sides may share an end and nothing more. */
+function crossesItself(contour: Path): boolean {
+  const sides = sidesOf(contour);
+  return sides.some((a, i) =>
+    sides.slice(i + 1).some((b) =>
+      meetings(a, b).some(([onA, onB]) => {
+        const p = pointAt(a, onA);
+        const ends = [a.from, a.to].filter((e) => Math.hypot(e.x - p.x, e.y - p.y) < 1e-6);
+        return ends.length === 0 || (onB > 1e-6 && onB < 1 - 1e-6);
+      }),
+    ),
+  );
+}
+
 const anyStar = fc
   .array(
     fc.record({
       radius: fc.double({ min: 8, max: 25, noNaN: true }),
-      bulge: fc.oneof(fc.constant(0), fc.double({ min: -0.25, max: 0.6, noNaN: true })),
+      bulge: fc.integer({ min: -25, max: 60 }).map((percent) => percent / 100),
     }),
     { minLength: 5, maxLength: 12 },
   )
@@ -142,7 +157,8 @@ const anyStar = fc
         return at(radius * Math.cos(angle), radius * Math.sin(angle), bulge);
       }),
     ),
-  );
+  )
+  .filter((star) => !crossesItself(star));
 
 describe('any star of lines and arcs, seed 20261', () => {
   test('has the area that clipper2-ts finds, and stays its distance away', () => {
@@ -159,7 +175,7 @@ describe('any star of lines and arcs, seed 20261', () => {
           if (closing) return;
           compared++;
           const area = contourArea(contour!);
-          expect(Math.abs(area - inflatedArea(star, d))).toBeLessThan(0.02);
+          expect(Math.abs(area - inflatedArea(star, d, 1e-4))).toBeLessThan(0.01);
           const sides = sidesOf(star);
           for (const side of sidesOf(contour!)) {
             const away = distanceToSides(sides, pointAt(side, 0.5));
@@ -167,7 +183,7 @@ describe('any star of lines and arcs, seed 20261', () => {
           }
         },
       ),
-      { seed: 20261, numRuns: 300 },
+      { seed: 20261, numRuns: 250 },
     );
     expect(compared).toBeGreaterThan(200);
   });
@@ -219,7 +235,10 @@ describe('narrow places', () => {
     );
     const { contour, closing } = offsetContour(pocket, 0.1);
     expect(closing!.width).toBeCloseTo(0.1, 9);
-    expect(contourArea(contour!)).toBeCloseTo(600 + 100 * 0.1 + Math.PI * 0.01, 6);
+    // Where the arcs about the mouth's corners meet, a cusp is left between them.
+    const under = 0.05 * Math.sqrt(0.01 - 0.05 ** 2) + 0.01 * Math.asin(0.5);
+    const cusp = 0.1 * 0.1 - under;
+    expect(contourArea(contour!)).toBeCloseTo(600 + 100 * 0.1 + Math.PI * 0.01 - cusp, 9);
   });
 
   test('a hole smaller than the kerf has nothing left', () => {
