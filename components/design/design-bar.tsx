@@ -10,6 +10,7 @@ import { Notice } from '@/components/ui/notice';
 import { StatusBadge } from '@/components/ui/status-badge';
 import type { Draft } from './draft';
 import { SaveState } from './save-state';
+import type { History } from './use-history';
 import type { Saving } from './use-saving';
 
 function NameField() {
@@ -30,7 +31,7 @@ function NameField() {
 }
 
 /** Name, status, where saving stands, and the two things to do with the whole design. */
-export function DesignBar({ saving }: { saving: Saving }) {
+export function DesignBar({ saving, history }: { saving: Saving; history: History }) {
   const { stored, dirty, state, refusal } = saving;
   const [hint, setHint] = useState<string | null>(null);
   const next = stored.status === 'ready' ? 'draft' : 'ready';
@@ -51,6 +52,12 @@ export function DesignBar({ saving }: { saving: Saving }) {
         <StatusBadge status={stored.status} />
         <SaveState saving={saving} />
         <div className="ml-auto flex flex-wrap gap-2">
+          <Button look="quiet" isDisabled={!history.canUndo} onPress={history.undo}>
+            Undo
+          </Button>
+          <Button look="quiet" isDisabled={!history.canRedo} onPress={history.redo}>
+            Redo
+          </Button>
           <Button
             isDisabled={status.isPending}
             onPress={() => {

@@ -2,6 +2,8 @@
 
 import { memo, use, useState, type ComponentProps } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
+import type { ToolPlace } from '@/components/tools/registry';
+import { ToolLinks } from '@/components/tools/tool-links';
 import { loadApi } from '@/components/api/load-api';
 import { ChosenContext } from './chosen-values';
 import { ListField, RadioField } from './choice-field';
@@ -39,13 +41,17 @@ function Field({ entry, prefix }: { entry: GroupEntry; prefix: string }) {
   );
 }
 
+const places: Partial<Record<Group['group'], ToolPlace>> = { law: 'law', stack: 'stack' };
+
 function Fields({ group, prefix }: { group: Group; prefix: string }) {
+  const place = places[group.group];
   return (
     <fieldset className="flex flex-col gap-1.5">
       <legend className="wide-letter mb-2 font-semibold">{group.title}</legend>
       {group.entries.map((entry) => (
         <Field key={prefix + entry.key} entry={entry} prefix={prefix} />
       ))}
+      {place && <ToolLinks place={place} />}
     </fieldset>
   );
 }

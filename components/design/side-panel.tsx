@@ -4,6 +4,7 @@ import dynamic from 'next/dynamic';
 import type { ReactNode } from 'react';
 import type { AngleStore } from '@/components/floor/angle-store';
 import type { Finding } from '@/geometry';
+import { ToolLinks } from '@/components/tools/tool-links';
 import { Cautions } from './cautions';
 import { StackFigures } from './figures';
 import { FindingsList } from './findings-list';
@@ -60,11 +61,13 @@ export function SidePanel({
           sections={derived?.sections.length ?? 1}
           {...(onPick && { onPick })}
         />
+        <ToolLinks place="checks" />
       </PanelSection>
       {derived && result && (
         <>
           <PanelSection title="Law held by the cut plates">
             <LawFigures section={result} />
+            <ToolLinks place="held" />
           </PanelSection>
           <PanelSection title="Built stack">
             <StackFigures derived={derived} section={section} />

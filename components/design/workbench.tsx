@@ -4,6 +4,9 @@ import dynamic from 'next/dynamic';
 import { useEffect, useState } from 'react';
 import type { UseFormReturn } from 'react-hook-form';
 import type { Derivation, Finding } from '@/geometry';
+import { ToolHost } from '@/components/tools/tool-host';
+import { OpenToolContext, ToolLinks } from '@/components/tools/tool-links';
+import type { ToolName } from '@/components/tools/registry';
 import type { DesignFiles, DesignRecord } from '@/lib/schemas/api';
 import { ChosenContext, useChosenValues } from './chosen-values';
 import { DesignBar } from './design-bar';
@@ -17,6 +20,7 @@ import { SectionTools } from './section-tools';
 import { PanelSection, SidePanel } from './side-panel';
 import { useAngleStore } from './use-angle-store';
 import { useDerivation } from './use-derivation';
+import { useHistory } from './use-history';
 import { useSaveAsNew } from './use-save-as-new';
 import { useSaveKey } from './use-save-key';
 import { useSaving } from './use-saving';
@@ -59,6 +63,8 @@ export function Workbench({
     [form, request],
   );
 
+  const history = useHistory(form);
+  const [tool, openTool] = useState<ToolName | null>(null);
   const saving = useSaving(form, record, userId);
   const unsaved = useUnsaved(form, saving, userId);
   const saveAsNew = useSaveAsNew(form, userId, record.id);
@@ -81,9 +87,17 @@ export function Workbench({
       : null;
 
   return (
-    <>
+    <OpenToolContext value={openTool}>
       <main id="main" className="flex flex-col bench:h-[calc(100dvh-3rem-1px)] bench:min-h-150">
-        <DesignBar saving={saving} />
+        <DesignBar saving={saving} history={history} />
+        <ToolHost
+          tool={tool}
+          form={form}
+          history={history}
+          derived={plates.derived}
+          section={section}
+          onClose={() => openTool(null)}
+        />
         <EditNotices
           saving={saving}
           unsaved={unsaved}
@@ -113,6 +127,7 @@ export function Workbench({
             <SidePanel plates={plates} section={shownSection} store={store} onPick={pick}>
               <PanelSection title="Files">
                 <FilesPanel record={saving.stored} first={files} dirty={saving.dirty} />
+                <ToolLinks place="files" />
               </PanelSection>
             </SidePanel>
           </div>
@@ -131,6 +146,6 @@ export function Workbench({
           onClose={saving.dismissConflict}
         />
       )}
-    </>
+    </OpenToolContext>
   );
 }

@@ -1,0 +1,37 @@
+import type { ComponentType } from 'react';
+import type { Derived, Design } from '@/geometry';
+
+/** What a tool gets. It is drawn anew with every change of the design. */
+export interface ToolProps {
+  /** The last design that could be read from the form. */
+  readonly design: Design;
+  readonly section: number;
+  readonly derived: Derived | null;
+  /** Puts another design on the screen as one step, which `words` name: `Applied 12 plates`. */
+  apply(change: (design: Design) => Design, words: string): void;
+  close(): void;
+}
+
+interface Tool {
+  readonly title: string;
+  /** How the button says it that opens the tool. */
+  readonly opener: string;
+  readonly Component: ComponentType<ToolProps>;
+}
+
+/** Every tool is loaded when it is opened. */
+export const tools: Record<string, Tool> = {};
+
+export type ToolName = string;
+
+/** Where on the design screen a tool is opened from. */
+export type ToolPlace = 'law' | 'stack' | 'checks' | 'held' | 'files' | 'chart';
+
+export const toolsAt: Readonly<Record<ToolPlace, readonly ToolName[]>> = {
+  law: [],
+  stack: [],
+  checks: [],
+  held: [],
+  files: [],
+  chart: [],
+};

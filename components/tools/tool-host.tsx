@@ -1,0 +1,73 @@
+'use client';
+
+import dynamic from 'next/dynamic';
+import { useState } from 'react';
+import type { UseFormReturn } from 'react-hook-form';
+import { designOf, draftOf, type Draft } from '@/components/design/draft';
+import type { History } from '@/components/design/use-history';
+import type { Derived, Design } from '@/geometry';
+import { Button } from '@/components/ui/button';
+import { Notice } from '@/components/ui/notice';
+import type { ToolName } from './registry';
+
+const ToolSheet = dynamic(() => import('./tool-sheet'), { ssr: false });
+
+/** The open tool, and what the last one put on the screen until it is undone or accepted. */
+export function ToolHost({
+  tool,
+  form,
+  history,
+  derived,
+  section,
+  onClose,
+}: {
+  tool: ToolName | null;
+  form: UseFormReturn<Draft>;
+  history: History;
+  derived: Derived | null;
+  section: number;
+  onClose: () => void;
+}) {
+  const [applied, setApplied] = useState<string | null>(null);
+  const read = tool ? designOf(form.getValues()) : null;
+  const design = read?.ok ? read.design : derived?.design;
+
+  function apply(change: (design: Design) => Design, words: string) {
+    if (!design) return;
+    history.apply(draftOf(form.getValues('name'), change(design)));
+    setApplied(words);
+  }
+
+  return (
+    <>
+      {applied && (
+        <Notice>
+          <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-2">
+            <p>{applied}.</p>
+            <span className="flex gap-2">
+              <Button
+                onPress={() => {
+                  history.undo();
+                  setApplied(null);
+                }}
+              >
+                Undo
+              </Button>
+              <Button onPress={() => setApplied(null)}>Keep it</Button>
+            </span>
+          </div>
+        </Notice>
+      )}
+      {tool && design && (
+        <ToolSheet
+          tool={tool}
+          design={design}
+          section={section}
+          derived={derived}
+          apply={apply}
+          close={onClose}
+        />
+      )}
+    </>
+  );
+}

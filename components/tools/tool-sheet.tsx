@@ -1,0 +1,49 @@
+'use client';
+
+import { useEffect, useRef } from 'react';
+import { Button } from '@/components/ui/button';
+import { tools, type ToolName, type ToolProps } from './registry';
+
+/** A tool beside the design, which stays in sight and can be worked on meanwhile. */
+export default function ToolSheet({ tool, ...props }: ToolProps & { tool: ToolName }) {
+  const heading = useRef<HTMLHeadingElement>(null);
+  const { title, Component } = tools[tool]!;
+  const { close } = props;
+
+  useEffect(() => {
+    const before = document.activeElement;
+    heading.current?.focus();
+    return () => {
+      if (before instanceof HTMLElement && before.isConnected) before.focus();
+    };
+  }, [tool]);
+
+  return (
+    <aside
+      role="dialog"
+      aria-label={title}
+      onKeyDown={(event) => {
+        if (event.key !== 'Escape' || event.defaultPrevented) return;
+        event.stopPropagation();
+        close();
+      }}
+      className="fixed inset-y-0 right-0 z-40 flex w-full flex-col border-l border-edge bg-panel shadow-[-8px_0_24px_rgb(20_32_31/0.18)] bench:top-12 bench:w-[36rem]"
+    >
+      <header className="flex items-center gap-3 border-b border-line px-5 py-2.5">
+        <h2
+          ref={heading}
+          tabIndex={-1}
+          className="wide-letter text-title font-semibold outline-none"
+        >
+          {title}
+        </h2>
+        <Button className="ml-auto" onPress={close}>
+          Close
+        </Button>
+      </header>
+      <div className="flex min-h-0 grow flex-col gap-4 overflow-y-auto px-5 py-4">
+        <Component {...props} />
+      </div>
+    </aside>
+  );
+}
