@@ -6,8 +6,11 @@ import {
   type NumberParameter,
   type OptionalNumberParameter,
   type Parameter,
+  type PointsParameter,
   type Quantity,
+  type TextParameter,
 } from './parameters';
+import { faultIn, MOST_POINTS, rowFaults } from './law-points';
 import { formatQuantity } from './quantity';
 
 function isRecord(value: unknown): value is Record<string, unknown> {
@@ -54,8 +57,49 @@ function checkNumber(
   return value;
 }
 
+function checkPoints({ label }: PointsParameter, path: string, value: unknown): unknown {
+  if (!Array.isArray(value)) {
+    throw new KernelError(
+      'not-a-number',
+      path,
+      value,
+      `${label}: give rows of an angle and a value`,
+    );
+  }
+  if (value.length > MOST_POINTS) {
+    throw new KernelError(
+      'out-of-bounds',
+      path,
+      value.length,
+      `${label}: ${value.length} rows are too many; give at most ${MOST_POINTS}`,
+    );
+  }
+  const fault = faultIn(value);
+  if (fault) {
+    throw new KernelError(
+      'not-a-number',
+      path,
+      value,
+      `${label}, row ${fault.row}: ${rowFaults[fault.fault]}`,
+    );
+  }
+  return value.map(([angle, at]: [number, number]) => [angle, at]);
+}
+
+function checkText({ label, longest }: TextParameter, path: string, value: unknown): unknown {
+  if (typeof value === 'string' && value.length <= longest) return value;
+  throw new KernelError(
+    'out-of-bounds',
+    path,
+    value,
+    `${label}: give a text of at most ${longest} characters`,
+  );
+}
+
 /** Checks one value against its parameter. @throws KernelError naming field, value and range. */
 export function checkParameter(parameter: Parameter, path: string, value: unknown): unknown {
+  if (parameter.kind === 'points') return checkPoints(parameter, path, value);
+  if (parameter.kind === 'text') return checkText(parameter, path, value);
   if (parameter.kind !== 'choice') return checkNumber(parameter, path, value);
   if (parameter.options.some((option) => option.value === value)) return value;
   const known = parameter.options.map((option) => option.value).join(', ');

@@ -7,6 +7,7 @@ export type FindingCode =
   | 'outline-infeasible'
   | 'plate-counts'
   | 'turn'
+  | 'own-law'
   | 'law-held'
   | 'law-rises'
   | 'open-capacitance'

@@ -27,6 +27,7 @@ export type {
   StackSpacer,
   Turn,
 } from './derived';
+export { MOST_POINTS, type LawPoint } from './law-points';
 export { KernelError, type KernelErrorCode } from './error';
 export type { Finding, FindingCode, Severity } from './finding';
 export {
@@ -49,10 +50,12 @@ export {
   type OptionalNumberParameter,
   type Parameter,
   type ParameterGroup,
+  type PointsParameter,
+  type TextParameter,
   type Quantity,
   type SectionKey,
   type SharedKey,
   type TargetKind,
 } from './parameters';
-export { resonantCapacitance, resonantFrequency } from './target';
+export { resonantCapacitance, resonantFrequency } from './resonance';
 export { formatQuantity, writeQuantity, type WrittenQuantity } from './quantity';

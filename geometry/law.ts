@@ -5,17 +5,11 @@
  * 41(5), 2010.
  */
 
-import type { Section } from './design';
-
-export type LawName = Section['law'];
-
 /** A law as a function of the swept fraction x, 0 open to 1 meshed. Capacitance in F. */
 export interface Law {
   readonly total: (x: number) => number;
   /** d(total)/dx, F. */
   readonly slope: (x: number) => number;
-  /** d²(total)/dx², F. */
-  readonly curvature: (x: number) => number;
 }
 
 type LawMaker = (min: number, max: number) => Law;
@@ -24,7 +18,6 @@ type LawMaker = (min: number, max: number) => Law;
 const capacitance: LawMaker = (min, max) => ({
   total: (x) => min + (max - min) * x,
   slope: () => max - min,
-  curvature: () => 0,
 });
 
 /** Equal steps of wavelength, which goes as √C: C = (a + b·x)². */
@@ -34,7 +27,6 @@ const wavelength: LawMaker = (min, max) => {
   return {
     total: (x) => (a + b * x) ** 2,
     slope: (x) => 2 * b * (a + b * x),
-    curvature: () => 2 * b * b,
   };
 };
 
@@ -45,7 +37,6 @@ const frequency: LawMaker = (min, max) => {
   return {
     total: (x) => (a - b * x) ** -2,
     slope: (x) => 2 * b * (a - b * x) ** -3,
-    curvature: (x) => 6 * b * b * (a - b * x) ** -4,
   };
 };
 
@@ -53,12 +44,15 @@ const frequency: LawMaker = (min, max) => {
 const logarithmic: LawMaker = (min, max) => {
   const k = Math.log(max / min);
   const total = (x: number): number => min * Math.exp(k * x);
-  return { total, slope: (x) => k * total(x), curvature: (x) => k * k * total(x) };
+  return { total, slope: (x) => k * total(x) };
 };
 
-const makers: Record<LawName, LawMaker> = { capacitance, wavelength, frequency, logarithmic };
+const makers = { capacitance, wavelength, frequency, logarithmic };
+
+/** Laws that have a name of their own. */
+export type NamedLaw = keyof typeof makers;
 
 /** The law between two total capacitances, F; 0 < min < max. */
-export function lawBetween(name: LawName, min: number, max: number): Law {
+export function lawBetween(name: NamedLaw, min: number, max: number): Law {
   return makers[name](min, max);
 }

@@ -5,6 +5,8 @@
  * Values are in kernel units: mm, rad, F, H, Hz, V (peak); counts and ratios are bare.
  */
 
+import type { LawPoint } from './law-points';
+
 export type Quantity =
   | 'length'
   | 'angle'
@@ -56,14 +58,42 @@ export interface ChoiceParameter<V extends string = string> {
   readonly cameLater?: true;
 }
 
-export type Parameter = NumberParameter | OptionalNumberParameter | ChoiceParameter;
+/** A table of angles and values, rising. */
+export interface PointsParameter {
+  readonly kind: 'points';
+  readonly group: ParameterGroup;
+  readonly label: string;
+  readonly help: string;
+  readonly default: readonly LawPoint[];
+  readonly appliesTo?: AppliesTo;
+  readonly cameLater?: true;
+}
+
+/** Text that the kernel reads by itself. */
+export interface TextParameter {
+  readonly kind: 'text';
+  readonly group: ParameterGroup;
+  readonly label: string;
+  readonly help: string;
+  readonly longest: number;
+  readonly default: string;
+  readonly appliesTo?: AppliesTo;
+  readonly cameLater?: true;
+}
+
+export type Parameter =
+  NumberParameter | OptionalNumberParameter | ChoiceParameter | PointsParameter | TextParameter;
 
 type ValueOf<P> =
   P extends ChoiceParameter<infer V>
     ? V
     : P extends OptionalNumberParameter
       ? number | null
-      : number;
+      : P extends PointsParameter
+        ? readonly LawPoint[]
+        : P extends TextParameter
+          ? string
+          : number;
 
 export type ValuesOf<T> = { -readonly [K in keyof T]: ValueOf<T[K]> };
 
@@ -108,13 +138,18 @@ function choice<V extends string>(
 
 const DEGREE = Math.PI / 180;
 
-const TERMINALS: AppliesTo = { targetKind: ['terminals'] };
+/** Laws whose range is given beside them; a table brings its own. */
+const RANGED = ['capacitance', 'wavelength', 'frequency', 'logarithmic', 'formula'];
+const TERMINALS: AppliesTo = { targetKind: ['terminals'], law: RANGED };
+const BAND_ENDS: AppliesTo = { targetKind: ['band'], law: RANGED };
 const BAND: AppliesTo = { targetKind: ['band'] };
 const FRAMED: AppliesTo = { frame: ['end-plates'] };
 
 /** Parameters of one section: its law, its target and its plates. */
 export const sectionParameters = {
-  law: choice<'capacitance' | 'wavelength' | 'frequency' | 'logarithmic'>('law', {
+  law: choice<
+    'capacitance' | 'wavelength' | 'frequency' | 'logarithmic' | 'points' | 'formula'
+  >('law', {
     label: 'Tuning law',
     help: 'What moves by equal steps as the shaft turns. The law acts on the total capacitance.',
     options: [
@@ -122,6 +157,8 @@ export const sectionParameters = {
       { value: 'wavelength', label: 'wavelength' },
       { value: 'frequency', label: 'frequency' },
       { value: 'logarithmic', label: 'log' },
+      { value: 'points', label: 'own table' },
+      { value: 'formula', label: 'formula' },
     ],
     default: 'frequency',
   }),
@@ -134,6 +171,25 @@ export const sectionParameters = {
     ],
     default: 'band',
   }),
+  lawPoints: {
+    kind: 'points',
+    group: 'law',
+    label: 'Table of the law',
+    help: 'Shaft angle from where the law begins, and what the dial shall have there: total capacitance, or with band and coil the frequency. The range is that of its ends.',
+    default: [],
+    appliesTo: { law: ['points'] },
+    cameLater: true,
+  } as PointsParameter,
+  lawFormula: {
+    kind: 'text',
+    group: 'law',
+    label: 'Formula of the law',
+    help: 'Total capacitance against the swept fraction x from 0 to 1, in any scale: it is stretched to the range. Numbers, + - * / ^, pi, e, sqrt, exp, log, sin and the like.',
+    longest: 200,
+    default: 'x^1.5',
+    appliesTo: { law: ['formula'] },
+    cameLater: true,
+  } as TextParameter,
   minCapacitance: capacitance('law', {
     label: 'Capacitance, open',
     help: 'At the terminals with the plates fully open, trimmer included.',
@@ -156,7 +212,7 @@ export const sectionParameters = {
     min: 1e3,
     max: 1e9,
     default: 530e3,
-    appliesTo: BAND,
+    appliesTo: BAND_ENDS,
   }),
   bandHigh: frequency('law', {
     label: 'Band, high end',
@@ -164,7 +220,7 @@ export const sectionParameters = {
     min: 1e3,
     max: 1e9,
     default: 1700e3,
-    appliesTo: BAND,
+    appliesTo: BAND_ENDS,
   }),
   inductance: inductance('law', {
     label: 'Coil inductance',

@@ -10,11 +10,12 @@ import { bladeFinding, hugeFinding, ON_LEAST_RADIUS, shapeFindings } from './fea
 import { cellField, sectionEdges, type EdgeCache } from './field/cell-field';
 import type { PlanShare } from './field/plan-share';
 import type { Finding } from './finding';
-import { lawBetween, type Law } from './law';
+import type { Law } from './law';
 import { checkLaw } from './law-check';
 import { sheetMaterials } from './material';
 import { contourArea, contourLength } from './measure';
 import { mirrorCircle, mirrorPath, mirrorPoint } from './mirror';
+import { lawOf } from './own-law';
 import { standPosts } from './post';
 import { bladeOf } from './rotor';
 import {
@@ -166,11 +167,12 @@ export function deriveSection(
   if ('code' in target) return refused(target, ...blocked);
   if (blocked.length > 0) return refused(...blocked);
 
+  const law = lawOf(section, index, target);
+  if ('code' in law) return refused(law);
   const { totalMin, totalMax, stray, inductance } = target;
   const arrangement = arrangementOf(design);
   const gaps = gapsOf(section);
   const airGap = electricalGap(section);
-  const law = lawBetween(section.law, totalMin, totalMax);
   const edges = sectionEdges({ ...design, ...section, airGap }, cache);
   const form = statorFormOf(section, arrangement);
   const setting: Setting = {

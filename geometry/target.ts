@@ -1,5 +1,7 @@
 import type { Section } from './design';
 import type { Finding } from './finding';
+import { tableFinding, totalsOf } from './own-table';
+import { resonantCapacitance } from './resonance';
 
 /** What a section must reach, F and H. */
 export interface Target {
@@ -9,26 +11,6 @@ export interface Target {
   readonly inductance: number | null;
 }
 
-/**
- * Capacitance that tunes a coil to a frequency: C = 1/((2πf)²·L).
- * @param frequency Hz
- * @param inductance H
- * @returns F
- */
-export function resonantCapacitance(frequency: number, inductance: number): number {
-  return 1 / ((2 * Math.PI * frequency) ** 2 * inductance);
-}
-
-/**
- * Frequency to which a capacitance tunes a coil.
- * @param capacitance F, the total
- * @param inductance H
- * @returns Hz
- */
-export function resonantFrequency(capacitance: number, inductance: number): number {
-  return 1 / (2 * Math.PI * Math.sqrt(capacitance * inductance));
-}
-
 function infeasible(
   index: number,
   rest: Pick<Finding, 'label' | 'value' | 'limit' | 'quantity' | 'change' | 'parameters'>,
@@ -36,8 +18,32 @@ function infeasible(
   return { code: 'range-infeasible', severity: 'fail', section: index, ...rest };
 }
 
+function strayFinding(index: number, stray: number, totalMin: number): Finding {
+  return infeasible(index, {
+    label: 'Circuit stray below the total at the high end',
+    value: stray,
+    limit: totalMin,
+    quantity: 'capacitance',
+    change:
+      'The stray alone tunes below the high end: lower it, take a smaller coil or a lower high end.',
+    parameters: ['stray', 'inductance', 'bandHigh'],
+  });
+}
+
+function targetOfTable(section: Section, index: number): Target | Finding {
+  const wrong = tableFinding(section, index);
+  if (wrong) return wrong;
+  const totals = totalsOf(section);
+  const ends = { totalMin: totals[0]!, totalMax: totals.at(-1)! };
+  if (section.targetKind === 'terminals') return { ...ends, stray: 0, inductance: null };
+  const { stray, inductance } = section;
+  if (stray < ends.totalMin) return { ...ends, stray, inductance };
+  return strayFinding(index, stray, ends.totalMin);
+}
+
 /** The total range of a section, or the finding that says why there is none. */
 export function targetOf(section: Section, index: number): Target | Finding {
+  if (section.law === 'points') return targetOfTable(section, index);
   if (section.targetKind === 'terminals') {
     const { minCapacitance: min, maxCapacitance: max } = section;
     if (min < max) return { totalMin: min, totalMax: max, stray: 0, inductance: null };
@@ -63,16 +69,6 @@ export function targetOf(section: Section, index: number): Target | Finding {
   }
   const totalMin = resonantCapacitance(bandHigh, inductance);
   const totalMax = resonantCapacitance(bandLow, inductance);
-  if (stray >= totalMin) {
-    return infeasible(index, {
-      label: 'Circuit stray below the total at the high end',
-      value: stray,
-      limit: totalMin,
-      quantity: 'capacitance',
-      change:
-        'The stray alone tunes below the high end: lower it, take a smaller coil or a lower high end.',
-      parameters: ['stray', 'inductance', 'bandHigh'],
-    });
-  }
+  if (stray >= totalMin) return strayFinding(index, stray, totalMin);
   return { totalMin, totalMax, stray, inductance };
 }

@@ -5,7 +5,7 @@ import { EPSILON_0 } from './constants';
 import type { Turn } from './derived';
 import type { Design, Section } from './design';
 import { electricalGap } from './dielectric';
-import { lawBetween } from './law';
+import { lawOf } from './own-law';
 import { targetOf } from './target';
 
 /**
@@ -28,8 +28,9 @@ function radiusByArea(design: Design, section: Section, x: 0 | 1): number {
   const target = targetOf(section, 0);
   const rc = design.cutoutRadius;
   if ('code' in target) return rc;
-  const slope =
-    lawBetween(section.law, target.totalMin, target.totalMax).slope(x) / design.travel;
+  const law = lawOf(section, 0, target);
+  if ('code' in law) return rc;
+  const slope = law.slope(x) / design.travel;
   const gaps = arrangementOf(design).share * Math.max(1, gapsOf(section));
   return Math.sqrt(
     rc * rc + (2 * electricalGap(section) * slope) / (EPSILON_0 * section.permittivity * gaps),

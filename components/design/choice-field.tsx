@@ -28,7 +28,7 @@ export function RadioField({ path, parameter }: ChoiceProps) {
       className="flex flex-col gap-1.5"
     >
       <Label className={law ? 'sr-only' : 'text-ink-2'}>{parameter.label}</Label>
-      <div className="dense flex overflow-hidden rounded-[3px] border border-edge bg-white">
+      <div className="dense flex flex-wrap overflow-hidden rounded-[3px] border border-edge bg-white">
         {parameter.options.map((option) => (
           <Radio
             key={option.value}

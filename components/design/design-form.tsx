@@ -1,5 +1,6 @@
 'use client';
 
+import dynamic from 'next/dynamic';
 import { memo, use, useState, type ComponentProps } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
 import type { ToolPlace } from '@/components/tools/registry';
@@ -19,6 +20,10 @@ import {
 } from './parameter-groups';
 import { QuantityField } from './quantity-field';
 
+// For those who ask for a law of their own.
+const PointsField = dynamic(() => import('./points-field'), { ssr: false });
+const FormulaField = dynamic(() => import('./formula-field'), { ssr: false });
+
 /** A field that may be left empty; only these are drawn anew with what the kernel chose. */
 function OptionalField({
   name,
@@ -33,6 +38,8 @@ function Field({ entry, prefix }: { entry: GroupEntry; prefix: string }) {
   if (parameter.kind === 'optional-number') {
     return <OptionalField name={key} path={path} parameter={parameter} />;
   }
+  if (parameter.kind === 'points') return <PointsField path={path} parameter={parameter} />;
+  if (parameter.kind === 'text') return <FormulaField path={path} parameter={parameter} />;
   if (parameter.kind !== 'choice') return <QuantityField path={path} parameter={parameter} />;
   return key === 'material' ? (
     <ListField path={path} parameter={parameter} />

@@ -7,13 +7,14 @@ import {
   sectionParameters,
   sharedParameters,
   type Design,
+  type LawPoint,
   type NumberParameter,
   type OptionalNumberParameter,
   type Parameter,
 } from '@/geometry';
 
 /** A kernel value, null for one left empty on purpose, or text that is no value (yet). */
-export type DraftValue = number | string | null;
+export type DraftValue = number | string | null | readonly LawPoint[];
 
 export type DraftSection = Record<string, DraftValue>;
 
@@ -62,7 +63,10 @@ const quantityWords: Record<NumberParameter['quantity'], string> = {
 
 /** What is wrong with a value in the form, or undefined. */
 export function messageFor(parameter: Parameter, path: string, value: DraftValue) {
-  if (typeof value === 'string' && parameter.kind !== 'choice') {
+  if (typeof value === 'string' && parameter.kind === 'points') {
+    return `${parameter.label}: rows of an angle and a value are needed`;
+  }
+  if (typeof value === 'string' && 'quantity' in parameter) {
     const { label, quantity, min, max } = parameter;
     const range = `${formatQuantity(min, quantity)} to ${formatQuantity(max, quantity)}`;
     return value.trim() === ''
@@ -120,6 +124,8 @@ function written(parameter: Parameter, value: unknown): string {
   if (parameter.kind === 'choice') {
     return parameter.options.find((option) => option.value === value)?.label ?? String(value);
   }
+  if (parameter.kind === 'points') return `${(value as unknown[]).length} rows`;
+  if (parameter.kind === 'text') return String(value);
   return typeof value === 'number' ? formatQuantity(value, parameter.quantity) : 'empty';
 }
 
@@ -133,7 +139,7 @@ export function differences(mine: Design, theirs: Design): Difference[] {
     where: string,
   ) => {
     for (const [key, parameter] of Object.entries(table)) {
-      if (a[key] === b[key]) continue;
+      if (JSON.stringify(a[key]) === JSON.stringify(b[key])) continue;
       found.push({
         label: parameter.label + where,
         mine: written(parameter, a[key]),

@@ -8,6 +8,7 @@ const sides: Record<Exclude<FindingCode, 'range-infeasible'>, 'at most' | 'at le
   'outline-infeasible': 'at least',
   'plate-counts': 'at most',
   turn: 'at least',
+  'own-law': 'at least',
   'law-held': 'at most',
   'law-rises': 'at least',
   'open-capacitance': 'at most',

@@ -7,6 +7,8 @@ function written({ key, parameter }: GroupEntry, values: Record<string, unknown>
   if (parameter.kind === 'choice') {
     return parameter.options.find((option) => option.value === value)?.label ?? String(value);
   }
+  if (parameter.kind === 'points') return `${(value as unknown[]).length} rows`;
+  if (parameter.kind === 'text') return String(value);
   return typeof value === 'number'
     ? formatQuantity(value, parameter.quantity)
     : 'left to the kernel';

@@ -10,7 +10,10 @@ import { fieldId } from './focus-field';
 
 function shown(value: DraftValue, { quantity }: QuantityParameter) {
   if (typeof value === 'number') return writeQuantity(value, quantity);
-  return { number: value ?? '', unit: writeQuantity(0, quantity).unit };
+  return {
+    number: typeof value === 'string' ? value : '',
+    unit: writeQuantity(0, quantity).unit,
+  };
 }
 
 /**

@@ -1,5 +1,5 @@
 import type { SectionResult } from '@/geometry';
-import { resonantFrequency } from '@/geometry/target';
+import { resonantFrequency } from '@/geometry/resonance';
 import { toDegrees } from './degrees';
 import { fixedUnit, type FixedUnit } from './fixed-unit';
 import { valueAt } from './interpolate';

@@ -1,5 +1,5 @@
 import type { SectionResult } from '@/geometry';
-import { resonantFrequency } from '@/geometry/target';
+import { resonantFrequency } from '@/geometry/resonance';
 import { toDegrees, toRadians } from './degrees';
 import { valueAt } from './interpolate';
 import type { LawSeries } from './law-series';

@@ -1,7 +1,7 @@
 /** The law as a CSV table: what was asked, what the cut outlines give, and the difference. */
 
 import type { SectionResult } from '../derived';
-import { resonantFrequency } from '../target';
+import { resonantFrequency } from '../resonance';
 
 const PICO = 1e12;
 

@@ -49,7 +49,19 @@ const all: [string, Parameter, (value: unknown) => unknown, string][] = [
 describe.each(all)('%s', (_key, parameter, build, path) => {
   test('nonsense is refused by name', () => {
     const missing = parameter.cameLater ? [] : [undefined];
-    for (const nonsense of ['x', ...missing, [], {}, NaN, Infinity, true]) {
+    const text = parameter.kind === 'text' ? ['x'.repeat(parameter.longest + 1)] : ['x'];
+    const rows =
+      parameter.kind === 'points'
+        ? [
+            ['x'],
+            [[0, 1, 2]],
+            [
+              [1, 1],
+              [0, 1],
+            ],
+          ]
+        : [[]];
+    for (const nonsense of [...text, ...missing, ...rows, {}, NaN, Infinity, true]) {
       const error = refusal(build(nonsense));
       expect(error.path).toBe(path);
       expect(error.message).toContain(parameter.label);
@@ -62,6 +74,7 @@ describe.each(all)('%s', (_key, parameter, build, path) => {
         expect(() => checkDesign(build(option.value))).not.toThrow();
       return;
     }
+    if (parameter.kind === 'points' || parameter.kind === 'text') return;
     expect(() => checkDesign(build(parameter.min))).not.toThrow();
     expect(() => checkDesign(build(parameter.max))).not.toThrow();
     const error = refusal(build(parameter.max * 2));

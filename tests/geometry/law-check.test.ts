@@ -5,7 +5,7 @@ import { EPSILON_0 } from '../../geometry/constants';
 import { contourArea } from '../../geometry/measure';
 import { overlapAt } from '../../geometry/overlap';
 import { bladeOf } from '../../geometry/rotor';
-import type { LawName } from '../../geometry/law';
+import type { NamedLaw } from '../../geometry/law';
 
 const cache = createEdgeCache();
 
@@ -17,7 +17,7 @@ function derived(change: (design: Design) => void) {
   return derivation.derived;
 }
 
-const laws: LawName[] = ['capacitance', 'wavelength', 'frequency', 'logarithmic'];
+const laws: NamedLaw[] = ['capacitance', 'wavelength', 'frequency', 'logarithmic'];
 
 describe.each(laws)('%s', (law) => {
   test.each([0.35, 0.5, 0.8])('gap %f mm: the cut outline holds the law', (airGap) => {

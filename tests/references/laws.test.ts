@@ -5,7 +5,7 @@
  */
 import { describe, expect, test } from 'vitest';
 import { EPSILON_0 } from '../../geometry/constants';
-import { lawBetween, type LawName } from '../../geometry/law';
+import { lawBetween, type NamedLaw } from '../../geometry/law';
 import { BLADE_STEPS, firstBlade } from '../../geometry/solve-blade';
 
 const GAPS = 20;
@@ -13,7 +13,7 @@ const GAP = 0.5;
 const CUTOUT = 10;
 
 /** Radius in mm and total in pF at 0°, 90° and 180°. */
-const table: Record<LawName, [number, number][]> = {
+const table: Record<NamedLaw, [number, number][]> = {
   capacitance: [
     [27.3332, 40],
     [27.3332, 220],
@@ -47,7 +47,7 @@ function sweptArea(radius: Float64Array, travel: number): number {
   return (sum * travel) / steps / 3;
 }
 
-describe.each(Object.entries(table) as [LawName, [number, number][]][])('%s', (name, rows) => {
+describe.each(Object.entries(table) as [NamedLaw, [number, number][]][])('%s', (name, rows) => {
   const law = lawBetween(name, 40e-12, 400e-12);
   const blade = firstBlade(
     {
@@ -74,14 +74,9 @@ describe.each(Object.entries(table) as [LawName, [number, number][]][])('%s', (n
     expect(sweptArea(blade.radius, Math.PI)).toBeCloseTo(1016.46816, 4);
   });
 
-  test.each([0.1, 0.5, 0.9])(
-    'slope and curvature are the derivatives of the total at %f',
-    (x) => {
-      const h = 1e-4;
-      const slope = (law.total(x + h) - law.total(x - h)) / (2 * h);
-      const curvature = (law.total(x + h) - 2 * law.total(x) + law.total(x - h)) / (h * h);
-      expect(law.slope(x) / slope).toBeCloseTo(1, 6);
-      expect((law.curvature(x) - curvature) / law.total(x)).toBeCloseTo(0, 5);
-    },
-  );
+  test.each([0.1, 0.5, 0.9])('the slope is the derivative of the total at %f', (x) => {
+    const h = 1e-4;
+    const slope = (law.total(x + h) - law.total(x - h)) / (2 * h);
+    expect(law.slope(x) / slope).toBeCloseTo(1, 6);
+  });
 });

@@ -5,7 +5,8 @@
  */
 import { expect, test } from 'vitest';
 import { defaultSection } from '../../geometry';
-import { resonantCapacitance, resonantFrequency, targetOf } from '../../geometry/target';
+import { resonantCapacitance, resonantFrequency } from '../../geometry/resonance';
+import { targetOf } from '../../geometry/target';
 
 test.each([
   [530e3, 1700e3, 10.2883588],

@@ -8,9 +8,26 @@ import {
   type Parameter,
 } from '../../geometry';
 
+/** Rows with rising angles; values rise, fall or jump about. */
+const anyPoints = fc
+  .array(
+    fc.tuple(
+      fc.double({ min: 0.01, max: 1, noNaN: true }),
+      fc.double({ min: 1e-12, max: 1e-9, noNaN: true }),
+    ),
+    { maxLength: 12 },
+  )
+  .map((rows) => {
+    let angle = 0;
+    return rows.map(([step, value]) => [(angle += step), value]);
+  });
+
 function anyValue(parameter: Parameter): fc.Arbitrary<unknown> {
   if (parameter.kind === 'choice')
     return fc.constantFrom(...parameter.options.map((o) => o.value));
+  if (parameter.kind === 'text')
+    return fc.constantFrom('x^2', 'x', 'sqrt(x) + x', '1 - x', 'y');
+  if (parameter.kind === 'points') return anyPoints;
   const { min, max } = parameter;
   if (parameter.quantity === 'count') return fc.integer({ min, max });
   const even = fc.double({ min, max, noNaN: true });
@@ -44,6 +61,8 @@ export const anyDesign = fc
 /** Choices that need other sectors, counts or films beside them. */
 const DECIDING = ['arrangement', 'dielectric'];
 
+const NAMED_LAWS = ['capacitance', 'wavelength', 'frequency', 'logarithmic'];
+
 /** A design near a given one: each number within a fifth of it, so that most give plates. */
 export function designNear(base: Design): fc.Arbitrary<Design> {
   const near = (table: Record<string, Parameter>, values: Record<string, unknown>) =>
@@ -52,7 +71,9 @@ export function designNear(base: Design): fc.Arbitrary<Design> {
         Object.entries(table).map(([key, parameter]) => {
           const value = values[key];
           if (DECIDING.includes(key)) return [key, fc.constant(value)];
+          if (key === 'law') return [key, fc.constantFrom(...NAMED_LAWS)];
           if (parameter.kind === 'choice') return [key, anyValue(parameter)];
+          if (!('quantity' in parameter)) return [key, fc.constant(value)];
           if (typeof value !== 'number' || parameter.quantity === 'count') {
             return [key, fc.constant(value)];
           }
@@ -119,6 +140,8 @@ export const buildableDesign = fc
         targetKind: 'terminals',
         minCapacitance: fix.open,
         maxCapacitance: fix.open * fix.ratio,
+        lawFormula: 'x + x^2',
+        lawPoints: [0, 0.5, 1].map((x) => [x, fix.open * (1 + (fix.ratio - 1) * x)] as const),
         permittivity: Math.min(section.permittivity, 3),
         airGap: fix.gap,
         filmThickness: Math.min(section.filmThickness, fix.gap / 2),

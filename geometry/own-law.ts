@@ -1,0 +1,71 @@
+/** The law that a section asks for: a named one, the builder's table, or a formula. */
+
+import type { Section } from './design';
+import type { Finding } from './finding';
+import { readFormula } from './formula';
+import { lawBetween, type Law } from './law';
+import { monotoneCubic } from './law-points';
+import { tableFinding, totalsOf, unreadable } from './own-table';
+import type { Target } from './target';
+
+/** Looks over the law for where it doesn't rise. */
+const LOOKS = 400;
+
+/** Of the swept fraction; a formula is differenced over this. */
+const STEP = 1e-4;
+
+function lawOfPoints(section: Section): Law {
+  const { lawPoints } = section;
+  const first = lawPoints[0]![0];
+  const span = lawPoints.at(-1)![0] - first;
+  const cubic = monotoneCubic(
+    lawPoints.map(([angle]) => (angle - first) / span),
+    totalsOf(section),
+  );
+  return { total: cubic.value, slope: cubic.slope };
+}
+
+function lawOfFormula(
+  text: string,
+  index: number,
+  { totalMin, totalMax }: Target,
+): Law | Finding {
+  const label = 'Formula of the law';
+  const read = readFormula(text);
+  if (!read.ok)
+    return unreadable(index, label, `Change the formula: ${read.message}.`, 'lawFormula');
+  const { valueAt } = read;
+  let before = valueAt(0);
+  for (let i = 0; i <= LOOKS; i++) {
+    const x = i / LOOKS;
+    const value = valueAt(x);
+    if (Number.isFinite(value) && (i === 0 || value > before)) {
+      before = value;
+      continue;
+    }
+    const what = Number.isFinite(value) ? 'it does not rise' : 'it gives no number';
+    return unreadable(
+      index,
+      label,
+      `At x = ${x} ${what}; it must rise from 0 to 1.`,
+      'lawFormula',
+    );
+  }
+  const from = valueAt(0);
+  const scale = (totalMax - totalMin) / (valueAt(1) - from);
+  const within = (x: number): number => Math.min(Math.max(x, STEP), 1 - STEP);
+  return {
+    total: (x) => totalMin + scale * (valueAt(x) - from),
+    slope: (x) => {
+      const at = within(x);
+      return (scale * (valueAt(at + STEP) - valueAt(at - STEP))) / (2 * STEP);
+    },
+  };
+}
+
+/** The law between the ends of a target, or the finding that says why there is none. */
+export function lawOf(section: Section, index: number, target: Target): Law | Finding {
+  if (section.law === 'points') return tableFinding(section, index) ?? lawOfPoints(section);
+  if (section.law === 'formula') return lawOfFormula(section.lawFormula, index, target);
+  return lawBetween(section.law, target.totalMin, target.totalMax);
+}
