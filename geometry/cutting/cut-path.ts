@@ -89,15 +89,21 @@ function startOf(sides: readonly Side[], edge: CutRun['edge'], leadIn: number): 
   return { index, from: to, to, length: 0 };
 }
 
-/** A chain of sides cut into equal stretches with gaps between them. */
-function dividedBy(sides: readonly Side[], bridges: number, gap: number): Side[][] {
+/** A closed chain cut into equal stretches with gaps between them, the first begun after `shift`. */
+function dividedBy(
+  sides: readonly Side[],
+  bridges: number,
+  gap: number,
+  shift: number,
+): Side[][] {
   const total = sides.reduce((sum, side) => sum + sideLength(side), 0);
   const pitch = total / bridges;
   return Array.from({ length: bridges }, (_, k) => {
-    const from = k * pitch;
-    const to = (k + 1) * pitch - gap;
+    const from = k * pitch + shift;
+    const to = (k + 1) * pitch + shift - gap;
     let at = 0;
-    return sides.flatMap((side) => {
+    // Twice round, for the stretch that passes the chain's own beginning.
+    return [...sides, ...sides].flatMap((side) => {
       const length = sideLength(side);
       const a = Math.max(0, (from - at) / length);
       const b = Math.min(1, (to - at) / length);
@@ -105,6 +111,24 @@ function dividedBy(sides: readonly Side[], bridges: number, gap: number): Side[]
       return b - a > 1e-9 ? [stretch(side, a, b)] : [];
     });
   });
+}
+
+/** Places along a pitch at which bridges are tried until every lead-in is clear. */
+const SHIFTS = 12;
+
+/** The stretches between bridges: moved along until each can be reached through the waste. */
+function stretchesOf(
+  sides: readonly Side[],
+  bridges: number,
+  gap: number,
+  leadIn: number,
+): Side[][] {
+  const pitch = sides.reduce((sum, side) => sum + sideLength(side), 0) / bridges;
+  const tried = Array.from({ length: SHIFTS }, (_, k) =>
+    dividedBy(sides, bridges, gap, (k * pitch) / SHIFTS),
+  );
+  const clear = (runs: Side[][]): boolean => runs.every((run) => leadTo(sides, run, leadIn));
+  return (leadIn > 0 && tried.find(clear)) || tried[0]!;
 }
 
 function leadTo(sides: readonly Side[], run: readonly Side[], length: number): Start | null {
@@ -141,7 +165,7 @@ function runsOf(contour: Contour, edge: CutRun['edge'], machine: Machine): CutRu
     ];
   }
   const chain = startingAt(sides, start.index, 0.5);
-  return dividedBy(chain, bridges, gap).map((run): CutRun => {
+  return stretchesOf(chain, bridges, gap, machine.leadIn).map((run): CutRun => {
     const lead = leadTo(sides, run, machine.leadIn);
     const last = run.at(-1)!;
     return {
