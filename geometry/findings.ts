@@ -5,7 +5,9 @@ import type { SectionResult, Stack } from './derived';
 import { smallerRadius } from './feasibility';
 import type { Finding, Severity } from './finding';
 import { formatQuantity } from './quantity';
-import { paschenVoltage, practiceVoltage } from './voltage';
+import { paschenVoltage, practiceVoltage, RADIO_FREQUENCY_SHARE } from './electrical/breakdown';
+import { clearanceVoltage } from './electrical/clearance';
+import { airPath } from './electrical/gap';
 
 /** Largest law error as a fraction of the range: warned of above the first, failed above the second. */
 const LAW_WARN = 0.001;
@@ -118,23 +120,41 @@ function openFinding(result: SectionResult, index: number): Finding {
   };
 }
 
-function voltageFinding(section: Section, index: number): Finding {
-  const { workingVoltage, airGap } = section;
-  const practice = practiceVoltage(airGap);
-  const breakdown = paschenVoltage(airGap);
+/** Frequency at which the gap is held to stand: the working one, the band's, or mains. */
+function heldFrequency({ workingFrequency, targetKind, bandHigh }: Section): number {
+  return workingFrequency ?? (targetKind === 'band' ? bandHigh : 50);
+}
+
+/** Hz. Above it the gap is reckoned to stand radio frequency. */
+const RADIO = 1e4;
+
+function voltageFinding(design: Design, section: Section, index: number): Finding | null {
+  const { length, share } = airPath(design, section);
+  if (length === 0) return null;
+  const atGap = section.workingVoltage * share;
+  const radio = heldFrequency(section) > RADIO ? RADIO_FREQUENCY_SHARE : 1;
+  // Thinner air holds less; the practical figure goes with it.
+  const thin = Math.min(1, paschenVoltage(length, design.altitude) / paschenVoltage(length));
+  const practice = practiceVoltage(length) * thin;
+  const breakdown = paschenVoltage(length, design.altitude) * radio;
   const severity: Severity =
-    workingVoltage <= practice ? 'ok' : workingVoltage < breakdown ? 'warn' : 'fail';
+    atGap <= Math.min(practice, breakdown) ? 'ok' : atGap < breakdown ? 'warn' : 'fail';
+  const squared = clearanceVoltage(length, 'inhomogeneous', design.altitude);
   const change =
     severity === 'ok'
       ? ''
-      : `Common practice is 1 kV peak per millimetre with rounded edges: take a gap of at least ${mm(workingVoltage / 1000)}. Even smooth parallel plates break down near ${formatQuantity(breakdown, 'voltage', 3)}.`;
+      : `Common practice is 1 kV peak per millimetre with rounded edges: take a gap of at least ${mm((section.airGap * atGap) / practice)}. ` +
+        (squared === null
+          ? ''
+          : `With square cut edges the clearance table gives ${formatQuantity(squared, 'voltage', 3)}. `) +
+        `Even smooth parallel plates break down near ${formatQuantity(breakdown, 'voltage', 3)}${radio < 1 ? ' at radio frequency' : ''}.`;
   return {
     code: 'gap-voltage',
     severity,
     section: index,
-    label: 'Working voltage at the gap',
-    value: workingVoltage,
-    limit: practice,
+    label: share === 1 ? 'Working voltage at the gap' : 'Voltage across the air of a gap',
+    value: atGap,
+    limit: Math.min(practice, breakdown),
     quantity: 'voltage',
     change,
     parameters: ['airGap', 'workingVoltage'],
@@ -149,7 +169,7 @@ function sectionFindings(design: Design, result: SectionResult, index: number): 
   return [
     ...lawFindings(result, index),
     openFinding(result, index),
-    voltageFinding(section, index),
+    ...[voltageFinding(design, section, index)].filter((finding) => finding !== null),
     atLeast('blade-narrow', index, 'fail', {
       label: 'Narrowest blade, over the hub',
       value: result.narrowestBlade,

@@ -9,6 +9,26 @@ interface SheetMaterial {
   readonly density: number;
 }
 
+/** Metals at the surface of a plate. */
+export type Metal = Material | 'silver';
+
+/** Resistivity at 20 °C, Ω·mm. Silver and copper published, the others handbook values from memory. */
+export const resistivities: Record<Metal, number> = {
+  silver: 1.59e-5,
+  copper: 1.68e-5,
+  brass: 6.6e-5,
+  aluminium: 4.9e-5,
+  steel: 1.4e-4,
+};
+
+/** Linear expansion, 1/K; middle of the handbook's range, from memory. */
+export const expansions: Record<Material, number> = {
+  brass: 19.8e-6,
+  aluminium: 23.5e-6,
+  copper: 16.8e-6,
+  steel: 11.5e-6,
+};
+
 export const sheetMaterials: Record<Material, SheetMaterial> = {
   brass: { slug: 'brass-cuzn37', density: 8.44e-3 },
   aluminium: { slug: 'aluminium-5754', density: 2.67e-3 },

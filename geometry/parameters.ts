@@ -9,6 +9,7 @@ import type { LawPoint } from './law-points';
 
 export type Quantity =
   | 'length'
+  | 'altitude'
   | 'angle'
   | 'capacitance'
   | 'inductance'
@@ -114,6 +115,7 @@ const capacitance = number('capacitance');
 const inductance = number('inductance');
 const frequency = number('frequency');
 const voltage = number('voltage');
+const altitude = number('altitude');
 const count = number('count');
 const ratio = number('ratio');
 
@@ -333,6 +335,13 @@ export const sectionParameters = {
     max: 50e3,
     default: 300,
   }),
+  workingFrequency: optional('frequency', 'stack', {
+    label: 'Working frequency',
+    help: 'For loss and for what the gap holds at radio frequency. Left empty: taken from the band, or 50 Hz.',
+    min: 1,
+    max: 1e9,
+    cameLater: true,
+  }),
 } as const satisfies Record<string, Parameter>;
 
 /** Parameters that all sections on the shaft share. */
@@ -505,6 +514,36 @@ export const sharedParameters = {
       { value: 'steel', label: 'Steel DC01' },
     ],
     default: 'brass',
+  }),
+  finish: choice<'none' | 'silver'>('sheet', {
+    label: 'Finish',
+    help: 'Silver plated plates lose less at radio frequency, if the silver is some skin depths thick.',
+    options: [
+      { value: 'none', label: 'bare' },
+      { value: 'silver', label: 'silver plated' },
+    ],
+    default: 'none',
+    cameLater: true,
+  }),
+  spacerMaterial: choice<'as-plates' | 'brass' | 'aluminium' | 'steel'>('sheet', {
+    label: 'Spacer metal',
+    help: 'What spacers are turned or cut from; with the plates it sets how the gaps drift with temperature.',
+    options: [
+      { value: 'as-plates', label: 'as plates' },
+      { value: 'brass', label: 'brass' },
+      { value: 'aluminium', label: 'aluminium' },
+      { value: 'steel', label: 'steel' },
+    ],
+    default: 'as-plates',
+    cameLater: true,
+  }),
+  altitude: altitude('envelope', {
+    label: 'Altitude of use',
+    help: 'Above sea level. Thinner air holds less voltage.',
+    min: 0,
+    max: 10e6,
+    default: 0,
+    cameLater: true,
   }),
   spacerMake: choice<'turned' | 'cut'>('frame', {
     label: 'Spacers',

@@ -9,6 +9,7 @@ interface Notation {
 /** Largest unit first; the first that leaves a value of 1 or more is used. */
 const notations: Record<Quantity, readonly Notation[]> = {
   length: [{ unit: 'mm', perKernelUnit: 1 }],
+  altitude: [{ unit: 'm', perKernelUnit: 1e-3 }],
   angle: [{ unit: '°', perKernelUnit: 180 / Math.PI }],
   capacitance: [
     { unit: 'µF', perKernelUnit: 1e6 },

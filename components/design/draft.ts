@@ -52,6 +52,7 @@ export function parameterAt(path: string): Parameter | undefined {
 
 const quantityWords: Record<NumberParameter['quantity'], string> = {
   length: 'a length',
+  altitude: 'an altitude',
   angle: 'an angle',
   capacitance: 'a capacitance',
   inductance: 'an inductance',

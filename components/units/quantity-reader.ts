@@ -8,6 +8,7 @@ const { Unit } = create(UnitDependencies as FactoryFunctionMap);
 /** The kernel's unit of each quantity, in mathjs's spelling. */
 const kernelUnits: Record<Quantity, string | null> = {
   length: 'mm',
+  altitude: 'mm',
   angle: 'rad',
   capacitance: 'F',
   inductance: 'H',

@@ -46,6 +46,7 @@ function addRings(
     }
   }
   const { design } = derived;
+  const metal = design.spacerMaterial === 'as-plates' ? design.material : design.spacerMaterial;
   lengths.forEach((length, i) => {
     const own = places.filter(({ from, to }) => Math.abs(to - from - length) < SAME_LENGTH);
     const key = lengths.length > 1 ? `${ring.key}-${i + 1}` : ring.key;
@@ -55,7 +56,7 @@ function addRings(
         collection,
         {
           ...common,
-          material: design.material,
+          material: metal,
           thickness: length,
           outside: circle(ring.outer / 2),
           holes: [circle(ring.bore / 2)],
@@ -68,12 +69,12 @@ function addRings(
       collection,
       {
         ...common,
-        material: ring.insulating ? 'insulator' : design.material,
+        material: ring.insulating ? 'insulator' : metal,
         outerDiameter: ring.outer,
         boreDiameter: ring.bore,
         length,
       },
-      ring.insulating ? INSULATOR_DENSITY : sheetMaterials[design.material].density,
+      ring.insulating ? INSULATOR_DENSITY : sheetMaterials[metal].density,
       own,
     );
   });

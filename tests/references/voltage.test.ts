@@ -4,7 +4,7 @@
  * 1 kV peak per millimetre with rounded edges: common practice, no source.
  */
 import { expect, test } from 'vitest';
-import { paschenVoltage, practiceVoltage } from '../../geometry/voltage';
+import { paschenVoltage, practiceVoltage } from '../../geometry/electrical/breakdown';
 
 test.each([
   [0.5, 2879.6],
