@@ -1,3 +1,4 @@
+import dynamic from 'next/dynamic';
 import type { ComponentType } from 'react';
 import type { Derived, Design } from '@/geometry';
 
@@ -20,7 +21,13 @@ interface Tool {
 }
 
 /** Every tool is loaded when it is opened. */
-export const tools: Record<string, Tool> = {};
+export const tools: Record<string, Tool> = {
+  'voltage-and-loss': {
+    title: 'Voltage, loss and drift',
+    opener: 'Voltage, loss and drift',
+    Component: dynamic(() => import('./voltage-and-loss/voltage-and-loss')),
+  },
+};
 
 export type ToolName = string;
 
@@ -30,7 +37,7 @@ export type ToolPlace = 'law' | 'stack' | 'checks' | 'held' | 'files' | 'chart';
 export const toolsAt: Readonly<Record<ToolPlace, readonly ToolName[]>> = {
   law: [],
   stack: [],
-  checks: [],
+  checks: ['voltage-and-loss'],
   held: [],
   files: [],
   chart: [],
