@@ -8,6 +8,7 @@ import { ToolLinks } from '@/components/tools/tool-links';
 import { Cautions } from './cautions';
 import { StackFigures } from './figures';
 import { FindingsList } from './findings-list';
+import { PanelSection } from './panel-section';
 import { LawFigures } from './law-figures';
 import type { Plates } from './use-derivation';
 
@@ -16,15 +17,6 @@ const StackView = dynamic(
   () => import('@/components/stack/stack-view').then(({ StackView }) => StackView),
   { ssr: false, loading: () => <p className="p-4 text-ink-2">Loading the 3D view</p> },
 );
-
-export function PanelSection({ title, children }: { title: string; children: ReactNode }) {
-  return (
-    <section className="flex flex-col gap-2">
-      <h2 className="wide-letter text-body font-semibold">{title}</h2>
-      {children}
-    </section>
-  );
-}
 
 /** Meshed stack, checks, law and figures; what else there is to show comes as children. */
 export function SidePanel({

@@ -1,6 +1,6 @@
 'use client';
 
-import { PanelSection } from '@/components/design/side-panel';
+import { PanelSection } from '@/components/design/panel-section';
 import { driftLeftOut, sectionDrift } from '@/geometry/electrical/drift';
 import { Figures } from '@/components/design/figures';
 import type { ToolProps } from '../registry';
