@@ -14,6 +14,7 @@ import {
 import { cutFiles } from '../geometry/files';
 import { dxfOf } from '../geometry/files/dxf';
 import { placeInRow } from '../geometry/files/placement';
+import { printSheets } from './bench-sheets';
 
 const RUNS = 41;
 
@@ -101,3 +102,5 @@ console.table([
     ),
   ),
 ]);
+
+printSheets();
