@@ -27,6 +27,11 @@ export const tools: Record<string, Tool> = {
     opener: 'Voltage, loss and drift',
     Component: dynamic(() => import('./voltage-and-loss/voltage-and-loss')),
   },
+  sheets: {
+    title: 'Lay out on sheets',
+    opener: 'Lay out on sheets',
+    Component: dynamic(() => import('./sheets/sheets')),
+  },
 };
 
 export type ToolName = string;
@@ -39,6 +44,6 @@ export const toolsAt: Readonly<Record<ToolPlace, readonly ToolName[]>> = {
   stack: [],
   checks: ['voltage-and-loss'],
   held: [],
-  files: [],
+  files: ['sheets'],
   chart: [],
 };

@@ -14,8 +14,11 @@ export interface Tally {
   /** mm, lead-ins included. */
   readonly cutLength: number;
   readonly pierces: number;
-  /** s; cutting and piercing alone, without moves from cut to cut, loading and speeding up. */
-  readonly time: number;
+  /**
+   * s; cutting and piercing alone, without moves from cut to cut, loading and speeding up. null
+   * for etching, which takes the whole sheet at once.
+   */
+  readonly time: number | null;
 }
 
 export function tallyOf(
@@ -53,6 +56,9 @@ export function tallyOf(
     sheets: sheets.length,
     cutLength,
     pierces,
-    time: cutLength / machine.feed + pierces * machine.pierceTime,
+    time:
+      machine.process === 'etching'
+        ? null
+        : cutLength / machine.feed + pierces * machine.pierceTime,
   };
 }

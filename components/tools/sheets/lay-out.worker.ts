@@ -1,0 +1,43 @@
+import type { Derived } from '@/geometry';
+import type { KerfState } from '@/geometry/cutting/cut-path';
+import type { Machine, Sheet } from '@/geometry/cutting/machine';
+import { sheetsFor } from '@/geometry/cutting/starting-values';
+import { layOut, type LaidOut } from '@/geometry/nesting/lay-out';
+import type { LayoutSettings } from '@/geometry/nesting/layout';
+import { partsOf } from '@/geometry/parts/assembly';
+
+export interface Question {
+  readonly derived: Derived;
+  readonly copies: number;
+  readonly machine: Machine;
+  readonly sheet: Pick<Sheet, 'width' | 'height' | 'count'>;
+  readonly settings: LayoutSettings;
+  readonly kerf: KerfState;
+}
+
+export type Message =
+  { readonly share: number } | { readonly laid: LaidOut } | { readonly failure: string };
+
+function answer({ derived, sheet, ...job }: Question): Message {
+  const parts = partsOf(derived).filter((part) => part.kind === 'cut');
+  let told = 0;
+  const laid = layOut({ ...job, parts, sheets: sheetsFor(parts, sheet) }, (done, of) => {
+    const percent = Math.floor((100 * done) / of);
+    if (percent > told) {
+      told = percent;
+      postMessage({ share: percent / 100 } satisfies Message);
+    }
+    return true;
+  });
+  // Whoever wants it stopped ends the worker.
+  return laid ? { laid } : { failure: 'The layout was stopped.' };
+}
+
+addEventListener('message', ({ data }: MessageEvent<Question>) => {
+  try {
+    postMessage(answer(data));
+  } catch (error) {
+    const failure = error instanceof Error ? error.message : String(error);
+    postMessage({ failure } satisfies Message);
+  }
+});
