@@ -1,12 +1,14 @@
 /** One section while its blade is solved: what stays the same, and the plates that a blade makes. */
 
-import type { Arrangement } from './arrangement';
+import { arrangementOf, gapsOf, type Arrangement } from './arrangement';
 import { longestRadius, type Blade } from './blade';
+import { EPSILON_0 } from './constants';
 import type { PlateRole, Turn } from './derived';
 import type { Design, Section } from './design';
+import { electricalGap } from './dielectric';
 import type { EarShape } from './ear';
 import { earFinding, postFinding } from './feasibility';
-import type { SectionEdges } from './field/cell-field';
+import { sectionEdges, type EdgeCache, type SectionEdges } from './field/cell-field';
 import { mirroredShape, turned, type PlanShape } from './field/plan-shape';
 import { planShare, type EnergySum, type PlanShare } from './field/plan-share';
 import type { EdgePlates } from './field/radial-edges';
@@ -16,7 +18,14 @@ import { edgePlates } from './law-check';
 import { polar } from './polar';
 import { layOutEars } from './post';
 import { rotorOutline, type RotorOutline } from './rotor';
-import { statorOutline, statorRadius, type StatorForm, type StatorOutline } from './stator';
+import { endPlatesOf } from './stack';
+import {
+  statorFormOf,
+  statorOutline,
+  statorRadius,
+  type StatorForm,
+  type StatorOutline,
+} from './stator';
 
 /** mm. Sagitta of the polygons on which the plan view is solved. */
 const PLAN_SAGITTA = 0.1;
@@ -32,6 +41,30 @@ export interface Setting {
   readonly airGap: number;
   readonly gaps: number;
   readonly endPlates: readonly [PlateRole, PlateRole];
+  /** ε of the gap, times what the terminals see of one blade with its stator, F/mm. */
+  readonly permittivity: number;
+}
+
+export function settingOf(
+  design: Design,
+  turn: Turn,
+  section: Section,
+  cache: EdgeCache,
+): Setting {
+  const arrangement = arrangementOf(design);
+  const airGap = electricalGap(section);
+  return {
+    design,
+    section,
+    arrangement,
+    turn,
+    form: statorFormOf(section, arrangement),
+    edges: sectionEdges({ ...design, ...section, airGap }, cache),
+    airGap,
+    gaps: gapsOf(section),
+    endPlates: endPlatesOf(section),
+    permittivity: EPSILON_0 * section.permittivity * arrangement.share,
+  };
 }
 
 /** The plates of a blade as the edge model sees them. */
