@@ -22,6 +22,16 @@ interface Tool {
 
 /** Every tool is loaded when it is opened. */
 export const tools: Record<string, Tool> = {
+  'plates-that-fit': {
+    title: 'Plates that fit',
+    opener: 'Which plates and gap fit',
+    Component: dynamic(() => import('./plates-that-fit/plates-that-fit')),
+  },
+  tolerance: {
+    title: 'Tolerance',
+    opener: 'What tolerances do to it',
+    Component: dynamic(() => import('./tolerance/tolerance')),
+  },
   'voltage-and-loss': {
     title: 'Voltage, loss and drift',
     opener: 'Voltage, loss and drift',
@@ -41,9 +51,9 @@ export type ToolPlace = 'law' | 'stack' | 'checks' | 'held' | 'files' | 'chart';
 
 export const toolsAt: Readonly<Record<ToolPlace, readonly ToolName[]>> = {
   law: [],
-  stack: [],
+  stack: ['plates-that-fit'],
   checks: ['voltage-and-loss'],
-  held: [],
+  held: ['tolerance'],
   files: ['sheets'],
   chart: [],
 };
