@@ -4,6 +4,7 @@ import type { Quantity } from '../parameters';
 export type CuttingCode =
   | 'hole-small'
   | 'web-thin'
+  | 'contour-crosses'
   | 'kerf-closes'
   | 'part-large'
   | 'reflective'

@@ -4,6 +4,7 @@ import type { Contour } from '../outline';
 import type { CutPart } from '../parts/part';
 import { formatQuantity } from '../quantity';
 import { contoursApart, held, type Held } from './apart';
+import { selfCrossing } from './crossing';
 import type { CuttingFinding } from './cutting-finding';
 import type { Machine } from './machine';
 import { narrowest } from './narrow';
@@ -92,6 +93,26 @@ function atLeast(
   ];
 }
 
+/** Contours that cross themselves. */
+function crossingFindings(part: CutPart): CuttingFinding[] {
+  const at = [part.outside, ...part.holes]
+    .map((contour) => selfCrossing(sidesOf(contour)))
+    .find((point) => point !== null);
+  if (!at) return [];
+  return [
+    {
+      code: 'contour-crosses',
+      severity: 'fail',
+      part: part.key,
+      label: `Outline crosses itself, ${part.label.toLowerCase()}`,
+      value: null,
+      limit: null,
+      quantity: 'length',
+      change: `Near ${mm(at.x)}, ${mm(at.y)} from the shaft it runs over itself: slots, ears or edges overlap there. Make them fewer, narrower or further apart.`,
+    },
+  ];
+}
+
 /** Contours in which a cut of this width has no room. */
 function kerfFindings(part: CutPart, { kerf }: Machine): CuttingFinding[] {
   const closings = [
@@ -162,6 +183,7 @@ export function partFindings(part: CutPart, machine: Machine): CuttingFinding[] 
       thinnest,
       `In ${mm(part.thickness)} sheet this machine leaves no web under ${mm(thinnest)} standing: make it at least that, or take thinner sheet.`,
     ),
+    ...crossingFindings(part),
     ...kerfFindings(part, machine),
     ...materialFindings(part, machine),
   ];

@@ -6,13 +6,14 @@
 import { EndType, inflatePaths, JoinType } from 'clipper2-ts';
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { meetings } from '../../../geometry/cutting/meet';
+import { selfCrossing } from '../../../geometry/cutting/crossing';
 import { offsetContour } from '../../../geometry/cutting/offset';
 import { distanceToSides, pointAt, sidesOf } from '../../../geometry/cutting/side';
 import { flatten } from '../../../geometry/flatten';
 import { contourArea, contourLength } from '../../../geometry/measure';
 import type { Contour, Path, Vertex } from '../../../geometry';
-import { examplePlates } from '../../support/example-plates';
+import { partsOf } from '../../../geometry/parts/assembly';
+import { examplePlates, examplesDerived } from '../../support/example-plates';
 
 const at = (x: number, y: number, bulge = 0): Vertex => ({ x, y, bulge });
 const path = (...vertices: Vertex[]): Path => ({ kind: 'path', vertices });
@@ -128,19 +129,19 @@ describe('the plates of the worked designs', () => {
   );
 });
 
-/** Does the contour cross itself? Two sides may share an end and nothing more. */
-function crossesItself(contour: Path): boolean {
-  const sides = sidesOf(contour);
-  return sides.some((a, i) =>
-    sides.slice(i + 1).some((b) =>
-      meetings(a, b).some(([onA, onB]) => {
-        const p = pointAt(a, onA);
-        const ends = [a.from, a.to].filter((e) => Math.hypot(e.x - p.x, e.y - p.y) < 1e-6);
-        return ends.length === 0 || (onB > 1e-6 && onB < 1 - 1e-6);
-      }),
-    ),
-  );
-}
+describe('end rotor plates with slots, end plates, arms and pads', () => {
+  test.each(examplesDerived({ endSlots: 4, frame: 'end-plates' }))('$name', ({ derived }) => {
+    const parts = partsOf(derived).filter((part) => part.kind === 'cut');
+    expect(parts.length).toBeGreaterThan(4);
+    for (const { outside } of parts) {
+      if (outside.kind === 'circle') continue;
+      for (const d of [0.05, 0.15]) {
+        const off = contourArea(offsetOf(outside, d)) - inflatedArea(outside, d, 1e-4);
+        expect(Math.abs(off)).toBeLessThan(1e-4 * contourLength(outside));
+      }
+    }
+  });
+});
 
 const anyStar = fc
   .array(
@@ -158,7 +159,7 @@ const anyStar = fc
       }),
     ),
   )
-  .filter((star) => !crossesItself(star));
+  .filter((star) => selfCrossing(sidesOf(star)) === null);
 
 describe('any star of lines and arcs, seed 20261', () => {
   test('has the area that clipper2-ts finds, and stays its distance away', () => {

@@ -157,6 +157,16 @@ describe('limits', () => {
     expect(codes(part(comb, []), { ...wide, kerf: 1.9 })).toEqual([]);
   });
 
+  test('an outline that crosses itself', () => {
+    const bow = path(at(0, 0), at(30, 20), at(30, 0), at(0, 20), at(-10, 10));
+    const found = partFindings(part(bow, []), machine);
+    const crossing = found.find(({ code }) => code === 'contour-crosses')!;
+    expect(crossing.severity).toBe('fail');
+    expect(crossing.change).toContain('15 mm, 10 mm');
+    const touching = path(at(0, 0), at(20, 0), at(20, 20), at(10, 0), at(0, 20));
+    expect(codes(part(touching, []))).toContain('contour-crosses fail');
+  });
+
   test('bright metal wants a laser that is rated for it, or none', () => {
     const bright = part(plate, []);
     expect(codes(bright, { reflective: false })).toEqual(['reflective fail']);
