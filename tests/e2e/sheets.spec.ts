@@ -30,8 +30,8 @@ test('the plates are laid out, follow what is asked, and can be stopped', async 
 
   await tool.getByLabel('Capacitors').fill('12');
   await tool.getByLabel('Sheets of each kind').fill('100');
-  await tool.getByRole('button', { name: 'Stop' }).click();
-  await expect(tool.getByText('Stopped.')).toBeVisible();
+  await tool.getByRole('button', { name: 'Cancel' }).click();
+  await expect(tool.getByText('Shown is the layout before.')).toBeVisible();
   await expect(tool.getByRole('progressbar')).toHaveCount(0);
   await tool.getByLabel('Capacitors').fill('2');
   await tool.getByLabel('Sheet width').fill('500');

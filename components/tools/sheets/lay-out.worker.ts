@@ -5,6 +5,7 @@ import { sheetsFor } from '@/geometry/cutting/starting-values';
 import { layOut, type LaidOut } from '@/geometry/nesting/lay-out';
 import type { LayoutSettings } from '@/geometry/nesting/layout';
 import { partsOf } from '@/geometry/parts/assembly';
+import { failureOf, type JobMessage } from '../job/messages';
 
 export interface Question {
   readonly derived: Derived;
@@ -15,29 +16,25 @@ export interface Question {
   readonly kerf: KerfState;
 }
 
-export type Message =
-  { readonly share: number } | { readonly laid: LaidOut } | { readonly failure: string };
-
-function answer({ derived, sheet, ...job }: Question): Message {
+function answer({ derived, sheet, ...job }: Question): JobMessage<LaidOut> {
   const parts = partsOf(derived).filter((part) => part.kind === 'cut');
   let told = 0;
   const laid = layOut({ ...job, parts, sheets: sheetsFor(parts, sheet) }, (done, of) => {
     const percent = Math.floor((100 * done) / of);
     if (percent > told) {
       told = percent;
-      postMessage({ share: percent / 100 } satisfies Message);
+      postMessage({ done: percent, of: 100 } satisfies JobMessage<LaidOut>);
     }
     return true;
   });
   // Whoever wants it stopped ends the worker.
-  return laid ? { laid } : { failure: 'The layout was stopped.' };
+  return laid ? { answer: laid } : { failure: 'The layout was stopped.' };
 }
 
 addEventListener('message', ({ data }: MessageEvent<Question>) => {
   try {
     postMessage(answer(data));
   } catch (error) {
-    const failure = error instanceof Error ? error.message : String(error);
-    postMessage({ failure } satisfies Message);
+    postMessage(failureOf(error));
   }
 });

@@ -1,14 +1,20 @@
 'use client';
 
-import { useMemo, useState } from 'react';
+import { useEffect, useMemo, useState } from 'react';
 import { PanelSection } from '@/components/design/panel-section';
 import { Button } from '@/components/ui/button';
 import { startingMachines } from '@/geometry/cutting/starting-values';
+import type { LaidOut } from '@/geometry/nesting/lay-out';
+import { JobProgress } from '../job/job-progress';
+import { useJob } from '../job/use-job';
 import type { ToolProps } from '../registry';
 import { GroupResult } from './group-result';
 import { LayoutFields, type Asked } from './layout-fields';
 import { MachineFindings } from './machine-findings';
-import { useLayout } from './use-layout';
+import type { Question } from './lay-out.worker';
+
+/** ms without a change before it begins: nobody wants a layout of half a number. */
+const SETTLED = 400;
 
 const first: Asked = {
   machine: startingMachines[0]!.name,
@@ -25,7 +31,7 @@ const first: Asked = {
 /** All cut parts of the design on sheets: how they lie, and what they take. */
 export default function Sheets({ derived }: ToolProps) {
   const [asked, setAsked] = useState(first);
-  const question = useMemo(() => {
+  const question = useMemo((): Question | null => {
     const machine = startingMachines.find(({ name }) => name === asked.machine)!;
     const { width, height, count, copies, gap, margin, rotations, kerf } = asked;
     return (
@@ -39,7 +45,16 @@ export default function Sheets({ derived }: ToolProps) {
       }
     );
   }, [asked, derived]);
-  const { laid, share, failure, stopped, stop, again } = useLayout(question);
+  const job = useJob<Question, LaidOut>(
+    () => new Worker(new URL('./lay-out.worker.ts', import.meta.url), { type: 'module' }),
+  );
+  const [shown, setShown] = useState<Question | null>(null);
+  const { start, answer: laid } = job;
+  useEffect(() => {
+    if (!question) return;
+    const begin = setTimeout(() => start(question, () => setShown(question)), SETTLED);
+    return () => clearTimeout(begin);
+  }, [question, start]);
 
   return (
     <>
@@ -48,26 +63,17 @@ export default function Sheets({ derived }: ToolProps) {
         onChange={(change) => setAsked((now) => ({ ...now, ...change }))}
       />
       {!derived && <p>There are no plates yet: the checks say what to change.</p>}
+      <JobProgress job={job} what="Laying out" />
       <div className="flex min-h-9 flex-wrap items-center gap-3" aria-live="polite">
-        {share !== null && (
+        {laid && !job.running && shown === question && <p>Laid out.</p>}
+        {question && !job.running && shown !== question && (
           <>
-            <progress aria-label="Laying out" value={share} className="grow" />
-            <Button onPress={stop}>Stop</Button>
+            <p>{laid ? 'Shown is the layout before.' : 'Not laid out yet.'}</p>
+            <Button onPress={() => start(question, () => setShown(question))}>
+              Lay out now
+            </Button>
           </>
         )}
-        {stopped && (
-          <>
-            <p>Stopped. What is shown is the layout before.</p>
-            <Button onPress={again}>Lay out again</Button>
-          </>
-        )}
-        {failure && (
-          <>
-            <p className="text-bad">The layout failed: {failure}</p>
-            <Button onPress={again}>Try again</Button>
-          </>
-        )}
-        {share === null && !stopped && !failure && laid && <p>Laid out.</p>}
       </div>
       {laid && (
         <>
