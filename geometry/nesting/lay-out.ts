@@ -57,7 +57,8 @@ const whole = {
 } as const;
 
 function gapFindings({ machine, settings }: LayoutJob): CuttingFinding[] {
-  const { gap } = settings;
+  const { gap, margin } = settings;
+  const narrow = Math.min(gap, margin);
   const { kerf, leadIn } = machine;
   const lead = leadIn + kerf;
   return [
@@ -73,16 +74,16 @@ function gapFindings({ machine, settings }: LayoutJob): CuttingFinding[] {
     },
     {
       code: 'lead-in-long',
-      severity: gap >= lead ? 'ok' : 'warn',
+      severity: narrow >= lead ? 'ok' : 'warn',
       part: null,
-      label: 'Gap between parts against lead-in and kerf',
-      value: gap,
+      label: 'Gap and margin against lead-in and kerf',
+      value: narrow,
       limit: lead,
       quantity: 'length',
       change:
-        gap >= lead
+        narrow >= lead
           ? ''
-          : `A lead-in may mark the next part: make the gap at least ${mm(lead)}, or shorten the lead-in.`,
+          : `A lead-in may mark the next part or begin off the sheet: make gap and margin at least ${mm(lead)}, or shorten the lead-in.`,
     },
   ];
 }

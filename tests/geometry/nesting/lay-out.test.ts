@@ -110,6 +110,7 @@ describe('findings of a layout', () => {
       'lead-in-long',
     ]);
     expect(failing({ settings: { ...job.settings, gap: 1 } })).toEqual(['lead-in-long']);
+    expect(failing({ settings: { ...job.settings, margin: 0 } })).toEqual(['lead-in-long']);
   });
 
   test('no sheet of the kind in store', () => {
