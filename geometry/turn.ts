@@ -46,11 +46,6 @@ function angleToClear(design: Design, x: 0 | 1): number {
   return Math.min(LONGEST_CHOSEN, Math.max(...angles));
 }
 
-/** How far the rotor, drawn at mesh angle 0, is turned at a shaft angle: counter-clockwise, rad. */
-export function rotorTurn({ direction, meshAtOpen }: Turn, shaftAngle: number): number {
-  return direction * (meshAtOpen + shaftAngle);
-}
-
 /** How the shaft turns; rests that the design leaves empty are chosen here. */
 export function turnOf(design: Design): Turn {
   const { travel, rotorSector, statorSector, statorEdgeOffset, sense } = design;

@@ -3,7 +3,7 @@
 import { useId, useRef, type CSSProperties } from 'react';
 import { formatQuantity } from '@/geometry/quantity';
 import type { Derived, Turn } from '@/geometry';
-import { rotorTurn } from '@/geometry/turn';
+import { rotorTurn } from '@/geometry/rotor-turn';
 import type { AngleStore } from './angle-store';
 import { toDegrees, writeDegrees } from './degrees';
 import { FloorKey, FloorReadout } from './floor-lettering';

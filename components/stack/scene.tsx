@@ -4,7 +4,7 @@ import { useFrame, useThree } from '@react-three/fiber';
 import { useMemo, useRef, type Ref } from 'react';
 import type { Group } from 'three';
 import type { Derived, PlateRole } from '@/geometry';
-import { rotorTurn } from '@/geometry/turn';
+import { rotorTurn } from '@/geometry/rotor-turn';
 import type { AngleStore } from '@/components/floor/angle-store';
 import { palette } from '@/components/floor/palette';
 import { useAngle } from '@/components/floor/use-angle';

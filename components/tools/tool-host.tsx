@@ -1,7 +1,7 @@
 'use client';
 
 import dynamic from 'next/dynamic';
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
 import type { UseFormReturn } from 'react-hook-form';
 import { designOf, draftOf, type Draft } from '@/components/design/draft';
 import type { History } from '@/components/design/use-history';
@@ -29,6 +29,18 @@ export function ToolHost({
   onClose: () => void;
 }) {
   const [applied, setApplied] = useState<string | null>(null);
+
+  // What is said of a step holds until the next one, whatever takes it.
+  useEffect(
+    () =>
+      applied === null
+        ? undefined
+        : form.subscribe({
+            formState: { values: true },
+            callback: () => setApplied(null),
+          }),
+    [applied, form],
+  );
   const read = tool ? designOf(form.getValues()) : null;
   const design = read?.ok ? read.design : derived?.design;
 

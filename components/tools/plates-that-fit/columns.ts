@@ -1,4 +1,3 @@
-import { formatQuantity } from '@/geometry';
 import type { Candidate } from '@/geometry/advice/advise';
 
 export type SortKey = keyof Candidate;
@@ -9,30 +8,26 @@ interface Column {
   readonly write: (candidate: Candidate) => string;
 }
 
-const mm = (value: number): string => formatQuantity(value, 'length', 3);
+const plain = (value: number): string => String(Number(value.toPrecision(3)));
 
 export const columns: readonly Column[] = [
-  { key: 'airGap', title: 'Gap', write: ({ airGap }) => mm(airGap) },
+  { key: 'airGap', title: 'Gap, mm', write: ({ airGap }) => plain(airGap) },
   {
     key: 'rotorPlates',
     title: 'Plates',
     write: ({ rotorPlates, statorPlates }) => `${rotorPlates} + ${statorPlates}`,
   },
-  { key: 'outerRadius', title: 'Radius, about', write: ({ outerRadius }) => mm(outerRadius) },
-  { key: 'depth', title: 'Depth', write: ({ depth }) => mm(depth) },
+  { key: 'outerRadius', title: 'Radius', write: ({ outerRadius }) => plain(outerRadius) },
+  { key: 'depth', title: 'Depth', write: ({ depth }) => plain(depth) },
   {
     key: 'narrowestBlade',
-    title: 'Narrowest blade',
-    write: ({ narrowestBlade }) => mm(narrowestBlade),
+    title: 'Blade',
+    write: ({ narrowestBlade }) => plain(narrowestBlade),
   },
   {
     key: 'voltage',
-    title: 'Voltage',
-    write: ({ voltage }) => (voltage === 0 ? '–' : formatQuantity(voltage, 'voltage', 3)),
+    title: 'Volts',
+    write: ({ voltage }) => (voltage === 0 ? '–' : plain(voltage)),
   },
-  {
-    key: 'mass',
-    title: 'Plates weigh',
-    write: ({ mass }) => `${Number(mass.toPrecision(2))} g`,
-  },
+  { key: 'mass', title: 'Weight, g', write: ({ mass }) => String(Number(mass.toPrecision(2))) },
 ];

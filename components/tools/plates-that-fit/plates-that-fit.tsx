@@ -60,8 +60,9 @@ export default function PlatesThatFit({ design, section, apply }: ToolProps) {
         {formatQuantity(design.largestRadius, 'length')} of radius and{' '}
         {formatQuantity(design.largestDepth, 'length')} of depth, at{' '}
         {formatQuantity(design.sections[section]!.workingVoltage, 'voltage')} of working
-        voltage. Radii and weights are estimates, good to some per cent; what you take is worked
-        out in full first.
+        voltage. Radius to the furthest ear, depth and narrowest blade in mm; voltage by 1 kV
+        peak for each millimetre. Radii and weights are estimates, good to some per cent; what
+        you take is worked out in full first.
       </p>
       <JobProgress job={list} what="Looking at plate counts and gaps" />
       {answer?.kind === 'list' && (
@@ -127,7 +128,7 @@ export default function PlatesThatFit({ design, section, apply }: ToolProps) {
                   <td className="py-1 pl-3">
                     <Button
                       onPress={() => take(candidate)}
-                      aria-label={`Take ${columns[1]!.write(candidate)} plates with ${columns[0]!.write(candidate)}`}
+                      aria-label={`Take ${columns[1]!.write(candidate)} plates with ${columns[0]!.write(candidate)} mm`}
                     >
                       Take
                     </Button>

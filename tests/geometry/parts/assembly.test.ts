@@ -18,7 +18,7 @@ import { flatten } from '../../../geometry/flatten';
 import { assemblyOf, type Assembly } from '../../../geometry/parts/assembly';
 import type { Placed } from '../../../geometry/parts/collection';
 import type { Part } from '../../../geometry/parts/part';
-import { rotorTurn } from '../../../geometry/turn';
+import { rotorTurn } from '../../../geometry/rotor-turn';
 
 const MICROMETRE = 1e-3;
 const cache = createEdgeCache();
