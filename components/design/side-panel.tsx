@@ -35,7 +35,7 @@ export function SidePanel({
   const { derived, findings, broken } = plates;
   const result = derived?.sections[section];
   return (
-    <div className="flex flex-col gap-5 px-5 py-4 bench:overflow-y-auto">
+    <div className="relative flex flex-col gap-5 px-5 py-4 bench:overflow-y-auto">
       {derived && (
         <div className="h-80 shrink-0">
           <StackView derived={derived} store={store} />

@@ -117,7 +117,7 @@ export function Workbench({
           </div>
           <section
             aria-label="Parameters"
-            className="flex min-w-0 flex-col gap-4 px-5 pt-4 bench:order-1 bench:overflow-y-auto"
+            className="relative flex min-w-0 flex-col gap-4 px-5 pt-4 bench:order-1 bench:overflow-y-auto"
           >
             <SectionTools section={section} onChange={setSection} />
             <ChosenContext value={chosen}>

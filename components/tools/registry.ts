@@ -22,6 +22,11 @@ interface Tool {
 
 /** Every tool is loaded when it is opened. */
 export const tools: Record<string, Tool> = {
+  'old-plate': {
+    title: 'Copy an old plate',
+    opener: 'Copy an old plate',
+    Component: dynamic(() => import('./old-plate/old-plate')),
+  },
   'plates-that-fit': {
     title: 'Plates that fit',
     opener: 'Which plates and gap fit',
@@ -50,7 +55,7 @@ export type ToolName = string;
 export type ToolPlace = 'law' | 'stack' | 'checks' | 'held' | 'files' | 'chart';
 
 export const toolsAt: Readonly<Record<ToolPlace, readonly ToolName[]>> = {
-  law: [],
+  law: ['old-plate'],
   stack: ['plates-that-fit'],
   checks: ['voltage-and-loss'],
   held: ['tolerance'],

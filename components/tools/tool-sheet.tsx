@@ -41,7 +41,7 @@ export default function ToolSheet({ tool, ...props }: ToolProps & { tool: ToolNa
           Close
         </Button>
       </header>
-      <div className="flex min-h-0 grow flex-col gap-4 overflow-y-auto px-5 py-4">
+      <div className="relative flex min-h-0 grow flex-col gap-4 overflow-y-auto px-5 py-4">
         <Component {...props} />
       </div>
     </aside>
