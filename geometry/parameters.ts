@@ -31,7 +31,6 @@ export interface NumberParameter {
   readonly quantity: Quantity;
   readonly group: ParameterGroup;
   readonly label: string;
-  readonly help: string;
   /** Smallest and largest value accepted, inclusive, in kernel units. */
   readonly min: number;
   readonly max: number;
@@ -52,7 +51,6 @@ export interface ChoiceParameter<V extends string = string> {
   readonly kind: 'choice';
   readonly group: ParameterGroup;
   readonly label: string;
-  readonly help: string;
   readonly options: readonly { readonly value: V; readonly label: string }[];
   readonly default: V;
   readonly appliesTo?: AppliesTo;
@@ -64,7 +62,6 @@ export interface PointsParameter {
   readonly kind: 'points';
   readonly group: ParameterGroup;
   readonly label: string;
-  readonly help: string;
   readonly default: readonly LawPoint[];
   readonly appliesTo?: AppliesTo;
   readonly cameLater?: true;
@@ -75,7 +72,6 @@ export interface TextParameter {
   readonly kind: 'text';
   readonly group: ParameterGroup;
   readonly label: string;
-  readonly help: string;
   readonly longest: number;
   readonly default: string;
   readonly appliesTo?: AppliesTo;
@@ -153,7 +149,6 @@ export const sectionParameters = {
     'capacitance' | 'wavelength' | 'frequency' | 'logarithmic' | 'points' | 'formula'
   >('law', {
     label: 'Tuning law',
-    help: 'What moves by equal steps as the shaft turns. The law acts on the total capacitance.',
     options: [
       { value: 'capacitance', label: 'capacitance' },
       { value: 'wavelength', label: 'wavelength' },
@@ -166,7 +161,6 @@ export const sectionParameters = {
   }),
   targetKind: choice<TargetKind>('law', {
     label: 'Range given as',
-    help: 'Capacitance at the terminals, or the band to be tuned with its coil and circuit stray.',
     options: [
       { value: 'band', label: 'band and coil' },
       { value: 'terminals', label: 'capacitance' },
@@ -177,7 +171,6 @@ export const sectionParameters = {
     kind: 'points',
     group: 'law',
     label: 'Table of the law',
-    help: 'Shaft angle from where the law begins, and what the dial shall have there: total capacitance, or with band and coil the frequency. The range is that of its ends.',
     default: [],
     appliesTo: { law: ['points'] },
     cameLater: true,
@@ -186,7 +179,6 @@ export const sectionParameters = {
     kind: 'text',
     group: 'law',
     label: 'Formula of the law',
-    help: 'Total capacitance against the swept fraction x from 0 to 1, in any scale: it is stretched to the range. Numbers, + - * / ^, pi, e, sqrt, exp, log, sin and the like.',
     longest: 200,
     default: 'x^1.5',
     appliesTo: { law: ['formula'] },
@@ -194,7 +186,6 @@ export const sectionParameters = {
   } as TextParameter,
   minCapacitance: capacitance('law', {
     label: 'Capacitance, open',
-    help: 'At the terminals with the plates fully open, trimmer included.',
     min: 0.1e-12,
     max: 20e-9,
     default: 40e-12,
@@ -202,7 +193,6 @@ export const sectionParameters = {
   }),
   maxCapacitance: capacitance('law', {
     label: 'Capacitance, meshed',
-    help: 'At the terminals with the plates fully meshed.',
     min: 0.2e-12,
     max: 50e-9,
     default: 400e-12,
@@ -210,7 +200,6 @@ export const sectionParameters = {
   }),
   bandLow: frequency('law', {
     label: 'Band, low end',
-    help: 'Tuned with the plates fully meshed.',
     min: 1e3,
     max: 1e9,
     default: 530e3,
@@ -218,7 +207,6 @@ export const sectionParameters = {
   }),
   bandHigh: frequency('law', {
     label: 'Band, high end',
-    help: 'Tuned with the plates fully open.',
     min: 1e3,
     max: 1e9,
     default: 1700e3,
@@ -226,7 +214,6 @@ export const sectionParameters = {
   }),
   inductance: inductance('law', {
     label: 'Coil inductance',
-    help: 'The coil that this section tunes.',
     min: 1e-9,
     max: 1,
     default: 240e-6,
@@ -234,7 +221,6 @@ export const sectionParameters = {
   }),
   stray: capacitance('law', {
     label: 'Circuit stray',
-    help: 'Coil, wiring and valve or transistor capacitance across the section, without the section itself.',
     min: 0,
     max: 5e-9,
     default: 15e-12,
@@ -242,14 +228,12 @@ export const sectionParameters = {
   }),
   frameAllowance: capacitance('law', {
     label: 'Insulators and frame',
-    help: 'What the section has besides its plates: insulators, posts to frame, terminals. An allowance; measure it on a built one.',
     min: 0,
     max: 200e-12,
     default: 2e-12,
   }),
   statorForm: choice<'by-law' | 'even' | 'following'>('stack', {
     label: 'Stator form',
-    help: 'A sector of even radius, or one that follows the meshed rotor at the overhang: its far side stays small, which a law that begins slowly needs.',
     options: [
       { value: 'by-law', label: 'as the law needs' },
       { value: 'even', label: 'even radius' },
@@ -259,49 +243,42 @@ export const sectionParameters = {
   }),
   rotorPlates: count('stack', {
     label: 'Rotor plates',
-    help: 'Plates on the shaft in this section.',
     min: 1,
     max: 60,
     default: 14,
   }),
   statorPlates: count('stack', {
     label: 'Stator plates',
-    help: 'Plates on the posts; one more, one fewer or as many as the rotor has.',
     min: 1,
     max: 61,
     default: 15,
   }),
   airGap: length('stack', {
     label: 'Air gap',
-    help: 'One side, rotor face to stator face.',
     min: 0.1,
     max: 15,
     default: 0.5,
   }),
   rotorThickness: length('stack', {
     label: 'Rotor sheet',
-    help: 'Thickness of a rotor plate.',
     min: 0.1,
     max: 6,
     default: 0.8,
   }),
   statorThickness: length('stack', {
     label: 'Stator sheet',
-    help: 'Thickness of a stator plate.',
     min: 0.1,
     max: 6,
     default: 0.8,
   }),
   permittivity: ratio('stack', {
     label: 'Relative permittivity',
-    help: 'Of the air or other gas or liquid in the gap. Dry air at 20 °C and 1013 hPa: 1.000537.',
     min: 1,
     max: 100,
     default: 1.000537,
   }),
   dielectric: choice<'air' | 'film' | 'disc'>('stack', {
     label: 'Between the plates',
-    help: 'Air; a film in each gap with air beside it; or one solid disc that fills the gap between one rotor and one stator plate.',
     options: [
       { value: 'air', label: 'air' },
       { value: 'film', label: 'film and air' },
@@ -312,7 +289,6 @@ export const sectionParameters = {
   }),
   filmThickness: length('stack', {
     label: 'Film thickness',
-    help: 'Of the film in each gap; air fills the rest.',
     min: 0.005,
     max: 10,
     default: 0.05,
@@ -321,7 +297,6 @@ export const sectionParameters = {
   }),
   filmPermittivity: ratio('stack', {
     label: 'Permittivity of film or disc',
-    help: 'Relative. Handbook ranges: mica 5.4, PTFE 2.1, polyethylene 2.25 to 2.3, polystyrene 2.5 to 2.6. Ceramics: as their maker says.',
     min: 1,
     max: 5000,
     default: 2.1,
@@ -330,14 +305,12 @@ export const sectionParameters = {
   }),
   workingVoltage: voltage('stack', {
     label: 'Working voltage, peak',
-    help: 'Largest peak voltage across the section, direct and alternating together.',
     min: 0,
     max: 50e3,
     default: 300,
   }),
   workingFrequency: optional('frequency', 'stack', {
     label: 'Working frequency',
-    help: 'For loss and for what the gap holds at radio frequency. Left empty: taken from the band, or 50 Hz.',
     min: 1,
     max: 1e9,
     cameLater: true,
@@ -348,7 +321,6 @@ export const sectionParameters = {
 export const sharedParameters = {
   arrangement: choice<'single' | 'differential' | 'split-stator' | 'butterfly'>('turn', {
     label: 'Arrangement',
-    help: 'One stator; one rotor that passes from a stator into another; two equal sets of plates in series, stator to stator; or two blades and two stators in series, on a quarter turn.',
     options: [
       { value: 'single', label: 'single' },
       { value: 'differential', label: 'differential' },
@@ -360,47 +332,40 @@ export const sharedParameters = {
   }),
   travel: angle('turn', {
     label: 'Travel',
-    help: 'Shaft rotation from the open to the meshed stop.',
     min: 60 * DEGREE,
     max: 330 * DEGREE,
     default: 180 * DEGREE,
   }),
   openRest: optional('angle', 'turn', {
     label: 'Rest before the law',
-    help: 'Shaft rotation from the open stop to where the law begins. Left empty: until edges that pass each other no longer disturb it.',
     min: 0,
     max: 120 * DEGREE,
   }),
   meshedRest: optional('angle', 'turn', {
     label: 'Rest after the law',
-    help: 'Shaft rotation from where the law ends to the meshed stop. Left empty: as much as the edges need.',
     min: 0,
     max: 90 * DEGREE,
   }),
   rotorSector: angle('turn', {
     label: 'Rotor sector',
-    help: 'Angle of the blade from its leading to its trailing edge.',
     min: 20 * DEGREE,
     max: 340 * DEGREE,
     default: 170 * DEGREE,
   }),
   statorSector: angle('turn', {
     label: 'Stator sector',
-    help: 'Angle of the stator from edge to edge.',
     min: 10 * DEGREE,
     max: 300 * DEGREE,
     default: 170 * DEGREE,
   }),
   statorEdgeOffset: length('turn', {
     label: 'Stator edges set in',
-    help: 'How far the straight edges of the stator lie inside their radial lines, parallel to them.',
     min: -5,
     max: 30,
     default: 0,
   }),
   sense: choice<'anticlockwise' | 'clockwise'>('turn', {
     label: 'Meshes turning',
-    help: 'Seen from the side on which the plates are drawn.',
     options: [
       { value: 'anticlockwise', label: 'anticlockwise' },
       { value: 'clockwise', label: 'clockwise' },
@@ -409,104 +374,89 @@ export const sharedParameters = {
   }),
   shaftDiameter: length('shaft', {
     label: 'Shaft diameter',
-    help: 'Nominal diameter; the hole in the rotor plate is drawn at this size.',
     min: 1,
     max: 30,
     default: 6,
   }),
   spacerRadius: length('shaft', {
     label: 'Rotor spacer radius',
-    help: 'Outside radius of the spacers between rotor plates.',
     min: 1,
     max: 60,
     default: 6,
   }),
   hubRadius: length('shaft', {
     label: 'Hub radius',
-    help: 'Radius of the rotor plate round the shaft, away from the blade.',
     min: 1,
     max: 60,
     default: 7,
   }),
   cutoutRadius: length('shaft', {
     label: 'Stator cut-out radius',
-    help: 'Radius of the opening in the stator round the shaft.',
     min: 1.5,
     max: 80,
     default: 9,
   }),
   overhang: length('posts', {
     label: 'Stator overhang',
-    help: 'How far the stator reaches past the longest rotor radius.',
     min: 0,
     max: 40,
     default: 2,
   }),
   postCount: count('posts', {
     label: 'Stator posts',
-    help: 'Posts that carry the stator plates.',
     min: 2,
     max: 4,
     default: 3,
   }),
   postHoleDiameter: length('posts', {
     label: 'Post hole',
-    help: 'Diameter of the hole for a post.',
     min: 0.8,
     max: 20,
     default: 3.2,
   }),
   postSpacerRadius: length('posts', {
     label: 'Post spacer radius',
-    help: 'Outside radius of the spacers between stator plates.',
     min: 0.8,
     max: 30,
     default: 3.5,
   }),
   postWeb: length('posts', {
     label: 'Metal round the post hole',
-    help: 'Width of the ring of sheet left round each post hole.',
     min: 0.2,
     max: 20,
     default: 2.5,
   }),
   postClearance: length('posts', {
     label: 'Rotor to post, at least',
-    help: 'Smallest distance allowed between the sweep of the rotor and a post spacer.',
     min: 0.1,
     max: 40,
     default: 2,
   }),
   postCircleRadius: optional('length', 'posts', {
     label: 'Post circle radius',
-    help: 'Distance of the posts from the shaft. Left empty: as near as the clearance allows.',
     min: 3,
     max: 300,
   }),
   largestRadius: length('envelope', {
     label: 'Largest radius allowed',
-    help: 'From the shaft to the furthest part, stator ears and sweep included.',
     min: 4,
     max: 300,
     default: 65,
   }),
   largestDepth: length('envelope', {
     label: 'Largest depth allowed',
-    help: 'Along the shaft, over all plates of all sections.',
     min: 1,
     max: 500,
     default: 60,
   }),
   sectionSpacing: length('envelope', {
     label: 'Between sections',
-    help: 'Clear distance along the shaft between neighbouring sections.',
     min: 0.5,
     max: 100,
     default: 6,
   }),
   material: choice<'brass' | 'aluminium' | 'copper' | 'steel'>('sheet', {
     label: 'Sheet',
-    help: 'What the plates are cut from.',
     options: [
       { value: 'brass', label: 'Brass CuZn37' },
       { value: 'aluminium', label: 'Aluminium EN AW-5754' },
@@ -517,7 +467,6 @@ export const sharedParameters = {
   }),
   finish: choice<'none' | 'silver'>('sheet', {
     label: 'Finish',
-    help: 'Silver plated plates lose less at radio frequency, if the silver is some skin depths thick.',
     options: [
       { value: 'none', label: 'bare' },
       { value: 'silver', label: 'silver plated' },
@@ -527,7 +476,6 @@ export const sharedParameters = {
   }),
   spacerMaterial: choice<'as-plates' | 'brass' | 'aluminium' | 'steel'>('sheet', {
     label: 'Spacer metal',
-    help: 'What spacers are turned or cut from; with the plates it sets how the gaps drift with temperature.',
     options: [
       { value: 'as-plates', label: 'as plates' },
       { value: 'brass', label: 'brass' },
@@ -539,7 +487,6 @@ export const sharedParameters = {
   }),
   altitude: altitude('envelope', {
     label: 'Altitude of use',
-    help: 'Above sea level. Thinner air holds less voltage.',
     min: 0,
     max: 10e6,
     default: 0,
@@ -547,7 +494,6 @@ export const sharedParameters = {
   }),
   spacerMake: choice<'turned' | 'cut'>('frame', {
     label: 'Spacers',
-    help: 'Turned to length, or rings cut from sheet of just that thickness.',
     options: [
       { value: 'turned', label: 'turned' },
       { value: 'cut', label: 'cut rings' },
@@ -557,7 +503,6 @@ export const sharedParameters = {
   }),
   endSlots: count('frame', {
     label: 'Slots in end rotor plates',
-    help: 'Divide the first and the last rotor plate of a section into segments that are bent to trim the law. 0 for none.',
     min: 0,
     max: 12,
     default: 0,
@@ -565,7 +510,6 @@ export const sharedParameters = {
   }),
   endSlotWidth: length('frame', {
     label: 'Slot width',
-    help: 'One sheet thickness or more can be cut safely (common practice).',
     min: 0.2,
     max: 5,
     default: 0.8,
@@ -573,7 +517,6 @@ export const sharedParameters = {
   }),
   frame: choice<'end-plates' | 'none'>('frame', {
     label: 'Frame',
-    help: 'Two end plates that carry shaft, posts and pillars, or none: plates and spacers alone.',
     options: [
       { value: 'end-plates', label: 'end plates' },
       { value: 'none', label: 'none' },
@@ -583,7 +526,6 @@ export const sharedParameters = {
   }),
   frameMaterial: choice<'aluminium' | 'brass' | 'steel' | 'insulator'>('frame', {
     label: 'Frame sheet',
-    help: 'What the end plates are cut from.',
     options: [
       { value: 'aluminium', label: 'aluminium' },
       { value: 'brass', label: 'brass' },
@@ -596,7 +538,6 @@ export const sharedParameters = {
   }),
   frameThickness: length('frame', {
     label: 'Frame thickness',
-    help: 'Thickness of an end plate.',
     min: 0.5,
     max: 20,
     default: 2,
@@ -605,7 +546,6 @@ export const sharedParameters = {
   }),
   frameClearance: length('frame', {
     label: 'Plates to frame',
-    help: 'Clear distance along the shaft from the outermost plate to an end plate. What the frame adds to the capacitance is in the allowance.',
     min: 1,
     max: 100,
     default: 5,
@@ -614,7 +554,6 @@ export const sharedParameters = {
   }),
   bearingDiameter: optional('length', 'frame', {
     label: 'Bearing hole',
-    help: 'Hole in the end plates for the bush or bearing of the shaft. Left empty: 4 mm more than the shaft.',
     min: 1,
     max: 60,
     appliesTo: FRAMED,
@@ -622,7 +561,6 @@ export const sharedParameters = {
   }),
   bushFlange: length('frame', {
     label: 'Insulating bush, flange',
-    help: 'Thickness of the flange of the bush that holds a post in the frame, on either face of the end plate.',
     min: 0.5,
     max: 20,
     default: 2,
@@ -631,7 +569,6 @@ export const sharedParameters = {
   }),
   pillarDiameter: length('frame', {
     label: 'Frame pillar',
-    help: 'Diameter of the pillars that hold the end plates apart, away from the stator.',
     min: 2,
     max: 40,
     default: 6,
@@ -640,7 +577,6 @@ export const sharedParameters = {
   }),
   shaftFront: length('frame', {
     label: 'Shaft beyond the front',
-    help: 'Length of shaft that stands out in front of the front plate.',
     min: 0,
     max: 200,
     default: 20,
@@ -649,7 +585,6 @@ export const sharedParameters = {
   }),
   bracket: choice<'none' | 'panel'>('frame', {
     label: 'Panel bracket',
-    help: 'A flat plate on the front pillars to screw the capacitor to a panel.',
     options: [
       { value: 'none', label: 'none' },
       { value: 'panel', label: 'panel plate' },

@@ -1,11 +1,12 @@
 'use client';
 
-import { Label, Radio, RadioGroup } from 'react-aria-components/RadioGroup';
+import { Label, Radio, RadioGroup, Text } from 'react-aria-components/RadioGroup';
 import { useController, useFormContext } from 'react-hook-form';
 import { inputClass } from '@/components/ui/input-class';
 import type { ChoiceParameter } from '@/geometry';
 import type { Draft } from './draft';
 import { fieldId } from './focus-field';
+import { useHelp } from './parameter-help';
 import { LawCurve } from './law-curve';
 
 interface ChoiceProps {
@@ -17,6 +18,7 @@ interface ChoiceProps {
 export function RadioField({ path, parameter }: ChoiceProps) {
   const { control } = useFormContext<Draft>();
   const { field } = useController({ control, name: `design.${path}` });
+  const help = useHelp(path);
   const law = path.endsWith('.law');
   return (
     <RadioGroup
@@ -28,6 +30,9 @@ export function RadioField({ path, parameter }: ChoiceProps) {
       className="flex flex-col gap-1.5"
     >
       <Label className={law ? 'sr-only' : 'text-ink-2'}>{parameter.label}</Label>
+      <Text slot="description" className="sr-only">
+        {help}
+      </Text>
       <div className="dense flex flex-wrap overflow-hidden rounded-[3px] border border-edge bg-white">
         {parameter.options.map((option) => (
           <Radio

@@ -4,7 +4,8 @@ import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { LocalTime } from '@/components/ui/local-time';
 import type { DesignRecord } from '@/lib/schemas/api';
-import { designOf, differences, type Draft } from './draft';
+import { differences } from './differences';
+import { designOf, type Draft } from './draft';
 
 /** Two people saved the same design: says what differs and lets the person choose. */
 export default function ConflictDialog({

@@ -10,6 +10,7 @@ import { ChosenContext } from './chosen-values';
 import { ListField, RadioField } from './choice-field';
 import { applies } from '@/geometry';
 import type { Draft } from './draft';
+import { loadHelp } from './parameter-help';
 import {
   sectionDeciding,
   sectionGroups,
@@ -80,9 +81,15 @@ export const DesignForm = memo(function DesignForm({ section }: { section: numbe
 
   /** The help of the field one is in stands at the foot; readers get it as its description. */
   function showHelp(target: HTMLElement) {
-    const ids = target.getAttribute('aria-describedby')?.split(' ') ?? [];
-    const text = ids.map((id) => document.getElementById(id)?.textContent ?? '');
-    setHelp(text[0] ?? '');
+    const described = target.closest('[role=radiogroup]') ?? target;
+    const read = () => {
+      const ids = described.getAttribute('aria-describedby')?.split(' ') ?? [];
+      const text = ids.map((id) => document.getElementById(id)?.textContent ?? '');
+      setHelp(text[0] ?? '');
+    };
+    // What is there at once, and all of it after the first time.
+    read();
+    void loadHelp().then(() => requestAnimationFrame(read));
     void loadApi().catch(() => undefined);
   }
 
@@ -90,6 +97,7 @@ export const DesignForm = memo(function DesignForm({ section }: { section: numbe
     <div
       className="flex flex-col gap-5 [&_input]:scroll-mb-28 [&_select]:scroll-mb-28"
       onFocus={(event) => showHelp(event.target)}
+      onPointerEnter={() => void loadHelp()}
     >
       {sectionGroups.map((group) => (
         <Fields

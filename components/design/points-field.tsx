@@ -5,6 +5,7 @@ import { useController, useFormContext, useWatch } from 'react-hook-form';
 import { MOST_POINTS, type LawPoint, type PointsParameter } from '@/geometry';
 import { messageFor, type Draft, type DraftValue } from './draft';
 import { fieldId } from './focus-field';
+import { useHelp } from './parameter-help';
 import { pointUnits, readPoints, writePoints, type PointValue } from './points-text';
 
 /** Larger files are no table of this kind. */
@@ -23,6 +24,7 @@ export default function PointsField({
   parameter: PointsParameter;
 }) {
   const id = useId();
+  const help = useHelp(path);
   const { control } = useFormContext<Draft>();
   const { field } = useController({ control, name: `design.${path}` });
   const targetKind = useWatch({
@@ -80,7 +82,7 @@ export default function PointsField({
         className="min-h-32 w-full rounded-[3px] border border-edge bg-white px-2 py-1 tabular-nums aria-invalid:border-2 aria-invalid:border-bad"
       />
       <p id={`${id}-help`} className="sr-only">
-        {parameter.help}
+        {help}
       </p>
       <p
         id={`${id}-message`}

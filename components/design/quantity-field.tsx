@@ -7,6 +7,7 @@ import { loadReader, readerNow } from '@/components/units/load-reader';
 import { writeQuantity } from '@/geometry';
 import { messageFor, type Draft, type DraftValue, type QuantityParameter } from './draft';
 import { fieldId } from './focus-field';
+import { useHelp } from './parameter-help';
 
 function shown(value: DraftValue, { quantity }: QuantityParameter) {
   if (typeof value === 'number') return writeQuantity(value, quantity);
@@ -66,7 +67,8 @@ export function QuantityField({
     );
   }
 
-  const { label, help, min, max } = parameter;
+  const { label, min, max } = parameter;
+  const help = useHelp(path);
   const hint = chosen === undefined ? null : writeQuantity(chosen, parameter.quantity, 3);
   const low = writeQuantity(min, parameter.quantity);
   const high = writeQuantity(max, parameter.quantity);

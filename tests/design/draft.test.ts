@@ -1,5 +1,6 @@
 import { expect, test } from 'vitest';
-import { designOf, differences, draftOf, sameDraft } from '@/components/design/draft';
+import { differences } from '@/components/design/differences';
+import { designOf, draftOf, sameDraft } from '@/components/design/draft';
 import { defaultDesign } from '@/geometry';
 
 test('a draft of a design is that design again', () => {
