@@ -3,7 +3,7 @@
 import dynamic from 'next/dynamic';
 import { memo, use, useState, type ComponentProps } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
-import type { ToolPlace } from '@/components/tools/registry';
+import type { ToolPlace } from '@/components/tools/places';
 import { ToolLinks } from '@/components/tools/tool-links';
 import { loadApi } from '@/components/api/load-api';
 import { ChosenContext } from './chosen-values';

@@ -4,9 +4,8 @@ import dynamic from 'next/dynamic';
 import { useEffect, useState } from 'react';
 import type { UseFormReturn } from 'react-hook-form';
 import type { Derivation, Finding } from '@/geometry';
-import { ToolHost } from '@/components/tools/tool-host';
 import { OpenToolContext, ToolLinks } from '@/components/tools/tool-links';
-import type { ToolName } from '@/components/tools/registry';
+import type { ToolName } from '@/components/tools/places';
 import type { DesignFiles, DesignRecord } from '@/lib/schemas/api';
 import { ChosenContext, useChosenValues } from './chosen-values';
 import { DesignBar } from './design-bar';
@@ -27,6 +26,8 @@ import { useSaveKey } from './use-save-key';
 import { useSaving } from './use-saving';
 import { useUnsaved } from './use-unsaved';
 
+// Loaded with the first tool.
+const ToolHost = dynamic(() => import('@/components/tools/tool-host'), { ssr: false });
 const ConflictDialog = dynamic(() => import('./conflict-dialog'), { ssr: false });
 
 /** Form, plates and what is made of them. It renders anew with every result; the form does not. */
@@ -66,6 +67,8 @@ export function Workbench({
 
   const history = useHistory(form);
   const [tool, openTool] = useState<ToolName | null>(null);
+  const [toolsUsed, setToolsUsed] = useState(false);
+  if (tool && !toolsUsed) setToolsUsed(true);
   const saving = useSaving(form, record, userId);
   const unsaved = useUnsaved(form, saving, userId);
   const saveAsNew = useSaveAsNew(form, userId, record.id);
@@ -91,14 +94,16 @@ export function Workbench({
     <OpenToolContext value={openTool}>
       <main id="main" className="flex flex-col bench:h-[calc(100dvh-3rem-1px)] bench:min-h-150">
         <DesignBar saving={saving} history={history} />
-        <ToolHost
-          tool={tool}
-          form={form}
-          history={history}
-          derived={plates.derived}
-          section={section}
-          onClose={() => openTool(null)}
-        />
+        {toolsUsed && (
+          <ToolHost
+            tool={tool}
+            form={form}
+            history={history}
+            derived={plates.derived}
+            section={section}
+            onClose={() => openTool(null)}
+          />
+        )}
         <EditNotices
           saving={saving}
           unsaved={unsaved}

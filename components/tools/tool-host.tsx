@@ -1,6 +1,5 @@
 'use client';
 
-import dynamic from 'next/dynamic';
 import { useEffect, useState } from 'react';
 import type { UseFormReturn } from 'react-hook-form';
 import { designOf, draftOf, type Draft } from '@/components/design/draft';
@@ -8,12 +7,11 @@ import type { History } from '@/components/design/use-history';
 import type { Derived, Design } from '@/geometry';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
-import type { ToolName } from './registry';
-
-const ToolSheet = dynamic(() => import('./tool-sheet'), { ssr: false });
+import type { ToolName } from './places';
+import ToolSheet from './tool-sheet';
 
 /** The open tool, and what the last one put on the screen until it is undone or accepted. */
-export function ToolHost({
+export default function ToolHost({
   tool,
   form,
   history,

@@ -2,12 +2,14 @@
 
 import { useEffect, useRef } from 'react';
 import { Button } from '@/components/ui/button';
-import { tools, type ToolName, type ToolProps } from './registry';
+import type { ToolName } from './places';
+import { tools } from './registry';
+import type { ToolProps } from './tool-props';
 
 /** A tool beside the design, which stays in sight and can be worked on meanwhile. */
 export default function ToolSheet({ tool, ...props }: ToolProps & { tool: ToolName }) {
   const heading = useRef<HTMLHeadingElement>(null);
-  const { title, Component } = tools[tool]!;
+  const { title, Component } = tools[tool];
   const { close } = props;
 
   useEffect(() => {

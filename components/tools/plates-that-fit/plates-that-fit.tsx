@@ -7,7 +7,7 @@ import type { Candidate } from '@/geometry/advice/advise';
 import { SortButton } from '@/components/designs/sort-button';
 import { JobProgress } from '../job/job-progress';
 import { useJob } from '../job/use-job';
-import type { ToolProps } from '../registry';
+import type { ToolProps } from '../tool-props';
 import { columns, type SortKey } from './columns';
 import type { FitAnswer, FitQuestion } from './plates-that-fit.worker';
 

@@ -7,7 +7,7 @@ import { startingMachines } from '@/geometry/cutting/starting-values';
 import type { LaidOut } from '@/geometry/nesting/lay-out';
 import { JobProgress } from '../job/job-progress';
 import { useJob } from '../job/use-job';
-import type { ToolProps } from '../registry';
+import type { ToolProps } from '../tool-props';
 import { GroupResult } from './group-result';
 import { LayoutFields, type Asked } from './layout-fields';
 import { MachineFindings } from './machine-findings';

@@ -13,7 +13,7 @@ import {
 } from '@/geometry/tolerance/tolerances';
 import { JobProgress } from '../job/job-progress';
 import { useJob } from '../job/use-job';
-import type { ToolProps } from '../registry';
+import type { ToolProps } from '../tool-props';
 import { AmountRow } from './amount-row';
 import { BandPlot } from './band-plot';
 import type { ToleranceAnswer, ToleranceQuestion } from './tolerance.worker';

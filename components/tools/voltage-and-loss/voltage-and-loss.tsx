@@ -3,7 +3,7 @@
 import { PanelSection } from '@/components/design/panel-section';
 import { driftLeftOut, sectionDrift } from '@/geometry/electrical/drift';
 import { Figures } from '@/components/design/figures';
-import type { ToolProps } from '../registry';
+import type { ToolProps } from '../tool-props';
 import { LossTable } from './loss-table';
 import { VoltageTable } from './voltage-table';
 

@@ -1,0 +1,21 @@
+/** The tools of the design screen, by what their button says. */
+export const openers = {
+  'old-plate': 'Copy an old plate',
+  'plates-that-fit': 'Which plates and gap fit',
+  tolerance: 'What tolerances do to it',
+  'voltage-and-loss': 'Voltage, loss and drift',
+  sheets: 'Lay out on sheets',
+} as const;
+
+export type ToolName = keyof typeof openers;
+
+/** Where a tool is opened from: where its answer is used. */
+export const toolsAt = {
+  law: ['old-plate'],
+  stack: ['plates-that-fit'],
+  checks: ['voltage-and-loss'],
+  held: ['tolerance'],
+  files: ['sheets'],
+} as const satisfies Record<string, readonly ToolName[]>;
+
+export type ToolPlace = keyof typeof toolsAt;
