@@ -1,0 +1,130 @@
+import AxeBuilder from '@axe-core/playwright';
+import { expect, test, type Page } from '@playwright/test';
+import { defaultDesign, derive } from '../../geometry';
+import { cutFiles } from '../../geometry/files';
+import { enter, field, makeDesign, rotorOutline } from '../support/design-screen';
+import { builder, signIn } from '../support/sign-ins';
+
+test.beforeEach(async ({ page }) => {
+  await signIn(page, builder);
+});
+
+async function openTool(page: Page, opener: string, title: string) {
+  await page.getByRole('button', { name: opener, exact: true }).first().click();
+  const tool = page.getByRole('dialog', { name: title });
+  await expect(tool).toBeVisible();
+  return tool;
+}
+
+/** No tool may be out of reach for those who can't see it. */
+async function expectAccessible(page: Page) {
+  const { violations } = await new AxeBuilder({ page }).include('[role=dialog]').analyze();
+  expect(violations.map(({ id, nodes }) => `${id}: ${nodes[0]?.html}`)).toEqual([]);
+}
+
+test('changes are undone and redone, by key and by button', async ({ page }) => {
+  await makeDesign(page, 'Undone');
+  await enter(page, 'Air gap', '0.6');
+  await enter(page, 'Rotor sheet', '1');
+  await page.keyboard.press('Control+z');
+  await expect(field(page, 'Rotor sheet')).toHaveValue('0.8');
+  await expect(field(page, 'Air gap')).toHaveValue('0.6');
+  await page.getByRole('button', { name: 'Undo', exact: true }).click();
+  await expect(field(page, 'Air gap')).toHaveValue('0.5');
+  await expect(page.getByRole('button', { name: 'Undo', exact: true })).toBeDisabled();
+  await page.getByRole('button', { name: 'Redo', exact: true }).click();
+  await expect(field(page, 'Air gap')).toHaveValue('0.6');
+});
+
+test('plates that fit are listed, one is taken and put back', async ({ page }) => {
+  await makeDesign(page, 'Fitting');
+  const before = await rotorOutline(page);
+  const tool = await openTool(page, 'Which plates and gap fit', 'Plates that fit');
+  await expect(tool.getByRole('status')).toContainText(/\d+ of the \d+ looked at fit/);
+  await expectAccessible(page);
+  await tool
+    .getByRole('button', { name: /^Take / })
+    .nth(2)
+    .click();
+  await expect(page.getByText(/gap taken/)).toBeVisible();
+  await expect.poll(() => rotorOutline(page)).not.toBe(before);
+  await page.getByRole('button', { name: 'Undo', exact: true }).last().click();
+  await expect.poll(() => rotorOutline(page)).toBe(before);
+  await page.keyboard.press('Escape');
+});
+
+test('two thousand stacks are built, and the limit decides how many pass', async ({ page }) => {
+  await makeDesign(page, 'Tolerant');
+  const tool = await openTool(page, 'What tolerances do to it', 'Tolerance');
+  await tool.getByRole('button', { name: 'Build 2000 stacks' }).click();
+  await expect(tool.getByText('Stacks within your limit')).toBeVisible();
+  const passed = tool
+    .locator('div')
+    .filter({ hasText: /^Stacks within your limit/ })
+    .last();
+  const strict = await passed.innerText();
+  await expectAccessible(page);
+  await tool.getByLabel(/Largest error allowed/).fill('10');
+  await tool.getByRole('button', { name: 'Build 2000 stacks' }).click();
+  await expect.poll(() => passed.innerText()).not.toBe(strict);
+  await tool.getByRole('button', { name: 'Close' }).click();
+  await expect(tool).toBeHidden();
+});
+
+test('voltages stand side by side and say that they are no rating', async ({ page }) => {
+  await makeDesign(page, 'High');
+  const tool = await openTool(page, 'Voltage, loss and drift', 'Voltage, loss and drift');
+  // Paschen's law for 0.5 mm, IEC 60664-1 for square edges; tests/references has the values.
+  await expect(tool.getByRole('row', { name: /Paschen/ })).toContainText('2.88 kV');
+  await expect(tool.getByRole('row', { name: /square cut edges/ })).toContainText('1.24 kV');
+  await expect(tool.getByText(/None of these is a rating/)).toBeVisible();
+  await expectAccessible(page);
+});
+
+test('a law of one’s own is typed as a table, and told what is wrong with it', async ({
+  page,
+}) => {
+  await makeDesign(page, 'Own law');
+  const before = await rotorOutline(page);
+  await page.getByText('own table', { exact: true }).click();
+  const table = page.getByRole('textbox', { name: /Table of the law/ });
+  await table.fill('angle;frequency\n0;1600\n60;1200\n120;850\n180;540');
+  await expect(page.getByText('4 rows, joined without overshoot')).toBeVisible();
+  await expect.poll(() => rotorOutline(page)).not.toBe(before);
+  await table.fill('0 1600\n60 many');
+  await expect(page.getByText(/Row 2, “60 many”/)).toBeVisible();
+  await page.getByText('formula', { exact: true }).click();
+  await page.getByRole('textbox', { name: 'Formula of the law' }).fill('fetch(x)');
+  await expect(page.getByText(/fetch is not a function here/)).toBeVisible();
+});
+
+test('an old plate is read from its DXF and its law kept', async ({ page }) => {
+  const design = defaultDesign();
+  design.sections[0]!.law = 'wavelength';
+  const derivation = derive(design);
+  if (!derivation.ok) throw new Error('no plates');
+  const file = cutFiles('Old', derivation.derived).find(
+    ({ kind, label }) => kind === 'dxf' && label.startsWith('Rotor plate'),
+  )!;
+  await makeDesign(page, 'Copied');
+  const before = await rotorOutline(page);
+  const tool = await openTool(page, 'Copy an old plate', 'Copy an old plate');
+  await tool.getByLabel('Outline file').setInputFiles({
+    name: 'broken.dxf',
+    mimeType: 'image/vnd.dxf',
+    buffer: Buffer.from('no drawing'),
+  });
+  await expect(tool.getByRole('alert')).toContainText('no DXF');
+  await tool.getByLabel('Outline file').setInputFiles({
+    name: 'vane.dxf',
+    mimeType: 'image/vnd.dxf',
+    buffer: Buffer.from('text' in file ? String(file.text) : ''),
+  });
+  await expect(tool.getByRole('img', { name: 'Outline from vane.dxf' })).toBeVisible();
+  await tool.getByRole('button', { name: 'Read its law' }).click();
+  await expect(tool.getByText('Off equal steps of wavelength')).toBeVisible();
+  await expectAccessible(page);
+  await tool.getByRole('button', { name: 'Keep this law' }).click();
+  await expect(page.getByText(/The old plate’s law taken/)).toBeVisible();
+  await expect.poll(() => rotorOutline(page)).not.toBe(before);
+});
