@@ -87,7 +87,9 @@ console.table([
   row('whole field: inverse, plan view and back-check', '200 ms, aim 60', () =>
     derive(usual, { cache }),
   ),
-  row('one DXF', '50 ms', () => dxfOf(placeInRow([usualDerived.sections[0]!.rotor]))),
+  row('one DXF', '50 ms', () =>
+    dxfOf(placeInRow([{ key: 's1-rotor', ...usualDerived.sections[0]!.rotor }])),
+  ),
   row('all files of a design', '', () => cutFiles('bench', usualDerived)),
 ]);
 

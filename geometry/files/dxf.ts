@@ -6,7 +6,6 @@
 import Drawing from 'dxf-writer';
 import Handle from 'dxf-writer/src/Handle';
 import type { Contour } from '../outline';
-import { partSlug } from './file-name';
 import type { Placement } from './placement';
 
 /** mm; far below any machine's step, and it keeps numbers like 1e-15 out of the file. */
@@ -32,8 +31,8 @@ function draw(drawing: Drawing, contour: Contour, dx: number, dy: number): void 
 }
 
 /**
- * One DXF of the plates as placed. Each plate has two layers of its own: outer cut and inner cut.
- * Contours are nominal: no kerf is taken off or added.
+ * One DXF of the parts as placed. Each part has two layers of its own: outer cut and inner cut.
+ * Whether kerf is allowed for is in the contours it is given, and in its name.
  */
 export function dxfOf(placements: readonly Placement[]): string {
   // The library counts handles over the whole process; from 0, equal designs give equal bytes.
@@ -41,16 +40,16 @@ export function dxfOf(placements: readonly Placement[]): string {
   const drawing = new Drawing();
   drawing.setUnits('Millimeters');
   drawing.header('MEASUREMENT', [[70, 1]]);
-  for (const { plate, dx, dy } of placements) {
-    const part = partSlug(plate).toUpperCase();
-    const outer = `${part}-OUTER-CUT`;
-    const inner = `${part}-INNER-CUT`;
+  for (const { part, dx, dy } of placements) {
+    const key = part.key.toUpperCase();
+    const outer = `${key}-OUTER-CUT`;
+    const inner = `${key}-INNER-CUT`;
     drawing.addLayer(outer, Drawing.ACI.LAYER, 'CONTINUOUS');
     drawing.addLayer(inner, Drawing.ACI.LAYER, 'CONTINUOUS');
     drawing.setActiveLayer(inner);
-    for (const hole of plate.holes) draw(drawing, hole, dx, dy);
+    for (const hole of part.holes) draw(drawing, hole, dx, dy);
     drawing.setActiveLayer(outer);
-    draw(drawing, plate.outside, dx, dy);
+    draw(drawing, part.outside, dx, dy);
   }
   return drawing.toDxfString();
 }

@@ -1,6 +1,5 @@
-import type { Plate } from '../derived';
-import type { Design } from '../design';
 import { sheetMaterials } from '../material';
+import type { CutPart } from '../parts/part';
 
 /** A design's name as it stands in file names: plain letters, digits and hyphens. */
 export function slugOf(designName: string): string {
@@ -17,37 +16,25 @@ export function slugOf(designName: string): string {
 
 const sheet = (thickness: number): string => `${thickness.toFixed(2)}mm`;
 
-/** `s1-rotor`: section and role, as in names of files and layers. */
-export function partSlug(plate: Plate): string {
-  return `s${plate.section + 1}-${plate.role}`;
-}
+const materialSlug = (material: CutPart['material']): string =>
+  material === 'insulator' ? 'insulator' : sheetMaterials[material].slug;
 
 /** `NAME_s1-rotor_brass-cuzn37_0.80mm_14off`, without the ending. */
-export function plateFileName(designName: string, design: Design, plate: Plate): string {
-  const { slug } = sheetMaterials[design.material];
+export function partFileName(designName: string, part: CutPart): string {
+  const { key, material, thickness, quantity } = part;
   return [
     slugOf(designName),
-    partSlug(plate),
-    slug,
-    sheet(plate.thickness),
-    `${plate.quantity}off`,
+    key,
+    materialSlug(material),
+    sheet(thickness),
+    `${quantity}off`,
   ].join('_');
 }
 
-/** Name of the file that shows one of each plate; every thickness that occurs is in it. */
-export function allPlatesFileName(
-  designName: string,
-  design: Design,
-  plates: readonly Plate[],
-): string {
-  const thicknesses = [...new Set(plates.map((plate) => plate.thickness))].sort(
-    (a, b) => a - b,
+/** Name of the file that shows one of each part of a sheet. */
+export function sheetFileName(designName: string, parts: readonly CutPart[]): string {
+  const { material, thickness } = parts[0]!;
+  return [slugOf(designName), 'one-of-each', materialSlug(material), sheet(thickness)].join(
+    '_',
   );
-  return [
-    slugOf(designName),
-    'all-plates',
-    sheetMaterials[design.material].slug,
-    thicknesses.map(sheet).join('+'),
-    plates.map((plate) => `${plate.quantity}off`).join('+'),
-  ].join('_');
 }

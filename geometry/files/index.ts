@@ -3,10 +3,11 @@
 import type { Derived } from '../derived';
 import { formatQuantity } from '../quantity';
 import { partsOf } from '../parts/assembly';
+import type { CutPart, Part } from '../parts/part';
 import { billTable } from './bill-table';
 import type { CutFile } from './cut-file';
 import { dxfOf } from './dxf';
-import { allPlatesFileName, plateFileName, slugOf } from './file-name';
+import { partFileName, sheetFileName, slugOf } from './file-name';
 import { lawTable } from './law-table';
 import { placeInRow } from './placement';
 import { svgOf } from './svg';
@@ -14,21 +15,35 @@ import { svgOf } from './svg';
 export type { CutFile } from './cut-file';
 export { slugOf } from './file-name';
 
+const isCut = (part: Part): part is CutPart => part.kind === 'cut';
+
+/** Cut parts of one material and thickness together, in the order in which they come. */
+export function bySheet(parts: readonly Part[]): CutPart[][] {
+  const sheets = new Map<string, CutPart[]>();
+  for (const part of parts.filter(isCut)) {
+    const key = `${part.material} ${part.thickness.toFixed(3)}`;
+    sheets.set(key, [...(sheets.get(key) ?? []), part]);
+  }
+  return [...sheets.values()];
+}
+
 /** All files of a design. The same design under the same name gives the same bytes. */
 export function cutFiles(designName: string, derived: Derived): CutFile[] {
   const { design, sections } = derived;
-  const plates = sections.flatMap(({ rotor, stator }) => [rotor, stator]);
+  const parts = partsOf(derived);
   const sets = [
-    ...plates.map((plate) => ({
-      base: plateFileName(designName, design, plate),
-      label: `${plate.role === 'rotor' ? 'Rotor' : 'Stator'} plate, section ${plate.section + 1}: ${plate.quantity} off, ${formatQuantity(plate.thickness, 'length')} sheet`,
-      placements: placeInRow([plate]),
+    ...parts.filter(isCut).map((part) => ({
+      base: partFileName(designName, part),
+      label: `${part.label}: ${part.quantity} off, ${formatQuantity(part.thickness, 'length')} sheet`,
+      placements: placeInRow([part]),
     })),
-    {
-      base: allPlatesFileName(designName, design, plates),
-      label: 'One of each plate, side by side',
-      placements: placeInRow(plates),
-    },
+    ...bySheet(parts)
+      .filter((together) => together.length > 1)
+      .map((together) => ({
+        base: sheetFileName(designName, together),
+        label: `One of each part of ${formatQuantity(together[0]!.thickness, 'length')} ${together[0]!.material}, side by side`,
+        placements: placeInRow(together),
+      })),
   ];
   const slug = slugOf(designName);
   return [
@@ -58,7 +73,7 @@ export function cutFiles(designName: string, derived: Derived): CutFile[] {
       label: 'Bill of materials: all parts with size, mass and sheet',
       kind: 'csv',
       mediaType: 'text/csv; charset=utf-8',
-      text: billTable(partsOf(derived)),
+      text: billTable(parts),
     },
     {
       name: `${slug}_design.json`,

@@ -1,23 +1,26 @@
-import type { Plate } from '../derived';
 import { contourBounds } from '../measure';
+import type { CutPart } from '../parts/part';
 
-/** A plate and how far it is moved in a file, mm. */
+/** What a cut file needs of a part. */
+export type FlatPart = Pick<CutPart, 'key' | 'outside' | 'holes'>;
+
+/** A part and how far it is moved in a file, mm. */
 export interface Placement {
-  readonly plate: Plate;
+  readonly part: FlatPart;
   readonly dx: number;
   readonly dy: number;
 }
 
-/** mm between plates laid out in one file. */
+/** mm between parts laid out in one file. */
 const BETWEEN = 10;
 
-/** Lays plates side by side, the first with the shaft at the origin. */
-export function placeInRow(plates: readonly Plate[]): Placement[] {
+/** Lays parts side by side, the first as it is drawn. */
+export function placeInRow(parts: readonly FlatPart[]): Placement[] {
   let edge: number | null = null;
-  return plates.map((plate) => {
-    const { minX, maxX } = contourBounds(plate.outside);
+  return parts.map((part) => {
+    const { minX, maxX } = contourBounds(part.outside);
     const dx: number = edge === null ? 0 : edge + BETWEEN - minX;
     edge = dx + maxX;
-    return { plate, dx, dy: 0 };
+    return { part, dx, dy: 0 };
   });
 }

@@ -2,7 +2,6 @@
 
 import makerjs from 'makerjs';
 import { walk, type Contour } from '../outline';
-import { partSlug } from './file-name';
 import type { Placement } from './placement';
 
 const DEGREES = 180 / Math.PI;
@@ -35,16 +34,16 @@ function modelOf(contour: Contour, layer: string): makerjs.IModel {
   return { layer, paths };
 }
 
-/** One SVG of the plates as placed; outer and inner cuts of each plate in groups of their own. */
+/** One SVG of the parts as placed; outer and inner cuts of each part in groups of their own. */
 export function svgOf(placements: readonly Placement[]): string {
   const models: Record<string, makerjs.IModel> = {};
-  for (const { plate, dx, dy } of placements) {
-    const part = partSlug(plate);
-    const holes = plate.holes.map((hole) => modelOf(hole, `${part}-inner-cut`));
-    models[part] = {
+  for (const { part, dx, dy } of placements) {
+    const { key } = part;
+    const holes = part.holes.map((hole) => modelOf(hole, `${key}-inner-cut`));
+    models[key] = {
       origin: [dx, dy],
       models: {
-        outer: modelOf(plate.outside, `${part}-outer-cut`),
+        outer: modelOf(part.outside, `${key}-outer-cut`),
         ...Object.fromEntries(holes.map((hole, i) => [`hole${i + 1}`, hole])),
       },
     };

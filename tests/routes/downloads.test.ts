@@ -1,4 +1,5 @@
 import { createHash } from 'node:crypto';
+import { strFromU8, unzipSync } from 'fflate';
 import { beforeAll, expect, test } from 'vitest';
 import { GET as DOWNLOAD } from '@/app/api/designs/[id]/files/[name]/route';
 import { GET as LIST } from '@/app/api/designs/[id]/files/route';
@@ -50,6 +51,29 @@ test('who has it already gets no second copy, and the record says so all the sam
   expect(response.status).toBe(304);
   expect((await response.arrayBuffer()).byteLength).toBe(0);
   expect(await cast.record(id)).toHaveLength(1);
+});
+
+test('the ZIP holds every other file, and a manifest with its hash, part and quantity', async () => {
+  const id = await cast.design();
+  cast.ask('machinist');
+  const files = await filesOf(id);
+  const zip = files.find(({ kind }) => kind === 'zip')!;
+  const response = await call(DOWNLOAD, { id, name: zip.name });
+  const entries = unzipSync(new Uint8Array(await response.arrayBuffer()));
+  const held = Object.fromEntries(
+    Object.entries(entries).map(([path, bytes]) => [path.split('/').at(-1)!, bytes]),
+  );
+  const manifest = JSON.parse(strFromU8(held['manifest.json']!)) as {
+    files: { file: string; sha256: string; part?: string; quantity?: number }[];
+  };
+  const others = files.filter(({ kind }) => kind !== 'zip');
+  expect(manifest.files.map(({ file }) => file)).toEqual(others.map(({ name }) => name));
+  for (const { file, sha256: listed } of manifest.files) {
+    const bytes = held[file]!;
+    expect(createHash('sha256').update(bytes).digest('hex')).toBe(listed);
+  }
+  const rotor = manifest.files.find(({ part }) => part === 's1-rotor')!;
+  expect(rotor.quantity).toBe(defaultDesign().sections[0]!.rotorPlates);
 });
 
 test('the same design gives the same bytes twice', async () => {

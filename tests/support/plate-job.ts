@@ -1,14 +1,13 @@
 /** The plates of a design, as often as it takes to have a given number of them. */
 import type { Derived } from '../../geometry';
 import type { Piece } from '../../geometry/nesting/layout';
-import { partSlug } from '../../geometry/files/file-name';
 
 export function plateJob({ sections }: Derived, atLeast: number): Piece[] {
   const plates = sections.flatMap(({ rotor, stator }) => [rotor, stator]);
   const one = plates.reduce((sum, { quantity }) => sum + quantity, 0);
   const copies = Math.ceil(atLeast / one);
   return plates.map((plate) => ({
-    key: partSlug(plate),
+    key: `s${plate.section + 1}-${plate.role}`,
     outside: plate.outside,
     quantity: plate.quantity * copies,
   }));

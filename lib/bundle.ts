@@ -1,0 +1,57 @@
+import 'server-only';
+import { strToU8, zipSync, type Zippable } from 'fflate';
+import type { Derived } from '@/geometry';
+import { slugOf } from '@/geometry/files';
+import { partsOf } from '@/geometry/parts/assembly';
+import type { HashedFile } from './design-files';
+
+/** ZIP has no time before 1980; every file gets this one, so that equal designs give equal bytes. */
+const NO_TIME = new Date(Date.UTC(1980, 0, 1, 12));
+
+/** What the files hold, for a person and for a program. */
+function manifestOf(name: string, derived: Derived, files: readonly HashedFile[]): string {
+  const parts = partsOf(derived);
+  return `${JSON.stringify(
+    {
+      design: name,
+      kernel: derived.kernel,
+      units: 'mm',
+      kerf: 'nominal: no kerf is added or taken off',
+      files: files.map((file) => {
+        const part = parts.find(
+          ({ key, kind }) => kind === 'cut' && file.name.includes(`_${key}_`),
+        );
+        return {
+          file: file.name,
+          what: file.label,
+          ...(part?.kind === 'cut' && {
+            part: part.key,
+            quantity: part.quantity,
+            material: part.material,
+            thickness: part.thickness,
+          }),
+          sha256: file.sha256,
+        };
+      }),
+    },
+    null,
+    2,
+  )}\n`;
+}
+
+/** All files of a design in one, with a manifest that names each by its hash. */
+export function bundleOf(
+  name: string,
+  derived: Derived,
+  files: readonly HashedFile[],
+): { readonly name: string; readonly body: Buffer } {
+  const folder = slugOf(name);
+  const entries: Zippable = {
+    [`${folder}/manifest.json`]: strToU8(manifestOf(name, derived, files)),
+  };
+  for (const { name: file, body } of files) entries[`${folder}/${file}`] = body;
+  return {
+    name: `${folder}_all-files.zip`,
+    body: Buffer.from(zipSync(entries, { mtime: NO_TIME, level: 6 })),
+  };
+}
