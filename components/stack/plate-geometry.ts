@@ -1,5 +1,5 @@
 import { BufferGeometry, Float32BufferAttribute, ShapeUtils, Vector2 } from 'three';
-import type { Contour, Plate } from '@/geometry';
+import type { Contour } from '@/geometry';
 import { flatten } from '@/geometry/flatten';
 
 /** Largest distance of a chord from its arc, as a share of the plate's reach: below a pixel. */
@@ -23,7 +23,11 @@ export function plateGeometry({
   outside,
   holes,
   thickness,
-}: Pick<Plate, 'outside' | 'holes' | 'thickness'>): BufferGeometry {
+}: {
+  readonly outside: Contour;
+  readonly holes: readonly Contour[];
+  readonly thickness: number;
+}): BufferGeometry {
   const sagitta = CHORD_SHARE * reach(outside);
   const rim = corners(outside, sagitta);
   // Holes run the other way round, so that their walls, too, face away from the metal.

@@ -77,6 +77,20 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
             >
               Further
             </Button>
+            {(['glb', 'stl'] as const).map((format) => (
+              <Button
+                key={format}
+                look="quiet"
+                className="grow px-1.5! text-small!"
+                aria-label={`Save the assembly as ${format === 'glb' ? 'glTF, in metres' : 'STL, in mm'}`}
+                onPress={async () => {
+                  const { saveAssembly } = await import('./assembly-file');
+                  await saveAssembly(derived, store.get(), format);
+                }}
+              >
+                {format === 'glb' ? 'glTF' : 'STL'}
+              </Button>
+            ))}
           </div>
         </>
       ) : (

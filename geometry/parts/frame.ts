@@ -21,7 +21,7 @@ const PILLAR_THREAD = 3;
 const PILLAR_CORE = 2.5;
 
 /** The stop: arm on the shaft's back end and two pins in the back plate, mm. */
-const PIN = 3;
+export const STOP_PIN = 3;
 const ARM_WIDTH = 6;
 const ARM_BEHIND = 0.5;
 const ARM_THICKNESS = 2;
@@ -83,9 +83,9 @@ export function frameLayout(derived: Derived): FrameLayout | null {
   const { design, stack, turn } = derived;
   if (design.frame === 'none') return null;
   const bearing = design.bearingDiameter ?? design.shaftDiameter + BEARING_OVER_SHAFT;
-  const pinRadius = bearing / 2 + PIN + RIM;
+  const pinRadius = bearing / 2 + STOP_PIN + RIM;
   // An arm's middle stays this far from a pin it touches.
-  const short = Math.asin((ARM_WIDTH + PIN) / 2 / pinRadius);
+  const short = Math.asin((ARM_WIDTH + STOP_PIN) / 2 / pinRadius);
   const pitch = (2 * Math.PI) / arrangementOf(design).lobes;
   const armAngle = turn.direction * ((pitch - design.rotorSector) / 2);
   const pinAt = (mesh: number, beyond: number): Point =>
@@ -94,7 +94,7 @@ export function frameLayout(derived: Derived): FrameLayout | null {
   // Where bushes and nuts are in the arm's way it stands behind them.
   const nearest = Math.min(...posts.map(({ x, y }) => Math.hypot(x, y)));
   const onPost = design.postSpacerRadius + design.postHoleDiameter;
-  const clear = pinRadius + PIN + onPost < nearest;
+  const clear = pinRadius + STOP_PIN + onPost < nearest;
   const behind = clear ? 0 : design.bushFlange + nutHeight(design.postHoleDiameter);
   return {
     bearing,
@@ -107,7 +107,8 @@ export function frameLayout(derived: Derived): FrameLayout | null {
     armAngle,
     pinRadius,
     corner:
-      RIM + Math.max(design.postSpacerRadius, design.pillarDiameter / 2, PIN / 2 + RIM / 2),
+      RIM +
+      Math.max(design.postSpacerRadius, design.pillarDiameter / 2, STOP_PIN / 2 + RIM / 2),
     posts,
   };
 }
@@ -147,8 +148,8 @@ function addEndPlates(collection: Collection, derived: Derived, layout: FrameLay
       ...common,
       key: 'frame-back',
       label: 'Back plate',
-      note: `Bearing hole to suit the bush, H7; two holes Ø ${PIN} for the pins of the stop, pressed in`,
-      holes: [...holes, ...pins.map((pin) => circle(PIN / 2, pin))],
+      note: `Bearing hole to suit the bush, H7; two holes Ø ${STOP_PIN} for the pins of the stop, pressed in`,
+      holes: [...holes, ...pins.map((pin) => circle(STOP_PIN / 2, pin))],
     },
     place(back - thickness),
   );
@@ -168,7 +169,7 @@ function addStop(collection: Collection, derived: Derived, layout: FrameLayout):
       note: 'Fixed on the shaft so that it meets the pins at both ends of the travel',
       outside: armOutline(
         Math.max(design.shaftDiameter / 2 + RIM, ARM_WIDTH / 2 + 1),
-        pinRadius + PIN / 2,
+        pinRadius + STOP_PIN / 2,
         ARM_WIDTH,
       ),
       holes: [circle(design.shaftDiameter / 2)],
@@ -182,7 +183,7 @@ function addStop(collection: Collection, derived: Derived, layout: FrameLayout):
       key: 'stop-pin',
       label: 'Pin of the stop',
       section: null,
-      size: `Ø ${PIN} × ${Math.ceil(length)}`,
+      size: `Ø ${STOP_PIN} × ${Math.ceil(length)}`,
       note: 'Parallel pin, pressed into the back plate',
     },
     pins.map(({ x, y }) => ({

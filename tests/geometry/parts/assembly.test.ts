@@ -9,8 +9,6 @@ import {
   createEdgeCache,
   defaultDesign,
   derive,
-  type Circle,
-  type Contour,
   type Derived,
   type Design,
 } from '../../../geometry';
@@ -18,6 +16,7 @@ import { flatten } from '../../../geometry/flatten';
 import { assemblyOf, type Assembly } from '../../../geometry/parts/assembly';
 import type { Placed } from '../../../geometry/parts/collection';
 import type { Part } from '../../../geometry/parts/part';
+import { planOf } from '../../../geometry/parts/solid';
 import { rotorTurn } from '../../../geometry/rotor-turn';
 
 const MICROMETRE = 1e-3;
@@ -55,33 +54,13 @@ const designs: [string, Design][] = [
 const partBy = ({ parts }: Assembly, key: string): Part =>
   parts.find((part) => part.key === key)!;
 
-/** What a part is in plan, about its own place: outer contour and holes. */
-function planOf(part: Part, design: Design): { outside: Contour; holes: readonly Contour[] } {
-  const disc = (diameter: number): Circle => ({
-    kind: 'circle',
-    x: 0,
-    y: 0,
-    radius: diameter / 2,
-  });
-  if (part.kind === 'cut') return part;
-  if (part.kind === 'turned') {
-    return { outside: disc(part.outerDiameter), holes: [disc(part.boreDiameter)] };
-  }
-  const diameters: Record<string, number> = {
-    shaft: design.shaftDiameter,
-    post: design.postHoleDiameter,
-    'stop-pin': 3,
-  };
-  return { outside: disc(diameters[part.key]!), holes: [] };
-}
-
 const UNIT = 1e-5;
 
 function pathsOf(part: Part, at: Placed, design: Design, turn: number): Paths64 {
   const angle = at.angle + (at.turns ? turn : 0);
   const cos = Math.cos(angle);
   const sin = Math.sin(angle);
-  const { outside, holes } = planOf(part, design);
+  const { outside, holes } = planOf(part, design)!;
   return [outside, ...holes].map((contour): Path64 => {
     const flat = flatten(contour, 1e-3);
     const path: Path64 = [];

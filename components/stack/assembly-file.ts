@@ -1,0 +1,41 @@
+import { GLTFExporter } from 'three/addons/exporters/GLTFExporter.js';
+import { STLExporter } from 'three/addons/exporters/STLExporter.js';
+import type { Derived } from '@/geometry';
+import { assemblyBodies } from './assembly-bodies';
+
+export type AssemblyFormat = 'glb' | 'stl';
+
+/** glTF is in metres by its standard; STL has no unit and is written in mm. */
+const METRES = 0.001;
+
+/** The assembly at a shaft angle (rad) as a file's bytes. */
+export async function assemblyFile(
+  derived: Derived,
+  angle: number,
+  format: AssemblyFormat,
+): Promise<ArrayBuffer> {
+  const bodies = assemblyBodies(derived, angle);
+  if (format === 'stl') {
+    const view = new STLExporter().parse(bodies, { binary: true });
+    return view.buffer.slice(view.byteOffset, view.byteOffset + view.byteLength) as ArrayBuffer;
+  }
+  bodies.scale.setScalar(METRES);
+  bodies.updateMatrixWorld(true);
+  return (await new GLTFExporter().parseAsync(bodies, { binary: true })) as ArrayBuffer;
+}
+
+/** Hands the file to the browser as a download. */
+export async function saveAssembly(
+  derived: Derived,
+  angle: number,
+  format: AssemblyFormat,
+): Promise<void> {
+  const bytes = await assemblyFile(derived, angle, format);
+  const type = format === 'glb' ? 'model/gltf-binary' : 'model/stl';
+  const address = URL.createObjectURL(new Blob([bytes], { type }));
+  const link = document.createElement('a');
+  link.href = address;
+  link.download = format === 'glb' ? 'assembly_metres.glb' : 'assembly_mm.stl';
+  link.click();
+  setTimeout(() => URL.revokeObjectURL(address), 60_000);
+}
