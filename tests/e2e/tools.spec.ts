@@ -1,7 +1,5 @@
 import AxeBuilder from '@axe-core/playwright';
 import { expect, test, type Page } from '@playwright/test';
-import { defaultDesign, derive } from '../../geometry';
-import { cutFiles } from '../../geometry/files';
 import { enter, field, makeDesign, rotorOutline } from '../support/design-screen';
 import { builder, signIn } from '../support/sign-ins';
 
@@ -99,14 +97,14 @@ test('a law of one’s own is typed as a table, and told what is wrong with it',
 });
 
 test('an old plate is read from its DXF and its law kept', async ({ page }) => {
-  const design = defaultDesign();
-  design.sections[0]!.law = 'wavelength';
-  const derivation = derive(design);
-  if (!derivation.ok) throw new Error('no plates');
-  const file = cutFiles('Old', derivation.derived).find(
-    ({ kind, label }) => kind === 'dxf' && label.startsWith('Rotor plate'),
-  )!;
-  await makeDesign(page, 'Copied');
+  await makeDesign(page, 'Copied', 'Laboratory section, straight-line wavelength');
+  const id = page.url().split('/').at(-1)!;
+  const listed = await page.request.get(`/api/designs/${id}/files`);
+  const { files } = (await listed.json()) as {
+    files: { name: string; kind: string; label: string }[];
+  };
+  const rotor = files.find(({ kind, label }) => kind === 'dxf' && label.startsWith('Rotor'))!;
+  const dxf = await page.request.get(`/api/designs/${id}/files/${rotor.name}`);
   const before = await rotorOutline(page);
   const tool = await openTool(page, 'Copy an old plate', 'Copy an old plate');
   await tool.getByLabel('Outline file').setInputFiles({
@@ -118,7 +116,7 @@ test('an old plate is read from its DXF and its law kept', async ({ page }) => {
   await tool.getByLabel('Outline file').setInputFiles({
     name: 'vane.dxf',
     mimeType: 'image/vnd.dxf',
-    buffer: Buffer.from('text' in file ? String(file.text) : ''),
+    buffer: await dxf.body(),
   });
   await expect(tool.getByRole('img', { name: 'Outline from vane.dxf' })).toBeVisible();
   await tool.getByRole('button', { name: 'Read its law' }).click();
