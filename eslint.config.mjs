@@ -86,8 +86,10 @@ const config = [
         {
           patterns: [
             {
-              regex: '^(?!\\.|@/geometry(/|$)|clipper2-ts$|makerjs$|dxf-writer(/|$))',
-              message: 'The kernel uses clipper2-ts, makerjs and dxf-writer alone.',
+              regex:
+                '^(?!\\.|@/geometry(/|$)|clipper2-ts$|makerjs$|dxf-writer(/|$)|dxf-parser$|mathjs/number$)',
+              message:
+                'The kernel uses clipper2-ts, makerjs, dxf-writer, dxf-parser and mathjs/number alone.',
             },
           ],
         },
