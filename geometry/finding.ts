@@ -8,6 +8,8 @@ export type FindingCode =
   | 'plate-counts'
   | 'turn'
   | 'own-law'
+  | 'table-span'
+  | 'table-rough'
   | 'law-held'
   | 'law-rises'
   | 'open-capacitance'

@@ -8,6 +8,7 @@ import { formatQuantity } from './quantity';
 import { paschenVoltage, practiceVoltage, RADIO_FREQUENCY_SHARE } from './electrical/breakdown';
 import { clearanceVoltage } from './electrical/clearance';
 import { airPath } from './electrical/gap';
+import { tableFindings } from './table-findings';
 
 /** Largest law error as a fraction of the range: warned of above the first, failed above the second. */
 const LAW_WARN = 0.001;
@@ -168,6 +169,7 @@ function sectionFindings(design: Design, result: SectionResult, index: number): 
   const clearance = Math.min(...result.posts.map((post) => post.clearance));
   return [
     ...lawFindings(result, index),
+    ...tableFindings(design, section, index, result.law),
     openFinding(result, index),
     ...[voltageFinding(design, section, index)].filter((finding) => finding !== null),
     atLeast('blade-narrow', index, 'fail', {

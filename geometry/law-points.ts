@@ -40,8 +40,13 @@ export const rowFaults: Readonly<Record<RowFault['fault'], string>> = {
  * 17(2), 1980, with the harmonic mean of F. N. Fritsch and J. Butland, SIAM J. Sci. Stat. Comput.
  * 5(2), 1984.
  * @param x rising @param y rising or level
+ * @param leastAtEnds least slope at either end, as a share of the slope between the points there
  */
-export function monotoneSlopes(x: readonly number[], y: readonly number[]): number[] {
+export function monotoneSlopes(
+  x: readonly number[],
+  y: readonly number[],
+  leastAtEnds = 0,
+): number[] {
   const n = x.length;
   const h = Array.from({ length: n - 1 }, (_, i) => x[i + 1]! - x[i]!);
   const secant = h.map((step, i) => (y[i + 1]! - y[i]!) / step);
@@ -54,7 +59,7 @@ export function monotoneSlopes(x: readonly number[], y: readonly number[]): numb
   };
   const end = (h0: number, h1: number, s0: number, s1: number): number => {
     const slope = ((2 * h0 + h1) * s0 - h0 * s1) / (h0 + h1);
-    if (slope * s0 <= 0) return 0;
+    if (slope * Math.sign(s0) <= leastAtEnds * Math.abs(s0)) return leastAtEnds * s0;
     return s0 * s1 < 0 && Math.abs(slope) > 3 * Math.abs(s0) ? 3 * s0 : slope;
   };
   if (n === 2) return [secant[0]!, secant[0]!];
@@ -71,8 +76,12 @@ export interface Cubic {
   readonly slope: (at: number) => number;
 }
 
-export function monotoneCubic(x: readonly number[], y: readonly number[]): Cubic {
-  const slopes = monotoneSlopes(x, y);
+export function monotoneCubic(
+  x: readonly number[],
+  y: readonly number[],
+  leastAtEnds = 0,
+): Cubic {
+  const slopes = monotoneSlopes(x, y, leastAtEnds);
   const piece = (at: number) => {
     let i = 0;
     while (i < x.length - 2 && at > x[i + 1]!) i += 1;

@@ -11,6 +11,12 @@ import type { Target } from './target';
 /** Looks over the law for where it doesn't rise. */
 const LOOKS = 400;
 
+/**
+ * Of the rise between the first two rows and the last two: a law that is level at an end asks for
+ * no plate at all there.
+ */
+const LEAST_AT_ENDS = 0.25;
+
 /** Of the swept fraction; a formula is differenced over this. */
 const STEP = 1e-4;
 
@@ -21,6 +27,7 @@ function lawOfPoints(section: Section): Law {
   const cubic = monotoneCubic(
     lawPoints.map(([angle]) => (angle - first) / span),
     totalsOf(section),
+    LEAST_AT_ENDS,
   );
   return { total: cubic.value, slope: cubic.slope };
 }

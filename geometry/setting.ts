@@ -2,6 +2,7 @@
 
 import { arrangementOf, gapsOf, type Arrangement } from './arrangement';
 import { longestRadius, type Blade } from './blade';
+import { coarsePolygon } from './coarse-polygon';
 import { EPSILON_0 } from './constants';
 import type { PlateRole, Turn } from './derived';
 import type { Design, Section } from './design';
@@ -29,6 +30,9 @@ import {
 
 /** mm. Sagitta of the polygons on which the plan view is solved. */
 const PLAN_SAGITTA = 0.1;
+
+/** mm. Corners nearer than this to a straight line between others are left out there. */
+const PLAN_STRAIGHT = 0.02;
 
 export interface Setting {
   readonly design: Design;
@@ -107,10 +111,10 @@ export function outlinesOf(setting: Setting, blade: Blade): Outlines | Finding {
 function planShape(setting: Setting, blade: Blade, outlines: Outlines): PlanShape {
   const { design, arrangement, gaps, endPlates } = setting;
   const { rotor, stator, ears } = outlines;
-  const first = flatten(stator.outside, PLAN_SAGITTA);
+  const first = coarsePolygon(flatten(stator.outside, PLAN_SAGITTA), PLAN_STRAIGHT);
   return {
     plates: platesOf(setting, blade),
-    rotor: flatten(rotor.outside, PLAN_SAGITTA),
+    rotor: coarsePolygon(flatten(rotor.outside, PLAN_SAGITTA), PLAN_STRAIGHT),
     stators: arrangement.stators.map((standsAt) => turned(first, standsAt)),
     statorAngles: arrangement.stators,
     lobeAngles: Array.from(

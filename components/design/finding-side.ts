@@ -4,11 +4,16 @@ import type { Finding, FindingCode } from '@/geometry';
  * On which side of its limit each check holds. It is not to be told from value and limit: a law
  * that rises to its very end has both alike, and so has a blade on its least radius.
  */
-const sides: Record<Exclude<FindingCode, 'range-infeasible'>, 'at most' | 'at least'> = {
+const sides: Record<
+  Exclude<FindingCode, 'range-infeasible'>,
+  'at most' | 'at least' | 'law over'
+> = {
   'outline-infeasible': 'at least',
   'plate-counts': 'at most',
   turn: 'at least',
   'own-law': 'at least',
+  'table-span': 'law over',
+  'table-rough': 'at most',
   'law-held': 'at most',
   'law-rises': 'at least',
   'open-capacitance': 'at most',
