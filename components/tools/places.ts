@@ -4,6 +4,7 @@ export const openers = {
   'plates-that-fit': 'Which plates and gap fit',
   tolerance: 'What tolerances do to it',
   'voltage-and-loss': 'Voltage, loss and drift',
+  dial: 'A dial to print',
   sheets: 'Lay out on sheets',
 } as const;
 
@@ -14,7 +15,7 @@ export const toolsAt = {
   law: ['old-plate'],
   stack: ['plates-that-fit'],
   checks: ['voltage-and-loss'],
-  held: ['tolerance'],
+  held: ['tolerance', 'dial'],
   files: ['sheets'],
 } as const satisfies Record<string, readonly ToolName[]>;
 

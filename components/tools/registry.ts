@@ -26,6 +26,10 @@ export const tools: Readonly<Record<ToolName, Tool>> = {
     title: 'Voltage, loss and drift',
     Component: dynamic(() => import('./voltage-and-loss/voltage-and-loss')),
   },
+  dial: {
+    title: 'Dial',
+    Component: dynamic(() => import('./dial/dial-tool')),
+  },
   sheets: {
     title: 'Lay out on sheets',
     Component: dynamic(() => import('./sheets/sheets')),

@@ -9,7 +9,7 @@ import { pointsOf, type OldStack } from '@/geometry/old-plate/plate-law';
 import { JobProgress } from '../job/job-progress';
 import { useJob } from '../job/use-job';
 import type { ToolProps } from '../tool-props';
-import { NumberField } from './number-field';
+import { NumberField } from '../number-field';
 import type { PlateAnswer, PlateQuestion } from './old-plate.worker';
 import { OutlineView } from './outline-view';
 import { PlateResult } from './plate-result';
