@@ -30,7 +30,7 @@ interface Trail {
 /** Leaves the field one is in, so that it shows what comes, and goes back to it afterwards. */
 function withFieldLeft(change: () => void): void {
   const field = document.activeElement;
-  if (!(field instanceof HTMLInputElement)) {
+  if (!(field instanceof HTMLInputElement || field instanceof HTMLTextAreaElement)) {
     change();
     return;
   }
@@ -38,6 +38,10 @@ function withFieldLeft(change: () => void): void {
   change();
   requestAnimationFrame(() => field.isConnected && field.focus());
 }
+
+/** What lies over the design has its own keys: a question, and text typed in a tool. */
+const ELSEWHERE =
+  ':is([role=dialog]:not(aside),[role=alertdialog]) *,[role=dialog] :is(textarea,input:not([type=radio],[type=checkbox]))';
 
 /** Undo and redo over the whole design, whoever changed it: fields, tools, a restored draft. */
 export function useHistory(form: UseFormReturn<Draft>): History {
@@ -67,8 +71,11 @@ export function useHistory(form: UseFormReturn<Draft>): History {
         const now = performance.now();
         const together = name !== undefined && name === own.field && now - own.time < TOGETHER;
         own.drafts.length = own.at + 1;
-        if (together && own.at > 0) own.drafts[own.at] = structuredClone(values);
-        else own.drafts.push(structuredClone(values));
+        // Typed and taken back again: no step.
+        if (together && own.at > 0) own.drafts.pop();
+        if (!together || own.at === 0 || !sameDraft(values, own.drafts.at(-1)!)) {
+          own.drafts.push(structuredClone(values));
+        }
         if (own.drafts.length > STEPS) own.drafts.shift();
         own.at = own.drafts.length - 1;
         own.field = name;
@@ -104,7 +111,9 @@ export function useHistory(form: UseFormReturn<Draft>): History {
       if (!(event.ctrlKey || event.metaKey) || event.altKey) return;
       const key = event.key.toLowerCase();
       const forward = key === 'y' || (key === 'z' && event.shiftKey);
-      if (!forward && key !== 'z') return;
+      if ((!forward && key !== 'z') || (event.target as Element).matches(ELSEWHERE)) {
+        return;
+      }
       event.preventDefault();
       go(forward ? 1 : -1);
     };
