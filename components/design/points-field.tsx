@@ -6,7 +6,11 @@ import { MOST_POINTS, type LawPoint, type PointsParameter } from '@/geometry';
 import { messageFor, type Draft, type DraftValue } from './draft';
 import { fieldId } from './focus-field';
 import { useHelp } from './parameter-help';
+import { areOtherValue, asOtherValue } from './points-value';
 import { pointUnits, readPoints, writePoints, type PointValue } from './points-text';
+
+const linkClass =
+  'min-h-8 self-start text-left text-small font-medium text-action underline underline-offset-2 max-bench:min-h-11';
 
 /** Larger files are no table of this kind. */
 const LARGEST_FILE = 100_000;
@@ -27,28 +31,33 @@ export default function PointsField({
   const help = useHelp(path);
   const { control } = useFormContext<Draft>();
   const { field } = useController({ control, name: `design.${path}` });
-  const targetKind = useWatch({
+  const [targetKind, inductance] = useWatch({
     control,
-    name: `design.${path.replace(/[^.]+$/, 'targetKind')}` as 'design.travel',
-  }) as unknown;
+    name: ['targetKind', 'inductance'].map(
+      (key) => `design.${path.replace(/[^.]+$/, key)}` as 'design.travel',
+    ),
+  }) as [unknown, unknown];
   const column: PointValue = targetKind === 'band' ? 'frequency' : 'capacitance';
   const value = field.value as DraftValue;
   const [editing, setEditing] = useState<string | null>(null);
   const [trouble, setTrouble] = useState<string | null>(null);
   const picker = useRef<HTMLInputElement>(null);
-  const text = editing ?? textOf(value, column);
+  // After the choice between capacitance and band was changed.
+  const other = areOtherValue(value, column);
+  const text = editing ?? (other ? '' : textOf(value, column));
   const read = readPoints(text, column);
   const message =
-    trouble ?? (read.ok ? messageFor(parameter, path, read.points) : read.message);
+    trouble ??
+    (other ? `These rows are no ${column} yet` : null) ??
+    (read.ok ? messageFor(parameter, path, read.points) : read.message);
 
-  function change(typed: string) {
-    setEditing(typed);
+  function take(typed: string) {
     setTrouble(null);
     const now = readPoints(typed, column);
     field.onChange(now.ok ? now.points : typed);
   }
 
-  async function take(file: File | undefined) {
+  async function open(file: File | undefined) {
     if (!file) return;
     if (file.size > LARGEST_FILE) {
       setTrouble(
@@ -56,7 +65,7 @@ export default function PointsField({
       );
       return;
     }
-    change(await file.text());
+    take(await file.text());
   }
 
   return (
@@ -74,7 +83,10 @@ export default function PointsField({
         placeholder={
           column === 'frequency' ? '0\t1600\n90\t900\n180\t530' : '0\t40\n90\t210\n180\t400'
         }
-        onChange={(event) => change(event.target.value)}
+        onChange={(event) => {
+          setEditing(event.target.value);
+          take(event.target.value);
+        }}
         onBlur={() => {
           setEditing(null);
           field.onBlur();
@@ -91,6 +103,16 @@ export default function PointsField({
       >
         {message ?? (read.ok ? `${read.points.length} rows, joined without overshoot` : '')}
       </p>
+      {other && typeof inductance === 'number' && (
+        <button
+          type="button"
+          onClick={() => field.onChange(asOtherValue(other, column, inductance))}
+          className={linkClass}
+        >
+          Turn the rows into {column === 'frequency' ? 'frequencies' : 'capacitances'} with this
+          coil
+        </button>
+      )}
       <input
         ref={picker}
         type="file"
@@ -99,15 +121,11 @@ export default function PointsField({
         tabIndex={-1}
         aria-hidden="true"
         onChange={(event) => {
-          void take(event.target.files?.[0]);
+          void open(event.target.files?.[0]);
           event.target.value = '';
         }}
       />
-      <button
-        type="button"
-        onClick={() => picker.current?.click()}
-        className="min-h-8 self-start text-small font-medium text-action underline underline-offset-2 max-bench:min-h-11"
-      >
+      <button type="button" onClick={() => picker.current?.click()} className={linkClass}>
         Read it from a CSV file
       </button>
     </div>

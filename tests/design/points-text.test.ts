@@ -1,5 +1,6 @@
 /** Tables of a law as people have them: typed, out of a spreadsheet, from a file. */
 import { describe, expect, test } from 'vitest';
+import { areOtherValue, asOtherValue } from '../../components/design/points-value';
 import { readPoints, writePoints } from '../../components/design/points-text';
 
 const DEGREE = Math.PI / 180;
@@ -67,4 +68,21 @@ test('what is written is read back', () => {
   const written = read.ok ? writePoints(read.points, 'capacitance') : '';
   expect(written).toBe('0\t45.25\n33.5\t100.125\n180\t390');
   expect(rowsOf(written, 'capacitance')).toEqual(rowsOf(text, 'capacitance'));
+});
+
+test('rows of capacitances become those of the frequencies that they tune, and back', () => {
+  // 200 µH with 100 pF and 400 pF: 1125.395 and 562.698 kHz; computed apart, 1/(2π√(LC)).
+  const rows: [number, number][] = [
+    [0, 100e-12],
+    [1, 400e-12],
+  ];
+  expect(areOtherValue(rows, 'capacitance')).toBeNull();
+  expect(areOtherValue([], 'frequency')).toBeNull();
+  expect(areOtherValue('0 100', 'frequency')).toBeNull();
+  expect(areOtherValue(rows, 'frequency')).toBe(rows);
+  const tuned = asOtherValue(rows, 'frequency', 200e-6);
+  expect(tuned[0]![1] / 1e3).toBeCloseTo(1125.395, 3);
+  expect(tuned[1]![1] / 1e3).toBeCloseTo(562.698, 3);
+  expect(areOtherValue(tuned, 'capacitance')).toBe(tuned);
+  expect(asOtherValue(tuned, 'capacitance', 200e-6)[1]![1]).toBeCloseTo(400e-12, 20);
 });

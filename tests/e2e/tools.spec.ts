@@ -34,6 +34,20 @@ test('changes are undone and redone, by key and by button', async ({ page }) => 
   await expect(field(page, 'Air gap')).toHaveValue('0.6');
 });
 
+test('text typed in a tool has its own undo', async ({ page }) => {
+  await makeDesign(page, 'Left alone');
+  await enter(page, 'Air gap', '0.6');
+  const tool = await openTool(page, 'What tolerances do to it', 'Tolerance');
+  const limit = tool.getByLabel(/Largest error allowed/);
+  await limit.pressSequentially('7');
+  await page.keyboard.press('Control+z');
+  await expect(field(page, 'Air gap')).toHaveValue('0.6');
+  await page.keyboard.press('Escape');
+  await expect(tool).toBeHidden();
+  await page.keyboard.press('Control+z');
+  await expect(field(page, 'Air gap')).toHaveValue('0.5');
+});
+
 test('plates that fit are listed, one is taken and put back', async ({ page }) => {
   await makeDesign(page, 'Fitting');
   const before = await rotorOutline(page);
@@ -91,9 +105,31 @@ test('a law of one’s own is typed as a table, and told what is wrong with it',
   await expect.poll(() => rotorOutline(page)).not.toBe(before);
   await table.fill('0 1600\n60 many');
   await expect(page.getByText(/Row 2, “60 many”/)).toBeVisible();
+  await page.keyboard.press('Control+z');
+  await expect(table).toHaveValue(/^0\t1600\n60\t1200/);
   await page.getByText('formula', { exact: true }).click();
   await page.getByRole('textbox', { name: 'Formula of the law' }).fill('fetch(x)');
   await expect(page.getByText(/fetch is not a function here/)).toBeVisible();
+});
+
+test('a law of one’s own is read from a CSV file and turned into the other kind', async ({
+  page,
+}) => {
+  await makeDesign(page, 'Own file');
+  await page.getByText('own table', { exact: true }).click();
+  await page.getByText('capacitance', { exact: true }).last().click();
+  const table = page.getByRole('textbox', { name: /Table of the law: degrees, pF/ });
+  await page.locator('input[type=file]').setInputFiles({
+    name: 'law.csv',
+    mimeType: 'text/csv',
+    buffer: Buffer.from('"Angle [°]";"C [nF]"\r\n0;0,045\r\n90;0,18\r\n180;0,39\r\n'),
+  });
+  await expect(table).toHaveValue('0\t45\n90\t180\n180\t390');
+  await expect(page.getByText('Angle that the rows of the table cover')).toBeVisible();
+  await page.getByText('band and coil', { exact: true }).click();
+  await expect(page.getByText('These rows are no frequency yet')).toBeVisible();
+  await page.getByRole('button', { name: /Turn the rows into frequencies/ }).click();
+  await expect(page.getByText('3 rows, joined without overshoot')).toBeVisible();
 });
 
 test('an old plate is read from its DXF and its law kept', async ({ page }) => {
