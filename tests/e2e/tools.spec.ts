@@ -103,6 +103,8 @@ test('a law of one’s own is typed as a table, and told what is wrong with it',
   await table.fill('angle;frequency\n0;1600\n60;1200\n120;850\n180;540');
   await expect(page.getByText('4 rows, joined without overshoot')).toBeVisible();
   await expect.poll(() => rotorOutline(page)).not.toBe(before);
+  // Something else between, or both are one step.
+  await enter(page, 'Air gap', '0.6');
   await table.fill('0 1600\n60 many');
   await expect(page.getByText(/Row 2, “60 many”/)).toBeVisible();
   await page.keyboard.press('Control+z');
