@@ -28,12 +28,15 @@ function FindingBody({ finding, sections }: { finding: Finding; sections: number
           {severityWords[severity]}
         </span>
       </span>
-      <span className="text-right whitespace-nowrap">
-        {written(finding, value)}
-        <span className="block text-small text-ink-2">
-          {findingSide(finding)} {written(finding, limit)}
+      {/* A law that can't be read has no number. */}
+      {finding.code !== 'own-law' && (
+        <span className="text-right whitespace-nowrap">
+          {written(finding, value)}
+          <span className="block text-small text-ink-2">
+            {findingSide(finding)} {written(finding, limit)}
+          </span>
         </span>
-      </span>
+      )}
       {change !== '' && (
         <span className="col-span-2 col-start-2 text-small text-ink">{change}</span>
       )}
