@@ -25,6 +25,7 @@ const config = {
     '@mikro-orm/migrations',
     '@mikro-orm/postgresql',
     '@node-rs/argon2',
+    'pdfkit',
     'pg',
     'pino',
   ],

@@ -16,7 +16,8 @@ export async function recordDownload(id: string, fileName: string): Promise<Hash
   const stored = await findDesign(viewer, id);
   if (!stored) throw notFound();
   const derived = derivePlates(stored.design);
-  const file = hashedFiles(stored.name, derived).find(({ name }) => name === fileName);
+  const files = await hashedFiles(stored, viewer.workshopName, derived);
+  const file = files.find(({ name }) => name === fileName);
   if (!file) {
     throw new RequestError(
       'not-found',

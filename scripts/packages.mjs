@@ -17,6 +17,7 @@ const known = {
     present: () => existsSync('/usr/lib/python3/dist-packages/ezdxf'),
     apt: 'python3-ezdxf',
   },
+  poppler: { present: () => existsSync('/usr/bin/pdftoppm'), apt: 'poppler-utils' },
 };
 
 /** @throws Stop when this Node is too old. */

@@ -44,7 +44,7 @@ await runUntilStopped(async () => {
   makeData();
   const started = Date.now();
   await ensureSystemPackages(['postgresql', 'chromium']);
-  await wantSystemPackages(['ezdxf']);
+  await wantSystemPackages(['ezdxf', 'poppler']);
   await ensureNodeModules();
 
   await verify();

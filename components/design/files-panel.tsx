@@ -7,7 +7,14 @@ import type { DesignFiles, DesignRecord } from '@/lib/schemas/api';
 
 type File = DesignFiles['files'][number];
 
-const kinds = { dxf: 'DXF', svg: 'SVG', csv: 'CSV', json: 'JSON', zip: 'ZIP' } as const;
+const kinds = {
+  dxf: 'DXF',
+  svg: 'SVG',
+  csv: 'CSV',
+  json: 'JSON',
+  pdf: 'PDF',
+  zip: 'ZIP',
+} as const;
 
 function size(bytes: number): string {
   return bytes < 1000 ? `${bytes} B` : `${Number((bytes / 1000).toPrecision(2))} kB`;

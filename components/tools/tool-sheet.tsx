@@ -21,7 +21,7 @@ export default function ToolSheet({ tool, ...props }: ToolProps & { tool: ToolNa
   }, [tool]);
 
   return (
-    <aside
+    <div
       role="dialog"
       aria-label={title}
       onKeyDown={(event) => {
@@ -46,6 +46,6 @@ export default function ToolSheet({ tool, ...props }: ToolProps & { tool: ToolNa
       <div className="relative flex min-h-0 grow flex-col gap-4 overflow-y-auto px-5 py-4">
         <Component {...props} />
       </div>
-    </aside>
+    </div>
   );
 }

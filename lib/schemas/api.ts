@@ -71,7 +71,7 @@ export const designFileSchema = z.object({
   name: z.string(),
   /** What it holds, for a person: `Rotor plate, section 1`. */
   label: z.string(),
-  kind: z.enum(['dxf', 'svg', 'csv', 'json', 'zip']),
+  kind: z.enum(['dxf', 'svg', 'csv', 'json', 'pdf', 'zip']),
   bytes: z.number().int(),
   sha256: z.string(),
 });

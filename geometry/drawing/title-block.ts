@@ -1,0 +1,91 @@
+/**
+ * The title block, 180 wide at the lower right. ISO 7200: mandatory are legal owner, identification
+ * number, date of issue, sheet number, title, approval person, creator and document type
+ * (published). Projection symbol: ISO 5456-2 (from memory).
+ */
+
+import { box, line, ring, text, type Mark } from '../sketch/sketch';
+import { BORDER, NARROW, WIDE, type Paper } from './paper';
+
+export interface Sheet {
+  readonly owner: string;
+  readonly number: string;
+  /** As written: 2026-12-01. */
+  readonly issued: string;
+  readonly sheet: string;
+  readonly title: string;
+  readonly approved: string;
+  readonly creator: string;
+  readonly documentType: string;
+  readonly scale: string;
+  readonly material: string;
+  readonly finish: string;
+  readonly tolerances: string;
+  readonly revision: string;
+}
+
+export const BLOCK = { w: 180, h: 42 } as const;
+
+export function blockCorner({ width, height }: Paper): { x: number; y: number } {
+  return { x: width - BORDER - BLOCK.w, y: height - BORDER - BLOCK.h };
+}
+
+/** First angle: the frustum's small end to the left, its circles to the right. */
+function firstAngle(x: number, y: number): Mark[] {
+  return [
+    line(x, y - 1.5, x, y + 1.5, WIDE),
+    line(x + 7, y - 3, x + 7, y + 3, WIDE),
+    line(x, y - 1.5, x + 7, y - 3, WIDE),
+    line(x, y + 1.5, x + 7, y + 3, WIDE),
+    ring(x + 14, y, 3, WIDE),
+    ring(x + 14, y, 1.5, WIDE),
+    line(x - 2, y, x + 9, y, NARROW, [3, 1, 0.5, 1]),
+    line(x + 10, y, x + 18, y, NARROW, [3, 1, 0.5, 1]),
+    line(x + 14, y - 4, x + 14, y + 4, NARROW, [3, 1, 0.5, 1]),
+  ];
+}
+
+/** Cut to what a cell of a width takes at a height of lettering. */
+export function fitted(written: string, width: number, height: number): string {
+  const most = Math.max(3, Math.floor(width / (height * 0.82)));
+  return written.length <= most ? written : `${written.slice(0, most - 1)}…`;
+}
+
+export function titleBlock(paper: Paper, sheet: Sheet): Mark[] {
+  const { x, y } = blockCorner(paper);
+  const marks: Mark[] = [box(x, y, BLOCK.w, BLOCK.h, WIDE)];
+  const cell = (
+    cx: number,
+    cy: number,
+    w: number,
+    h: number,
+    label: string,
+    value: string,
+    height = 2.5,
+  ): void => {
+    marks.push(box(x + cx, y + cy, w, h, NARROW));
+    marks.push(text(x + cx + 1, y + cy + 2.6, label, 1.5));
+    marks.push(
+      text(x + cx + 1.5, y + cy + h - 1.8, fitted(value, w - 3, height), height, {
+        bold: height > 2.5,
+      }),
+    );
+  };
+  cell(0, 0, 60, 10.5, 'Material', sheet.material);
+  cell(60, 0, 45, 10.5, 'Finish', sheet.finish);
+  cell(105, 0, 45, 10.5, 'Tolerances', sheet.tolerances);
+  cell(150, 0, 30, 10.5, 'Scale', sheet.scale);
+  cell(0, 10.5, 45, 10.5, 'Legal owner', sheet.owner);
+  cell(45, 10.5, 30, 10.5, 'Created by', sheet.creator);
+  cell(75, 10.5, 30, 10.5, 'Approved by', sheet.approved);
+  cell(105, 10.5, 45, 10.5, 'Document type', sheet.documentType);
+  cell(150, 10.5, 30, 10.5, 'Date of issue', sheet.issued);
+  cell(0, 21, 105, 21, 'Title', sheet.title, 3.5);
+  cell(105, 21, 45, 10.5, 'Identification number', sheet.number);
+  cell(150, 21, 15, 10.5, 'Rev.', sheet.revision);
+  cell(165, 21, 15, 10.5, 'Sheet', sheet.sheet);
+  marks.push(box(x + 105, y + 31.5, 75, 10.5, NARROW));
+  marks.push(...firstAngle(x + 110, y + 36.75));
+  marks.push(text(x + 135, y + 37.6, 'mm, first angle', 2.5));
+  return marks;
+}
