@@ -34,7 +34,7 @@ const sides: Record<
 
 /** How the limit of a finding is to be read. */
 export function findingSide({ code, value, limit, parameters }: Finding): string {
-  if (code === 'frame' && parameters[0] !== 'frameClearance') return 'at most';
+  if (code === 'frame' && !parameters[0]?.startsWith('frame')) return 'at most';
   if (code !== 'range-infeasible') return sides[code];
   // Only listed when it fails: what is too large must come below, what is too small above.
   return value > limit ? 'below' : 'above';

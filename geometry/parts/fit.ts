@@ -7,6 +7,7 @@ import { contourReach } from '../measure';
 import { formatQuantity } from '../quantity';
 import { assemblyOf } from './assembly';
 import { frameLayout, postPlaces } from './frame';
+import type { CutPart } from './part';
 import { slottedRotor } from './plates';
 
 const mm = (value: number): string => formatQuantity(value, 'length', 4);
@@ -35,6 +36,16 @@ function slotFindings({ design, sections, turn }: Checked): Finding[] {
     };
     return [finding];
   });
+}
+
+/** Least metal between round holes, mm. */
+function smallestWeb(holes: CutPart['holes']): number {
+  const round = holes.filter((hole) => hole.kind === 'circle');
+  return Math.min(
+    ...round.flatMap((a, i) =>
+      round.slice(i + 1).map((b) => Math.hypot(a.x - b.x, a.y - b.y) - a.radius - b.radius),
+    ),
+  );
 }
 
 /** @param derived without its findings yet */
@@ -75,7 +86,24 @@ export function fitFindings(derived: Derived): Finding[] {
       parameters: ['postCircleRadius'],
     });
   }
-  const plate = assemblyOf(derived).parts.find(({ key }) => key === 'frame-front');
+  const { parts } = assemblyOf(derived);
+  const back = parts.find(({ key }) => key === 'frame-back');
+  const web = back?.kind === 'cut' ? smallestWeb(back.holes) : Infinity;
+  findings.push({
+    code: 'frame',
+    severity: web >= design.frameThickness ? 'ok' : 'warn',
+    section: null,
+    label: 'Web between the holes of the back plate',
+    value: web,
+    limit: design.frameThickness,
+    quantity: 'length',
+    change:
+      web >= design.frameThickness
+        ? ''
+        : 'One sheet thickness is safe: take a smaller bearing, posts further out, or no frame.',
+    parameters: ['frameThickness', 'bearingDiameter', 'postCircleRadius'],
+  });
+  const plate = parts.find(({ key }) => key === 'frame-front');
   const reach = plate?.kind === 'cut' ? contourReach(plate.outside) : 0;
   const holds = reach <= design.largestRadius;
   findings.push({

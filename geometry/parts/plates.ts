@@ -34,6 +34,9 @@ export function slottedRotor(
   if (design.endSlots === 0 || outside.kind !== 'path') return null;
   // The segments hang together where the stator's cut-out leaves the plate uncovered.
   const bottom = design.cutoutRadius + Math.max(thickness, design.endSlotWidth / 2);
+  // Between two slots at least as much metal is left as a slot takes.
+  const pitch = design.rotorSector / (design.endSlots + 1);
+  if (bottom * pitch < 2 * design.endSlotWidth) return { outside, slots: 0 };
   let slotted: Path = outside;
   let slots = 0;
   for (const angle of slotAngles(design, direction)) {
