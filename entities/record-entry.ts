@@ -19,6 +19,9 @@ export const RecordEntry = defineEntity({
       'design-status-set',
       'design-deleted',
       'file-downloaded',
+      'item-created',
+      'item-saved',
+      'item-deleted',
     ]),
     /** Id of the design or workshop it was done to. */
     subject: p.uuid(),

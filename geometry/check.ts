@@ -111,7 +111,8 @@ export function checkParameter(parameter: Parameter, path: string, value: unknow
   );
 }
 
-function checkTable(
+/** All values of a table, later ones at their default where they are missing. */
+export function checkTable(
   table: Record<string, Parameter>,
   input: Record<string, unknown>,
   prefix: string,

@@ -8,6 +8,7 @@ import { join } from 'node:path';
 import { beforeAll, describe, expect, test } from 'vitest';
 import { defaultDesign, derive } from '@/geometry';
 import { cutFiles } from '@/geometry/files';
+import { machineParameters } from '@/geometry/cutting/shop-parameters';
 import { RecordEntry } from '@/entities';
 import { entityManager } from '@/lib/db';
 import { call } from '../support/call';
@@ -17,6 +18,8 @@ const root = join(import.meta.dirname, '..', '..');
 const methods = ['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE', 'OPTIONS'];
 
 interface Rule {
+  /** What the route is called with beside the design's id and the file's name. */
+  readonly params?: (cast: Cast) => Promise<Record<string, string>>;
   readonly status: Readonly<Record<Caller, number>>;
   readonly body?: unknown;
 }
@@ -54,6 +57,35 @@ const routes: Record<string, Record<string, Rule>> = {
   'app/api/designs/[id]/files/route.ts': { GET: { status: reads } },
   'app/api/designs/[id]/files/[name]/route.ts': { GET: { status: reads } },
 };
+
+const machine = {
+  name: 'Bench laser',
+  values: Object.fromEntries(
+    Object.entries(machineParameters).map(([key, parameter]) => [key, parameter.default]),
+  ),
+};
+const ofMachines = () => Promise.resolve({ kind: 'machines' });
+const ofOne = async (people: Cast) => {
+  people.ask('builder');
+  const { POST } = await import('@/app/api/shop/[kind]/route');
+  const made = await call(POST, { kind: 'machines' }, { method: 'POST', body: machine });
+  return { kind: 'machines', id: ((await made.json()) as { id: string }).id };
+};
+
+Object.assign(routes, {
+  'app/api/shop/[kind]/route.ts': {
+    GET: { params: ofMachines, status: answers(200, 200, 200, 200, 401, 401) },
+    POST: {
+      params: ofMachines,
+      status: answers(201, 201, 403, 201, 401, 401),
+      body: machine,
+    },
+  },
+  'app/api/shop/[kind]/[id]/route.ts': {
+    PUT: { params: ofOne, status: writes, body: { ...machine, version: 1 } },
+    DELETE: { params: ofOne, status: answers(204, 204, 403, 404, 401, 401) },
+  },
+} satisfies typeof routes);
 
 const actions: Record<string, readonly string[]> = {
   // Open to everybody: it makes a workshop of one's own. tests/routes/sign-up.test.ts
@@ -107,15 +139,15 @@ for (const [file, rules] of Object.entries(routes)) {
         test(`answers ${status} to ${caller}`, async () => {
           const id = await cast.design();
           const before = await storedDesign(id);
+          const params = { id, name: fileName, ...(await rule.params?.(cast)) };
           const em = await entityManager();
           const rows = await em.count(RecordEntry);
           cast.ask(caller);
           const handler = (await load(file))[method]!;
-          const response = await call(
-            handler,
-            { id, name: fileName },
-            { method, ...(rule.body !== undefined && { body: rule.body }) },
-          );
+          const response = await call(handler, params, {
+            method,
+            ...(rule.body !== undefined && { body: rule.body }),
+          });
           const answer = await response.text();
           expect({ status: response.status, answer: status < 400 ? '' : answer }).toEqual({
             status,

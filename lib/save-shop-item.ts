@@ -1,0 +1,45 @@
+import 'server-only';
+import { User, type ShopItem } from '@/entities';
+import { mayEdit, requireMember } from './access';
+import { entityManager } from './db';
+import { badInput } from './errors';
+import { addRecord } from './record';
+import {
+  saveItemSchemas,
+  type ShopItem as ShopItemRecord,
+  type ShopKind,
+} from './schemas/shop';
+import { lockShopItem, refuseStaleItem, toShopItem } from './shop-items';
+
+/** Changes a machine or sheet, over the version it began from. @throws RequestError conflict */
+export async function saveShopItem(
+  kind: ShopKind,
+  id: string,
+  input: unknown,
+): Promise<ShopItemRecord> {
+  const viewer = await requireMember(mayEdit);
+  const em = await entityManager();
+  return em.transactional(async (tx) => {
+    const stored = await lockShopItem(tx, viewer, kind, id);
+    const parsed = saveItemSchemas[kind].safeParse(input);
+    if (!parsed.success) throw badInput(parsed.error);
+    const { name, version, values } = parsed.data;
+    refuseStaleItem(stored, version);
+    tx.assign(stored, {
+      name,
+      values: values as unknown as ShopItem['values'],
+      version: stored.version + 1,
+      updatedBy: await tx.findOneOrFail(User, viewer.userId),
+      updatedAt: new Date(),
+    });
+    addRecord(tx, {
+      workshopId: viewer.workshopId,
+      who: viewer.userId,
+      what: 'item-saved',
+      subject: id,
+      detail: { kind, name, values, version: stored.version },
+    });
+    await tx.flush();
+    return toShopItem(stored);
+  });
+}
