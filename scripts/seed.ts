@@ -8,8 +8,14 @@ import { randomBytes, randomUUID } from 'node:crypto';
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { MikroORM, type EntityManager } from '@mikro-orm/postgresql';
-import { Design, Membership, RecordEntry, User, Workshop } from '../entities';
-import { checkDesign } from '../geometry';
+import { Design, Membership, RecordEntry, ShopItem, User, Workshop } from '../entities';
+import { checkDesign, type Parameter } from '../geometry';
+import {
+  checkMachine,
+  checkSheet,
+  machineParameters,
+  sheetParameters,
+} from '../geometry/cutting/shop-parameters';
 import { assessDesign } from '../lib/assess-design';
 import { hashPassword } from '../lib/password';
 import type { Role } from '../lib/schemas/api';
@@ -70,6 +76,55 @@ function addDesigns(em: EntityManager, workshop: Workshop, builder: User): void 
   }
 }
 
+/** Two machines and three sheets, so that a layout can be tried at once. */
+function addShop(em: EntityManager, workshop: Workshop, builder: User): void {
+  const start = (table: Record<string, Parameter>): Record<string, unknown> =>
+    Object.fromEntries(Object.entries(table).map(([key, { default: value }]) => [key, value]));
+  const add = (kind: ShopItem['kind'], name: string, values: ShopItem['values']): void => {
+    const now = new Date();
+    const made = { id: randomUUID(), createdAt: now, updatedAt: now, updatedBy: builder };
+    em.create(ShopItem, { ...made, workshop, kind, name, values });
+  };
+  const machine = start(machineParameters);
+  add(
+    'machine',
+    'Bench fibre laser',
+    checkMachine({ ...machine, reflective: 'yes', bedWidth: 600, bedHeight: 400 }),
+  );
+  add(
+    'machine',
+    'Etching bath',
+    checkMachine({
+      ...machine,
+      process: 'etching',
+      kerf: 0,
+      smallestHole: 1.2,
+      reflective: 'yes',
+      leadIn: 0,
+      bridges: 2,
+      bridgeWidth: 0.4,
+      feed: 1,
+      pierceTime: 0,
+      bedWidth: 300,
+      bedHeight: 300,
+    }),
+  );
+  const sheet = start(sheetParameters);
+  add('sheet', 'Brass, 0.8', checkSheet({ ...sheet, count: 12 }));
+  add('sheet', 'Brass, 0.5', checkSheet({ ...sheet, thickness: 0.5, count: 6 }));
+  add(
+    'sheet',
+    'Aluminium, 2',
+    checkSheet({
+      ...sheet,
+      material: 'aluminium',
+      thickness: 2,
+      thicknessTolerance: 0.07,
+      count: 4,
+    }),
+  );
+}
+
 async function seed(em: EntityManager, signInsFile: string): Promise<boolean> {
   await em.execute('select pg_advisory_xact_lock(?)', [SEED_LOCK]);
   if ((await em.count(Workshop)) > 0) return false;
@@ -91,7 +146,9 @@ async function seed(em: EntityManager, signInsFile: string): Promise<boolean> {
           detail: { name: workshopName },
         });
       }
-      if (role === 'builder') addDesigns(em, workshop, user);
+      if (role !== 'builder') continue;
+      addDesigns(em, workshop, user);
+      addShop(em, workshop, user);
     }
   }
   // Before the commit: passwords that were lost would leave a demo nobody can enter.

@@ -2,6 +2,11 @@ import Link from 'next/link';
 import { Mark } from '@/components/ui/mark';
 import { SignOutButton } from './sign-out-button';
 
+const places = [
+  ['/designs', 'Designs'],
+  ['/workshop', 'Machines and sheet'],
+] as const;
+
 /** The bar over every screen of the workshop. */
 export function TopBar({ workshop, person }: { workshop: string; person: string }) {
   return (
@@ -19,13 +24,16 @@ export function TopBar({ workshop, person }: { workshop: string; person: string 
         <Mark />
         Vaneloft
       </Link>
-      <nav aria-label="Main" className="self-stretch">
-        <Link
-          href="/designs"
-          className="flex h-full min-h-11 items-center border-b-2 border-action font-medium text-ink no-underline hover:border-action-dark"
-        >
-          Designs
-        </Link>
+      <nav aria-label="Main" className="flex gap-5 self-stretch">
+        {places.map(([href, name]) => (
+          <Link
+            key={href}
+            href={href}
+            className="flex min-h-11 items-center border-b-2 border-transparent font-medium text-ink no-underline hover:border-action"
+          >
+            {name}
+          </Link>
+        ))}
       </nav>
       <p className="ml-auto flex items-center gap-3 text-ink-2">
         <span className="max-wide:hidden">

@@ -1,0 +1,115 @@
+'use client';
+
+import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { useState } from 'react';
+import { saveShopItem, shopKey } from '@/components/api/shop';
+import { Button } from '@/components/ui/button';
+import { Dialog } from '@/components/ui/dialog';
+import { Notice } from '@/components/ui/notice';
+import { SelectField } from '@/components/ui/select-field';
+import { TextField } from '@/components/ui/text-field';
+import { loadReader } from '@/components/units/load-reader';
+import type { Parameter } from '@/geometry';
+import type { ShopItem, ShopKind } from '@/lib/schemas/shop';
+import { shopKinds, writtenValue } from './kinds';
+
+/** A value as typed, read as what its parameter asks; the text itself where that can't be. */
+async function readValue(parameter: Parameter, text: string): Promise<string | number> {
+  if (!('quantity' in parameter)) return text;
+  const read = (await loadReader())(
+    text,
+    parameter.quantity,
+    parameter.quantity === 'length' ? 'mm' : '',
+  );
+  return read ?? text;
+}
+
+/** Adds or changes a machine or a sheet. */
+export default function ItemDialog({
+  kind,
+  item,
+  onClose,
+}: {
+  kind: ShopKind;
+  item: ShopItem | null;
+  onClose: () => void;
+}) {
+  const { one, parameters } = shopKinds[kind];
+  const client = useQueryClient();
+  const [name, setName] = useState(item?.name ?? '');
+  const [texts, setTexts] = useState<Record<string, string>>(() =>
+    Object.fromEntries(
+      Object.entries(parameters).map(([key, parameter]) => {
+        const value = item?.values[key] ?? (parameter.default as string | number);
+        return [
+          key,
+          parameter.kind === 'choice' ? String(value) : writtenValue(parameter, value),
+        ];
+      }),
+    ),
+  );
+  const saving = useMutation({
+    mutationFn: async () => {
+      const values = Object.fromEntries(
+        await Promise.all(
+          Object.entries(parameters).map(async ([key, parameter]) => [
+            key,
+            await readValue(parameter, texts[key]!),
+          ]),
+        ),
+      ) as Record<string, string | number>;
+      return saveShopItem(kind, item?.id ?? null, {
+        name,
+        values,
+        ...(item && { version: item.version }),
+      });
+    },
+    onSuccess: async () => {
+      await client.invalidateQueries({ queryKey: shopKey(kind) });
+      onClose();
+    },
+  });
+  const set = (key: string) => (text: string) => setTexts((now) => ({ ...now, [key]: text }));
+
+  return (
+    <Dialog title={item ? `Change ${item.name}` : `Add ${one}`} isOpen onClose={onClose} wide>
+      <form
+        onSubmit={(event) => {
+          event.preventDefault();
+          saving.mutate();
+        }}
+        className="flex flex-col gap-4"
+      >
+        <TextField label="Name" value={name} onChange={setName} maxLength={80} autoFocus />
+        <div className="grid gap-3 wide:grid-cols-2">
+          {Object.entries(parameters).map(([key, parameter]) =>
+            parameter.kind === 'choice' ? (
+              <SelectField
+                key={key}
+                label={parameter.label}
+                value={texts[key]!}
+                options={parameter.options}
+                onChange={set(key)}
+              />
+            ) : (
+              <TextField
+                key={key}
+                label={parameter.label}
+                value={texts[key]!}
+                onChange={set(key)}
+                autoComplete="off"
+              />
+            ),
+          )}
+        </div>
+        {saving.isError && <Notice look="bad">{saving.error.message}</Notice>}
+        <div className="flex flex-wrap justify-end gap-2">
+          <Button onPress={onClose}>Cancel</Button>
+          <Button type="submit" look="action" isDisabled={saving.isPending}>
+            {saving.isPending ? 'Saving' : 'Save'}
+          </Button>
+        </div>
+      </form>
+    </Dialog>
+  );
+}
