@@ -98,7 +98,7 @@ function lawFindings(result: SectionResult, index: number): Finding[] {
   return [held, atEnds, rises];
 }
 
-function openFinding(result: SectionResult, index: number): Finding {
+function openFinding({ law }: Section, result: SectionResult, index: number): Finding {
   const { platesAtLaw, frame, ownMin } = result;
   const open = platesAtLaw + frame;
   const holds = open <= ownMin;
@@ -116,14 +116,16 @@ function openFinding(result: SectionResult, index: number): Finding {
       : `Too much by ${over} before any trimmer: ask for a larger open capacitance or less stray, take a larger gap with fewer plates, or a larger cut-out radius.`,
     parameters:
       result.inductance === null
-        ? ['minCapacitance', 'airGap', 'rotorPlates']
+        ? [law === 'points' ? 'lawPoints' : 'minCapacitance', 'airGap', 'rotorPlates']
         : ['stray', 'inductance', 'airGap', 'rotorPlates'],
   };
 }
 
 /** Frequency at which the gap is held to stand: the working one, the band's, or mains. */
-function heldFrequency({ workingFrequency, targetKind, bandHigh }: Section): number {
-  return workingFrequency ?? (targetKind === 'band' ? bandHigh : 50);
+function heldFrequency(section: Section): number {
+  const { workingFrequency, targetKind, law, lawPoints, bandHigh } = section;
+  if (workingFrequency !== null || targetKind !== 'band') return workingFrequency ?? 50;
+  return law === 'points' ? lawPoints[0]![1] : bandHigh;
 }
 
 /** Hz. Above it the gap is reckoned to stand radio frequency. */
@@ -170,7 +172,7 @@ function sectionFindings(design: Design, result: SectionResult, index: number): 
   return [
     ...lawFindings(result, index),
     ...tableFindings(design, section, index, result.law),
-    openFinding(result, index),
+    openFinding(section, result, index),
     ...[voltageFinding(design, section, index)].filter((finding) => finding !== null),
     atLeast('blade-narrow', index, 'fail', {
       label: 'Narrowest blade, over the hub',

@@ -18,7 +18,12 @@ function infeasible(
   return { code: 'range-infeasible', severity: 'fail', section: index, ...rest };
 }
 
-function strayFinding(index: number, stray: number, totalMin: number): Finding {
+function strayFinding(
+  { law }: Section,
+  index: number,
+  stray: number,
+  totalMin: number,
+): Finding {
   return infeasible(index, {
     label: 'Circuit stray below the total at the high end',
     value: stray,
@@ -26,7 +31,7 @@ function strayFinding(index: number, stray: number, totalMin: number): Finding {
     quantity: 'capacitance',
     change:
       'The stray alone tunes below the high end: lower it, take a smaller coil or a lower high end.',
-    parameters: ['stray', 'inductance', 'bandHigh'],
+    parameters: ['stray', 'inductance', law === 'points' ? 'lawPoints' : 'bandHigh'],
   });
 }
 
@@ -38,7 +43,7 @@ function targetOfTable(section: Section, index: number): Target | Finding {
   if (section.targetKind === 'terminals') return { ...ends, stray: 0, inductance: null };
   const { stray, inductance } = section;
   if (stray < ends.totalMin) return { ...ends, stray, inductance };
-  return strayFinding(index, stray, ends.totalMin);
+  return strayFinding(section, index, stray, ends.totalMin);
 }
 
 /** The total range of a section, or the finding that says why there is none. */
@@ -69,6 +74,6 @@ export function targetOf(section: Section, index: number): Target | Finding {
   }
   const totalMin = resonantCapacitance(bandHigh, inductance);
   const totalMax = resonantCapacitance(bandLow, inductance);
-  if (stray >= totalMin) return strayFinding(index, stray, totalMin);
+  if (stray >= totalMin) return strayFinding(section, index, stray, totalMin);
   return { totalMin, totalMax, stray, inductance };
 }
