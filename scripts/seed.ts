@@ -76,7 +76,7 @@ function addDesigns(em: EntityManager, workshop: Workshop, builder: User): void 
   }
 }
 
-/** Two machines and three sheets, so that a layout can be tried at once. */
+/** Three machines and three sheets, so that a layout can be tried at once. */
 function addShop(em: EntityManager, workshop: Workshop, builder: User): void {
   const start = (table: Record<string, Parameter>): Record<string, unknown> =>
     Object.fromEntries(Object.entries(table).map(([key, { default: value }]) => [key, value]));
@@ -90,6 +90,11 @@ function addShop(em: EntityManager, workshop: Workshop, builder: User): void {
     'machine',
     'Bench fibre laser',
     checkMachine({ ...machine, reflective: 'yes', bedWidth: 600, bedHeight: 400 }),
+  );
+  add(
+    'machine',
+    'Old CO₂ laser',
+    checkMachine({ ...machine, kerf: 0.25, feed: 30, pierceTime: 0.8 }),
   );
   add(
     'machine',

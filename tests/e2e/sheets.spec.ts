@@ -15,12 +15,13 @@ test('the plates are laid out, follow what is asked, and can be stopped', async 
   await expect(sheet.locator('g > path')).toHaveCount(29);
   await expect(tool.getByText('0.8 mm brass')).toBeVisible();
 
-  await tool.getByLabel('Machine').selectOption('CO₂ laser');
+  await tool.getByLabel('Machine').selectOption('Old CO₂ laser');
   await expect(tool.getByText(/Bright brass under a laser/).first()).toBeVisible({
     timeout: 30_000,
   });
 
   // Two small sheets don’t hold it.
+  await tool.getByLabel('Sheet taken').selectOption('of the size below');
   await tool.getByLabel('Sheet width').fill('110 mm');
   await tool.getByLabel('Sheet height').fill('4 in');
   await tool.getByLabel('Sheets of each kind').fill('2');

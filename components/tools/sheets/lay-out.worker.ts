@@ -11,15 +11,31 @@ export interface Question {
   readonly derived: Derived;
   readonly copies: number;
   readonly machine: Machine;
+  /** Taken where the workshop has no such sheet in its store. */
   readonly sheet: Pick<Sheet, 'width' | 'height' | 'count'>;
+  readonly stock: readonly Sheet[];
   readonly settings: LayoutSettings;
   readonly kerf: KerfState;
 }
 
-function answer({ derived, sheet, ...job }: Question): JobMessage<LaidOut> {
+/** mm. Sheet of this much other thickness is the same. */
+const SAME_THICKNESS = 0.005;
+
+function answer({ derived, sheet, stock, ...job }: Question): JobMessage<LaidOut> {
   const parts = partsOf(derived).filter((part) => part.kind === 'cut');
+  const sheets = sheetsFor(parts, sheet).flatMap((asked) => {
+    const own = stock.filter(
+      ({ material, thickness, count }) =>
+        count > 0 &&
+        material === asked.material &&
+        Math.abs(thickness - asked.thickness) < SAME_THICKNESS,
+    );
+    return own.length > 0
+      ? own.map((found) => ({ ...found, thickness: asked.thickness }))
+      : [asked];
+  });
   let told = 0;
-  const laid = layOut({ ...job, parts, sheets: sheetsFor(parts, sheet) }, (done, of) => {
+  const laid = layOut({ ...job, parts, sheets }, (done, of) => {
     const percent = Math.floor((100 * done) / of);
     if (percent > told) {
       told = percent;

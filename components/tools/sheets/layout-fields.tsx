@@ -2,12 +2,14 @@
 
 import { SelectField } from '@/components/ui/select-field';
 import type { KerfState } from '@/geometry/cutting/cut-path';
-import { startingMachines } from '@/geometry/cutting/starting-values';
+import type { Machine } from '@/geometry/cutting/machine';
 import { MeasureField } from './measure-field';
 
 /** What is asked of a layout. mm */
 export interface Asked {
   readonly machine: string;
+  /** Sheet of the workshop's store where it has some, or of the size given. */
+  readonly from: 'store' | 'size';
   readonly width: number;
   readonly height: number;
   readonly count: number;
@@ -17,8 +19,6 @@ export interface Asked {
   readonly rotations: number;
   readonly kerf: KerfState;
 }
-
-const machines = startingMachines.map(({ name }) => ({ value: name, label: name }));
 
 const rotations = [
   { value: '1', label: 'as drawn, for a grain' },
@@ -35,9 +35,11 @@ const kerfs = [
 
 export function LayoutFields({
   asked,
+  machines,
   onChange,
 }: {
   asked: Asked;
+  machines: readonly Machine[];
   onChange: (change: Partial<Asked>) => void;
 }) {
   const length = (
@@ -69,8 +71,12 @@ export function LayoutFields({
     <div className="grid grid-cols-2 gap-x-4 gap-y-3">
       <SelectField
         label="Machine"
-        value={asked.machine}
-        options={machines}
+        value={
+          machines.some(({ name }) => name === asked.machine)
+            ? asked.machine
+            : machines[0]!.name
+        }
+        options={machines.map(({ name }) => ({ value: name, label: name }))}
         onChange={(machine) => onChange({ machine })}
       />
       <SelectField
@@ -78,6 +84,15 @@ export function LayoutFields({
         value={asked.kerf}
         options={kerfs}
         onChange={(kerf) => onChange({ kerf })}
+      />
+      <SelectField
+        label="Sheet taken"
+        value={asked.from}
+        options={[
+          { value: 'store', label: 'from the workshop’s store' },
+          { value: 'size', label: 'of the size below' },
+        ]}
+        onChange={(from) => onChange({ from })}
       />
       {length('Sheet width', 'width', 20, 4000)}
       {length('Sheet height', 'height', 20, 4000)}

@@ -3,7 +3,6 @@
 import { useEffect, useMemo, useState } from 'react';
 import { PanelSection } from '@/components/design/panel-section';
 import { Button } from '@/components/ui/button';
-import { startingMachines } from '@/geometry/cutting/starting-values';
 import type { LaidOut } from '@/geometry/nesting/lay-out';
 import { JobProgress } from '../job/job-progress';
 import { useJob } from '../job/use-job';
@@ -12,12 +11,14 @@ import { GroupResult } from './group-result';
 import { LayoutFields, type Asked } from './layout-fields';
 import { MachineFindings } from './machine-findings';
 import type { Question } from './lay-out.worker';
+import { useShop } from './use-shop';
 
 /** ms without a change before it begins: nobody wants a layout of half a number. */
 const SETTLED = 400;
 
 const first: Asked = {
-  machine: startingMachines[0]!.name,
+  machine: '',
+  from: 'store',
   width: 500,
   height: 300,
   count: 20,
@@ -31,8 +32,9 @@ const first: Asked = {
 /** All cut parts of the design on sheets: how they lie, and what they take. */
 export default function Sheets({ derived }: ToolProps) {
   const [asked, setAsked] = useState(first);
+  const { machines, stock } = useShop();
   const question = useMemo((): Question | null => {
-    const machine = startingMachines.find(({ name }) => name === asked.machine)!;
+    const machine = machines.find(({ name }) => name === asked.machine) ?? machines[0]!;
     const { width, height, count, copies, gap, margin, rotations, kerf } = asked;
     return (
       derived && {
@@ -41,10 +43,11 @@ export default function Sheets({ derived }: ToolProps) {
         copies,
         kerf,
         sheet: { width, height, count },
+        stock: asked.from === 'store' ? stock : [],
         settings: { gap, margin, rotations },
       }
     );
-  }, [asked, derived]);
+  }, [asked, derived, machines, stock]);
   const job = useJob<Question, LaidOut>(
     () => new Worker(new URL('./lay-out.worker.ts', import.meta.url), { type: 'module' }),
   );
@@ -60,6 +63,7 @@ export default function Sheets({ derived }: ToolProps) {
     <>
       <LayoutFields
         asked={asked}
+        machines={machines}
         onChange={(change) => setAsked((now) => ({ ...now, ...change }))}
       />
       {!derived && <p>There are no plates yet: the checks say what to change.</p>}
@@ -84,9 +88,10 @@ export default function Sheets({ derived }: ToolProps) {
             <GroupResult key={`${group.material} ${group.thickness}`} group={group} />
           ))}
           <p className="text-small text-ink-2">
-            Time counts cutting and piercing; moves from cut to cut, loading and speeding up are
-            left out. No part is put into a hole of another. Distances are measured between the
-            true outlines at nominal size.
+            From the store, sheet is taken at its own size and count; the size above is for what
+            is not there. Time counts cutting and piercing; moves from cut to cut, loading and
+            speeding up are left out. No part is put into a hole of another. Distances are
+            measured between the true outlines at nominal size.
           </p>
         </>
       )}
