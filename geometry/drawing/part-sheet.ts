@@ -9,8 +9,8 @@ import { mirrorPath } from '../mirror';
 import { BLADE_STEPS } from '../solve-blade';
 import { line, outline, text, type Mark, type Sketch } from '../sketch/sketch';
 import { across, leader, mm, upright } from './dimension';
-import { A4, drawingArea, frameMarks, NARROW, scaleFor, WIDE, writtenScale } from './paper';
-import { BLOCK, titleBlock, type Sheet } from './title-block';
+import { A4, frameMarks, NARROW, scaleFor, WIDE, writtenScale } from './paper';
+import { titleBlock, type Sheet } from './title-block';
 
 /** Room for the plan view, mm on the paper. */
 const VIEW = { x: 42, y: 24, w: 125, h: 112 } as const;
@@ -148,6 +148,3 @@ export function wrapped(note: string, width: number, height: number): string[] {
   }
   return [...rows, row];
 }
-
-/** Lower edge of what a part sheet may fill above its title block, mm. */
-export const NOTES_END = drawingArea(A4).y + drawingArea(A4).h - BLOCK.h;
