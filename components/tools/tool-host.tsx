@@ -48,26 +48,29 @@ export default function ToolHost({
     setApplied(words);
   }
 
+  const notice = applied && (
+    <Notice>
+      <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-2">
+        <p>{applied}.</p>
+        <span className="flex gap-2">
+          <Button
+            onPress={() => {
+              history.undo();
+              setApplied(null);
+            }}
+          >
+            Undo
+          </Button>
+          <Button onPress={() => setApplied(null)}>Keep it</Button>
+        </span>
+      </div>
+    </Notice>
+  );
+
+  // Where the tool covers the screen's edge, what it did is said in it.
   return (
     <>
-      {applied && (
-        <Notice>
-          <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-2">
-            <p>{applied}.</p>
-            <span className="flex gap-2">
-              <Button
-                onPress={() => {
-                  history.undo();
-                  setApplied(null);
-                }}
-              >
-                Undo
-              </Button>
-              <Button onPress={() => setApplied(null)}>Keep it</Button>
-            </span>
-          </div>
-        </Notice>
-      )}
+      {!tool && notice}
       {tool && design && (
         <ToolSheet
           tool={tool}
@@ -76,6 +79,7 @@ export default function ToolHost({
           derived={derived}
           apply={apply}
           close={onClose}
+          notice={notice}
         />
       )}
     </>

@@ -1,13 +1,21 @@
 'use client';
 
-import { useEffect, useRef } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 import { Button } from '@/components/ui/button';
 import type { ToolName } from './places';
 import { tools } from './registry';
 import type { ToolProps } from './tool-props';
 
 /** A tool beside the design, which stays in sight and can be worked on meanwhile. */
-export default function ToolSheet({ tool, ...props }: ToolProps & { tool: ToolName }) {
+export default function ToolSheet({
+  tool,
+  notice,
+  ...props
+}: ToolProps & {
+  tool: ToolName;
+  /** What the tool did last, with a way back. */
+  notice: ReactNode;
+}) {
   const heading = useRef<HTMLHeadingElement>(null);
   const { title, Component } = tools[tool];
   const { close } = props;
@@ -44,6 +52,7 @@ export default function ToolSheet({ tool, ...props }: ToolProps & { tool: ToolNa
         </Button>
       </header>
       <div className="relative flex min-h-0 grow flex-col gap-4 overflow-y-auto px-5 py-4">
+        {notice}
         <Component {...props} />
       </div>
     </div>
