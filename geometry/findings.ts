@@ -5,9 +5,8 @@ import type { SectionResult, Stack } from './derived';
 import { smallerRadius } from './feasibility';
 import type { Finding, Severity } from './finding';
 import { formatQuantity } from './quantity';
-import { paschenVoltage, practiceVoltage, RADIO_FREQUENCY_SHARE } from './electrical/breakdown';
-import { clearanceVoltage } from './electrical/clearance';
 import { airPath } from './electrical/gap';
+import { gapLimits, gapThatHolds, worksAtRadio } from './electrical/limits';
 import { tableFindings } from './table-findings';
 
 /** Largest law error as a fraction of the range: warned of above the first, failed above the second. */
@@ -121,45 +120,40 @@ function openFinding({ law }: Section, result: SectionResult, index: number): Fi
   };
 }
 
-/** Frequency at which the gap is held to stand: the working one, the band's, or mains. */
-function heldFrequency(section: Section): number {
-  const { workingFrequency, targetKind, law, lawPoints, bandHigh } = section;
-  if (workingFrequency !== null || targetKind !== 'band') return workingFrequency ?? 50;
-  return law === 'points' ? lawPoints[0]![1] : bandHigh;
-}
-
-/** Hz. Above it the gap is reckoned to stand radio frequency. */
-const RADIO = 1e4;
-
+/**
+ * The least of three limits counts: common practice, the clearance table for square cut edges, and
+ * what smooth plates break down at. Over the last it fails, over another it is warned of.
+ */
 function voltageFinding(design: Design, section: Section, index: number): Finding | null {
   const { length, share } = airPath(design, section);
   if (length === 0) return null;
+  const { altitude } = design;
+  const volts = (value: number): string => formatQuantity(value, 'voltage', 3);
   const atGap = section.workingVoltage * share;
-  const radio = heldFrequency(section) > RADIO ? RADIO_FREQUENCY_SHARE : 1;
-  // Thinner air holds less; the practical figure goes with it.
-  const thin = Math.min(1, paschenVoltage(length, design.altitude) / paschenVoltage(length));
-  const practice = practiceVoltage(length) * thin;
-  const breakdown = paschenVoltage(length, design.altitude) * radio;
-  const severity: Severity =
-    atGap <= Math.min(practice, breakdown) ? 'ok' : atGap < breakdown ? 'warn' : 'fail';
-  const squared = clearanceVoltage(length, 'inhomogeneous', design.altitude);
-  const change =
-    severity === 'ok'
+  const radio = worksAtRadio(section);
+  const { practice, squared, breakdown, least } = gapLimits(length, altitude, radio);
+  const severity: Severity = atGap <= least ? 'ok' : atGap < breakdown ? 'warn' : 'fail';
+  const enough = severity === 'ok' ? null : gapThatHolds(design, section);
+  const where = altitude > 0 ? ` at ${formatQuantity(altitude, 'altitude', 4)}` : '';
+  const change = [
+    `This gap holds ${volts(practice)} by common practice with rounded edges (1 kV peak per millimetre at sea level)`,
+    squared === null
       ? ''
-      : `Common practice is 1 kV peak per millimetre with rounded edges: take a gap of at least ${mm((section.airGap * atGap) / practice)}. ` +
-        (squared === null
-          ? ''
-          : `With square cut edges the clearance table gives ${formatQuantity(squared, 'voltage', 3)}. `) +
-        `Even smooth parallel plates break down near ${formatQuantity(breakdown, 'voltage', 3)}${radio < 1 ? ' at radio frequency' : ''}.`;
+      : `, ${volts(squared)} by the clearance table of IEC 60664-1 for square cut edges (inhomogeneous field)`,
+    `${where}; smooth parallel plates break down near ${volts(breakdown)}${radio ? ' at radio frequency' : ''}. `,
+    enough === null
+      ? 'No gap in these tables holds it: take a lower voltage.'
+      : `Take a gap of about ${formatQuantity(enough, 'length', 3)} or more, or a lower voltage.`,
+  ].join('');
   return {
     code: 'gap-voltage',
     severity,
     section: index,
     label: share === 1 ? 'Working voltage at the gap' : 'Voltage across the air of a gap',
     value: atGap,
-    limit: Math.min(practice, breakdown),
+    limit: least,
     quantity: 'voltage',
-    change,
+    change: severity === 'ok' ? '' : change,
     parameters: ['airGap', 'workingVoltage'],
   };
 }

@@ -2,6 +2,11 @@ import type { Design } from './design';
 
 export type Material = Design['material'];
 
+/** Metal of the spacers on shaft and posts. */
+export function spacerMaterialOf({ spacerMaterial, material }: Design): Material {
+  return spacerMaterial === 'as-plates' ? material : spacerMaterial;
+}
+
 interface SheetMaterial {
   /** As it stands in a file name. */
   readonly slug: string;
@@ -20,6 +25,16 @@ export const resistivities: Record<Metal, number> = {
   aluminium: 4.9e-5,
   steel: 1.4e-4,
 };
+
+/**
+ * Relative permeability where it isn't 1. Mild steel in small fields: order of magnitude, from
+ * memory; batches differ several times.
+ */
+const permeabilities: Partial<Record<Metal, number>> = { steel: 200 };
+
+export function relativePermeability(metal: Metal): number {
+  return permeabilities[metal] ?? 1;
+}
 
 /** Linear expansion, 1/K; middle of the handbook's range, from memory. */
 export const expansions: Record<Material, number> = {

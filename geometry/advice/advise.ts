@@ -34,7 +34,7 @@ export interface Candidate {
   readonly depth: number;
   /** Narrowest blade over the hub, mm. */
   readonly narrowestBlade: number;
-  /** 1 kV peak for each millimetre of air, between the terminals, V. */
+  /** 1 kV peak for each millimetre of air, less in thin air, between the terminals, V. */
   readonly voltage: number;
   /** Estimate of all plates of the section, g. */
   readonly mass: number;
@@ -86,7 +86,12 @@ export function variantsOf(design: Design, index: number): Section[] {
     const plain = { ...section, airGap };
     if (section.dielectric === 'film' && section.filmThickness >= airGap) return [];
     const { length, share } = airPath(design, plain);
-    if (length > 0 && practiceVoltage(length) < section.workingVoltage * share) return [];
+    if (
+      length > 0 &&
+      practiceVoltage(length, design.altitude) < section.workingVoltage * share
+    ) {
+      return [];
+    }
     const pitch = section.rotorThickness + section.statorThickness + 2 * airGap;
     const most = Math.min(60, Math.floor((room - section.statorThickness) / pitch));
     return countsUpTo(section.dielectric === 'disc' ? Math.min(1, most) : most).map(
@@ -183,7 +188,7 @@ export function candidateOf(
     outerRadius,
     depth: depthOf(variant),
     narrowestBlade: shortestRadius(blade) - design.hubRadius,
-    voltage: share === 0 ? 0 : practiceVoltage(length) / share,
+    voltage: share === 0 ? 0 : practiceVoltage(length, design.altitude) / share,
     mass:
       density *
       packs *

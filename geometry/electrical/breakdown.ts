@@ -1,28 +1,38 @@
 import { pressureAt } from './atmosphere';
 
+/** Paschen's constants for air: published, A in 1/(kPa·cm), B in V/(kPa·cm); γ = 0.01. */
+const A = 112.5;
+const B = 2737.5;
+const YIELD = Math.log(1 + 1 / 0.01);
+
+/** kPa·cm. Where the curve has its least voltage; smaller gaps are held to that voltage too. */
+const LEAST = (Math.E * YIELD) / A;
+
 /**
  * Breakdown of air between parallel plates by Paschen's law,
- * V = B·p·d / (ln(A·p·d) − ln ln(1 + 1/γ)), A = 112.50 /(kPa·cm), B = 2737.5 V/(kPa·cm),
- * γ = 0.01. Published; polished, parallel, clean faces, direct voltage.
+ * V = B·p·d / (ln(A·p·d) − ln ln(1 + 1/γ)); left of the minimum of the curve, the minimum (some
+ * 305 V). Polished, parallel, clean faces, direct voltage.
  *
- * @param gap mm, from about 0.05 upwards (right of the curve's minimum)
+ * @param gap mm
  * @param altitude mm above sea level
  * @returns peak voltage, V
  */
 export function paschenVoltage(gap: number, altitude = 0): number {
-  const pd = (pressureAt(altitude) * gap) / 10;
-  return (2737.5 * pd) / (Math.log(112.5 * pd) - Math.log(Math.log(1 + 1 / 0.01)));
+  const pd = Math.max((pressureAt(altitude) * gap) / 10, LEAST);
+  return (B * pd) / (Math.log(A * pd) - Math.log(YIELD));
 }
 
 /**
  * The cautious working figure for an air gap between plates with rounded edges: 1 kV peak for
- * each millimetre. Common practice, no source. Square, burred or dusty edges hold less.
+ * each millimetre at sea level. Common practice, no source. Square, burred or dusty edges hold
+ * less. Thinner air: less by as much as Paschen's law gives.
  *
  * @param gap mm
+ * @param altitude mm above sea level
  * @returns peak voltage, V
  */
-export function practiceVoltage(gap: number): number {
-  return 1000 * gap;
+export function practiceVoltage(gap: number, altitude = 0): number {
+  return (1000 * gap * paschenVoltage(gap, altitude)) / paschenVoltage(gap);
 }
 
 /**
@@ -30,3 +40,6 @@ export function practiceVoltage(gap: number): number {
  * practice, no source.
  */
 export const RADIO_FREQUENCY_SHARE = 0.8;
+
+/** Hz. Up to here the clearances of IEC 60664-1 are meant (its scope, from memory). */
+export const RADIO_FREQUENCY = 30e3;

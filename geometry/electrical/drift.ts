@@ -5,7 +5,7 @@
  * trade). Air: (ε − 1) goes with its density.
  */
 
-import { expansions } from '../material';
+import { expansions, spacerMaterialOf } from '../material';
 import type { Design, Section } from '../design';
 
 export interface Drift {
@@ -20,7 +20,7 @@ export interface Drift {
 const AIR = (1.000536509 / 1.000575797 - 1) / 20;
 
 export const driftLeftOut: readonly string[] = [
-  'insulators and frame, whose capacitance drifts by its own law',
+  'film, disc, insulators and frame, whose capacitance drifts by its own law',
   'plates that bow or creep as they warm',
   'end play of the shaft',
 ];
@@ -28,8 +28,7 @@ export const driftLeftOut: readonly string[] = [
 export function sectionDrift(design: Design, section: Section): Drift {
   const { airGap, rotorThickness, statorThickness, dielectric } = section;
   const plate = expansions[design.material];
-  const spacer =
-    expansions[design.spacerMaterial === 'as-plates' ? design.material : design.spacerMaterial];
+  const spacer = expansions[spacerMaterialOf(design)];
   // Stator spacers hold the gaps beside a rotor plate, rotor spacers those beside a stator plate.
   const between = (thickness: number): number => {
     const length = 2 * airGap + thickness;

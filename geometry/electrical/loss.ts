@@ -1,30 +1,46 @@
 /**
  * Loss in the metal of a meshed section by skin effect, and the unloaded Q it leads to. Current
- * fills plates evenly over their meshed faces and gathers towards the hub, and towards the posts,
- * as the area behind each radius: the sheet's resistance on both faces, integrated along the
- * radius, all plates side by side; shaft and posts carry what their length gathers (a third of
- * their resistance). What it leaves out makes the true Q lower: see {@link lossLeftOut}.
- * Derived here from the surface resistance ρ/δ; skin depth: textbook.
+ * crosses the gaps evenly over the meshed faces and gathers on both faces of a sheet: in rotor
+ * plates towards the hub, in stator plates outwards, and from there to the posts. The sheet's
+ * resistance is integrated along the radius, all plates side by side; spacers on the shaft and on
+ * the posts carry what their length gathers (a third of their resistance). What it leaves out
+ * makes the true Q lower: see {@link lossLeftOut}. Derived here; skin depth and the surface
+ * resistance of a sheet are textbook.
  */
 
 import { arrangementOf } from '../arrangement';
 import type { Derived } from '../derived';
 import type { Design } from '../design';
-import { resistivities, type Metal } from '../material';
+import { relativePermeability, resistivities, spacerMaterialOf, type Metal } from '../material';
 
 /** Magnetic constant, H/mm (CODATA 2022: 1.25663706127e-6 H/m). */
 const MU_0 = 1.25663706127e-9;
 
 /**
- * δ = √(ρ/(π·f·µ0)).
- * @param resistivity Ω·mm @param frequency Hz
+ * δ = √(ρ/(π·f·µ0·µr)).
+ * @param frequency Hz
  * @returns mm
  */
-export function skinDepth(resistivity: number, frequency: number): number {
-  return Math.sqrt(resistivity / (Math.PI * frequency * MU_0));
+export function skinDepth(metal: Metal, frequency: number): number {
+  const permeability = MU_0 * relativePermeability(metal);
+  return Math.sqrt(resistivities[metal] / (Math.PI * frequency * permeability));
+}
+
+/**
+ * Resistance of one face of a sheet that carries as much current on the other,
+ * (ρ/δ)·(sinh x + sin x)/(cosh x − cos x) with x = t/δ: ρ/δ when thick, 2ρ/t when thin.
+ * @param thickness mm @param frequency Hz
+ * @returns Ω a square
+ */
+export function faceResistance(metal: Metal, thickness: number, frequency: number): number {
+  const depth = skinDepth(metal, frequency);
+  const x = thickness / depth;
+  const share = x > 40 ? 1 : (Math.sinh(x) + Math.sin(x)) / (Math.cosh(x) - Math.cos(x));
+  return (resistivities[metal] / depth) * share;
 }
 
 export const lossLeftOut: readonly string[] = [
+  'the narrower way of the current while plates are only partly meshed',
   'contacts, wipers and bearings that carry the rotor’s current',
   'insulators, film and disc',
   'joints, solder and roughness',
@@ -37,18 +53,27 @@ export function surfaceMetal({ finish, material }: Design): Metal {
   return finish === 'silver' ? 'silver' : material;
 }
 
-/** ∫ (I/I₀)² dr/(S·r) on both faces of a sector that gathers its current towards a radius. */
-function sectorPath(inner: number, outer: number, sector: number): number {
+/** ∫ (I/I₀)² dr/(S·r) on both faces of a sector whose current gathers inwards, or outwards. */
+function sectorPath(inner: number, outer: number, sector: number, inwards: boolean): number {
   const square = outer ** 2 - inner ** 2;
-  const integral =
-    Math.log(outer / inner) * outer ** 4 - outer ** 2 * square + (outer ** 4 - inner ** 4) / 4;
+  const fourth = (outer ** 4 - inner ** 4) / 4;
+  const ratio = Math.log(outer / inner);
+  const integral = inwards
+    ? ratio * outer ** 4 - outer ** 2 * square + fourth
+    : ratio * inner ** 4 - inner ** 2 * square + fourth;
   return integral / square ** 2 / (2 * sector);
+}
+
+/** From the outside of a sector to its posts: half circles that close in on each of them. */
+function pathToPosts({ statorSector, postCount, postSpacerRadius }: Design, outer: number) {
+  const reach = (statorSector * outer) / postCount / 2;
+  return Math.log(Math.max(1, reach / postSpacerRadius)) / (2 * Math.PI * postCount);
 }
 
 export interface Loss {
   /** mm */
   readonly skinDepth: number;
-  /** Series resistance of plates, and of shaft with posts, Ω. */
+  /** Series resistance of plates, and of spacers on shaft and posts, Ω. */
   readonly plates: number;
   readonly rods: number;
   /** 1/(ω·C·R) at the capacitance asked for. */
@@ -65,27 +90,36 @@ export function sectionLoss(
   frequency: number,
   capacitance: number,
 ): Loss {
-  const section = sections[index]!;
-  const { rotorPlates, statorPlates } = design.sections[index]!;
+  const { sweepRadius } = sections[index]!;
+  const section = design.sections[index]!;
   const { share, lobes } = arrangementOf(design);
-  const resistivity = resistivities[surfaceMetal(design)];
-  const depth = skinDepth(resistivity, frequency);
-  const surface = resistivity / depth;
   const { cutoutRadius, spacerRadius, postSpacerRadius, postCount } = design;
-  const path = sectorPath(cutoutRadius, section.sweepRadius, design.rotorSector);
+  const metal = surfaceMetal(design);
   // From the cut-out to the wall of spacers, all the current together.
   const neck =
     Math.log(cutoutRadius / Math.min(spacerRadius, 0.99 * cutoutRadius)) /
     ((2 * (2 * Math.PI)) / lobes);
-  const plates = surface * ((path + neck) / rotorPlates + path / statorPlates);
+  const inRotor = sectorPath(cutoutRadius, sweepRadius, design.rotorSector, true) + neck;
+  const inStator =
+    sectorPath(cutoutRadius, sweepRadius, design.statorSector, false) +
+    pathToPosts(design, sweepRadius);
+  const plates =
+    (faceResistance(metal, section.rotorThickness, frequency) * inRotor) / section.rotorPlates +
+    (faceResistance(metal, section.statorThickness, frequency) * inStator) /
+      section.statorPlates;
   const sets = stack.plates.filter((plate) => plate.section === index && plate.pack === 0);
   const length = Math.max(...sets.map(({ z }) => z)) - Math.min(...sets.map(({ z }) => z));
-  const rod = (radius: number): number => (surface * length) / (2 * Math.PI * radius) / 3;
+  // Plates are plated, spacers aren't.
+  const spacers = spacerMaterialOf(design);
+  const rod = (radius: number): number =>
+    ((resistivities[spacers] / skinDepth(spacers, frequency)) * length) /
+    (2 * Math.PI * radius) /
+    3;
   const rods = rod(spacerRadius) + rod(postSpacerRadius) / postCount;
   // Two in series have twice the resistance of one.
   const resistance = (plates + rods) / share;
   return {
-    skinDepth: depth,
+    skinDepth: skinDepth(metal, frequency),
     plates: plates / share,
     rods: rods / share,
     q: 1 / (2 * Math.PI * frequency * capacitance * resistance),

@@ -1,7 +1,7 @@
 /** Spacers on the shaft and on the posts, between plates, between sections and to the frame. */
 
 import type { Derived, Post, StackPlate } from '../derived';
-import { sheetMaterials } from '../material';
+import { sheetMaterials, spacerMaterialOf } from '../material';
 import {
   addCut,
   addTurned,
@@ -46,7 +46,7 @@ function addRings(
     }
   }
   const { design } = derived;
-  const metal = design.spacerMaterial === 'as-plates' ? design.material : design.spacerMaterial;
+  const metal = spacerMaterialOf(design);
   lengths.forEach((length, i) => {
     const own = places.filter(({ from, to }) => Math.abs(to - from - length) < SAME_LENGTH);
     const key = lengths.length > 1 ? `${ring.key}-${i + 1}` : ring.key;
