@@ -1,5 +1,6 @@
 import { Figures } from '@/components/design/figures';
 import { PanelSection } from '@/components/design/panel-section';
+import { Button } from '@/components/ui/button';
 import { formatQuantity } from '@/geometry';
 import type { LaidGroup } from '@/geometry/nesting/lay-out';
 import { SheetPreview } from './sheet-preview';
@@ -15,7 +16,14 @@ function duration(seconds: number | null): string {
 }
 
 /** Parts of one kind of sheet: what they take, and each sheet as it will be cut. */
-export function GroupResult({ group }: { group: LaidGroup }) {
+export function GroupResult({
+  group,
+  onSave,
+}: {
+  group: LaidGroup;
+  /** Saves one of its sheets as DXF. */
+  onSave: (sheet: number) => void;
+}) {
   const { layout, tally, thickness, material } = group;
   const title = `${formatQuantity(thickness, 'length')} ${material}`;
   return (
@@ -41,7 +49,12 @@ export function GroupResult({ group }: { group: LaidGroup }) {
         ]}
       />
       {layout.sheets.map((_, sheet) => (
-        <SheetPreview key={sheet} group={group} sheet={sheet} />
+        <div key={sheet} className="flex flex-col gap-1.5">
+          <SheetPreview group={group} sheet={sheet} />
+          <Button className="self-start" onPress={() => onSave(sheet)}>
+            Save sheet {sheet + 1} as DXF
+          </Button>
+        </div>
       ))}
     </PanelSection>
   );

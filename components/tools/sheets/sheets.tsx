@@ -85,7 +85,15 @@ export default function Sheets({ derived }: ToolProps) {
             <MachineFindings findings={laid.findings} />
           </PanelSection>
           {laid.groups.map((group) => (
-            <GroupResult key={`${group.material} ${group.thickness}`} group={group} />
+            <GroupResult
+              key={`${group.material} ${group.thickness}`}
+              group={group}
+              onSave={async (sheet) => {
+                if (!shown) return;
+                const { saveSheet } = await import('./save-sheet');
+                saveSheet(group, sheet, shown.machine, shown.kerf);
+              }}
+            />
           ))}
           <p className="text-small text-ink-2">
             From the store, sheet is taken at its own size and count; the size above is for what
