@@ -90,7 +90,28 @@ test('voltages stand side by side and say that they are no rating', async ({ pag
   await expect(tool.getByRole('row', { name: /Paschen/ })).toContainText('2.88 kV');
   await expect(tool.getByRole('row', { name: /square cut edges/ })).toContainText('1.27 kV');
   await expect(tool.getByText(/None of these is a rating/)).toBeVisible();
+  await expect(tool.getByText('Capacitance of the plates', { exact: true })).toBeVisible();
   await expectAccessible(page);
+  // Taken as one step; the design has it, and all figures fall.
+  const altitude = tool.getByLabel('Altitude of use');
+  await altitude.fill('-5 m');
+  await altitude.press('Tab');
+  await expect(tool.getByText(/“-5 m” is no altitude from 0 m to 10000 m/)).toBeVisible();
+  await altitude.fill('3 km');
+  await altitude.press('Tab');
+  await expect(page.getByText('Altitude of use set to 3000 m.')).toBeVisible();
+  await expect(tool.getByRole('row', { name: /Paschen/ })).toContainText('2.16 kV');
+  await expect(tool.getByRole('row', { name: /square cut edges/ })).toContainText('1.22 kV');
+  await tool.getByLabel('Working frequency').fill('7 MHz');
+  await tool.getByLabel('Working frequency').press('Enter');
+  const loss = tool.getByRole('region', { name: 'Loss and Q' });
+  // Brass at 7 MHz: computed from δ = √(ρ/(π·f·µ0)).
+  await expect(loss.getByRole('row').nth(1)).toContainText('48.9 µm');
+  await page.keyboard.press('Escape');
+  await expect(tool).toBeHidden();
+  await page.getByRole('button', { name: 'Undo', exact: true }).last().click();
+  await page.keyboard.press('Control+z');
+  await expect(field(page, 'Altitude of use')).toHaveValue('0');
 });
 
 test('a law of one’s own is typed as a table, and told what is wrong with it', async ({

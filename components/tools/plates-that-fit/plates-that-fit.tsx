@@ -61,8 +61,8 @@ export default function PlatesThatFit({ design, section, apply }: ToolProps) {
         {formatQuantity(design.largestDepth, 'length')} of depth, at{' '}
         {formatQuantity(design.sections[section]!.workingVoltage, 'voltage')} of working
         voltage. Radius to the furthest ear, depth and narrowest blade in mm; voltage by 1 kV
-        peak for each millimetre. Radii and weights are estimates, good to some per cent; what
-        you take is worked out in full first.
+        peak for each millimetre, less in thin air. Radii and weights are estimates, good to
+        some per cent; what you take is worked out in full first.
       </p>
       <JobProgress job={list} what="Looking at plate counts and gaps" />
       {answer?.kind === 'list' && (

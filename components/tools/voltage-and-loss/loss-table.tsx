@@ -1,5 +1,7 @@
-import { formatQuantity, resonantFrequency, type Derived } from '@/geometry';
-import { lossLeftOut, sectionLoss, surfaceMetal } from '@/geometry/electrical/loss';
+import { formatQuantity, type Derived } from '@/geometry';
+import { lossLeftOut, surfaceMetal } from '@/geometry/electrical/loss';
+import { hasFrequency, lawPoint } from './law-point';
+import { QPlot } from './q-plot';
 
 const ohms = (value: number): string =>
   value < 1
@@ -13,43 +15,27 @@ const ROWS = [0, 0.25, 0.5, 0.75, 1];
 
 /** Loss and Q over the band, or at the working frequency. */
 export function LossTable({ derived, section }: { derived: Derived; section: number }) {
-  const { design, sections } = derived;
-  const result = sections[section]!;
-  const { workingFrequency } = design.sections[section]!;
-  const { law, inductance, stray } = result;
-  if (workingFrequency === null && inductance === null) {
+  const { design } = derived;
+  if (!hasFrequency(derived, section)) {
     return (
       <p>
-        Give a working frequency among the plates of the section, or the band with its coil, and
-        loss and Q are reckoned here.
+        Give a working frequency above, or the band with its coil, and loss and Q are reckoned
+        here.
       </p>
     );
   }
-  const rows = ROWS.map((fraction) => {
-    const angle = law.from + fraction * (law.to - law.from);
-    const i = law.angle.findIndex((a) => a >= angle - 1e-9);
-    const total = law.achieved[i]!;
-    const frequency = workingFrequency ?? resonantFrequency(total, inductance!);
-    const capacitance = total - stray;
-    return {
-      capacitance,
-      frequency,
-      loss: sectionLoss(derived, section, frequency, capacitance),
-    };
-  });
+  const rows = ROWS.map((fraction) => lawPoint(derived, section, fraction));
   return (
     <>
       <div role="region" aria-label="Loss and Q" tabIndex={0} className="overflow-x-auto">
         <table className="dense w-full text-right text-small tabular-nums">
           <thead>
             <tr className="border-b border-edge">
-              {['At', 'Section has', 'Skin depth', 'Plates', 'Shaft, posts', 'Q'].map(
-                (title) => (
-                  <th key={title} scope="col" className="py-1.5 pl-3 font-medium first:pl-0">
-                    {title}
-                  </th>
-                ),
-              )}
+              {['At', 'Section has', 'Skin depth', 'Plates', 'Spacers', 'Q'].map((title) => (
+                <th key={title} scope="col" className="py-1.5 pl-3 font-medium first:pl-0">
+                  {title}
+                </th>
+              ))}
             </tr>
           </thead>
           <tbody>
@@ -70,11 +56,15 @@ export function LossTable({ derived, section }: { derived: Derived; section: num
           </tbody>
         </table>
       </div>
+      <p className="text-small text-ink-2">Q over the shaft angle, where the law holds.</p>
+      <QPlot derived={derived} section={section} />
       <p className="text-small text-ink-2">
-        With meshed plates of {surfaceMetal(design)}
+        With wholly meshed plates of {surfaceMetal(design)}
         {design.finish === 'silver' &&
           `, if the silver is some times ${microns(rows[0]!.loss.skinDepth)} thick`}
-        . The true Q is lower. Left out: {lossLeftOut.join('; ')}.
+        {surfaceMetal(design) === 'steel' &&
+          '; how magnetic steel is differs from batch to batch, so take its loss as an order of magnitude'}
+        . Spacers are reckoned bare. The true Q is lower. Left out: {lossLeftOut.join('; ')}.
       </p>
     </>
   );

@@ -4,6 +4,7 @@ import { PanelSection } from '@/components/design/panel-section';
 import { driftLeftOut, sectionDrift } from '@/geometry/electrical/drift';
 import { Figures } from '@/components/design/figures';
 import type { ToolProps } from '../tool-props';
+import { Conditions } from './conditions';
 import { LossTable } from './loss-table';
 import { VoltageTable } from './voltage-table';
 
@@ -13,11 +14,14 @@ const ppm = (value: number): string => {
 };
 
 /** What the gap holds, what the metal loses, and how the capacitance drifts as it warms. */
-export default function VoltageAndLoss({ design, section, derived }: ToolProps) {
+export default function VoltageAndLoss({ design, section, derived, apply }: ToolProps) {
   const values = design.sections[section]!;
   const { area, gap, air, total } = sectionDrift(design, values);
   return (
     <>
+      <PanelSection title="Where it works">
+        <Conditions design={design} section={section} apply={apply} />
+      </PanelSection>
       <PanelSection title="Voltage">
         <VoltageTable design={design} section={values} />
       </PanelSection>

@@ -28,7 +28,7 @@ export function VoltageTable({ design, section }: { design: Design; section: Sec
     [
       'The same at radio frequency',
       paschen * RADIO_FREQUENCY_SHARE,
-      'common practice, no source',
+      'four fifths: common practice, no source',
     ],
     [
       'Clearance, square cut edges',
@@ -42,8 +42,8 @@ export function VoltageTable({ design, section }: { design: Design; section: Sec
     ],
     [
       '1 kV peak for each millimetre',
-      practiceVoltage(length),
-      'common practice, rounded edges',
+      practiceVoltage(length, altitude),
+      'common practice, rounded edges; less in thin air, as by Paschen',
     ],
   ];
   return (
@@ -86,7 +86,9 @@ export function VoltageTable({ design, section }: { design: Design; section: Sec
         {share !== 1 &&
           `, which takes ${Number((100 * share).toPrecision(3))} % of the voltage`}
         , at {formatQuantity(altitude, 'altitude', 4)} above sea level. None of these is a
-        rating: dust, burrs, damp and sharp corners hold less.
+        rating: dust, burrs, damp and sharp corners hold less. Clearances between listed values
+        lie on a straight line; they are meant for up to 30 kHz. The least of common practice,
+        square cut edges and breakdown is what the checks go by.
       </p>
     </>
   );
