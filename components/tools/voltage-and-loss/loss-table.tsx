@@ -31,11 +31,13 @@ export function LossTable({ derived, section }: { derived: Derived; section: num
         <table className="dense w-full text-right text-small tabular-nums">
           <thead>
             <tr className="border-b border-edge">
-              {['At', 'Section has', 'Skin depth', 'Plates', 'Spacers', 'Q'].map((title) => (
-                <th key={title} scope="col" className="py-1.5 pl-3 font-medium first:pl-0">
-                  {title}
-                </th>
-              ))}
+              {['At', 'Section has', 'Skin depth', 'Plates', 'Spacers', 'Q at most'].map(
+                (title) => (
+                  <th key={title} scope="col" className="py-1.5 pl-3 font-medium first:pl-0">
+                    {title}
+                  </th>
+                ),
+              )}
             </tr>
           </thead>
           <tbody>
@@ -64,7 +66,9 @@ export function LossTable({ derived, section }: { derived: Derived; section: num
           `, if the silver is some times ${microns(rows[0]!.loss.skinDepth)} thick`}
         {surfaceMetal(design) === 'steel' &&
           '; how magnetic steel is differs from batch to batch, so take its loss as an order of magnitude'}
-        . Spacers are reckoned bare. The true Q is lower. Left out: {lossLeftOut.join('; ')}.
+        . Spacers are reckoned bare. This is the bound that plates and spacers set; contacts and
+        insulators commonly lose many times more, so measure the true Q. Left out:{' '}
+        {lossLeftOut.join('; ')}.
       </p>
     </>
   );
