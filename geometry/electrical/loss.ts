@@ -41,7 +41,7 @@ export function faceResistance(metal: Metal, thickness: number, frequency: numbe
 
 export const lossLeftOut: readonly string[] = [
   'the narrower way of the current while plates are only partly meshed',
-  'contacts, wipers and bearings that carry the rotor’s current',
+  'contacts, wipers, bearings and leads beyond what is allowed for them',
   'insulators, film and disc',
   'joints, solder and roughness',
   'crowding at edges and between neighbouring plates',
@@ -76,19 +76,23 @@ export interface Loss {
   /** Series resistance of plates, and of spacers on shaft and posts, Ω. */
   readonly plates: number;
   readonly rods: number;
-  /** 1/(ω·C·R) at the capacitance asked for. */
+  /** 1/(ω·C·R) at the capacitance asked for: of plates and spacers alone, the most it can be. */
   readonly q: number;
+  /** The same with the contacts' resistance beside theirs. */
+  readonly qWithContacts: number;
 }
 
 /**
  * @param frequency Hz
  * @param capacitance F, what the section has between its terminals there
+ * @param contacts Ω, what wipers, joints and leads add between the terminals
  */
 export function sectionLoss(
   { design, sections, stack }: Derived,
   index: number,
   frequency: number,
   capacitance: number,
+  contacts = 0,
 ): Loss {
   const { sweepRadius } = sections[index]!;
   const section = design.sections[index]!;
@@ -118,10 +122,12 @@ export function sectionLoss(
   const rods = rod(spacerRadius) + rod(postSpacerRadius) / postCount;
   // Two in series have twice the resistance of one.
   const resistance = (plates + rods) / share;
+  const reactance = 1 / (2 * Math.PI * frequency * capacitance);
   return {
     skinDepth: skinDepth(metal, frequency),
     plates: plates / share,
     rods: rods / share,
-    q: 1 / (2 * Math.PI * frequency * capacitance * resistance),
+    q: reactance / resistance,
+    qWithContacts: reactance / (resistance + contacts),
   };
 }

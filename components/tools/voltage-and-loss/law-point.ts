@@ -1,3 +1,4 @@
+import { valueAt } from '@/components/floor/interpolate';
 import { resonantFrequency, type Derived } from '@/geometry';
 import { sectionLoss, type Loss } from '@/geometry/electrical/loss';
 
@@ -17,12 +18,16 @@ export function hasFrequency({ design, sections }: Derived, section: number): bo
   );
 }
 
-/** Loss at a fraction of the law, at the working frequency or where the band's coil resonates. */
-export function lawPoint(derived: Derived, section: number, fraction: number): LawPoint {
+/** Loss at a fraction of the law, with contacts of so many Ω, at the working frequency or where the band's coil resonates. */
+export function lawPoint(
+  derived: Derived,
+  section: number,
+  fraction: number,
+  contacts: number,
+): LawPoint {
   const { law, inductance, stray } = derived.sections[section]!;
   const angle = law.from + fraction * (law.to - law.from);
-  const after = law.angle.findIndex((other) => other >= angle - 1e-9);
-  const total = law.achieved[after < 0 ? law.angle.length - 1 : after]!;
+  const total = valueAt(law.angle, law.achieved, angle);
   const frequency =
     derived.design.sections[section]!.workingFrequency ?? resonantFrequency(total, inductance!);
   const capacitance = total - stray;
@@ -30,6 +35,6 @@ export function lawPoint(derived: Derived, section: number, fraction: number): L
     angle,
     capacitance,
     frequency,
-    loss: sectionLoss(derived, section, frequency, capacitance),
+    loss: sectionLoss(derived, section, frequency, capacitance, contacts),
   };
 }

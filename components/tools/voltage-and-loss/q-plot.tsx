@@ -3,16 +3,29 @@ import { Plot } from '@/components/floor/plot';
 import type { Derived } from '@/geometry';
 import { lawPoint } from './law-point';
 
+const short = new Intl.NumberFormat('en', {
+  notation: 'compact',
+  maximumSignificantDigits: 2,
+});
+
 /** Places over the law at which the line is drawn. */
 const PLACES = 48;
 
 /** The unloaded Q over the shaft angle, where the law holds. */
-export function QPlot({ derived, section }: { derived: Derived; section: number }) {
+export function QPlot({
+  derived,
+  section,
+  contacts,
+}: {
+  derived: Derived;
+  section: number;
+  contacts: number;
+}) {
   const { law } = derived.sections[section]!;
   const points = Array.from({ length: PLACES + 1 }, (_, i) =>
-    lawPoint(derived, section, i / PLACES),
+    lawPoint(derived, section, i / PLACES, contacts),
   );
-  const q = points.map(({ loss }) => loss.q);
+  const q = points.map(({ loss }) => loss.qWithContacts);
   const top = 1.05 * Math.max(...q);
   const travel = toDegrees(derived.design.travel);
   return (
@@ -24,7 +37,7 @@ export function QPlot({ derived, section }: { derived: Derived; section: number 
             side: 'left',
             range: [0, top],
             ticks: [0, Math.max(...q)],
-            write: (value) => String(Number(value.toPrecision(2))),
+            write: (value) => short.format(value),
             className: 'text-ink-2',
             lines: [
               { values: [null, ...q, null], className: 'stroke-steel-dark stroke-[1.5]' },

@@ -38,6 +38,16 @@ test('a face of a thick sheet has ρ/δ, of a thin one 2ρ/t; never less than ei
   }
 });
 
+test('contacts add to the resistance that Q goes by', () => {
+  const plates = derived();
+  const [bare, worn] = [0, 0.02].map((ohms) => sectionLoss(plates, 0, 1e6, 300e-12, ohms));
+  expect(bare!.qWithContacts).toBe(bare!.q);
+  expect(1 / worn!.qWithContacts - 1 / worn!.q).toBeCloseTo(
+    2 * Math.PI * 1e6 * 300e-12 * 0.02,
+    12,
+  );
+});
+
 test('steel holds the current in a thinner skin; spacers go by their own metal', () => {
   const brass = sectionLoss(derived(), 0, 10e6, 300e-12);
   const steel = sectionLoss(
