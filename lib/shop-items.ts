@@ -65,6 +65,11 @@ export function refuseStaleItem(
   version: number | undefined,
 ): void {
   if (stored.version === version) return;
+  if (version === undefined) {
+    throw new RequestError('bad-input', 'Version: missing; give the one that you opened.', {
+      field: 'version',
+    });
+  }
   throw new RequestError(
     'conflict',
     `${stored.name}: ${stored.updatedBy.name} has changed it since you opened it. Close this, look at theirs, and change it anew.`,

@@ -37,6 +37,6 @@ export class Migration002ShopItems extends Migration {
     this.addSql('alter table record_entries drop constraint record_entries_what_check');
     this.addSql(`
       alter table record_entries add constraint record_entries_what_check
-        check (what in (${before}))`);
+        check (what in (${before})) not valid`);
   }
 }

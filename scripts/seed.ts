@@ -124,7 +124,7 @@ function addShop(em: EntityManager, workshop: Workshop, builder: User): void {
       ...sheet,
       material: 'aluminium',
       thickness: 2,
-      thicknessTolerance: 0.07,
+      thicknessTolerance: 0.09,
       count: 4,
     }),
   );

@@ -1,5 +1,6 @@
 import Link from 'next/link';
 import { Mark } from '@/components/ui/mark';
+import { PlaceLink } from './place-link';
 import { SignOutButton } from './sign-out-button';
 
 const places = [
@@ -26,13 +27,7 @@ export function TopBar({ workshop, person }: { workshop: string; person: string 
       </Link>
       <nav aria-label="Main" className="flex gap-5 self-stretch">
         {places.map(([href, name]) => (
-          <Link
-            key={href}
-            href={href}
-            className="flex min-h-11 items-center border-b-2 border-transparent font-medium text-ink no-underline hover:border-action"
-          >
-            {name}
-          </Link>
+          <PlaceLink key={href} href={href} name={name} />
         ))}
       </nav>
       <p className="ml-auto flex items-center gap-3 text-ink-2">

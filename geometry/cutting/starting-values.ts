@@ -80,19 +80,26 @@ export const startingMachines: readonly Machine[] = [
   },
 ];
 
-/** EN 485-4:1993, aluminium sheet, narrow column: up to each thickness, ± mm. */
+/**
+ * EN 485-4, aluminium alloys of group II, to which EN AW-5754 belongs, up to 1000 wide: thickness
+ * up to, ± mm (published copies of BS EN 485-4:1994, as cited in the trade).
+ */
 const thicknessTolerances: readonly (readonly [upTo: number, tolerance: number])[] = [
-  [0.8, 0.03],
-  [1.2, 0.04],
-  [1.5, 0.05],
-  [1.8, 0.06],
-  [2.5, 0.07],
-  [3, 0.08],
+  [0.5, 0.03],
+  [0.8, 0.04],
+  [1.2, 0.05],
+  [1.5, 0.07],
+  [1.8, 0.08],
+  [2, 0.09],
+  [2.5, 0.1],
+  [3, 0.11],
+  [3.5, 0.12],
+  [4, 0.15],
 ];
 
-/** Taken for the other metals too, as practice has it. mm */
-function toleranceOf(thickness: number): number {
-  return (thicknessTolerances.find(([upTo]) => thickness <= upTo) ?? [0, 0.1])[1];
+/** For the other metals as a start: give what their own standard says. mm */
+export function toleranceOf(thickness: number): number {
+  return (thicknessTolerances.find(([upTo]) => thickness <= upTo) ?? [0, 0.2])[1];
 }
 
 /** Sheets of a size for each kind of stock that is needed. */

@@ -21,7 +21,7 @@ const DEGREE = Math.PI / 180;
 export const startingTolerances: Tolerances = {
   thickness: {
     label: 'Sheet thickness',
-    help: 'Each plate. ± 0.03 to 0.04 for sheet of 0.5 to 1.2 mm (EN 485-4, aluminium); other metals as their standard says.',
+    help: 'Each plate. ± 0.03 to 0.05 for sheet of 0.5 to 1.2 mm (EN 485-4, aluminium alloys of group II); other metals as their standard says.',
     amount: 0.04,
     spread: 'even',
   },

@@ -22,6 +22,7 @@ interface Rule {
   readonly params?: (cast: Cast) => Promise<Record<string, string>>;
   readonly status: Readonly<Record<Caller, number>>;
   readonly body?: unknown;
+  readonly query?: Record<string, string>;
 }
 
 /** Answers in the order of `callers`: owner, builder, machinist, outsider, removed, signed out. */
@@ -36,6 +37,17 @@ function answers(
 const reads = answers(200, 200, 200, 404, 401, 401);
 const writes = answers(200, 200, 403, 404, 401, 401);
 const change = { version: 1, name: 'Renamed', design: defaultDesign() };
+
+const dial = {
+  section: '0',
+  quantity: 'frequency',
+  form: 'round',
+  radius: '50',
+  ratio: '1',
+  drum: '100',
+  sense: 'clockwise',
+  hole: '6',
+};
 
 /** next-auth's own routes answer everybody; tests/e2e signs in and out through them. */
 const nextAuth = 'app/api/auth/[...nextauth]/route.ts';
@@ -54,6 +66,7 @@ const routes: Record<string, Record<string, Rule>> = {
   'app/api/designs/[id]/status/route.ts': {
     PUT: { status: writes, body: { version: 1, status: 'ready' } },
   },
+  'app/api/designs/[id]/dial/route.ts': { GET: { status: reads, query: dial } },
   'app/api/designs/[id]/files/route.ts': { GET: { status: reads } },
   'app/api/designs/[id]/files/[name]/route.ts': { GET: { status: reads } },
 };
@@ -146,6 +159,7 @@ for (const [file, rules] of Object.entries(routes)) {
           const handler = (await load(file))[method]!;
           const response = await call(handler, params, {
             method,
+            ...(rule.query && { query: rule.query }),
             ...(rule.body !== undefined && { body: rule.body }),
           });
           const answer = await response.text();

@@ -8,23 +8,27 @@ interface Call {
   /** Sent as it stands instead of a body in JSON. */
   raw?: string;
   headers?: Record<string, string>;
+  query?: Record<string, string>;
 }
 
 export function call<P>(
   handler: Handler<P>,
   params: P,
-  { method = 'GET', body, raw, headers = {} }: Call = {},
+  { method = 'GET', body, raw, headers = {}, query = {} }: Call = {},
 ): Promise<Response> {
   const text = raw ?? (body === undefined ? undefined : JSON.stringify(body));
-  const request = new Request('http://127.0.0.1:3000/api', {
-    method,
-    headers: {
-      host: '127.0.0.1:3000',
-      ...(text !== undefined && { 'content-type': 'application/json' }),
-      ...headers,
+  const request = new Request(
+    `http://127.0.0.1:3000/api?${new URLSearchParams(query).toString()}`,
+    {
+      method,
+      headers: {
+        host: '127.0.0.1:3000',
+        ...(text !== undefined && { 'content-type': 'application/json' }),
+        ...headers,
+      },
+      ...(text !== undefined && { body: text }),
     },
-    ...(text !== undefined && { body: text }),
-  });
+  );
   return handler(request, { params: Promise.resolve(params) });
 }
 

@@ -1,7 +1,9 @@
 'use client';
 
+import { useParams } from 'next/navigation';
 import { useMemo, useState } from 'react';
 import { Button } from '@/components/ui/button';
+import { buttonClass } from '@/components/ui/button-class';
 import { SelectField } from '@/components/ui/select-field';
 import { TextField } from '@/components/ui/text-field';
 import { DialError, dialOf, type DialSettings } from '@/geometry/dial/dial';
@@ -23,8 +25,12 @@ function save(svg: string): void {
   setTimeout(() => URL.revokeObjectURL(address), 60_000);
 }
 
+const texts = (settings: DialSettings): Record<string, string> =>
+  Object.fromEntries(Object.entries(settings).map(([key, value]) => [key, String(value)]));
+
 /** A dial to print, with its marks where the finished plates have their values. */
 export default function DialTool({ derived, section }: ToolProps) {
+  const { id } = useParams<{ id: string }>();
   const result = derived?.sections[section] ?? null;
   const [settings, setSettings] = useState<DialSettings>({
     quantity: result?.inductance === null ? 'capacitance' : 'frequency',
@@ -143,10 +149,17 @@ export default function DialTool({ derived, section }: ToolProps) {
             className="border border-line bg-white [&_svg]:h-auto [&_svg]:w-full"
             dangerouslySetInnerHTML={{ __html: svg }}
           />
-          <p>
+          <p className="flex flex-wrap gap-2">
             <Button look="action" onPress={() => save(svg)}>
               Save as SVG, true size
             </Button>
+            <a
+              href={`/api/designs/${id}/dial?${new URLSearchParams({ ...texts(settings), section: String(section) })}`}
+              download
+              className={buttonClass('plain')}
+            >
+              Save as PDF, of the saved version
+            </a>
           </p>
         </>
       )}

@@ -1,0 +1,59 @@
+import 'server-only';
+import { createHash } from 'node:crypto';
+import { DialError, dialOf } from '@/geometry/dial/dial';
+import { slugOf } from '@/geometry/files';
+import { mayDownload, requireMember } from './access';
+import { entityManager } from './db';
+import { derivePlates, type HashedFile } from './design-files';
+import { sketchesPdf } from './drawing-pdf';
+import { badInput, notFound, RequestError } from './errors';
+import { findDesign } from './queries';
+import { addRecord } from './record';
+import { dialQuerySchema } from './schemas/dial';
+
+/** A dial of the saved version as PDF, true size, with a row in the record. @throws RequestError */
+export async function makeDial(id: string, query: unknown): Promise<HashedFile> {
+  const viewer = await requireMember(mayDownload);
+  const stored = await findDesign(viewer, id);
+  if (!stored) throw notFound();
+  const parsed = dialQuerySchema.safeParse(query);
+  if (!parsed.success) throw badInput(parsed.error);
+  const { section, ...settings } = parsed.data;
+  const derived = derivePlates(stored.design);
+  const result = derived.sections[section];
+  if (!result) {
+    throw new RequestError('bad-input', `Section: there is no section ${section + 1} in it.`, {
+      field: 'section',
+    });
+  }
+  try {
+    const body = await sketchesPdf([dialOf(result, derived.turn, settings)], {
+      title: `Dial of ${stored.name}`,
+      author: viewer.workshopName,
+      issued: new Date(stored.updatedAt),
+    });
+    const sha256 = createHash('sha256').update(body).digest('hex');
+    const name = `${slugOf(stored.name)}_dial-${settings.quantity}.pdf`;
+    const em = await entityManager();
+    await em.transactional((tx) => {
+      addRecord(tx, {
+        workshopId: viewer.workshopId,
+        who: viewer.userId,
+        what: 'file-downloaded',
+        subject: id,
+        detail: {
+          file: name,
+          sha256,
+          bytes: body.byteLength,
+          version: stored.version,
+          settings,
+        },
+      });
+    });
+    const label = 'Dial, true size';
+    return { name, label, kind: 'pdf', mediaType: 'application/pdf', body, sha256 };
+  } catch (error) {
+    if (error instanceof DialError) throw new RequestError('bad-input', error.message);
+    throw error;
+  }
+}
