@@ -1,6 +1,6 @@
 /**
  * Clearances in air of IEC 60664-1:2020 for steady peak voltages, and its altitude factors (tables
- * published, as cited in the trade). Between listed values the clearance is taken on a straight
+ * published, read second-hand in a transcription: confirm them before they are quoted). Between listed values the clearance is taken on a straight
  * line, which the standard allows. Square cut edges make the field inhomogeneous.
  */
 

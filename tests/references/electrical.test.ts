@@ -1,6 +1,6 @@
 /**
  * Voltage, loss and drift against the outside. IEC 60664-1:2020 clearances and altitude factors:
- * published, as cited in the trade. Skin depth δ = √(ρ/(π·f·µ0)): values computed from the equation
+ * published, read second-hand. Skin depth δ = √(ρ/(π·f·µ0)): values computed from the equation
  * with published resistivities of silver and copper. Expansion figures: handbook, from memory.
  */
 import { describe, expect, test } from 'vitest';

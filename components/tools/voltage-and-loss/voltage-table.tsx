@@ -86,9 +86,10 @@ export function VoltageTable({ design, section }: { design: Design; section: Sec
         {share !== 1 &&
           `, which takes ${Number((100 * share).toPrecision(3))} % of the voltage`}
         , at {formatQuantity(altitude, 'altitude', 4)} above sea level. None of these is a
-        rating: dust, burrs, damp and sharp corners hold less. Clearances between listed values
-        lie on a straight line; they are meant for up to 30 kHz. The least of common practice,
-        square cut edges and breakdown is what the checks go by.
+        rating: dust, burrs, damp and sharp corners hold less. The clearance table is cited
+        second-hand: confirm it before you quote it. Between its rows a straight line is taken,
+        and it is meant for up to 30 kHz. The least of common practice, square cut edges and
+        breakdown is what the checks go by.
       </p>
     </>
   );
