@@ -87,4 +87,7 @@ export const parameterHelp: Readonly<Record<SectionKey | SharedKey, string>> = {
     'Diameter of the pillars that hold the end plates apart, away from the stator.',
   shaftFront: 'Length of shaft that stands out in front of the front plate.',
   bracket: 'A flat plate on the front pillars to screw the capacitor to a panel.',
+  toleranceClass: 'For what the drawing gives no tolerance of its own: fine, medium or coarse.',
+  projection:
+    'How the views of the drawing stand to each other; its symbol is in the title block.',
 };

@@ -474,6 +474,25 @@ export const sharedParameters = {
     default: 'none',
     cameLater: true,
   }),
+  toleranceClass: choice<'f' | 'm' | 'c'>('sheet', {
+    label: 'General tolerances',
+    options: [
+      { value: 'f', label: 'ISO 2768-f' },
+      { value: 'm', label: 'ISO 2768-m' },
+      { value: 'c', label: 'ISO 2768-c' },
+    ],
+    default: 'm',
+    cameLater: true,
+  }),
+  projection: choice<'first' | 'third'>('sheet', {
+    label: 'Drawing',
+    options: [
+      { value: 'first', label: 'first angle' },
+      { value: 'third', label: 'third angle' },
+    ],
+    default: 'first',
+    cameLater: true,
+  }),
   spacerMaterial: choice<'as-plates' | 'brass' | 'aluminium' | 'steel'>('sheet', {
     label: 'Spacer metal',
     options: [

@@ -10,7 +10,7 @@ import { planOf } from '../parts/solid';
 import { box, line, outline, ring, text, type Mark, type Sketch } from '../sketch/sketch';
 import { across } from './dimension';
 import { A3, frameMarks, NARROW, scaleFor, WIDE, writtenScale } from './paper';
-import { blockCorner, fitted, titleBlock, type Sheet } from './title-block';
+import { blockCorner, fitted, revisionTable, titleBlock, type Sheet } from './title-block';
 
 const PLAN = { x: 27, y: 24, w: 118, h: 118 } as const;
 const SIDE = { x: 150, y: 24, w: 84, h: 118 } as const;
@@ -90,7 +90,7 @@ function sideView(
 function partsList(parts: readonly Part[]): Mark[] {
   const marks: Mark[] = [];
   const rows = billOf(parts);
-  const room = blockCorner(A3).y - LIST.y - 14;
+  const room = blockCorner(A3).y - LIST.y - 30;
   const h = Math.min(6, room / (rows.length + 1));
   const height = Math.min(2.2, h * 0.42);
   const columns: [number, string][] = [
@@ -209,6 +209,12 @@ export function assemblySheet(
         2.2,
       ),
       ...titleBlock(A3, {
+        ...sheet,
+        title: name,
+        material: 'see list',
+        scale: writtenScale(scale),
+      }),
+      ...revisionTable(A3, {
         ...sheet,
         title: name,
         material: 'see list',

@@ -37,7 +37,8 @@ export function drawingOf(derived: Derived, facts: DrawingFacts): Sketch[] {
     sheet: `${index} / ${total}`,
     documentType,
     finish,
-    tolerances: 'ISO 2768-m',
+    tolerances: `ISO 2768-${derived.design.toleranceClass}`,
+    projection: derived.design.projection,
   });
   return [
     assemblySheet(derived, facts.name, common(1, 'Assembly drawing')),

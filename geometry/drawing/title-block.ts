@@ -22,6 +22,7 @@ export interface Sheet {
   readonly finish: string;
   readonly tolerances: string;
   readonly revision: string;
+  readonly projection: 'first' | 'third';
 }
 
 export const BLOCK = { w: 180, h: 42 } as const;
@@ -30,18 +31,44 @@ export function blockCorner({ width, height }: Paper): { x: number; y: number } 
   return { x: width - BORDER - BLOCK.w, y: height - BORDER - BLOCK.h };
 }
 
-/** First angle: the frustum's small end to the left, its circles to the right. */
-function firstAngle(x: number, y: number): Mark[] {
+/** Frustum and circles: in first angle the circles stand to its right, in third to its left. */
+function projectionSymbol(projection: Sheet['projection'], x: number, y: number): Mark[] {
+  const [cone, circles] = projection === 'first' ? [x, x + 14] : [x + 9, x + 2];
+  const dashed = [3, 1, 0.5, 1];
   return [
-    line(x, y - 1.5, x, y + 1.5, WIDE),
-    line(x + 7, y - 3, x + 7, y + 3, WIDE),
-    line(x, y - 1.5, x + 7, y - 3, WIDE),
-    line(x, y + 1.5, x + 7, y + 3, WIDE),
-    ring(x + 14, y, 3, WIDE),
-    ring(x + 14, y, 1.5, WIDE),
-    line(x - 2, y, x + 9, y, NARROW, [3, 1, 0.5, 1]),
-    line(x + 10, y, x + 18, y, NARROW, [3, 1, 0.5, 1]),
-    line(x + 14, y - 4, x + 14, y + 4, NARROW, [3, 1, 0.5, 1]),
+    line(cone, y - 1.5, cone, y + 1.5, WIDE),
+    line(cone + 7, y - 3, cone + 7, y + 3, WIDE),
+    line(cone, y - 1.5, cone + 7, y - 3, WIDE),
+    line(cone, y + 1.5, cone + 7, y + 3, WIDE),
+    ring(circles, y, 3, WIDE),
+    ring(circles, y, 1.5, WIDE),
+    line(cone - 2, y, cone + 9, y, NARROW, dashed),
+    line(circles - 4, y, circles + 4, y, NARROW, dashed),
+    line(circles, y - 4, circles, y + 4, NARROW, dashed),
+  ];
+}
+
+/** The revision table, over the title block: what is on this sheet. */
+export function revisionTable(
+  paper: Paper,
+  { revision, issued, creator, approved }: Sheet,
+): Mark[] {
+  const { x, y } = blockCorner(paper);
+  const [w, h] = [BLOCK.w, 5];
+  const top = y - 2 * h - 2;
+  const columns: [number, string, string][] = [
+    [0, 'Rev.', revision],
+    [20, 'Date', issued],
+    [60, 'Issued by', creator],
+    [110, 'Approved by', approved],
+  ];
+  return [
+    box(x, top, w, 2 * h, NARROW),
+    line(x, top + h, x + w, top + h, NARROW),
+    ...columns.flatMap(([at, label, value]) => [
+      text(x + at + 1.5, top + h - 1.6, label, 1.8),
+      text(x + at + 1.5, top + 2 * h - 1.6, value, 1.8),
+    ]),
   ];
 }
 
@@ -85,7 +112,7 @@ export function titleBlock(paper: Paper, sheet: Sheet): Mark[] {
   cell(150, 21, 15, 10.5, 'Rev.', sheet.revision);
   cell(165, 21, 15, 10.5, 'Sheet', sheet.sheet);
   marks.push(box(x + 105, y + 31.5, 75, 10.5, NARROW));
-  marks.push(...firstAngle(x + 110, y + 36.75));
-  marks.push(text(x + 135, y + 37.6, 'mm, first angle', 2.5));
+  marks.push(...projectionSymbol(sheet.projection, x + 110, y + 36.75));
+  marks.push(text(x + 135, y + 37.6, `mm, ${sheet.projection} angle`, 2.5));
   return marks;
 }

@@ -17,6 +17,10 @@ export { slugOf } from './file-name';
 
 const isCut = (part: Part): part is CutPart => part.kind === 'cut';
 
+/** Plain letters: old readers know no others. */
+const wordsFor = ({ key, quantity, material, thickness }: CutPart): string =>
+  `${key}: ${quantity} off, ${material} ${thickness} mm, nominal size, no kerf, units mm`;
+
 /** Cut parts of one material and thickness together, in the order in which they come. */
 export function bySheet(parts: readonly Part[]): CutPart[][] {
   const sheets = new Map<string, CutPart[]>();
@@ -35,14 +39,14 @@ export function cutFiles(designName: string, derived: Derived): CutFile[] {
     ...parts.filter(isCut).map((part) => ({
       base: partFileName(designName, part),
       label: `${part.label}: ${part.quantity} off, ${formatQuantity(part.thickness, 'length')} sheet`,
-      placements: placeInRow([part]),
+      placements: placeInRow([{ ...part, words: wordsFor(part) }]),
     })),
     ...bySheet(parts)
       .filter((together) => together.length > 1)
       .map((together) => ({
         base: sheetFileName(designName, together),
         label: `One of each part of ${formatQuantity(together[0]!.thickness, 'length')} ${together[0]!.material}, side by side`,
-        placements: placeInRow(together),
+        placements: placeInRow(together.map((part) => ({ ...part, words: part.key }))),
       })),
   ];
   const slug = slugOf(designName);

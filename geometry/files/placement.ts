@@ -2,7 +2,10 @@ import { contourBounds } from '../measure';
 import type { CutPart } from '../parts/part';
 
 /** What a cut file needs of a part. */
-export type FlatPart = Pick<CutPart, 'key' | 'outside' | 'holes'>;
+export interface FlatPart extends Pick<CutPart, 'key' | 'outside' | 'holes'> {
+  /** Written beside it, on a layer that is not cut. */
+  readonly words?: string;
+}
 
 /** A part and how far it is moved in a file, mm. */
 export interface Placement {

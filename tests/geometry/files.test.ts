@@ -60,11 +60,16 @@ describe.each<[string, Plate]>([
     expect(dxf.header.$MEASUREMENT).toBe(1);
   });
 
-  test('holds one closed outline and its holes as circles, nothing else', () => {
+  test('holds one closed outline and its holes as circles, nothing else to cut', () => {
     expect(outer).toHaveLength(1);
     expect(outer[0]!.shape).toBe(true);
     expect(circles).toHaveLength(plate.holes.length);
-    expect(dxf.entities).toHaveLength(1 + plate.holes.length);
+    const cut = dxf.entities.filter(({ layer }) => layer.endsWith('-CUT'));
+    expect(cut).toHaveLength(1 + plate.holes.length);
+    // Beside it words that no machine cuts.
+    expect(
+      dxf.entities.filter((entity) => !cut.includes(entity)).map(({ layer }) => layer),
+    ).toEqual(['NOTES']);
   });
 
   test('keeps outer and inner cuts on layers of their own', () => {
