@@ -58,6 +58,8 @@ export default function ItemDialog({
           ]),
         ),
       ) as Record<string, string | number>;
+      // Told here, before anything is sent; the server checks the same again.
+      shopKinds[kind].check(values);
       return saveShopItem(kind, item?.id ?? null, {
         name,
         values,

@@ -1,6 +1,11 @@
 import type { Parameter } from '@/geometry';
 import { formatQuantity } from '@/geometry';
-import { machineParameters, sheetParameters } from '@/geometry/cutting/shop-parameters';
+import {
+  checkMachine,
+  checkSheet,
+  machineParameters,
+  sheetParameters,
+} from '@/geometry/cutting/shop-parameters';
 import type { ShopItem, ShopKind } from '@/lib/schemas/shop';
 
 interface Kind {
@@ -9,6 +14,8 @@ interface Kind {
   readonly one: string;
   readonly empty: string;
   readonly parameters: Readonly<Record<string, Parameter>>;
+  /** @throws KernelError naming field, value and range */
+  readonly check: (values: Record<string, unknown>) => unknown;
   /** Which of them the table shows. */
   readonly shown: readonly string[];
 }
@@ -20,6 +27,7 @@ export const shopKinds: Readonly<Record<ShopKind, Kind>> = {
     empty:
       'No machine yet. Add the one that cuts your plates: its kerf and its smallest hole decide what a layout and its checks say.',
     parameters: machineParameters,
+    check: checkMachine,
     shown: ['process', 'kerf', 'smallestHole', 'bedWidth', 'bedHeight', 'reflective'],
   },
   sheets: {
@@ -27,6 +35,7 @@ export const shopKinds: Readonly<Record<ShopKind, Kind>> = {
     one: 'a sheet',
     empty: 'No sheet yet. Add what lies in the rack: layouts are made on its sizes.',
     parameters: sheetParameters,
+    check: checkSheet,
     shown: ['material', 'thickness', 'thicknessTolerance', 'width', 'height', 'count'],
   },
 };
