@@ -1,8 +1,8 @@
 'use client';
 
-import { Label, Radio, RadioGroup, Text } from 'react-aria-components/RadioGroup';
 import { useController, useFormContext } from 'react-hook-form';
 import { inputClass } from '@/components/ui/input-class';
+import { RadioRow } from '@/components/ui/radio-row';
 import type { ChoiceParameter } from '@/geometry';
 import type { Draft } from './draft';
 import { fieldId } from './focus-field';
@@ -21,31 +21,27 @@ export function RadioField({ path, parameter }: ChoiceProps) {
   const help = useHelp(path);
   const law = path.endsWith('.law');
   return (
-    <RadioGroup
+    <RadioRow
       id={fieldId(path)}
+      label={parameter.label}
+      labelClass={law ? 'sr-only' : 'text-ink-2'}
+      help={help}
+      options={parameter.options.map(({ value, label }) => ({
+        value,
+        content: (
+          <>
+            {law && <LawCurve law={value} />}
+            {label}
+          </>
+        ),
+      }))}
       value={String(field.value)}
       onChange={field.onChange}
       onBlur={field.onBlur}
-      orientation="horizontal"
       className="flex flex-col gap-1.5"
-    >
-      <Label className={law ? 'sr-only' : 'text-ink-2'}>{parameter.label}</Label>
-      <Text slot="description" className="sr-only">
-        {help}
-      </Text>
-      <div className="dense flex flex-wrap overflow-hidden rounded-[3px] border border-edge bg-white">
-        {parameter.options.map((option) => (
-          <Radio
-            key={option.value}
-            value={option.value}
-            className="relative flex min-h-9 grow cursor-pointer flex-col items-center justify-center gap-0.5 border-l border-line px-1 py-1.5 text-[0.8125rem] first:border-0 hover:bg-page max-bench:min-h-11 data-focus-visible:outline-2 data-focus-visible:-outline-offset-3 data-focus-visible:outline-action data-selected:bg-ink data-selected:text-white data-selected:data-focus-visible:outline-white"
-          >
-            {law && <LawCurve law={option.value} />}
-            {option.label}
-          </Radio>
-        ))}
-      </div>
-    </RadioGroup>
+      rowClass="dense flex flex-wrap overflow-hidden rounded-[3px] border border-edge bg-white"
+      optionClass="flex min-h-9 grow flex-col items-center justify-center gap-0.5 border-l border-line px-1 py-1.5 text-[0.8125rem] first:border-0 hover:bg-page max-bench:min-h-11 has-focus-visible:outline-2 has-focus-visible:-outline-offset-3 has-focus-visible:outline-action has-checked:bg-ink has-checked:text-white has-checked:has-focus-visible:outline-white"
+    />
   );
 }
 

@@ -1,6 +1,6 @@
 'use client';
 
-import { Label, Radio, RadioGroup } from 'react-aria-components/RadioGroup';
+import { RadioRow } from '@/components/ui/radio-row';
 
 /** Which section of the capacitor form, floor and chart show. */
 export function SectionPicker({
@@ -13,22 +13,18 @@ export function SectionPicker({
   onChange: (section: number) => void;
 }) {
   return (
-    <RadioGroup
+    <RadioRow
+      label="Section"
+      labelClass="font-semibold"
+      options={Array.from({ length: count }, (_, index) => ({
+        value: String(index),
+        content: index + 1,
+      }))}
       value={String(section)}
       onChange={(value) => onChange(Number(value))}
-      orientation="horizontal"
       className="flex items-center gap-2"
-    >
-      <Label className="font-semibold">Section</Label>
-      {Array.from({ length: count }, (_, index) => (
-        <Radio
-          key={index}
-          value={String(index)}
-          className="relative flex size-9 cursor-pointer items-center justify-center rounded-[3px] border border-edge bg-white max-bench:size-11 data-focus-visible:outline-2 data-focus-visible:outline-action data-selected:bg-ink data-selected:text-white"
-        >
-          {index + 1}
-        </Radio>
-      ))}
-    </RadioGroup>
+      rowClass="flex gap-2"
+      optionClass="flex size-9 items-center justify-center rounded-[3px] border border-edge bg-white max-bench:size-11 has-focus-visible:outline-2 has-focus-visible:outline-action has-checked:bg-ink has-checked:text-white"
+    />
   );
 }
