@@ -455,6 +455,13 @@ export const sharedParameters = {
     max: 100,
     default: 6,
   }),
+  altitude: altitude('envelope', {
+    label: 'Altitude of use',
+    min: 0,
+    max: 10e6,
+    default: 0,
+    cameLater: true,
+  }),
   material: choice<'brass' | 'aluminium' | 'copper' | 'steel'>('sheet', {
     label: 'Sheet',
     options: [
@@ -502,13 +509,6 @@ export const sharedParameters = {
       { value: 'steel', label: 'steel' },
     ],
     default: 'as-plates',
-    cameLater: true,
-  }),
-  altitude: altitude('envelope', {
-    label: 'Altitude of use',
-    min: 0,
-    max: 10e6,
-    default: 0,
     cameLater: true,
   }),
   spacerMake: choice<'turned' | 'cut'>('frame', {

@@ -23,19 +23,3 @@ export async function assemblyFile(
   bodies.updateMatrixWorld(true);
   return (await new GLTFExporter().parseAsync(bodies, { binary: true })) as ArrayBuffer;
 }
-
-/** Hands the file to the browser as a download. */
-export async function saveAssembly(
-  derived: Derived,
-  angle: number,
-  format: AssemblyFormat,
-): Promise<void> {
-  const bytes = await assemblyFile(derived, angle, format);
-  const type = format === 'glb' ? 'model/gltf-binary' : 'model/stl';
-  const address = URL.createObjectURL(new Blob([bytes], { type }));
-  const link = document.createElement('a');
-  link.href = address;
-  link.download = format === 'glb' ? 'assembly_metres.glb' : 'assembly_mm.stl';
-  link.click();
-  setTimeout(() => URL.revokeObjectURL(address), 60_000);
-}

@@ -84,8 +84,8 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
                 className="grow px-1.5! text-small!"
                 aria-label={`Save the assembly as ${format === 'glb' ? 'glTF, in metres' : 'STL, in mm'}`}
                 onPress={async () => {
-                  const { saveAssembly } = await import('./assembly-file');
-                  await saveAssembly(derived, store.get(), format);
+                  const { saveAssembly } = await import('./save-assembly');
+                  saveAssembly(derived, store.get(), format);
                 }}
               >
                 {format === 'glb' ? 'glTF' : 'STL'}
