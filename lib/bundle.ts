@@ -9,11 +9,17 @@ import type { HashedFile } from './design-files';
 const NO_TIME = new Date(Date.UTC(1980, 0, 1, 12));
 
 /** What the files hold, for a person and for a program. */
-function manifestOf(name: string, derived: Derived, files: readonly HashedFile[]): string {
+function manifestOf(
+  name: string,
+  version: number,
+  derived: Derived,
+  files: readonly HashedFile[],
+): string {
   const parts = partsOf(derived);
   return `${JSON.stringify(
     {
       design: name,
+      revision: version,
       kernel: derived.kernel,
       units: 'mm',
       kerf: 'nominal: no kerf is added or taken off',
@@ -42,12 +48,13 @@ function manifestOf(name: string, derived: Derived, files: readonly HashedFile[]
 /** All files of a design in one, with a manifest that names each by its hash. */
 export function bundleOf(
   name: string,
+  version: number,
   derived: Derived,
   files: readonly HashedFile[],
 ): { readonly name: string; readonly body: Buffer } {
   const folder = slugOf(name);
   const entries: Zippable = {
-    [`${folder}/manifest.json`]: strToU8(manifestOf(name, derived, files)),
+    [`${folder}/manifest.json`]: strToU8(manifestOf(name, version, derived, files)),
   };
   for (const { name: file, body } of files) entries[`${folder}/${file}`] = body;
   return {

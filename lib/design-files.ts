@@ -103,7 +103,7 @@ async function makeFiles(
     body: drawing,
     sha256: hashOf(drawing),
   });
-  const bundle = bundleOf(name, derived, files);
+  const bundle = bundleOf(name, stored.version, derived, files);
   return [
     ...files,
     {

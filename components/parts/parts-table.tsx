@@ -2,6 +2,7 @@ import { formatQuantity } from '@/geometry';
 import { billOf, type BillLine } from '@/geometry/parts/bill';
 import type { Part } from '@/geometry/parts/part';
 import { partMaterials } from './part-materials';
+import { PartPicture } from './part-picture';
 
 const made: Record<Part['kind'], string> = { cut: 'cut', turned: 'turned', bought: 'bought' };
 
@@ -21,12 +22,17 @@ function Line({ line }: { line: BillLine }) {
     <tr className="border-b border-line align-top">
       <td className="py-2 pr-3 text-right tabular-nums">{item}</td>
       <th scope="row" className="py-2 pr-4 text-left font-medium">
-        {part.label}
-        {part.note && (
-          <span className="block max-w-prose text-small font-normal text-ink-2">
-            {part.note}
+        <span className="flex items-center gap-3">
+          {part.kind === 'cut' && <PartPicture part={part} />}
+          <span>
+            {part.label}
+            {part.note && (
+              <span className="block max-w-prose text-small font-normal text-ink-2">
+                {part.note}
+              </span>
+            )}
           </span>
-        )}
+        </span>
       </th>
       <td className="py-2 pr-4 text-right tabular-nums">{part.quantity}</td>
       <td className="py-2 pr-4 whitespace-nowrap tabular-nums">{size}</td>
