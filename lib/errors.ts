@@ -22,8 +22,8 @@ export class RequestError extends Error {
   }
 }
 
-export const notFound = () =>
-  new RequestError('not-found', 'No such design in your workshop; it may have been deleted.');
+export const notFound = (what: 'design' | 'machine' | 'sheet' = 'design') =>
+  new RequestError('not-found', `No such ${what} in your workshop; it may have been deleted.`);
 
 const statuses: Record<ApiErrorCode, number> = {
   'bad-input': 422,

@@ -1,6 +1,7 @@
 import 'server-only';
 import { User, type ShopItem } from '@/entities';
 import { mayEdit, requireMember } from './access';
+import { changesBetween } from './changes';
 import { entityManager } from './db';
 import { badInput } from './errors';
 import { addRecord } from './record';
@@ -11,7 +12,11 @@ import {
 } from './schemas/shop';
 import { lockShopItem, refuseStaleItem, toShopItem } from './shop-items';
 
-/** Changes a machine or sheet, over the version it began from. @throws RequestError conflict */
+/**
+ * Changes a machine or sheet, over the version it began from. Saving what is stored already
+ * changes nothing.
+ * @throws RequestError conflict
+ */
 export async function saveShopItem(
   kind: ShopKind,
   id: string,
@@ -25,6 +30,12 @@ export async function saveShopItem(
     if (!parsed.success) throw badInput(parsed.error);
     const { name, version, values } = parsed.data;
     refuseStaleItem(stored, version);
+    const changes = changesBetween(
+      { name: stored.name, values: stored.values },
+      { name, values },
+    );
+    if (changes.length === 0) return toShopItem(stored);
+
     tx.assign(stored, {
       name,
       values: values as unknown as ShopItem['values'],
@@ -37,7 +48,7 @@ export async function saveShopItem(
       who: viewer.userId,
       what: 'item-saved',
       subject: id,
-      detail: { kind, name, values, version: stored.version },
+      detail: { kind, version: stored.version, changes },
     });
     await tx.flush();
     return toShopItem(stored);

@@ -49,13 +49,13 @@ export async function lockShopItem(
   kind: ShopKind,
   id: string,
 ): Promise<Loaded<ShopItem, 'updatedBy'>> {
-  if (!idSchema.safeParse(id).success) throw notFound();
+  if (!idSchema.safeParse(id).success) throw notFound(storedKind(kind));
   const stored = await tx.findOne(
     ShopItem,
     { id, workshop: viewer.workshopId, kind: storedKind(kind), deletedAt: null },
     { lockMode: LockMode.PESSIMISTIC_WRITE },
   );
-  if (!stored) throw notFound();
+  if (!stored) throw notFound(storedKind(kind));
   return tx.populate(stored, ['updatedBy']);
 }
 
