@@ -34,7 +34,7 @@ export default function ItemDialog({
   item: ShopItem | null;
   onClose: () => void;
 }) {
-  const { one, parameters } = shopKinds[kind];
+  const { one, parameters, hints } = shopKinds[kind];
   const client = useQueryClient();
   const [name, setName] = useState(item?.name ?? '');
   const [texts, setTexts] = useState<Record<string, string>>(() =>
@@ -100,6 +100,7 @@ export default function ItemDialog({
                 value={texts[key]!}
                 onChange={set(key)}
                 autoComplete="off"
+                {...(hints[key] && { description: hints[key] })}
               />
             ),
           )}

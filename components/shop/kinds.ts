@@ -1,5 +1,6 @@
 import type { Parameter } from '@/geometry';
 import { formatQuantity } from '@/geometry';
+import { toleranceOf } from '@/geometry/cutting/starting-values';
 import {
   checkMachine,
   checkSheet,
@@ -18,7 +19,13 @@ interface Kind {
   readonly check: (values: Record<string, unknown>) => unknown;
   /** Which of them the table shows. */
   readonly shown: readonly string[];
+  /** What to give where the label does not say it. */
+  readonly hints: Readonly<Record<string, string>>;
 }
+
+const standardTolerances = [0.5, 0.8, 1, 1.5, 2]
+  .map((thickness) => `± ${toleranceOf(thickness)} at ${thickness}`)
+  .join(', ');
 
 export const shopKinds: Readonly<Record<ShopKind, Kind>> = {
   machines: {
@@ -29,6 +36,13 @@ export const shopKinds: Readonly<Record<ShopKind, Kind>> = {
     parameters: machineParameters,
     check: checkMachine,
     shown: ['process', 'kerf', 'smallestHole', 'bedWidth', 'bedHeight', 'reflective'],
+    hints: {
+      kerf: 'Width of what a cut takes away, measured on the sheet you cut most.',
+      leadIn: 'From the piercing to the contour; 0 for none.',
+      bridges: 'They hold a part in its sheet until it is broken out; 0 leaves it loose.',
+      feed: 'Along the cut. With the piercings it gives the time of a sheet.',
+      pierceTime: 'Each piercing, until the cut begins.',
+    },
   },
   sheets: {
     title: 'Sheet in store',
@@ -37,6 +51,9 @@ export const shopKinds: Readonly<Record<ShopKind, Kind>> = {
     parameters: sheetParameters,
     check: checkSheet,
     shown: ['material', 'thickness', 'thicknessTolerance', 'width', 'height', 'count'],
+    hints: {
+      thicknessTolerance: `Aluminium alloys of group II to EN 485-4: ${standardTolerances} mm. Other metals as their own standard says.`,
+    },
   },
 };
 

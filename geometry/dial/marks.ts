@@ -1,12 +1,10 @@
 /** What a dial has to mark: values of the finished law, at the angles where they stand. */
 
 import type { SectionResult } from '../derived';
-import { resonantCapacitance, resonantFrequency } from '../resonance';
-
-export type DialQuantity = 'frequency' | 'wavelength' | 'capacitance';
-
-/** Speed of light, m/s (exact by the definition of the metre). */
-const LIGHT = 299_792_458;
+import { lawInverse } from './law-inverse';
+import { overlaps, type Box } from './box';
+import type { DialQuantity } from './quantity';
+import { roundness, steps } from './steps';
 
 export interface DialMark {
   /** Hz, m or F. */
@@ -18,111 +16,64 @@ export interface DialMark {
   readonly label: string | null;
 }
 
-/** Value of a dial's quantity for a total capacitance. @param inductance H */
-export function dialValue(total: number, quantity: DialQuantity, inductance: number): number {
-  if (quantity === 'capacitance') return total;
-  const frequency = resonantFrequency(total, inductance);
-  return quantity === 'frequency' ? frequency : LIGHT / frequency;
-}
-
-/** Scale from a value to what is written on the dial, by its largest value. */
-export function dialUnit(
-  quantity: DialQuantity,
-  largest: number,
-): { scale: number; unit: string } {
-  if (quantity === 'capacitance') return { scale: 1e12, unit: 'pF' };
-  if (quantity === 'wavelength') return { scale: 1, unit: 'm' };
-  return largest >= 3e6 ? { scale: 1e-6, unit: 'MHz' } : { scale: 1e-3, unit: 'kHz' };
-}
-
 export interface Spacing {
   /** Length along the scale for a shaft angle of 1 rad, mm. */
   readonly perRadian: number;
-  /** Nearest that two marks may stand, and room that a number takes, mm. */
+  /** Nearest that two marks may stand, mm. */
   readonly apart: number;
-  readonly numberRoom: number;
+  /** Paper that a number takes at a shaft angle, with the room about it. */
+  readonly boxOf: (label: string, angle: number) => Box;
 }
 
-/** Total capacitance for a value of a dial's quantity, F. */
-function totalFor(value: number, quantity: DialQuantity, inductance: number): number {
-  if (quantity === 'capacitance') return value;
-  return resonantCapacitance(quantity === 'frequency' ? value : LIGHT / value, inductance);
-}
-
-/** Divisions of a step, in turn: 10 into two 5s, 5 into five 1s, and so on. */
-const DIVISIONS = [2, 5] as const;
-const DEEPEST = 7;
+const written = (value: number): string => String(Number(value.toPrecision(6)));
 
 /**
- * Marks over the law of a finished section. Each step is divided again wherever all its parts
- * stand far enough apart, so that a crowded end has fewer; numbers stand at the roundest values
- * that leave room for them.
+ * Marks over the law of a finished section, in rising order of their values: as many as stand far
+ * enough apart, so that a crowded end has fewer; numbers in steps of their own, none over another.
+ * @throws DialError
  */
 export function dialMarks(
-  { law, inductance }: Pick<SectionResult, 'law' | 'inductance'>,
+  section: Pick<SectionResult, 'law' | 'inductance'>,
   quantity: DialQuantity,
-  { perRadian, apart, numberRoom }: Spacing,
+  { perRadian, apart, boxOf }: Spacing,
 ): DialMark[] {
-  const coil = inductance ?? 1;
-  const inside = law.angle.flatMap((angle, i) =>
-    angle >= law.from - 1e-12 && angle <= law.to + 1e-12 ? [i] : [],
+  const { low, high, scale, angleAt } = lawInverse(section, quantity);
+  const along = (value: number): number => angleAt(value) * perRadian;
+  const values = steps(low, high, (some) =>
+    some.every((value, i) => i === 0 || Math.abs(along(value) - along(some[i - 1]!)) >= apart),
   );
-  const angles = inside.map((i) => law.angle[i]!);
-  const totals = inside.map((i) => law.achieved[i]!);
-  const ends = [
-    dialValue(totals[0]!, quantity, coil),
-    dialValue(totals.at(-1)!, quantity, coil),
-  ];
-  const { scale } = dialUnit(quantity, Math.max(...ends));
-  const [low, high] = [Math.min(...ends) * scale, Math.max(...ends) * scale];
-
-  const angleAt = (value: number): number => {
-    const total = totalFor(value / scale, quantity, coil);
-    let i = 1;
-    while (i < totals.length - 1 && totals[i]! < total) i += 1;
-    const [a, b] = [totals[i - 1]!, totals[i]!];
-    return angles[i - 1]! + ((total - a) / (b - a)) * (angles[i]! - angles[i - 1]!);
-  };
-  const within = (value: number): boolean =>
-    value >= low * (1 - 1e-9) && value <= high * (1 + 1e-9);
-  const far = (a: number, b: number, room: number): boolean =>
-    Math.abs(angleAt(a) - angleAt(b)) * perRadian >= room;
-
-  /** Value and the depth at which it came: 0 for the roundest. */
-  const found = new Map<number, number>();
-  const divide = (from: number, step: number, depth: number): void => {
-    if (depth > DEEPEST) return;
-    const parts = DIVISIONS[depth % 2]!;
-    const fine = step / parts;
-    const all = Array.from({ length: parts + 1 }, (_, k) => from + k * fine).filter(within);
-    if (all.some((value, i) => i > 0 && !far(all[i - 1]!, value, apart))) return;
-    for (let k = 1; k < parts; k++) {
-      const value = Number((from + k * fine).toPrecision(12));
-      if (within(value)) found.set(value, depth + 1);
-    }
-    for (let k = 0; k < parts; k++) {
-      const begin = from + k * fine;
-      if (begin < high && begin + fine > low) divide(begin, fine, depth + 1);
-    }
-  };
-  const step = 10 ** Math.ceil(Math.log10(high - low));
-  for (let k = Math.floor(low / step); k * step <= high; k++) {
-    if (within(k * step)) found.set(k * step, 0);
-    divide(k * step, step, 0);
-  }
-
-  const values = [...found.keys()].sort((a, b) => found.get(a)! - found.get(b)! || a - b);
-  const numbers: number[] = [];
-  for (const value of values) {
-    if (numbers.every((other) => far(other, value, numberRoom))) numbers.push(value);
-  }
-  return values.map((value): DialMark => {
-    const numbered = numbers.includes(value);
+  const marked = new Set(values);
+  const box = (value: number): Box => boxOf(written(value), angleAt(value));
+  const numbered = new Set(
+    steps(low, high, (some) => {
+      if (!some.every((value) => marked.has(value))) return false;
+      const boxes = some.map(box);
+      // On a dial of nearly a full turn the first may meet the last.
+      return boxes.every((one, i) => boxes.slice(i + 1).every((other) => !overlaps(one, other)));
+    }),
+  );
+  const free = unhindered([...numbered], box);
+  return values.map((value, i): DialMark => {
+    const label = free.has(value);
+    const neighbours = [values[i - 1], values[i + 1]].filter((other) => other !== undefined);
+    const finest = Math.min(...neighbours.map((other) => Math.abs(other - value)));
+    const times = roundness(value) / finest;
     return {
       value: value / scale,
       angle: angleAt(value),
-      rank: numbered ? 'long' : found.get(value)! % 2 === 1 ? 'middle' : 'short',
-      label: numbered ? String(Number(value.toPrecision(6))) : null,
+      rank: label || times > 9.9 ? 'long' : times > 4.9 ? 'middle' : 'short',
+      label: label ? written(value) : null,
     };
   });
+}
+
+/** Steps are looked at one by one; where two of them meet over a gap, the rounder number stays. */
+function unhindered(values: readonly number[], box: (value: number) => Box): Set<number> {
+  const kept = new Map<number, Box>();
+  const byRoundness = [...values].sort((a, b) => roundness(b) - roundness(a) || a - b);
+  for (const value of byRoundness) {
+    const own = box(value);
+    if (![...kept.values()].some((other) => overlaps(own, other))) kept.set(value, own);
+  }
+  return new Set(kept.keys());
 }
