@@ -87,7 +87,9 @@ test('voltages stand side by side and say that they are no rating', async ({ pag
   await makeDesign(page, 'High');
   const tool = await openTool(page, 'Voltage, loss and drift', 'Voltage, loss and drift');
   // Paschen's law for 0.5 mm, IEC 60664-1 for square edges; tests/references has the values.
-  await expect(tool.getByRole('row', { name: /Paschen/ })).toContainText('2.88 kV');
+  await expect(tool.getByRole('row', { name: /breaks down: Paschen/ })).toContainText(
+    '2.88 kV',
+  );
   await expect(tool.getByRole('row', { name: /square cut edges/ })).toContainText('1.27 kV');
   await expect(tool.getByText(/None of these is a rating/)).toBeVisible();
   await expect(tool.getByText('Capacitance of the plates', { exact: true })).toBeVisible();
@@ -100,7 +102,9 @@ test('voltages stand side by side and say that they are no rating', async ({ pag
   await altitude.fill('3 km');
   await altitude.press('Tab');
   await expect(page.getByText('Altitude of use set to 3000 m.')).toBeVisible();
-  await expect(tool.getByRole('row', { name: /Paschen/ })).toContainText('2.16 kV');
+  await expect(tool.getByRole('row', { name: /breaks down: Paschen/ })).toContainText(
+    '2.16 kV',
+  );
   await expect(tool.getByRole('row', { name: /square cut edges/ })).toContainText('1.22 kV');
   await tool.getByLabel('Working frequency').fill('7 MHz');
   await tool.getByLabel('Working frequency').press('Enter');
