@@ -1,6 +1,7 @@
 import 'server-only';
 import { createHash } from 'node:crypto';
-import { DialError, dialOf } from '@/geometry/dial/dial';
+import { dialOf } from '@/geometry/dial/dial';
+import { DialError } from '@/geometry/dial/settings';
 import { slugOf } from '@/geometry/files';
 import { mayDownload, requireMember } from './access';
 import { entityManager } from './db';

@@ -49,7 +49,9 @@ export function dialMarks(
       if (!some.every((value) => marked.has(value))) return false;
       const boxes = some.map(box);
       // On a dial of nearly a full turn the first may meet the last.
-      return boxes.every((one, i) => boxes.slice(i + 1).every((other) => !overlaps(one, other)));
+      return boxes.every((one, i) =>
+        boxes.slice(i + 1).every((other) => !overlaps(one, other)),
+      );
     }),
   );
   const free = unhindered([...numbered], box);

@@ -46,7 +46,8 @@ const names = {
 
 /** @throws DialError */
 export function checkSettings(settings: DialSettings): void {
-  const counts = settings.form === 'round' ? (['radius', 'hole'] as const) : (['drum'] as const);
+  const counts =
+    settings.form === 'round' ? (['radius', 'hole'] as const) : (['drum'] as const);
   for (const key of ['ratio', ...counts] as const) {
     const [least, most] = dialBounds[key];
     const value = settings[key];

@@ -31,15 +31,20 @@ export function steps(
     const halves = range(start, 5 * unit, 2);
     if (!fits(halves)) return;
     const ones = [0, 5].map((half) => range(start + half * unit, unit, 5));
-    const both = ones.map(fits);
+    const fine = ones.map((half) => half.length > 0 && fits(half));
     const twos = range(start, 2 * unit, 5);
-    if (!both.some(Boolean) && fits(twos)) {
+    if (!fine.some(Boolean) && fits(twos)) {
       take(twos);
       return;
     }
     take(halves);
-    both.forEach((fine, half) => {
-      if (!fine) return;
+    fine.forEach((divided, half) => {
+      if (!divided) {
+        // Beside a half in ones, this one in the twos that lie in it.
+        const coarse = ones[half]!.filter((v) => twos.includes(v) || halves.includes(v));
+        if (fits(coarse)) take(coarse);
+        return;
+      }
       take(ones[half]!);
       for (let k = 0; k < 5; k++) {
         divide(clean(start + (5 * half + k) * unit), unit / 10, depth + 1);

@@ -43,6 +43,9 @@ test('a dial comes as PDF of its true size; what can’t be is told', async () =
     ratio: '1',
     drum: '100',
     sense: 'clockwise',
+    moves: 'pointer',
+    place: 'upper',
+    open: '0',
     hole: '6',
   };
   const made = await call(DIAL, { id }, { query });

@@ -46,6 +46,9 @@ const dial = {
   ratio: '1',
   drum: '100',
   sense: 'clockwise',
+  moves: 'pointer',
+  place: 'upper',
+  open: '0',
   hole: '6',
 };
 

@@ -4,13 +4,12 @@ import { useParams } from 'next/navigation';
 import { useMemo, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
-import { SelectField } from '@/components/ui/select-field';
-import { TextField } from '@/components/ui/text-field';
-import { DialError, dialOf, type DialSettings } from '@/geometry/dial/dial';
+import { dialOf } from '@/geometry/dial/dial';
+import { DialError, type DialSettings } from '@/geometry/dial/settings';
 import type { Sketch } from '@/geometry/sketch/sketch';
 import { sketchSvg } from '@/geometry/sketch/svg';
-import { NumberField } from '../number-field';
 import type { ToolProps } from '../tool-props';
+import { DialFields } from './dial-fields';
 
 type Made =
   | { readonly sketch: Sketch; readonly trouble: null }
@@ -28,6 +27,21 @@ function save(svg: string): void {
 const texts = (settings: DialSettings): Record<string, string> =>
   Object.fromEntries(Object.entries(settings).map(([key, value]) => [key, String(value)]));
 
+/** ISO 216 sheets that printers take, by what they print with 10 mm of border all round. */
+const papers = [
+  { name: 'A4', short: 190, long: 277 },
+  { name: 'A3', short: 277, long: 400 },
+] as const;
+
+function paperWords({ width, height }: Sketch): string {
+  const [short, long] = width < height ? [width, height] : [height, width];
+  const paper = papers.find((one) => short <= one.short && long <= one.long);
+  const size = `${Math.ceil(width)} × ${Math.ceil(height)} mm`;
+  return paper
+    ? `${size}: prints on ${paper.name}.`
+    : `${size}: larger than A3, so print it on a roll or in tiles.`;
+}
+
 /** A dial to print, with its marks where the finished plates have their values. */
 export default function DialTool({ derived, section }: ToolProps) {
   const { id } = useParams<{ id: string }>();
@@ -35,15 +49,16 @@ export default function DialTool({ derived, section }: ToolProps) {
   const [settings, setSettings] = useState<DialSettings>({
     quantity: result?.inductance === null ? 'capacitance' : 'frequency',
     form: 'round',
+    moves: 'pointer',
+    sense: 'clockwise',
     radius: 55,
+    place: 'upper',
+    open: 0,
     ratio: 1,
     drum: 150,
-    sense: 'clockwise',
     hole: derived ? derived.design.shaftDiameter + 0.5 : 6.5,
     title: '',
   });
-  const set = (change: Partial<DialSettings>) =>
-    setSettings((before) => ({ ...before, ...change }));
 
   const made = useMemo((): Made | null => {
     if (!derived || !result) return null;
@@ -59,89 +74,16 @@ export default function DialTool({ derived, section }: ToolProps) {
   const svg = made.sketch && sketchSvg(made.sketch);
   return (
     <>
-      <div className="grid grid-cols-2 gap-3">
-        <SelectField
-          label="Marks"
-          value={settings.quantity}
-          options={[
-            { value: 'frequency', label: 'frequency' },
-            { value: 'wavelength', label: 'wavelength' },
-            { value: 'capacitance', label: 'capacitance' },
-          ]}
-          onChange={(quantity) => set({ quantity })}
-        />
-        <SelectField
-          label="Scale"
-          value={settings.form}
-          options={[
-            { value: 'round', label: 'round' },
-            { value: 'straight', label: 'straight, by a cord' },
-          ]}
-          onChange={(form) => set({ form })}
-        />
-        {settings.form === 'round' ? (
-          <>
-            <NumberField
-              label="Radius, mm"
-              value={settings.radius}
-              min={15}
-              max={200}
-              onChange={(radius) => set({ radius })}
-            />
-            <NumberField
-              label="Hole, mm"
-              value={settings.hole}
-              min={0}
-              max={60}
-              onChange={(hole) => set({ hole })}
-            />
-          </>
-        ) : (
-          <NumberField
-            label="Drum, mm round"
-            value={settings.drum}
-            min={10}
-            max={2000}
-            onChange={(drum) => set({ drum })}
-          />
-        )}
-        <NumberField
-          label="Turns for one of the shaft"
-          value={settings.ratio}
-          min={0.01}
-          max={100}
-          onChange={(ratio) => set({ ratio })}
-        />
-        <SelectField
-          label="With the shaft meshing it goes"
-          value={settings.sense}
-          options={
-            settings.form === 'round'
-              ? [
-                  { value: 'clockwise', label: 'clockwise' },
-                  { value: 'anticlockwise', label: 'anticlockwise' },
-                ]
-              : [
-                  { value: 'clockwise', label: 'to the right' },
-                  { value: 'anticlockwise', label: 'to the left' },
-                ]
-          }
-          onChange={(sense) => set({ sense })}
-        />
-        <TextField
-          label="Lettering"
-          value={settings.title}
-          maxLength={40}
-          autoComplete="off"
-          onChange={(title) => set({ title })}
-        />
-      </div>
+      <DialFields
+        settings={settings}
+        onChange={(change) => setSettings((before) => ({ ...before, ...change }))}
+      />
       {made.trouble !== null && (
         <p role="alert" className="text-bad">
           {made.trouble}
         </p>
       )}
-      {svg && (
+      {made.sketch && svg && (
         <>
           <div
             role="img"
@@ -149,6 +91,7 @@ export default function DialTool({ derived, section }: ToolProps) {
             className="border border-line bg-white [&_svg]:h-auto [&_svg]:w-full"
             dangerouslySetInnerHTML={{ __html: svg }}
           />
+          <p>{paperWords(made.sketch)}</p>
           <p className="flex flex-wrap gap-2">
             <Button look="action" onPress={() => save(svg)}>
               Save as SVG, true size
@@ -166,7 +109,8 @@ export default function DialTool({ derived, section }: ToolProps) {
       <p className="text-small text-ink-2">
         Marks follow the finished plates with their trimmer set. The built one differs by its
         tolerances and by what is in the circuit: correct the stray or the frame’s allowance by
-        what you measure, and print it again. Check the printed size at the bar.
+        what you measure, and print it again. A pair of gears turns the sense round: give the
+        sense of what you see move. Check the printed size at the bar.
       </p>
     </>
   );
