@@ -4,11 +4,10 @@ import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
-import { GET as DIAL } from '@/app/api/designs/[id]/dial/route';
 import { GET as DOWNLOAD } from '@/app/api/designs/[id]/files/[name]/route';
 import { GET as LIST } from '@/app/api/designs/[id]/files/route';
 import { designFilesSchema } from '@/lib/schemas/api';
-import { call, refusal } from '../support/call';
+import { call } from '../support/call';
 import { Cast } from '../support/cast';
 
 let bytes: Buffer;
@@ -29,35 +28,6 @@ afterAll(() => rmSync(folder, { recursive: true }));
 test('it is a PDF with an embedded face', () => {
   expect(bytes.subarray(0, 5).toString()).toBe('%PDF-');
   expect(bytes.toString('latin1')).toContain('/FontFile2');
-});
-
-test('a dial comes as PDF of its true size; what can’t be is told', async () => {
-  const cast = await Cast.gather();
-  const id = await cast.design();
-  cast.ask('builder');
-  const query = {
-    section: '0',
-    quantity: 'frequency',
-    form: 'round',
-    radius: '50',
-    ratio: '1',
-    drum: '100',
-    sense: 'clockwise',
-    moves: 'pointer',
-    place: 'upper',
-    open: '0',
-    hole: '6',
-  };
-  const made = await call(DIAL, { id }, { query });
-  expect(made.status).toBe(200);
-  const pdf = Buffer.from(await made.arrayBuffer()).toString('latin1');
-  // 2 × (50 + 10) mm across, in points of 1/72 inch.
-  const [, width] = /MediaBox \[0 0 ([\d.]+) /.exec(pdf)!;
-  expect((Number(width) * 25.4) / 72).toBeCloseTo(120, 3);
-  const refused = await call(DIAL, { id }, { query: { ...query, ratio: '9' } });
-  expect(refused.status).toBe(422);
-  expect((await refusal(refused)).message).toContain('turn more than once');
-  expect((await call(DIAL, { id }, { query: { ...query, form: 'oval' } })).status).toBe(422);
 });
 
 const hasPoppler = spawnSync('pdftoppm', ['-v']).status === 0;
