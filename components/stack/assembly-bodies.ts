@@ -16,6 +16,9 @@ function colourOf(part: Part): string {
   return colours[part.material] ?? '#c9d0d2';
 }
 
+/** mm. Arcs are chords in these files; this near, a fit is checked by them and not by the chords. */
+const SAGITTA = 0.01;
+
 /** Every part that has a place as a body of its own, mm, shaft along z, at a shaft angle (rad). */
 export function assemblyBodies(derived: Derived, angle: number): Group {
   const { parts, placed } = assemblyOf(derived);
@@ -34,7 +37,8 @@ export function assemblyBodies(derived: Derived, angle: number): Group {
     const shapes = new Map<string, BufferGeometry>();
     places.forEach(({ x, y, from, to, angle: own, turns }, i) => {
       const key = (to - from).toFixed(6);
-      const shape = shapes.get(key) ?? plateGeometry({ ...plan, thickness: to - from });
+      const shape =
+        shapes.get(key) ?? plateGeometry({ ...plan, thickness: to - from }, SAGITTA);
       shapes.set(key, shape);
       const mesh = new Mesh(shape, material);
       mesh.name = `${part.key}-${i + 1}`;

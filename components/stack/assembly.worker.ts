@@ -8,7 +8,14 @@ export interface AssemblyQuestion {
   readonly format: AssemblyFormat;
 }
 
+export type AssemblyAnswer = { readonly bytes: ArrayBuffer } | { readonly failure: string };
+
+const answer = (said: AssemblyAnswer): void => postMessage(said);
+
 addEventListener('message', ({ data }: MessageEvent<AssemblyQuestion>) => {
   const { derived, angle, format } = data;
-  void assemblyFile(derived, angle, format).then((bytes) => postMessage(bytes));
+  assemblyFile(derived, angle, format).then(
+    (bytes) => answer({ bytes }),
+    (error: unknown) => answer({ failure: String(error) }),
+  );
 });

@@ -18,17 +18,22 @@ function reach(contour: Contour): number {
   return contour.vertices.reduce((most, { x, y }) => Math.max(most, Math.hypot(x, y)), 0);
 }
 
-/** One plate as a body with its middle at z = 0, mm. The caller disposes of it. */
-export function plateGeometry({
-  outside,
-  holes,
-  thickness,
-}: {
-  readonly outside: Contour;
-  readonly holes: readonly Contour[];
-  readonly thickness: number;
-}): BufferGeometry {
-  const sagitta = CHORD_SHARE * reach(outside);
+/**
+ * One plate as a body with its middle at z = 0, mm. The caller disposes of it.
+ * @param sagitta largest distance of a chord from its arc, mm; without it, what a picture needs
+ */
+export function plateGeometry(
+  {
+    outside,
+    holes,
+    thickness,
+  }: {
+    readonly outside: Contour;
+    readonly holes: readonly Contour[];
+    readonly thickness: number;
+  },
+  sagitta = CHORD_SHARE * reach(outside),
+): BufferGeometry {
   const rim = corners(outside, sagitta);
   // Holes run the other way round, so that their walls, too, face away from the metal.
   const bores = holes.map((hole) => corners(hole, sagitta / 4).reverse());

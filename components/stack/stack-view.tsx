@@ -5,6 +5,7 @@ import type { Derived } from '@/geometry';
 import type { AngleStore } from '@/components/floor/angle-store';
 import { toDegrees } from '@/components/floor/degrees';
 import { Button } from '@/components/ui/button';
+import { AssemblyLinks } from './assembly-links';
 import type { EyeHandle } from './eye';
 import { Scene } from './scene';
 import { StackCanvas } from './stack-canvas';
@@ -77,21 +78,8 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
             >
               Further
             </Button>
-            {(['glb', 'stl'] as const).map((format) => (
-              <Button
-                key={format}
-                look="quiet"
-                className="grow px-1.5! text-small!"
-                aria-label={`Save the assembly as ${format === 'glb' ? 'glTF, in metres' : 'STL, in mm'}`}
-                onPress={async () => {
-                  const { saveAssembly } = await import('./save-assembly');
-                  saveAssembly(derived, store.get(), format);
-                }}
-              >
-                {format === 'glb' ? 'glTF' : 'STL'}
-              </Button>
-            ))}
           </div>
+          <AssemblyLinks derived={derived} store={store} />
         </>
       ) : (
         <p className="m-auto max-w-sm p-4 text-ink-2">
