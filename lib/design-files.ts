@@ -8,6 +8,7 @@ import { describeFailure } from './assess-design';
 import { bundleOf } from './bundle';
 import { deriveDesign } from './derive-design';
 import { notFound, RequestError } from './errors';
+import { filePartsOf } from './file-parts';
 import { findDesign } from './queries';
 import { sketchesPdf } from './drawing-pdf';
 import type { DesignFiles, DesignRecord } from './schemas/api';
@@ -42,6 +43,7 @@ const materials: Readonly<Record<string, string>> = {
   ),
   insulator: 'Insulating sheet',
 };
+const materialWords = (material: string): string => materials[material] ?? material;
 
 /** The drawing of a stored version: the same version gives the same bytes. */
 function drawingFile(stored: DesignRecord, owner: string, derived: Derived): Promise<Buffer> {
@@ -54,7 +56,7 @@ function drawingFile(stored: DesignRecord, owner: string, derived: Derived): Pro
     issued: updatedAt.slice(0, 10),
     creator: updatedBy.name,
     approved: '',
-    materialOf: (material) => materials[material] ?? material,
+    materialOf: materialWords,
   });
   return sketchesPdf(sketches, { title: name, author: owner, issued: new Date(updatedAt) });
 }
@@ -121,7 +123,8 @@ export async function listFiles(id: string): Promise<DesignFiles> {
   const viewer = await requireMember(mayDownload);
   const stored = await findDesign(viewer, id);
   if (!stored) throw notFound();
-  const files = await hashedFiles(stored, viewer.workshopName, derivePlates(stored.design));
+  const derived = derivePlates(stored.design);
+  const files = await hashedFiles(stored, viewer.workshopName, derived);
   return {
     version: stored.version,
     files: files.map(({ name, label, kind, body, sha256 }) => ({
@@ -131,5 +134,6 @@ export async function listFiles(id: string): Promise<DesignFiles> {
       bytes: body.byteLength,
       sha256,
     })),
+    parts: filePartsOf(stored.name, derived, materialWords),
   };
 }

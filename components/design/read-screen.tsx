@@ -5,11 +5,10 @@ import { LocalTime } from '@/components/ui/local-time';
 import { StatusBadge } from '@/components/ui/status-badge';
 import type { Derivation } from '@/geometry';
 import type { DesignFiles, DesignRecord } from '@/lib/schemas/api';
-import { FilesPanel } from './files-panel';
+import { CutList } from './cut-list';
 import { ParameterList } from './parameter-list';
 import { PlatesColumn } from './plates-column';
 import { SectionPicker } from './section-picker';
-import { PanelSection } from './panel-section';
 import { SidePanel } from './side-panel';
 import { useAngleStore } from './use-angle-store';
 import { useDerivation } from './use-derivation';
@@ -56,15 +55,13 @@ export function ReadScreen({
       </div>
       <div className="grid min-h-0 grow bench:grid-cols-[19.5rem_minmax(0,1fr)_20.5rem] bench:grid-rows-[minmax(0,1fr)]">
         <div className="contents bench:flex bench:flex-col bench:gap-5 bench:overflow-y-auto bench:px-5 bench:py-4">
-          <div className="max-bench:px-5 max-bench:py-4">
-            <PanelSection title="Files to cut from">
-              {record.status === 'draft' && (
-                <p className="border-l-4 border-warn bg-warn-tint px-3 py-2">
-                  A draft: ask the builder before cutting from it.
-                </p>
-              )}
-              <FilesPanel record={record} first={files} dirty={false} />
-            </PanelSection>
+          <div className="flex flex-col gap-5 max-bench:px-5 max-bench:py-4">
+            <CutList
+              record={record}
+              first={files}
+              derived={plates.current ? plates.derived : null}
+              section={shown}
+            />
           </div>
           <div className="flex flex-col gap-5 max-bench:order-last max-bench:px-5 max-bench:py-4">
             {count > 1 && <SectionPicker count={count} section={shown} onChange={setSection} />}

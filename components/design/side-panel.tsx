@@ -5,7 +5,6 @@ import type { ReactNode } from 'react';
 import type { AngleStore } from '@/components/floor/angle-store';
 import type { Finding } from '@/geometry';
 import { ToolLinks } from '@/components/tools/tool-links';
-import { Cautions } from './cautions';
 import { StackFigures } from './figures';
 import { FindingsList } from './findings-list';
 import { PanelSection } from './panel-section';
@@ -67,7 +66,6 @@ export function SidePanel({
         </>
       )}
       {children}
-      <Cautions />
     </div>
   );
 }

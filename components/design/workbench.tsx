@@ -7,6 +7,7 @@ import type { Derivation, Finding } from '@/geometry';
 import { OpenToolContext, ToolLinks } from '@/components/tools/tool-links';
 import type { ToolName } from '@/components/tools/places';
 import type { DesignFiles, DesignRecord } from '@/lib/schemas/api';
+import { Cautions } from './cautions';
 import { ChosenContext, useChosenValues } from './chosen-values';
 import { DesignBar } from './design-bar';
 import { DesignForm } from './design-form';
@@ -135,6 +136,7 @@ export function Workbench({
                 <FilesPanel record={saving.stored} first={files} dirty={saving.dirty} />
                 <ToolLinks place="files" />
               </PanelSection>
+              <Cautions />
             </SidePanel>
           </div>
         </div>

@@ -7,6 +7,7 @@ import { contoursApart, held, type Held } from './apart';
 import { selfCrossing } from './crossing';
 import type { CuttingFinding } from './cutting-finding';
 import type { Machine } from './machine';
+import { isBright } from './material-caution';
 import { narrowest } from './narrow';
 import { offsetContour } from './offset';
 import { sidesOf } from './side';
@@ -135,8 +136,6 @@ function kerfFindings(part: CutPart, { kerf }: Machine): CuttingFinding[] {
   ];
 }
 
-const REFLECTIVE = ['brass', 'copper', 'aluminium'];
-
 function materialFindings(part: CutPart, machine: Machine): CuttingFinding[] {
   if (machine.process !== 'laser') return [];
   const without = { part: part.key, value: null, limit: null, quantity: 'count' } as const;
@@ -152,7 +151,7 @@ function materialFindings(part: CutPart, machine: Machine): CuttingFinding[] {
       },
     ];
   }
-  if (machine.reflective || !REFLECTIVE.includes(part.material)) return [];
+  if (machine.reflective || !isBright(part.material)) return [];
   return [
     {
       ...without,

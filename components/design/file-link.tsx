@@ -1,0 +1,31 @@
+import type { DesignFiles } from '@/lib/schemas/api';
+
+export type ListedFile = DesignFiles['files'][number];
+
+const kinds = {
+  dxf: 'DXF',
+  svg: 'SVG',
+  csv: 'CSV',
+  json: 'JSON',
+  pdf: 'PDF',
+  zip: 'ZIP',
+} as const;
+
+function size(bytes: number): string {
+  return bytes < 1000 ? `${bytes} B` : `${Number((bytes / 1000).toPrecision(2))} kB`;
+}
+
+/** One format to download, large enough for a glove. */
+export function FileLink({ id, file }: { id: string; file: ListedFile }) {
+  return (
+    <a
+      href={`/api/designs/${id}/files/${encodeURIComponent(file.name)}`}
+      download={file.name}
+      aria-label={`${kinds[file.kind]}, ${file.label}`}
+      className="flex min-h-11 grow items-center justify-center gap-2 rounded-[3px] border border-edge bg-white px-3 text-ink no-underline hover:border-action"
+    >
+      <span className="font-semibold text-action">{kinds[file.kind]}</span>
+      <span className="text-small text-ink-2">{size(file.bytes)}</span>
+    </a>
+  );
+}
