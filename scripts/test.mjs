@@ -49,7 +49,7 @@ await runUntilStopped(async () => {
 
   await verify();
   await unused();
-  await vitest('house', ['house']);
+  await vitest('layout and house', ['layout', 'house']);
 
   const cluster = await startThrowawayPostgres();
   await vitest('route', ['routes'], { TEST_DATABASE_URL: cluster.ensureDatabase('template') });
