@@ -42,6 +42,21 @@ test('a machinist gets every file, byte for byte as listed, and the record has i
   expect(rows.every(({ who }) => who.id === cast.person('machinist').id)).toBe(true);
 });
 
+test('every cut part is listed with its own files, as many and as large as they say', async () => {
+  const id = await cast.design();
+  cast.ask('machinist');
+  const { files, parts } = designFilesSchema.parse(await (await call(LIST, { id })).json());
+  expect(parts.map(({ label }) => label)).toContain('Rotor plate, section 1');
+  for (const { stem, quantity, thickness, picture } of parts) {
+    expect(stem).toContain(`_${thickness.toFixed(2)}mm_${quantity}off`);
+    expect(files.map(({ name }) => name)).toContain(`${stem}.dxf`);
+    const svg = await (await call(DOWNLOAD, { id, name: `${stem}.svg` })).text();
+    const [, width, height] = /width="([\d.]+)mm" height="([\d.]+)mm"/.exec(svg)!.map(Number);
+    expect(picture.width).toBeCloseTo(width!, 3);
+    expect(picture.height).toBeCloseTo(height!, 3);
+  }
+});
+
 test('who has it already gets no second copy, and the record says so all the same', async () => {
   const id = await cast.design();
   cast.ask('builder');
