@@ -50,7 +50,11 @@ export function AppliedField({
       autoComplete="off"
       onChange={setTyped}
       onBlur={() => typed !== null && void take(typed)}
-      onKeyDown={({ key }) => key === 'Enter' && typed !== null && void take(typed)}
+      onKeyDown={(event) => {
+        if (event.key === 'Enter' && typed !== null) void take(typed);
+        // The library keeps a key to the field otherwise; Escape closes the tool round it.
+        else event.continuePropagation();
+      }}
       errorMessage={
         wrong === null || wrong !== typed
           ? undefined
