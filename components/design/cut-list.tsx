@@ -46,7 +46,7 @@ export function CutList({
         </p>
         {derived && (
           <Button className="min-h-12 self-stretch" onPress={() => setLaying(true)}>
-            Lay out on sheets, with kerf
+            Lay out on sheets
           </Button>
         )}
         {query.isPending && <p>Making the list of files</p>}

@@ -14,7 +14,7 @@ function Picture({ part: { label, picture } }: { part: FilePart }) {
       viewBox={`${x - round} ${y - round} ${width + 2 * round} ${height + 2 * round}`}
       role="img"
       aria-label={`Outline of ${label}, ${width.toFixed(1)} × ${height.toFixed(1)} mm`}
-      className="h-40 min-w-0 grow basis-0 border border-line bg-white p-1.5 bench:h-32"
+      className="h-40 w-0 grow border border-line bg-white p-1.5 bench:h-32"
     >
       <path
         d={path}

@@ -55,7 +55,7 @@ export function ReadScreen({
       </div>
       <div className="grid min-h-0 grow bench:grid-cols-[19.5rem_minmax(0,1fr)_20.5rem] bench:grid-rows-[minmax(0,1fr)]">
         <div className="contents bench:flex bench:flex-col bench:gap-5 bench:overflow-y-auto bench:px-5 bench:py-4">
-          <div className="flex flex-col gap-5 max-bench:px-5 max-bench:py-4">
+          <div className="flex min-w-0 flex-col gap-5 max-bench:px-5 max-bench:py-4">
             <CutList
               record={record}
               first={files}

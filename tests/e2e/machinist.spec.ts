@@ -51,11 +51,11 @@ test('each part has its file first, a picture, sheet, kerf and pieces; all by a 
 });
 
 test('sheets are laid out, seen and saved with the kerf allowed for', async ({ page }) => {
-  await page.getByRole('button', { name: 'Lay out on sheets, with kerf' }).click();
+  await page.getByRole('button', { name: 'Lay out on sheets' }).click();
   const tool = page.getByRole('dialog', { name: 'Lay out on sheets' });
   await expect(tool.getByText('Laid out.')).toBeVisible({ timeout: 30_000 });
   await expect(tool.getByRole('img', { name: /^Sheet 1 with/ }).first()).toBeVisible();
-  await tool.getByLabel('Length of cut counted').selectOption('moved by half the kerf');
+  await tool.getByLabel('Kerf', { exact: true }).selectOption('allowed for');
   await expect(tool.getByText('Laid out.')).toBeVisible({ timeout: 30_000 });
   const save = tool.getByRole('button', { name: 'Save sheet 1 as DXF' }).first();
   expect((await save.boundingBox())!.height).toBeGreaterThanOrEqual(44);

@@ -29,8 +29,8 @@ const rotations = [
 ] as const;
 
 const kerfs = [
-  { value: 'nominal', label: 'at the parts’ own size' },
-  { value: 'compensated', label: 'moved by half the kerf' },
+  { value: 'nominal', label: 'not allowed for' },
+  { value: 'compensated', label: 'allowed for' },
 ] as const;
 
 export function LayoutFields({
@@ -80,7 +80,7 @@ export function LayoutFields({
         onChange={(machine) => onChange({ machine })}
       />
       <SelectField
-        label="Length of cut counted"
+        label="Kerf"
         value={asked.kerf}
         options={kerfs}
         onChange={(kerf) => onChange({ kerf })}
