@@ -111,7 +111,7 @@ test('voltages stand side by side and say that they are no rating', async ({ pag
   const loss = tool.getByRole('region', { name: 'Loss and Q' });
   // Brass at 7 MHz: computed from δ = √(ρ/(π·f·µ0)).
   await expect(loss.getByRole('row').nth(1)).toContainText('48.9 µm');
-  await page.keyboard.press('Escape');
+  await tool.getByRole('button', { name: 'Close' }).click();
   await expect(tool).toBeHidden();
   await page.getByRole('button', { name: 'Undo', exact: true }).last().click();
   await page.keyboard.press('Control+z');
