@@ -13,6 +13,9 @@ import { useFiles } from './use-files';
 
 const ToolSheet = dynamic(() => import('@/components/tools/tool-sheet'), { ssr: false });
 
+/** What is read at the machine comes before what is read at a desk. */
+const rank = { pdf: 0, zip: 1, dxf: 2, svg: 2, csv: 3, json: 4 } as const;
+
 /** The files of the saved version for whoever cuts: each part with its sheet, kerf and pieces. */
 export function CutList({
   record,
@@ -32,6 +35,9 @@ export function CutList({
   const query = useFiles(record, first);
   const { files = [], parts = [] } = query.data ?? {};
   const stems = new Set(parts.map(({ stem }) => stem));
+  const others = files
+    .filter((file) => !stems.has(stemOf(file)))
+    .sort((a, b) => rank[a.kind] - rank[b.kind]);
   return (
     <>
       <PanelSection title="Files to cut from">
@@ -40,15 +46,7 @@ export function CutList({
             A draft: ask the builder before cutting from it.
           </p>
         )}
-        <p>
-          Version {version}, in millimetres, at nominal size: no kerf is allowed for. For your
-          own machine’s kerf, lay the parts out.
-        </p>
-        {derived && (
-          <Button className="min-h-12 self-stretch" onPress={() => setLaying(true)}>
-            Lay out on sheets
-          </Button>
-        )}
+        <p>Version {version}, in millimetres, at nominal size: no kerf is allowed for.</p>
         {query.isPending && <p>Making the list of files</p>}
         {query.isError && <p className="text-bad">{query.error.message}</p>}
         <ul className="flex flex-col">
@@ -62,6 +60,17 @@ export function CutList({
           ))}
         </ul>
       </PanelSection>
+      {derived && (
+        <PanelSection title="Sheets for your machine">
+          <p>
+            All pieces laid out on sheets, with the kerf of a machine allowed for, to look at
+            and save.
+          </p>
+          <Button className="min-h-12 self-stretch" onPress={() => setLaying(true)}>
+            Lay out on sheets
+          </Button>
+        </PanelSection>
+      )}
       <Cautions />
       <PanelSection title="Drawing, lists and all in one">
         <p>
@@ -70,7 +79,7 @@ export function CutList({
           </a>
         </p>
         <ul className="flex flex-col">
-          {byStem(files.filter((file) => !stems.has(stemOf(file)))).map((set) => (
+          {byStem(others).map((set) => (
             <FileSet key={set[0]?.name} id={id} files={set} />
           ))}
         </ul>
