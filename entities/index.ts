@@ -1,6 +1,15 @@
+export { Attachment } from './attachment';
+export { CutOrder } from './cut-order';
 export { Design, PARAMETERS_FORMAT, type CheckCounts } from './design';
-export { Membership } from './membership';
-export { RecordEntry } from './record-entry';
+export { DesignVersion } from './design-version';
+export { Invitation } from './invitation';
+export { Mail } from './mail';
+export { Membership, mailChoices, type MailChoice } from './membership';
+export { OrderMessage } from './order-message';
+export { PasswordReset } from './password-reset';
+export { RecordEntry, recordVerbs, type RecordVerb } from './record-entry';
+export { Revision, type Waiver } from './revision';
+export { RevisionFile } from './revision-file';
 export { ShopItem } from './shop-item';
 export { User } from './user';
 export { Workshop } from './workshop';

@@ -3,7 +3,18 @@ import { base } from './base';
 import { User } from './user';
 import { Workshop } from './workshop';
 
-/** What a person may do in a workshop. Taking the row away ends their sessions there. */
+/** What mail tells of. Invitations and resets always come: nobody else asks for them. */
+export const mailChoices = [
+  'released',
+  'withdrawn',
+  'ordered',
+  'asked',
+  'answered',
+  'cut',
+] as const;
+export type MailChoice = (typeof mailChoices)[number];
+
+/** What a person may do in a workshop. Once removed, their sessions there are over. */
 export const Membership = defineEntity({
   name: 'Membership',
   tableName: 'memberships',
@@ -13,6 +24,10 @@ export const Membership = defineEntity({
     user: () => p.manyToOne(User).deleteRule('cascade'),
     workshop: () => p.manyToOne(Workshop).deleteRule('cascade').index(),
     role: p.enum(['owner', 'builder', 'machinist']),
+    /** What this person does not want mail about. */
+    mutedMail: p.json<MailChoice[]>().onCreate(() => []),
+    /** The row stays, so that what they did keeps its name. */
+    removedAt: p.datetime(3).nullable(),
   },
 });
 export type Membership = InferEntity<typeof Membership>;

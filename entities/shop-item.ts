@@ -9,6 +9,13 @@ export const ShopItem = defineEntity({
   name: 'ShopItem',
   tableName: 'shop_items',
   indexes: [{ properties: ['workshop', 'kind'] }],
+  checks: [
+    {
+      // The store is never less than empty, whoever draws from it.
+      name: 'shop_items_count_check',
+      expression: `kind <> 'sheet' or (values->>'count')::numeric >= 0`,
+    },
+  ],
   properties: {
     ...base(),
     workshop: () => p.manyToOne(Workshop),

@@ -13,6 +13,8 @@ export const User = defineEntity({
     name: p.string().length(80),
     /** argon2id, with its salt and parameters. */
     passwordHash: p.string().length(255).hidden(),
+    /** A session holds while it names this one; raising it ends all of them. */
+    sessionEpoch: p.integer().onCreate(() => 0),
   },
 });
 export type User = InferEntity<typeof User>;

@@ -3,7 +3,8 @@ import { cache } from 'react';
 import { redirect } from 'next/navigation';
 import { Membership } from '@/entities';
 import { signedInUser } from './auth';
-import { entityManager } from './db';
+import { chosenWorkshop } from './chosen-workshop';
+import { within } from './db';
 import { RequestError } from './errors';
 import type { Role } from './schemas/api';
 
@@ -19,39 +20,74 @@ export interface Viewer {
 
 /** The one table of who may what. */
 const may = {
-  owner: { read: true, download: true, edit: true },
-  builder: { read: true, download: true, edit: true },
-  machinist: { read: true, download: true, edit: false },
-} as const satisfies Record<Role, Record<'read' | 'download' | 'edit', boolean>>;
+  owner: {
+    read: true,
+    download: true,
+    edit: true,
+    release: true,
+    waive: true,
+    order: true,
+    cut: true,
+    people: true,
+    record: true,
+  },
+  builder: {
+    read: true,
+    download: true,
+    edit: true,
+    release: true,
+    waive: false,
+    order: true,
+    cut: true,
+    people: false,
+    record: true,
+  },
+  machinist: {
+    read: true,
+    download: true,
+    edit: false,
+    release: false,
+    waive: false,
+    order: false,
+    cut: true,
+    people: false,
+    record: false,
+  },
+} as const satisfies Record<Role, Record<string, boolean>>;
 
-/** May this role create, save, release and delete designs? */
+/** May this role create, save, restore and delete designs, machines and sheet? */
 export const mayEdit = (role: Role): boolean => may[role].edit;
 export const mayRead = (role: Role): boolean => may[role].read;
 export const mayDownload = (role: Role): boolean => may[role].download;
 
 /**
- * The person behind the session, or null. Asked of the database every time, so a session dies
- * with the membership; once per render in a page.
+ * The person behind the session, in the workshop they have chosen or else their first; or null.
+ * Asked of the database every time, so a session dies with the membership or when it is ended
+ * everywhere; once per render in a page.
  */
 export const findViewer = cache(async (): Promise<Viewer | null> => {
-  const userId = await signedInUser();
-  if (userId === null) return null;
-  const em = await entityManager();
-  const membership = await em.findOne(
-    Membership,
-    { user: userId },
-    { populate: ['user', 'workshop'], orderBy: { createdAt: 'asc' } },
-  );
-  if (!membership) return null;
-  const { user, workshop, role } = membership;
-  return {
-    userId: user.id,
-    name: user.name,
-    email: user.email,
-    role,
-    workshopId: workshop.id,
-    workshopName: workshop.name,
-  };
+  const session = await signedInUser();
+  if (session === null) return null;
+  const wanted = await chosenWorkshop();
+  return within({ user: session.userId }, async (tx) => {
+    const memberships = await tx.find(
+      Membership,
+      { user: session.userId, removedAt: null },
+      { populate: ['user', 'workshop'], orderBy: { createdAt: 'asc', id: 'asc' } },
+    );
+    const membership =
+      memberships.find(({ workshop }) => workshop.id === wanted) ?? memberships[0];
+    if (!membership || membership.user.sessionEpoch !== session.epoch) return null;
+    const { user, workshop, role } = membership;
+    return {
+      userId: user.id,
+      name: user.name,
+      email: user.email,
+      role,
+      workshopId: workshop.id,
+      workshopName: workshop.name,
+    };
+  });
 });
 
 /** The guard of routes and actions. @throws RequestError not-signed-in or not-allowed. */

@@ -7,7 +7,7 @@ import CredentialsProvider from 'next-auth/providers/credentials';
 import { z } from 'zod';
 import { env } from './env';
 import { toRequestError } from './errors';
-import { signIn } from './sign-in';
+import { signIn, type SignedIn } from './sign-in';
 
 /** Seconds from signing in to the end of the session, unless the browser renews it. */
 const SESSION_AGE = 14 * 24 * 3600;
@@ -37,17 +37,18 @@ export function authOptions(): NextAuthOptions {
       }),
     ],
     callbacks: {
-      jwt: ({ token, user }) => (user ? { sub: user.id } : token),
+      jwt: ({ token, user }) =>
+        user ? { sub: user.id, epoch: (user as Partial<SignedIn>).epoch } : token,
       // The screens ask the server who they are; this answers only until when.
       session: ({ session }) => ({ expires: session.expires, user: {} }),
     },
   };
 }
 
-const subjectSchema = z.object({ sub: z.uuid() });
+const tokenSchema = z.object({ sub: z.uuid(), epoch: z.number().int() });
 
-/** The user id in the request's session cookie, or null when there is none that holds. */
-export async function signedInUser(): Promise<string | null> {
+/** Whose session the request's cookie holds, and of which epoch; null when there is none. */
+export async function signedInUser(): Promise<{ userId: string; epoch: number } | null> {
   const jar = await cookies();
   if (jar.getAll().length === 0) return null;
   // Cookies alone: next-auth would also take a token from an Authorization header.
@@ -55,5 +56,6 @@ export async function signedInUser(): Promise<string | null> {
     headers: { cookie: (await headers()).get('cookie') ?? '' },
   });
   const token = await getToken({ req: request, secret: env().NEXTAUTH_SECRET });
-  return subjectSchema.safeParse(token).data?.sub ?? null;
+  const held = tokenSchema.safeParse(token).data;
+  return held ? { userId: held.sub, epoch: held.epoch } : null;
 }

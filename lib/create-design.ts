@@ -4,7 +4,7 @@ import { Design, User, Workshop } from '@/entities';
 import { defaultDesign } from '@/geometry';
 import { mayEdit, requireMember } from './access';
 import { assessDesign } from './assess-design';
-import { entityManager } from './db';
+import { inWorkshop } from './db';
 import { toRecord } from './design-record';
 import { badInput } from './errors';
 import { addRecord } from './record';
@@ -18,8 +18,7 @@ export async function createDesign(input: unknown): Promise<DesignRecord> {
   const { name, design = defaultDesign() } = parsed.data;
   const { kernel, checks } = assessDesign(design);
 
-  const em = await entityManager();
-  return em.transactional(async (tx) => {
+  return inWorkshop(viewer, async (tx) => {
     const person = await tx.findOneOrFail(User, viewer.userId);
     const stored = tx.create(Design, {
       id: randomUUID(),
@@ -33,9 +32,7 @@ export async function createDesign(input: unknown): Promise<DesignRecord> {
       createdAt: new Date(),
       updatedAt: new Date(),
     });
-    addRecord(tx, {
-      workshopId: viewer.workshopId,
-      who: viewer.userId,
+    addRecord(tx, viewer, {
       what: 'design-created',
       subject: stored.id,
       detail: { name, kernel, checks },

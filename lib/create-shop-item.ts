@@ -2,7 +2,7 @@ import 'server-only';
 import { randomUUID } from 'node:crypto';
 import { ShopItem, User, Workshop } from '@/entities';
 import { mayEdit, requireMember } from './access';
-import { entityManager } from './db';
+import { inWorkshop } from './db';
 import { badInput } from './errors';
 import { addRecord } from './record';
 import {
@@ -18,8 +18,7 @@ export async function createShopItem(kind: ShopKind, input: unknown): Promise<Sh
   const parsed = saveItemSchemas[kind].safeParse(input);
   if (!parsed.success) throw badInput(parsed.error);
   const { name, values } = parsed.data;
-  const em = await entityManager();
-  return em.transactional(async (tx) => {
+  return inWorkshop(viewer, async (tx) => {
     const stored = tx.create(ShopItem, {
       id: randomUUID(),
       createdAt: new Date(),
@@ -30,9 +29,7 @@ export async function createShopItem(kind: ShopKind, input: unknown): Promise<Sh
       updatedBy: await tx.findOneOrFail(User, viewer.userId),
       updatedAt: new Date(),
     });
-    addRecord(tx, {
-      workshopId: viewer.workshopId,
-      who: viewer.userId,
+    addRecord(tx, viewer, {
       what: 'item-created',
       subject: stored.id,
       detail: { kind, name, values },

@@ -28,10 +28,38 @@ function orm(): Promise<MikroORM> {
   return store.vaneloftOrm;
 }
 
-/** An entity manager of its own for one request. */
-export async function entityManager(): Promise<EntityManager> {
-  return (await orm()).em.fork();
+/**
+ * Whose rows a transaction may see and write; the database itself holds to it (006-walls). Each
+ * names one way to be let in: a workshop, a person, an email at the door, a link's hashed secret.
+ */
+export interface Scope {
+  readonly workshop?: string;
+  readonly user?: string;
+  readonly email?: string;
+  readonly token?: string;
 }
+
+/** A transaction that sees the rows of one scope and no others. */
+export async function within<T>(
+  { workshop = '', user = '', email = '', token = '' }: Scope,
+  work: (tx: EntityManager) => T | Promise<T>,
+): Promise<T> {
+  const em = (await orm()).em.fork();
+  return em.transactional(async (tx) => {
+    await tx.execute(
+      `select set_config('vaneloft.workshop', ?, true), set_config('vaneloft.user', ?, true),
+        set_config('vaneloft.email', ?, true), set_config('vaneloft.token', ?, true)`,
+      [workshop, user, email, token],
+    );
+    return work(tx);
+  });
+}
+
+/** A transaction in the workshop of the person who asks. */
+export const inWorkshop = <T>(
+  { workshopId, userId }: { readonly workshopId: string; readonly userId: string },
+  work: (tx: EntityManager) => T | Promise<T>,
+): Promise<T> => within({ workshop: workshopId, user: userId }, work);
 
 /** Plain connections, for the count of sign-in attempts. */
 export function pool(): Pool {

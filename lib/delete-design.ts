@@ -1,19 +1,16 @@
 import 'server-only';
 import { mayEdit, requireMember } from './access';
-import { entityManager } from './db';
+import { inWorkshop } from './db';
 import { lockDesign } from './lock-design';
 import { addRecord } from './record';
 
 /** Takes a design out of the workshop's sight; its row and its record stay. */
 export async function deleteDesign(id: string): Promise<void> {
   const viewer = await requireMember(mayEdit);
-  const em = await entityManager();
-  await em.transactional(async (tx) => {
+  await inWorkshop(viewer, async (tx) => {
     const stored = await lockDesign(tx, viewer, id);
     stored.deletedAt = new Date();
-    addRecord(tx, {
-      workshopId: viewer.workshopId,
-      who: viewer.userId,
+    addRecord(tx, viewer, {
       what: 'design-deleted',
       subject: id,
       detail: { name: stored.name, version: stored.version },

@@ -4,7 +4,7 @@ import { dialOf } from '@/geometry/dial/dial';
 import { DialError } from '@/geometry/dial/settings';
 import { slugOf } from '@/geometry/files';
 import { mayDownload, requireMember } from './access';
-import { entityManager } from './db';
+import { inWorkshop } from './db';
 import { derivePlates, type HashedFile } from './design-files';
 import { sketchesPdf } from './drawing-pdf';
 import { badInput, notFound, RequestError } from './errors';
@@ -35,11 +35,8 @@ export async function makeDial(id: string, query: unknown): Promise<HashedFile> 
     });
     const sha256 = createHash('sha256').update(body).digest('hex');
     const name = `${slugOf(stored.name)}_dial-${settings.quantity}.pdf`;
-    const em = await entityManager();
-    await em.transactional((tx) => {
-      addRecord(tx, {
-        workshopId: viewer.workshopId,
-        who: viewer.userId,
+    await inWorkshop(viewer, (tx) => {
+      addRecord(tx, viewer, {
         what: 'file-downloaded',
         subject: id,
         detail: {

@@ -1,7 +1,7 @@
 import 'server-only';
 import { Design } from '@/entities';
 import { mayRead, type Viewer } from './access';
-import { entityManager } from './db';
+import { inWorkshop } from './db';
 import { toRecord, toSummary } from './design-record';
 import { idSchema } from './schemas/id';
 import type { DesignRecord, DesignSummary } from './schemas/api';
@@ -9,11 +9,12 @@ import type { DesignRecord, DesignSummary } from './schemas/api';
 /** The workshop's designs, last changed first. */
 export async function listDesigns(viewer: Viewer): Promise<DesignSummary[]> {
   if (!mayRead(viewer.role)) return [];
-  const em = await entityManager();
-  const stored = await em.find(
-    Design,
-    { workshop: viewer.workshopId, deletedAt: null },
-    { populate: ['updatedBy'], orderBy: { updatedAt: 'desc', id: 'asc' } },
+  const stored = await inWorkshop(viewer, (tx) =>
+    tx.find(
+      Design,
+      { workshop: viewer.workshopId, deletedAt: null },
+      { populate: ['updatedBy'], orderBy: { updatedAt: 'desc', id: 'asc' } },
+    ),
   );
   return stored.map(toSummary);
 }
@@ -21,11 +22,12 @@ export async function listDesigns(viewer: Viewer): Promise<DesignSummary[]> {
 /** One design of the workshop, or null: another workshop's, deleted, or no id at all. */
 export async function findDesign(viewer: Viewer, id: string): Promise<DesignRecord | null> {
   if (!mayRead(viewer.role) || !idSchema.safeParse(id).success) return null;
-  const em = await entityManager();
-  const stored = await em.findOne(
-    Design,
-    { id, workshop: viewer.workshopId, deletedAt: null },
-    { populate: ['updatedBy'] },
+  const stored = await inWorkshop(viewer, (tx) =>
+    tx.findOne(
+      Design,
+      { id, workshop: viewer.workshopId, deletedAt: null },
+      { populate: ['updatedBy'] },
+    ),
   );
   return stored && toRecord(stored, viewer);
 }

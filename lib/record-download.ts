@@ -1,6 +1,6 @@
 import 'server-only';
 import { mayDownload, requireMember } from './access';
-import { entityManager } from './db';
+import { inWorkshop } from './db';
 import { derivePlates, hashedFiles, type HashedFile } from './design-files';
 import { notFound, RequestError } from './errors';
 import { findDesign } from './queries';
@@ -24,11 +24,8 @@ export async function recordDownload(id: string, fileName: string): Promise<Hash
       'No such file in this design; it may have been saved since. Load the list of files again.',
     );
   }
-  const em = await entityManager();
-  await em.transactional((tx) => {
-    addRecord(tx, {
-      workshopId: viewer.workshopId,
-      who: viewer.userId,
+  await inWorkshop(viewer, (tx) => {
+    addRecord(tx, viewer, {
       what: 'file-downloaded',
       subject: id,
       detail: {

@@ -1,21 +1,25 @@
 import 'server-only';
 import type { EntityManager } from '@mikro-orm/postgresql';
-import { RecordEntry, User, Workshop } from '@/entities';
+import { RecordEntry, User, Workshop, type RecordVerb } from '@/entities';
 
 interface Entry {
-  workshopId: string;
-  who: string;
-  what: RecordEntry['what'];
-  subject: string;
-  detail: Record<string, unknown>;
+  readonly what: RecordVerb;
+  readonly subject: string;
+  /** The revision it was done to or with. */
+  readonly revision?: string;
+  readonly detail: Record<string, unknown>;
 }
 
 /** Puts a row into the record, in the transaction that `tx` is in. */
-export function addRecord(tx: EntityManager, entry: Entry): void {
-  const { workshopId, who, ...rest } = entry;
+export function addRecord(
+  tx: EntityManager,
+  by: { readonly workshopId: string; readonly userId: string },
+  { revision, ...entry }: Entry,
+): void {
   tx.create(RecordEntry, {
-    ...rest,
-    workshop: tx.getReference(Workshop, workshopId),
-    who: tx.getReference(User, who),
+    ...entry,
+    revision: revision ?? null,
+    workshop: tx.getReference(Workshop, by.workshopId),
+    who: tx.getReference(User, by.userId),
   });
 }

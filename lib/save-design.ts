@@ -3,7 +3,7 @@ import { User } from '@/entities';
 import { mayEdit, requireMember } from './access';
 import { assessDesign } from './assess-design';
 import { changesBetween } from './changes';
-import { entityManager } from './db';
+import { inWorkshop } from './db';
 import { readParameters, toRecord } from './design-record';
 import { badInput } from './errors';
 import { lockDesign, refuseStale } from './lock-design';
@@ -17,9 +17,8 @@ import { saveDesignSchema, type DesignRecord } from './schemas/api';
  */
 export async function saveDesign(id: string, input: unknown): Promise<DesignRecord> {
   const viewer = await requireMember(mayEdit);
-  const em = await entityManager();
   // Whose design it is comes before what is wrong with the input.
-  return em.transactional(async (tx) => {
+  return inWorkshop(viewer, async (tx) => {
     const stored = await lockDesign(tx, viewer, id);
     const parsed = saveDesignSchema.safeParse(input);
     if (!parsed.success) throw badInput(parsed.error);
@@ -43,9 +42,7 @@ export async function saveDesign(id: string, input: unknown): Promise<DesignReco
       updatedBy: await tx.findOneOrFail(User, viewer.userId),
       updatedAt: new Date(),
     });
-    addRecord(tx, {
-      workshopId: viewer.workshopId,
-      who: viewer.userId,
+    addRecord(tx, viewer, {
       what: 'design-saved',
       subject: id,
       detail: { version: stored.version, kernel, checks, changes },

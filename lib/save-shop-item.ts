@@ -2,7 +2,7 @@ import 'server-only';
 import { User, type ShopItem } from '@/entities';
 import { mayEdit, requireMember } from './access';
 import { changesBetween } from './changes';
-import { entityManager } from './db';
+import { inWorkshop } from './db';
 import { badInput } from './errors';
 import { addRecord } from './record';
 import {
@@ -23,8 +23,7 @@ export async function saveShopItem(
   input: unknown,
 ): Promise<ShopItemRecord> {
   const viewer = await requireMember(mayEdit);
-  const em = await entityManager();
-  return em.transactional(async (tx) => {
+  return inWorkshop(viewer, async (tx) => {
     const stored = await lockShopItem(tx, viewer, kind, id);
     const parsed = saveItemSchemas[kind].safeParse(input);
     if (!parsed.success) throw badInput(parsed.error);
@@ -43,9 +42,7 @@ export async function saveShopItem(
       updatedBy: await tx.findOneOrFail(User, viewer.userId),
       updatedAt: new Date(),
     });
-    addRecord(tx, {
-      workshopId: viewer.workshopId,
-      who: viewer.userId,
+    addRecord(tx, viewer, {
       what: 'item-saved',
       subject: id,
       detail: { kind, version: stored.version, changes },

@@ -2,7 +2,7 @@ import 'server-only';
 import { User } from '@/entities';
 import { mayEdit, requireMember } from './access';
 import { assessDesign, describeFailure } from './assess-design';
-import { entityManager } from './db';
+import { inWorkshop } from './db';
 import { readParameters, toRecord } from './design-record';
 import { badInput, RequestError } from './errors';
 import { lockDesign, refuseStale } from './lock-design';
@@ -15,8 +15,7 @@ import { setStatusSchema, type DesignRecord } from './schemas/api';
  */
 export async function setDesignStatus(id: string, input: unknown): Promise<DesignRecord> {
   const viewer = await requireMember(mayEdit);
-  const em = await entityManager();
-  return em.transactional(async (tx) => {
+  return inWorkshop(viewer, async (tx) => {
     const stored = await lockDesign(tx, viewer, id);
     const parsed = setStatusSchema.safeParse(input);
     if (!parsed.success) throw badInput(parsed.error);
@@ -40,9 +39,7 @@ export async function setDesignStatus(id: string, input: unknown): Promise<Desig
       updatedBy: await tx.findOneOrFail(User, viewer.userId),
       updatedAt: new Date(),
     });
-    addRecord(tx, {
-      workshopId: viewer.workshopId,
-      who: viewer.userId,
+    addRecord(tx, viewer, {
       what: 'design-status-set',
       subject: id,
       detail: { version: stored.version, status, kernel, checks },

@@ -2,7 +2,7 @@ import 'server-only';
 import { LockMode, type EntityManager, type Loaded } from '@mikro-orm/postgresql';
 import { ShopItem } from '@/entities';
 import { mayRead, type Viewer } from './access';
-import { entityManager } from './db';
+import { inWorkshop } from './db';
 import { notFound, RequestError } from './errors';
 import { idSchema } from './schemas/id';
 import { shopKindSchema, type ShopItem as ShopItemRecord, type ShopKind } from './schemas/shop';
@@ -33,11 +33,12 @@ export function toShopItem(stored: Loaded<ShopItem, 'updatedBy'>): ShopItemRecor
 /** The workshop's machines or sheet, by name. */
 export async function listShopItems(viewer: Viewer, kind: ShopKind): Promise<ShopItemRecord[]> {
   if (!mayRead(viewer.role)) return [];
-  const em = await entityManager();
-  const stored = await em.find(
-    ShopItem,
-    { workshop: viewer.workshopId, kind: storedKind(kind), deletedAt: null },
-    { populate: ['updatedBy'], orderBy: { name: 'asc', id: 'asc' } },
+  const stored = await inWorkshop(viewer, (tx) =>
+    tx.find(
+      ShopItem,
+      { workshop: viewer.workshopId, kind: storedKind(kind), deletedAt: null },
+      { populate: ['updatedBy'], orderBy: { name: 'asc', id: 'asc' } },
+    ),
   );
   return stored.map(toShopItem);
 }

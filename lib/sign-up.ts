@@ -3,7 +3,7 @@ import { randomUUID } from 'node:crypto';
 import { UniqueConstraintViolationException } from '@mikro-orm/postgresql';
 import { Membership, User, Workshop } from '@/entities';
 import { countSignUp } from './attempts';
-import { entityManager } from './db';
+import { within } from './db';
 import { badInput, RequestError } from './errors';
 import { hashPassword } from './password';
 import { addRecord } from './record';
@@ -20,20 +20,22 @@ export async function signUp(input: unknown, address: string): Promise<{ userId:
   await countSignUp(address);
 
   const passwordHash = await hashPassword(password);
-  const em = await entityManager();
+  const [userId, workshopId] = [randomUUID(), randomUUID()];
   try {
-    return await em.transactional((tx) => {
-      const user = tx.create(User, { id: randomUUID(), email, name, passwordHash });
-      const workshop = tx.create(Workshop, { id: randomUUID(), name: workshopName });
+    return await within({ user: userId, workshop: workshopId }, (tx) => {
+      const user = tx.create(User, { id: userId, email, name, passwordHash });
+      const workshop = tx.create(Workshop, { id: workshopId, name: workshopName });
       tx.create(Membership, { user, workshop, role: 'owner' });
-      addRecord(tx, {
-        workshopId: workshop.id,
-        who: user.id,
-        what: 'workshop-opened',
-        subject: workshop.id,
-        detail: { name: workshopName },
-      });
-      return { userId: user.id };
+      addRecord(
+        tx,
+        { workshopId: workshop.id, userId: user.id },
+        {
+          what: 'workshop-opened',
+          subject: workshop.id,
+          detail: { name: workshopName },
+        },
+      );
+      return { userId };
     });
   } catch (error) {
     if (!(error instanceof UniqueConstraintViolationException)) throw error;

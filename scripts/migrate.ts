@@ -1,22 +1,10 @@
-/** Brings the database at DATABASE_URL to the newest migration. Safe to run at every start. */
+/**
+ * Brings the database at OWNER_DATABASE_URL to the newest migration, for the application's role at
+ * DATABASE_URL. Safe to run at every start.
+ */
 
-import { MikroORM } from '@mikro-orm/postgresql';
-import config from '../mikro-orm.config';
+import { prepareDatabase } from './prepare-database';
 
-// Two starts at once must not run the same migration twice; the number is ours alone.
-const MIGRATION_LOCK = 80_411_907;
-
-const orm = await MikroORM.init(config);
-try {
-  const holder = await orm.em.getKnex().client.acquireConnection();
-  try {
-    await holder.query('select pg_advisory_lock($1)', [MIGRATION_LOCK]);
-    const done = await orm.migrator.up();
-    for (const { name } of done) console.log(`Migrated: ${name}`);
-  } finally {
-    await holder.query('select pg_advisory_unlock($1)', [MIGRATION_LOCK]);
-    await orm.em.getKnex().client.releaseConnection(holder);
-  }
-} finally {
-  await orm.close();
-}
+const { OWNER_DATABASE_URL: owner, DATABASE_URL: app } = process.env;
+if (!owner || !app) throw new Error('migrate: give OWNER_DATABASE_URL and DATABASE_URL');
+for (const name of await prepareDatabase(owner, app)) console.log(`Migrated: ${name}`);

@@ -3,6 +3,7 @@
 import { createHash, randomBytes } from 'node:crypto';
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
+import { appUrlOf } from './app-url.mjs';
 import { ensureBuild } from './build.mjs';
 import { mustRun } from './command.mjs';
 import { claimClone, rememberServer } from './leftovers.mjs';
@@ -22,11 +23,21 @@ function signInsFile() {
   return join(data, `sign-ins${tag}.json`);
 }
 
-/** The address of the database: the one given, or our own cluster, started for it. */
-async function database() {
-  if (given) return given;
-  console.log('Starting PostgreSQL');
-  return (await startPostgres()).ensureDatabase('vaneloft');
+/**
+ * The database's two addresses: its owner's, who migrates and sends mail, and the application's,
+ * whose role is made by the migration. Of the one given, or of our own cluster, started for it.
+ */
+async function databases() {
+  if (process.env.OWNER_DATABASE_URL) {
+    if (!given) throw new Stop('OWNER_DATABASE_URL is given, but no DATABASE_URL beside it.');
+    return { OWNER_DATABASE_URL: process.env.OWNER_DATABASE_URL, DATABASE_URL: given };
+  }
+  let owner = given;
+  if (!owner) {
+    console.log('Starting PostgreSQL');
+    owner = (await startPostgres()).ensureDatabase('vaneloft');
+  }
+  return { OWNER_DATABASE_URL: owner, DATABASE_URL: appUrlOf(owner, secret()) };
 }
 
 /** What session cookies are sealed with: made once, kept where only we can read it. */
@@ -62,7 +73,7 @@ async function main() {
   await ensureNodeModules();
 
   const signIns = signInsFile();
-  const env = { ...process.env, DATABASE_URL: await database() };
+  const env = { ...process.env, ...(await databases()) };
   await mustRun('The migration', process.execPath, ['--import', 'tsx', 'scripts/migrate.ts'], {
     env,
   });

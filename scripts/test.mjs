@@ -2,6 +2,7 @@
 
 import { randomBytes } from 'node:crypto';
 import { join } from 'node:path';
+import { appUrlOf } from './app-url.mjs';
 import { ensureBuild } from './build.mjs';
 import { check, playwright, printTally, unused, verify, vitest } from './checks.mjs';
 import { mustRun } from './command.mjs';
@@ -21,13 +22,15 @@ import { runUntilStopped } from './stop.mjs';
 async function serve(cluster) {
   const port = await freePort();
   const signIns = join(data, 'test-sign-ins.json');
+  const secret = randomBytes(32).toString('base64url');
+  const owner = cluster.ensureDatabase('vaneloft');
   const env = {
-    DATABASE_URL: cluster.ensureDatabase('vaneloft'),
+    DATABASE_URL: appUrlOf(owner, secret),
     NEXTAUTH_URL: `http://127.0.0.1:${port}`,
-    NEXTAUTH_SECRET: randomBytes(32).toString('base64url'),
+    NEXTAUTH_SECRET: secret,
     LOG_LEVEL: 'warn',
   };
-  const whole = { env: { ...process.env, ...env } };
+  const whole = { env: { ...process.env, ...env, OWNER_DATABASE_URL: owner } };
   await mustRun('migrate', process.execPath, ['--import', 'tsx', 'scripts/migrate.ts'], whole);
   await mustRun(
     'seed',

@@ -1,7 +1,8 @@
 import { Client } from 'pg';
 import { beforeAll, describe, expect, test, vi } from 'vitest';
 import { GET as HEALTH } from '@/app/api/health/route';
-import { closeDatabase, entityManager } from '@/lib/db';
+import { closeDatabase } from '@/lib/db';
+import { entityManager } from '../support/as-owner';
 import { saveDesign } from '@/lib/save-design';
 import { defaultDesign } from '@/geometry';
 import { call, refusal } from '../support/call';
@@ -48,7 +49,7 @@ describe('the record', () => {
 
 test('an email in capitals is refused by the database itself', async () => {
   const em = await entityManager();
-  const sql = `insert into users values (gen_random_uuid(), now(), 'A@b.example', 'A', 'x')`;
+  const sql = `insert into users values (gen_random_uuid(), now(), 'A@b.example', 'A', 'x', 0)`;
   await expect(em.execute(sql)).rejects.toThrow(/users_email_check/);
 });
 
@@ -86,10 +87,10 @@ test('connections that the database has ended are replaced', async () => {
   const health = await import('@/app/api/health/route');
   const both = async () => [(await call(GET, {})).status, (await call(health.GET, {})).status];
   expect(await both()).toEqual([200, 200]);
-  const client = new Client({ connectionString: process.env.DATABASE_URL });
+  const client = new Client({ connectionString: process.env.OWNER_DATABASE_URL });
   await client.connect();
   const ended = await client.query(
-    'select pg_terminate_backend(pid) from pg_stat_activity where datname = current_database() and pid <> pg_backend_pid()',
+    'select pg_terminate_backend(pid) from pg_stat_activity where datname = current_database() and usename <> current_user',
   );
   await client.end();
   expect(ended.rowCount).toBeGreaterThan(1);

@@ -10,7 +10,7 @@ import { defaultDesign, derive } from '@/geometry';
 import { cutFiles } from '@/geometry/files';
 import { machineParameters } from '@/geometry/cutting/shop-parameters';
 import { RecordEntry } from '@/entities';
-import { entityManager } from '@/lib/db';
+import { entityManager } from '../support/as-owner';
 import { call } from '../support/call';
 import { callers, Cast, storedDesign, type Caller } from '../support/cast';
 

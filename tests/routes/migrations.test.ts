@@ -5,7 +5,7 @@ import config from '@/mikro-orm.config';
 let orm: MikroORM;
 
 beforeAll(async () => {
-  orm = await MikroORM.init({ ...config, clientUrl: process.env.DATABASE_URL! });
+  orm = await MikroORM.init({ ...config, clientUrl: process.env.OWNER_DATABASE_URL! });
 });
 afterAll(() => orm.close());
 

@@ -4,7 +4,7 @@ import { PUT as PUT_STATUS } from '@/app/api/designs/[id]/status/route';
 import { GET as LIST, POST } from '@/app/api/designs/route';
 import { Design as StoredDesign } from '@/entities';
 import { defaultDesign, derive, KERNEL_VERSION, type Design } from '@/geometry';
-import { entityManager } from '@/lib/db';
+import { entityManager } from '../support/as-owner';
 import { apiErrorSchema, designListSchema, designRecordSchema } from '@/lib/schemas/api';
 import { call, refusal } from '../support/call';
 import { Cast, storedDesign } from '../support/cast';

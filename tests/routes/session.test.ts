@@ -1,7 +1,7 @@
 import { beforeAll, expect, test } from 'vitest';
 import { GET, POST } from '@/app/api/designs/route';
 import { Membership } from '@/entities';
-import { entityManager } from '@/lib/db';
+import { entityManager } from '../support/as-owner';
 import { call } from '../support/call';
 import { Cast, cookieFor } from '../support/cast';
 import { askWith } from '../support/request-context';

@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 import { signUpAction } from '@/app/(account)/sign-up/actions';
 import { Membership, User, Workshop } from '@/entities';
-import { entityManager } from '@/lib/db';
+import { entityManager } from '../support/as-owner';
 import { askWith } from '../support/request-context';
 
 const good = {

@@ -2,10 +2,10 @@
 
 import { randomUUID } from 'node:crypto';
 import { encode } from 'next-auth/jwt';
-import { Design, Membership, RecordEntry, User, Workshop } from '@/entities';
+import { Design, Membership, RecordEntry, ShopItem, User, Workshop } from '@/entities';
 import { defaultDesign, type Design as Parameters } from '@/geometry';
 import { assessDesign } from '@/lib/assess-design';
-import { entityManager } from '@/lib/db';
+import { entityManager } from './as-owner';
 import type { Role } from '@/lib/schemas/api';
 import { askWith } from './request-context';
 
@@ -26,9 +26,9 @@ interface Person {
 }
 
 /** A cookie as next-auth's own encoder seals it. */
-export async function cookieFor(userId: string, secret?: string): Promise<string> {
+export async function cookieFor(userId: string, secret?: string, epoch = 0): Promise<string> {
   const token = await encode({
-    token: { sub: userId },
+    token: { sub: userId, epoch },
     secret: secret ?? process.env.NEXTAUTH_SECRET!,
   });
   return `next-auth.session-token=${token}`;
@@ -90,6 +90,29 @@ export class Cast {
       ...assessDesign(parameters),
       createdBy: builder,
       updatedBy: builder,
+      createdAt: now,
+      updatedAt: now,
+    });
+    await em.flush();
+    return id;
+  }
+
+  /** A machine or sheet of ours, put there without any route. */
+  async item(
+    kind: ShopItem['kind'],
+    name: string,
+    values: ShopItem['values'],
+  ): Promise<string> {
+    const em = await entityManager();
+    const id = randomUUID();
+    const now = new Date();
+    em.create(ShopItem, {
+      id,
+      workshop: em.getReference(Workshop, this.workshopId),
+      kind,
+      name,
+      values,
+      updatedBy: em.getReference(User, this.person('builder').id),
       createdAt: now,
       updatedAt: now,
     });

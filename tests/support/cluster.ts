@@ -3,15 +3,17 @@
  * in one of its own.
  */
 
-import { MikroORM } from '@mikro-orm/postgresql';
 import type { TestProject } from 'vitest/node';
-import config from '@/mikro-orm.config';
+import { appUrlOf } from '../../scripts/app-url.mjs';
+import { prepareDatabase } from '../../scripts/prepare-database';
 import { startThrowawayPostgres } from '../../scripts/postgres.mjs';
 
 declare module 'vitest' {
   export interface ProvidedContext {
     /** Address of the database that every test file copies. */
     template: string;
+    /** The same address for the application's own role. */
+    application: string;
   }
 }
 
@@ -19,9 +21,9 @@ export default async function setup(project: TestProject): Promise<() => Promise
   const given = process.env.TEST_DATABASE_URL;
   const cluster = given ? null : await startThrowawayPostgres();
   const template = given ?? cluster!.ensureDatabase('template');
-  const orm = await MikroORM.init({ ...config, clientUrl: template });
-  await orm.migrator.up();
-  await orm.close();
+  const application = appUrlOf(template, 'for tests alone');
+  await prepareDatabase(template, application);
   project.provide('template', template);
+  project.provide('application', application);
   return async () => cluster?.stop();
 }

@@ -19,9 +19,14 @@ async function asAdministrator(sql: string): Promise<void> {
 }
 
 await asAdministrator(`create database ${name} template template`);
-const address = new URL(template);
-address.pathname = `/${name}`;
-process.env.DATABASE_URL = address.href;
+for (const [variable, known] of [
+  ['OWNER_DATABASE_URL', template],
+  ['DATABASE_URL', new URL(inject('application'))],
+] as const) {
+  const address = new URL(known);
+  address.pathname = `/${name}`;
+  process.env[variable] = address.href;
+}
 process.env.NEXTAUTH_URL = 'http://127.0.0.1:3000';
 process.env.NEXTAUTH_SECRET = randomUUID();
 process.env.LOG_LEVEL ??= 'silent';
@@ -29,5 +34,6 @@ process.env.LOG_LEVEL ??= 'silent';
 afterAll(async () => {
   const { closeDatabase } = await import('@/lib/db');
   await closeDatabase();
+  await (await import('./as-owner')).closeOwner();
   await asAdministrator(`drop database ${name} with (force)`);
 });

@@ -1,0 +1,1 @@
+export declare function appUrlOf(ownerUrl: string, secret: string): string;
