@@ -1,8 +1,7 @@
 'use client';
 
 import { useQuery } from '@tanstack/react-query';
-import dynamic from 'next/dynamic';
-import { useState } from 'react';
+import { lazy, Suspense, useState } from 'react';
 import { designKeys } from '@/components/api/design-keys';
 import { loadApi } from '@/components/api/load-api';
 import { Button } from '@/components/ui/button';
@@ -10,8 +9,9 @@ import { Notice } from '@/components/ui/notice';
 import type { DesignSummary } from '@/lib/schemas/api';
 import { DesignsTable } from './designs-table';
 
-const NewDesignDialog = dynamic(() => import('./new-design-dialog'), { ssr: false });
-const DeleteDialog = dynamic(() => import('./delete-dialog'), { ssr: false });
+// By React itself: next/dynamic would bring more with it than these take.
+const NewDesignDialog = lazy(() => import('./new-design-dialog'));
+const DeleteDialog = lazy(() => import('./delete-dialog'));
 
 type Asking = { what: 'new' } | { what: 'copy' | 'delete'; design: DesignSummary } | null;
 
@@ -65,15 +65,17 @@ export function DesignsList({
           })}
         />
       )}
-      {(asking?.what === 'new' || asking?.what === 'copy') && (
-        <NewDesignDialog
-          copyOf={asking.what === 'copy' ? asking.design : null}
-          onClose={() => setAsking(null)}
-        />
-      )}
-      {asking?.what === 'delete' && (
-        <DeleteDialog design={asking.design} onClose={() => setAsking(null)} />
-      )}
+      <Suspense>
+        {(asking?.what === 'new' || asking?.what === 'copy') && (
+          <NewDesignDialog
+            copyOf={asking.what === 'copy' ? asking.design : null}
+            onClose={() => setAsking(null)}
+          />
+        )}
+        {asking?.what === 'delete' && (
+          <DeleteDialog design={asking.design} onClose={() => setAsking(null)} />
+        )}
+      </Suspense>
     </main>
   );
 }

@@ -6,7 +6,8 @@ import { Button } from '@/components/ui/button';
 import { SelectField } from '@/components/ui/select-field';
 import { SearchField } from '@/components/ui/search-field';
 import type { DesignSummary } from '@/lib/schemas/api';
-import { columnsWith, features, statusOptions } from './columns';
+import { columnsWith, features } from './columns';
+import { found, statusOptions, type StatusAsked } from './search';
 import { SortButton } from './sort-button';
 
 // On a narrow screen every row is laid out in lines, which would take the table's meaning from it:
@@ -23,21 +24,20 @@ export function DesignsTable({
   onDelete?: (design: DesignSummary) => void;
 }) {
   const [search, setSearch] = useState('');
-  const [status, setStatus] = useState<(typeof statusOptions)[number]['value']>('all');
+  const [status, setStatus] = useState<StatusAsked>('all');
   const [sorting, setSorting] = useState<SortingState>([{ id: 'updatedAt', desc: true }]);
   const columns = useMemo(() => columnsWith(lawLabels), [lawLabels]);
+  const data = useMemo(
+    () => found(designs, search, status, lawLabels),
+    [designs, search, status, lawLabels],
+  );
   const table = useTable({
     features,
     columns,
-    data: designs,
+    data,
     getRowId: (design) => design.id,
-    globalFilterFn: 'includesString',
     enableSortingRemoval: false,
-    state: {
-      globalFilter: search.trim(),
-      columnFilters: status === 'all' ? [] : [{ id: 'status', value: status }],
-      sorting,
-    },
+    state: { sorting },
     onSortingChange: setSorting,
   });
   const { rows } = table.getRowModel();
