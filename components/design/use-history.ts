@@ -27,10 +27,14 @@ interface Trail {
   time: number;
 }
 
-/** Leaves the field one is in, so that it shows what comes, and goes back to it afterwards. */
+/**
+ * Leaves the field one is in, so that it shows what comes, and goes back to it afterwards. A
+ * tool's own field is not left: until the next frame its keys, Escape too, would go nowhere.
+ */
 function withFieldLeft(change: () => void): void {
   const field = document.activeElement;
-  if (!(field instanceof HTMLInputElement || field instanceof HTMLTextAreaElement)) {
+  const typed = field instanceof HTMLInputElement || field instanceof HTMLTextAreaElement;
+  if (!typed || field.closest('[role=dialog]')) {
     change();
     return;
   }

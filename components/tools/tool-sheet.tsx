@@ -32,12 +32,14 @@ export default function ToolSheet({
     <div
       role="dialog"
       aria-label={title}
+      // Whoever clicks on its text stays in it, so that Escape closes it.
+      tabIndex={-1}
       onKeyDown={(event) => {
         if (event.key !== 'Escape' || event.defaultPrevented) return;
         event.stopPropagation();
         close();
       }}
-      className="fixed inset-y-0 right-0 z-40 flex w-full flex-col border-l border-edge bg-panel shadow-[-8px_0_24px_rgb(20_32_31/0.18)] bench:top-12 bench:w-[36rem]"
+      className="fixed inset-y-0 right-0 z-40 flex w-full flex-col border-l border-edge bg-panel shadow-[-8px_0_24px_rgb(20_32_31/0.18)] outline-none bench:top-12 bench:w-[36rem]"
     >
       <header className="flex items-center gap-3 border-b border-line px-5 py-2.5">
         <h2

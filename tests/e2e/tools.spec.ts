@@ -111,8 +111,13 @@ test('voltages stand side by side and say that they are no rating', async ({ pag
   const loss = tool.getByRole('region', { name: 'Loss and Q' });
   // Brass at 7 MHz: computed from δ = √(ρ/(π·f·µ0)).
   await expect(loss.getByRole('row').nth(1)).toContainText('48.9 µm');
-  await tool.getByRole('button', { name: 'Close' }).click();
+  // At once after a value is taken, and from the field itself.
+  await tool.getByLabel('Working frequency').fill('8 MHz');
+  await page.keyboard.press('Enter');
+  await expect(page.getByText('Working frequency set to 8 MHz.')).toBeVisible();
+  await page.keyboard.press('Escape');
   await expect(tool).toBeHidden();
+  await page.getByRole('button', { name: 'Undo', exact: true }).last().click();
   await page.getByRole('button', { name: 'Undo', exact: true }).last().click();
   await page.keyboard.press('Control+z');
   await expect(field(page, 'Altitude of use')).toHaveValue('0');
