@@ -5,6 +5,11 @@ export async function register(): Promise<void> {
   if (process.env.NEXT_RUNTIME !== 'nodejs') return;
   const { env } = await import('./lib/env');
   env();
+  // Streams to open screens never end by themselves; they would hold up the end of the server.
+  const { changes } = await import('./lib/live/changes');
+  for (const signal of ['SIGTERM', 'SIGINT'] as const) {
+    process.on(signal, () => changes().endAll());
+  }
 }
 
 /** What a page or an action threw, in the log's own form. Routes answer for themselves. */

@@ -2,6 +2,7 @@
 
 import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { useState, type ReactNode } from 'react';
+import { useLive } from './live/use-live';
 
 /** What the workshop's pages share in the browser. */
 export function Providers({ children }: { children: ReactNode }) {
@@ -11,5 +12,6 @@ export function Providers({ children }: { children: ReactNode }) {
         defaultOptions: { queries: { staleTime: 10_000, retry: 1 }, mutations: { retry: 0 } },
       }),
   );
+  useLive(client);
   return <QueryClientProvider client={client}>{children}</QueryClientProvider>;
 }

@@ -60,24 +60,30 @@ export const mayEdit = (role: Role): boolean => may[role].edit;
 export const mayRead = (role: Role): boolean => may[role].read;
 export const mayDownload = (role: Role): boolean => may[role].download;
 
+/** A signed-in person with the epoch of the session that they came with. */
+interface Session {
+  readonly viewer: Viewer;
+  readonly epoch: number;
+}
+
 /**
- * The person behind the session, in the workshop they have chosen or else their first; or null.
- * Asked of the database every time, so a session dies with the membership or when it is ended
- * everywhere; once per render in a page.
+ * What somebody is in a workshop, or in their first one when `wanted` is none of theirs; null
+ * when they belong to none, or their sessions of that epoch have been ended.
  */
-export const findViewer = cache(async (): Promise<Viewer | null> => {
-  const session = await signedInUser();
-  if (session === null) return null;
-  const wanted = await chosenWorkshop();
-  return within({ user: session.userId }, async (tx) => {
+async function viewerIn(
+  userId: string,
+  epoch: number,
+  wanted: string | null,
+): Promise<Viewer | null> {
+  return within({ user: userId }, async (tx) => {
     const memberships = await tx.find(
       Membership,
-      { user: session.userId, removedAt: null },
+      { user: userId, removedAt: null },
       { populate: ['user', 'workshop'], orderBy: { createdAt: 'asc', id: 'asc' } },
     );
     const membership =
       memberships.find(({ workshop }) => workshop.id === wanted) ?? memberships[0];
-    if (!membership || membership.user.sessionEpoch !== session.epoch) return null;
+    if (!membership || membership.user.sessionEpoch !== epoch) return null;
     const { user, workshop, role } = membership;
     return {
       userId: user.id,
@@ -88,13 +94,44 @@ export const findViewer = cache(async (): Promise<Viewer | null> => {
       workshopName: workshop.name,
     };
   });
+}
+
+/** Does this person still belong to the workshop, with sessions of that epoch? */
+export async function isStillMember(
+  { userId, workshopId }: Viewer,
+  epoch: number,
+): Promise<boolean> {
+  return (await viewerIn(userId, epoch, workshopId))?.workshopId === workshopId;
+}
+
+/**
+ * The session, in the workshop that the person has chosen or else their first. Asked of the
+ * database every time, so it dies with the membership or when it is ended everywhere; once per
+ * render in a page.
+ */
+const findSession = cache(async (): Promise<Session | null> => {
+  const session = await signedInUser();
+  if (session === null) return null;
+  const { userId, epoch } = session;
+  const viewer = await viewerIn(userId, epoch, await chosenWorkshop());
+  return viewer && { viewer, epoch };
 });
+
+/** The person behind the session, or null. */
+export const findViewer = async (): Promise<Viewer | null> =>
+  (await findSession())?.viewer ?? null;
+
+/** The session of a request that goes on. @throws RequestError not-signed-in */
+export async function requireSession(): Promise<Session> {
+  const session = await findSession();
+  if (!session)
+    throw new RequestError('not-signed-in', 'You are not signed in; sign in and try again.');
+  return session;
+}
 
 /** The guard of routes and actions. @throws RequestError not-signed-in or not-allowed. */
 export async function requireMember(allowed?: (role: Role) => boolean): Promise<Viewer> {
-  const viewer = await findViewer();
-  if (!viewer)
-    throw new RequestError('not-signed-in', 'You are not signed in; sign in and try again.');
+  const { viewer } = await requireSession();
   if (allowed && !allowed(viewer.role)) {
     throw new RequestError(
       'not-allowed',

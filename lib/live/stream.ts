@@ -1,0 +1,62 @@
+import 'server-only';
+import { isStillMember, type Viewer } from '../access';
+import { log } from '../log';
+import { changes } from './changes';
+
+/** Keeps proxies from closing a quiet stream, and asks whether the person still belongs here. */
+const BEAT = 15_000;
+
+/**
+ * Server-sent events for one screen: `change` with what was recorded, `again` when some may have
+ * been missed. Ends with the request, and with the membership or session that opened it.
+ */
+export function changeStream(
+  viewer: Viewer,
+  epoch: number,
+  signal: AbortSignal,
+): ReadableStream {
+  const encoder = new TextEncoder();
+  let stop = (): void => undefined;
+  return new ReadableStream<Uint8Array>({
+    start(controller) {
+      let ended = false;
+      const write = (text: string): void => {
+        if (!ended) controller.enqueue(encoder.encode(text));
+      };
+      const end = (): void => {
+        if (ended) return;
+        ended = true;
+        clearInterval(beat);
+        leave();
+        signal.removeEventListener('abort', end);
+        controller.close();
+      };
+      const askAgain = async (): Promise<void> => {
+        if (!(await isStillMember(viewer, epoch))) end();
+      };
+      const check = (): void => {
+        // While the database is away nothing is told either.
+        askAgain().catch((error: unknown) => log.debug({ err: error }, 'membership not asked'));
+      };
+      const leave = changes().follow({
+        workshop: viewer.workshopId,
+        tell: ({ what, subject, revision }) => {
+          write(`event: change\ndata: ${JSON.stringify({ what, subject, revision })}\n\n`);
+          if (what.startsWith('member-')) check();
+        },
+        lookAgain: () => write('event: again\ndata: {}\n\n'),
+        end,
+      });
+      const beat = setInterval(() => {
+        write(': still here\n\n');
+        check();
+      }, BEAT);
+      beat.unref();
+      signal.addEventListener('abort', end);
+      stop = end;
+      write('retry: 1000\n\n');
+      if (signal.aborted) end();
+    },
+    cancel: () => stop(),
+  });
+}
