@@ -23,12 +23,15 @@ export function changeStream(
       const write = (text: string): void => {
         if (!ended) controller.enqueue(encoder.encode(text));
       };
-      const end = (): void => {
-        if (ended) return;
+      const letGo = (): void => {
         ended = true;
         clearInterval(beat);
         leave();
         signal.removeEventListener('abort', end);
+      };
+      const end = (): void => {
+        if (ended) return;
+        letGo();
         controller.close();
       };
       const askAgain = async (): Promise<void> => {
@@ -53,7 +56,7 @@ export function changeStream(
       }, BEAT);
       beat.unref();
       signal.addEventListener('abort', end);
-      stop = end;
+      stop = letGo;
       write('retry: 1000\n\n');
       if (signal.aborted) end();
     },
