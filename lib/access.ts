@@ -58,6 +58,7 @@ const may = {
 /** May this role create, save, restore and delete designs, machines and sheet? */
 export const mayEdit = (role: Role): boolean => may[role].edit;
 export const mayRead = (role: Role): boolean => may[role].read;
+export const mayReadRecord = (role: Role): boolean => may[role].record;
 export const mayDownload = (role: Role): boolean => may[role].download;
 
 /** A signed-in person with the epoch of the session that they came with. */

@@ -9,9 +9,11 @@ import { beforeAll, describe, expect, test } from 'vitest';
 import { defaultDesign, derive } from '@/geometry';
 import { cutFiles } from '@/geometry/files';
 import { machineParameters } from '@/geometry/cutting/shop-parameters';
+import { partsOf } from '@/geometry/parts/assembly';
 import { RecordEntry } from '@/entities';
 import { entityManager } from '../support/as-owner';
 import { call } from '../support/call';
+import { rowLayout } from '../support/row-layout';
 import { callers, Cast, storedDesign, type Caller } from '../support/cast';
 
 const root = join(import.meta.dirname, '..', '..');
@@ -57,6 +59,8 @@ const nextAuth = 'app/api/auth/[...nextauth]/route.ts';
 
 const routes: Record<string, Record<string, Rule>> = {
   'app/api/health/route.ts': { GET: { status: answers(200, 200, 200, 200, 200, 200) } },
+  'app/api/record/route.ts': { GET: { status: answers(200, 200, 403, 200, 401, 401) } },
+  'app/api/record/export/route.ts': { GET: { status: answers(200, 200, 403, 200, 401, 401) } },
   'app/api/live/route.ts': { GET: { status: answers(200, 200, 200, 200, 401, 401) } },
   'app/api/designs/route.ts': {
     GET: { status: answers(200, 200, 200, 200, 401, 401) },
@@ -104,6 +108,25 @@ Object.assign(routes, {
   },
 } satisfies typeof routes);
 
+const derivation = derive(defaultDesign());
+if (!derivation.ok) throw new Error('the default design has no plates');
+const settings = { gap: 2, margin: 5, rotations: 1 };
+const sheets = {
+  version: 1,
+  machine: { from: 'values', ...machine },
+  copies: 1,
+  settings,
+  kerf: 'compensated',
+  groups: rowLayout(
+    partsOf(derivation.derived).filter((part) => part.kind === 'cut'),
+    1,
+    { width: 500, height: 300, ...settings },
+  ),
+};
+Object.assign(routes, {
+  'app/api/designs/[id]/sheets/route.ts': { POST: { status: reads, body: sheets } },
+} satisfies typeof routes);
+
 const actions: Record<string, readonly string[]> = {
   // Open to everybody: it makes a workshop of one's own. tests/routes/sign-up.test.ts
   'app/(account)/sign-up/actions.ts': ['signUpAction'],
@@ -121,8 +144,6 @@ let fileName: string;
 
 beforeAll(async () => {
   cast = await Cast.gather();
-  const derivation = derive(defaultDesign());
-  if (!derivation.ok) throw new Error('the default design has no plates');
   fileName = cutFiles('Bench section', derivation.derived)[0]!.name;
 });
 
