@@ -1,12 +1,9 @@
 import 'server-only';
-import { strToU8, zipSync, type Zippable } from 'fflate';
 import type { Derived } from '@/geometry';
 import { slugOf } from '@/geometry/files';
 import { partsOf } from '@/geometry/parts/assembly';
 import type { HashedFile } from './design-files';
-
-/** ZIP has no time before 1980; every file gets this one, so that equal designs give equal bytes. */
-const NO_TIME = new Date(Date.UTC(1980, 0, 1, 12));
+import { zipOf } from './zip';
 
 /** What the files hold, for a person and for a program. */
 function manifestOf(
@@ -53,12 +50,9 @@ export function bundleOf(
   files: readonly HashedFile[],
 ): { readonly name: string; readonly body: Buffer } {
   const folder = slugOf(name);
-  const entries: Zippable = {
-    [`${folder}/manifest.json`]: strToU8(manifestOf(name, version, derived, files)),
-  };
-  for (const { name: file, body } of files) entries[`${folder}/${file}`] = body;
+  const manifest = Buffer.from(manifestOf(name, version, derived, files), 'utf8');
   return {
     name: `${folder}_all-files.zip`,
-    body: Buffer.from(zipSync(entries, { mtime: NO_TIME, level: 6 })),
+    body: zipOf(folder, [{ name: 'manifest.json', body: manifest }, ...files]),
   };
 }

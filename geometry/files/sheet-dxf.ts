@@ -49,11 +49,24 @@ export const kerfWords = (state: KerfState, { kerf }: Pick<Machine, 'kerf'>): st
     ? 'nominal size, no kerf allowed for'
     : `contours moved by half of ${kerf} mm of kerf, outer out, holes in`;
 
+/** What a person should know of a sheet. */
+export function sheetWords(
+  { material, thickness, layout }: LaidGroup,
+  sheet: number,
+  machine: Machine,
+  state: KerfState,
+): string {
+  const { width, height } = layout.sheets[sheet]!;
+  return `${material} ${thickness} mm, sheet ${sheet + 1} of ${layout.sheets.length}, ${width} x ${height} mm, ${machine.name}: ${kerfWords(state, machine)}`;
+}
+
+/** @param title what its notes begin with: whose sheet it is */
 export function sheetDxf(
   group: LaidGroup,
   sheet: number,
   machine: Machine,
   state: KerfState,
+  title = '',
 ): string {
   // The library counts handles over the whole process; from 0, equal sheets give equal bytes.
   Handle.seed = 0;
@@ -79,7 +92,6 @@ export function sheetDxf(
     true,
   );
   drawing.setActiveLayer(LAYERS.notes);
-  const notes = `${group.material} ${group.thickness} mm, sheet ${sheet + 1} of ${group.layout.sheets.length}, ${width} x ${height} mm, ${machine.name}: ${kerfWords(state, machine)}`;
-  drawing.drawText(0, -8, 4, 0, notes);
+  drawing.drawText(0, -8, 4, 0, title + sheetWords(group, sheet, machine, state));
   return drawing.toDxfString();
 }

@@ -1,6 +1,6 @@
 import { CAPITALS, type Mark, type Sketch } from './sketch';
 
-const escaped = (text: string): string =>
+export const escaped = (text: string): string =>
   text
     .replace(/&/g, '&amp;')
     .replace(/</g, '&lt;')

@@ -35,7 +35,7 @@ test('each part has its file first, a picture, sheet, kerf and pieces; all by a 
   expect([...order].sort((a, b) => a - b)).toEqual(order);
   await expect(rotor.getByText('none allowed for')).toBeVisible();
   // Quantity and sheet are those of the file's own name.
-  const [, thickness, quantity] = /_(\d\.\d+)mm_(\d+)off\./.exec(
+  const [, thickness, quantity] = /_(\d\.\d+)mm_(\d+)off_nominal\./.exec(
     (await link.getAttribute('download'))!,
   )!;
   await expect(rotor.getByText(quantity!, { exact: true })).toBeVisible();
