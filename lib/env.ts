@@ -6,6 +6,8 @@ const envSchema = z.object({
   NEXTAUTH_URL: z.url({ protocol: /^https?$/ }),
   NEXTAUTH_SECRET: z.string().min(32),
   PORT: z.coerce.number().int().min(0).max(65535).optional(),
+  /** Where a stand-in for a mail server keeps what it was sent; there is none in earnest. */
+  MAIL_FOLDER: z.string().optional(),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('info'),
 });
 export type Env = z.infer<typeof envSchema>;

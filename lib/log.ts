@@ -1,4 +1,3 @@
-import 'server-only';
 import pino from 'pino';
 
 const secrets = [

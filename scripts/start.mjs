@@ -7,6 +7,7 @@ import { appUrlOf } from './app-url.mjs';
 import { ensureBuild } from './build.mjs';
 import { mustRun } from './command.mjs';
 import { claimClone, rememberServer } from './leftovers.mjs';
+import { startMail } from './mail.mjs';
 import { checkNode, ensureNodeModules, ensureSystemPackages } from './packages.mjs';
 import { data, makeData } from './paths.mjs';
 import { freePortFrom } from './port.mjs';
@@ -91,16 +92,25 @@ async function main() {
   if (port !== wanted) console.log(`Port ${wanted} is taken; using ${port}.`);
   const shown = ['0.0.0.0', '::'].includes(host) ? 'localhost' : host;
   const address = process.env.NEXTAUTH_URL || `http://${shown}:${port}`;
+  const mail = await startMail(env, join(data, 'mail'));
   const server = await startServer({
     mode: dev ? 'dev' : 'start',
     host,
     port,
-    env: { DATABASE_URL: env.DATABASE_URL, NEXTAUTH_URL: address, NEXTAUTH_SECRET: secret() },
+    env: {
+      DATABASE_URL: env.DATABASE_URL,
+      NEXTAUTH_URL: address,
+      NEXTAUTH_SECRET: secret(),
+      ...mail,
+    },
   });
   if (!given) rememberServer(server.child.pid);
 
   console.log(`\nVaneloft is at ${address}\n`);
   printSignIns(signIns);
+  if (mail.MAIL_FOLDER) {
+    console.log(`\nMail goes nowhere: owners read it at ${address}/people/mail`);
+  }
   console.log('\nCtrl-C stops it.');
   throw new Stop(`The server ended (${await server.exited}).`);
 }

@@ -6,6 +6,7 @@ import { appUrlOf } from './app-url.mjs';
 import { ensureBuild } from './build.mjs';
 import { check, playwright, printTally, unused, verify, vitest } from './checks.mjs';
 import { mustRun } from './command.mjs';
+import { startMail } from './mail.mjs';
 import {
   checkNode,
   ensureNodeModules,
@@ -38,7 +39,8 @@ async function serve(cluster) {
     ['--import', 'tsx', 'scripts/seed.ts', signIns],
     whole,
   );
-  await startServer({ host: '127.0.0.1', port, env });
+  const mail = await startMail(whole.env, join(data, 'test-mail'));
+  await startServer({ host: '127.0.0.1', port, env: { ...env, ...mail } });
   return { BASE_URL: env.NEXTAUTH_URL, SIGN_INS: signIns };
 }
 
