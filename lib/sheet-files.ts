@@ -2,7 +2,7 @@ import 'server-only';
 import { createHash } from 'node:crypto';
 import type { Derived } from '@/geometry';
 import { partFindings } from '@/geometry/cutting/part-findings';
-import { kerfWords } from '@/geometry/files/sheet-dxf';
+import { kerfWords } from '@/geometry/files/kerf-words';
 import { sheetCutFiles, type SheetFile, type SheetNames } from '@/geometry/files/sheet-files';
 import { slugOf } from '@/geometry/files';
 import { heldLayout, LayoutError, type GivenLayout } from '@/geometry/nesting/given-layout';

@@ -63,8 +63,8 @@ export function CutList({
       {derived && (
         <PanelSection title="Sheets for your machine">
           <p>
-            All pieces laid out on sheets, with the kerf of a machine allowed for, to look at
-            and save.
+            All pieces laid out on sheets, compensated for the kerf of your machine or nominal:
+            see every sheet, then save it or all files in one.
           </p>
           <Button className="min-h-12 self-stretch" onPress={() => setLaying(true)}>
             Lay out on sheets
@@ -90,6 +90,7 @@ export function CutList({
           design={derived.design}
           section={section}
           derived={derived}
+          saved={{ id, version, changed: false }}
           // Whoever only reads has nothing to put the answer into.
           apply={() => undefined}
           close={() => setLaying(false)}

@@ -28,8 +28,8 @@ function Picture({ part: { label, picture } }: { part: FilePart }) {
 }
 
 const kerfs: Record<FilePart['kerf'], string> = {
-  nominal: 'none allowed for',
-  compensated: 'allowed for',
+  nominal: 'nominal, none allowed for',
+  compensated: 'compensated, allowed for',
 };
 
 /** One part to cut: its file and how it looks first, then what to cut it from and how often. */

@@ -102,6 +102,11 @@ export function Workbench({
             history={history}
             derived={plates.derived}
             section={section}
+            saved={{
+              id: record.id,
+              version: saving.stored.version,
+              changed: saving.dirty,
+            }}
             onClose={() => openTool(null)}
           />
         )}

@@ -8,6 +8,7 @@ import type { Derived, Design } from '@/geometry';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import type { ToolName } from './places';
+import type { Saved } from './tool-props';
 import ToolSheet from './tool-sheet';
 
 /** The open tool, and what the last one put on the screen until it is undone or accepted. */
@@ -17,6 +18,7 @@ export default function ToolHost({
   history,
   derived,
   section,
+  saved,
   onClose,
 }: {
   tool: ToolName | null;
@@ -24,6 +26,7 @@ export default function ToolHost({
   history: History;
   derived: Derived | null;
   section: number;
+  saved: Saved;
   onClose: () => void;
 }) {
   const [applied, setApplied] = useState<string | null>(null);
@@ -77,6 +80,7 @@ export default function ToolHost({
           design={design}
           section={section}
           derived={derived}
+          saved={saved}
           apply={apply}
           close={onClose}
           notice={notice}

@@ -11,6 +11,7 @@ import type { Machine } from '../cutting/machine';
 import type { LaidGroup } from '../nesting/lay-out';
 import { sheetCuts } from '../nesting/sheet-cuts';
 import type { Vertex } from '../outline';
+import { kerfWords } from './kerf-words';
 
 const LAYERS = {
   outer: 'OUTER-CUT',
@@ -42,12 +43,6 @@ function drawRun(drawing: Drawing, { edge, contour, between, leadIn }: CutRun): 
   drawing.setActiveLayer(LAYERS.leadIn);
   drawing.drawLine(rounded(from.x), rounded(from.y), rounded(to.x), rounded(to.y));
 }
-
-/** What the notes say of the kerf. */
-export const kerfWords = (state: KerfState, { kerf }: Pick<Machine, 'kerf'>): string =>
-  state === 'nominal'
-    ? 'nominal size, no kerf allowed for'
-    : `contours moved by half of ${kerf} mm of kerf, outer out, holes in`;
 
 /** What a person should know of a sheet. */
 export function sheetWords(

@@ -8,8 +8,9 @@ import { formatQuantity } from '../quantity';
 import type { CutFile } from './cut-file';
 import { dxfOf } from './dxf';
 import { laidSheetName, partFileName, slugOf } from './file-name';
+import { kerfWords } from './kerf-words';
 import { placeInRow } from './placement';
-import { kerfWords, sheetDxf, sheetWords } from './sheet-dxf';
+import { sheetDxf, sheetWords } from './sheet-dxf';
 import { sheetSvg } from './sheet-svg';
 import { svgOf } from './svg';
 

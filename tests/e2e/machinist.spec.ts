@@ -2,6 +2,7 @@
 
 import { readFileSync } from 'node:fs';
 import AxeBuilder from '@axe-core/playwright';
+import { unzipSync } from 'fflate';
 import { expect, test } from '../support/quiet-test';
 import { ready } from '../support/design-screen';
 import { machinist, signIn } from '../support/sign-ins';
@@ -55,13 +56,21 @@ test('sheets are laid out, seen and saved with the kerf allowed for', async ({ p
   const tool = page.getByRole('dialog', { name: 'Lay out on sheets' });
   await expect(tool.getByText('Laid out.')).toBeVisible({ timeout: 30_000 });
   await expect(tool.getByRole('img', { name: /^Sheet 1 with/ }).first()).toBeVisible();
-  await tool.getByLabel('Kerf', { exact: true }).selectOption('allowed for');
+  await tool.getByLabel('Kerf', { exact: true }).selectOption('compensated, allowed for');
   await expect(tool.getByText('Laid out.')).toBeVisible({ timeout: 30_000 });
-  const save = tool.getByRole('button', { name: 'Save sheet 1 as DXF' }).first();
+  const save = tool.getByRole('button', { name: 'Save sheet 1 as DXF, compensated' }).first();
   expect((await save.boundingBox())!.height).toBeGreaterThanOrEqual(44);
   const [download] = await Promise.all([page.waitForEvent('download'), save.click()]);
-  expect(download.suggestedFilename()).toMatch(/_compensated\.dxf$/);
-  expect(readFileSync(await download.path(), 'utf8')).toContain('contours moved by half of');
+  expect(download.suggestedFilename()).toMatch(/_sheet-1-of-\d+_compensated\.dxf$/);
+  const dxf = readFileSync(await download.path());
+  expect(dxf.toString()).toContain('contours moved by half of');
+  const all = tool.getByRole('button', { name: 'Save all in a ZIP' });
+  const [zip] = await Promise.all([page.waitForEvent('download'), all.click()]);
+  expect(zip.suggestedFilename()).toMatch(/_sheets_compensated\.zip$/);
+  const held = Object.entries(unzipSync(readFileSync(await zip.path())));
+  const [, same] = held.find(([name]) => name.endsWith(download.suggestedFilename()))!;
+  expect(Buffer.from(same).equals(dxf)).toBe(true);
+  expect(held.some(([name]) => name.endsWith('manifest.json'))).toBe(true);
   const { violations } = await new AxeBuilder({ page }).include('[role=dialog]').analyze();
   expect(violations.map(({ id, nodes }) => `${id}: ${nodes[0]?.html}`)).toEqual([]);
   await page.keyboard.press('Escape');

@@ -13,7 +13,9 @@ test('the plates are laid out, follow what is asked, and can be stopped', async 
   await expect(tool.getByText('This machine can cut every contour.')).toBeVisible();
   const sheet = tool.getByRole('img', { name: /^Sheet 1 with 14 × Rotor plate/ });
   await expect(sheet.locator('g > path')).toHaveCount(29);
-  await expect(tool.getByText('0.8 mm brass')).toBeVisible();
+  await expect(tool.getByRole('heading', { name: '0.8 mm brass' })).toBeVisible();
+  await expect(tool.getByText(/compensated: contours moved by half of/)).toBeVisible();
+  await expect(tool.getByRole('button', { name: 'Save all in a ZIP' })).toBeEnabled();
 
   await tool.getByLabel('Machine').selectOption('Old CO₂ laser');
   await expect(tool.getByText(/Bright brass under a laser/).first()).toBeVisible({
@@ -26,6 +28,8 @@ test('the plates are laid out, follow what is asked, and can be stopped', async 
   await tool.getByLabel('Sheet height').fill('4 in');
   await tool.getByLabel('Sheets of each kind').fill('2');
   await expect(tool.getByText(/Parts without room/)).toBeVisible({ timeout: 30_000 });
+  await expect(tool.getByText(/Not all parts are on a sheet yet/)).toBeVisible();
+  await expect(tool.getByRole('button', { name: 'Save all in a ZIP' })).toBeDisabled();
   await tool.getByLabel('Sheet height').fill('4 kg');
   await expect(tool.getByText('“4 kg” is no length from 20 mm to 4000 mm.')).toBeVisible();
 

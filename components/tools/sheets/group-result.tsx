@@ -1,9 +1,7 @@
 import { Figures } from '@/components/design/figures';
 import { PanelSection } from '@/components/design/panel-section';
-import { Button } from '@/components/ui/button';
 import { formatQuantity } from '@/geometry';
 import type { LaidGroup } from '@/geometry/nesting/lay-out';
-import { SheetPreview } from './sheet-preview';
 
 const percent = (share: number): string => `${Number((100 * share).toPrecision(3))} %`;
 
@@ -15,15 +13,8 @@ function duration(seconds: number | null): string {
   return `${Math.floor(minutes / 60)} h ${minutes % 60} min`;
 }
 
-/** Parts of one kind of sheet: what they take, and each sheet as it will be cut. */
-export function GroupResult({
-  group,
-  onSave,
-}: {
-  group: LaidGroup;
-  /** Saves one of its sheets as DXF. */
-  onSave: (sheet: number) => void;
-}) {
+/** Parts of one kind of sheet: what they take. */
+export function GroupResult({ group }: { group: LaidGroup }) {
   const { layout, tally, thickness, material } = group;
   const title = `${formatQuantity(thickness, 'length')} ${material}`;
   return (
@@ -48,14 +39,6 @@ export function GroupResult({
           ['Time to cut and pierce', duration(tally.time)],
         ]}
       />
-      {layout.sheets.map((_, sheet) => (
-        <div key={sheet} className="flex flex-col gap-1.5">
-          <SheetPreview group={group} sheet={sheet} />
-          <Button className="self-start" onPress={() => onSave(sheet)}>
-            Save sheet {sheet + 1} as DXF
-          </Button>
-        </div>
-      ))}
     </PanelSection>
   );
 }

@@ -1,16 +1,17 @@
 import type { Derived } from '@/geometry';
 import type { KerfState } from '@/geometry/cutting/cut-path';
-import type { Machine, Sheet } from '@/geometry/cutting/machine';
+import type { Sheet } from '@/geometry/cutting/machine';
 import { sheetsFor } from '@/geometry/cutting/starting-values';
 import { layOut, type LaidOut } from '@/geometry/nesting/lay-out';
 import type { LayoutSettings } from '@/geometry/nesting/layout';
 import { partsOf } from '@/geometry/parts/assembly';
 import { failureOf, type JobMessage } from '../job/messages';
+import type { ShopMachine } from './use-shop';
 
 export interface Question {
   readonly derived: Derived;
   readonly copies: number;
-  readonly machine: Machine;
+  readonly machine: ShopMachine;
   /** Taken where the workshop has no such sheet in its store. */
   readonly sheet: Pick<Sheet, 'width' | 'height' | 'count'>;
   readonly stock: readonly Sheet[];

@@ -29,8 +29,8 @@ const rotations = [
 ] as const;
 
 const kerfs = [
-  { value: 'nominal', label: 'not allowed for' },
-  { value: 'compensated', label: 'allowed for' },
+  { value: 'nominal', label: 'nominal, not allowed for' },
+  { value: 'compensated', label: 'compensated, allowed for' },
 ] as const;
 
 export function LayoutFields({

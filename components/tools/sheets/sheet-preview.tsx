@@ -1,7 +1,10 @@
-import { useId } from 'react';
+import { useId, useMemo } from 'react';
 import { svgPath } from '@/components/floor/svg-path';
+import type { KerfState } from '@/geometry/cutting/cut-path';
+import type { Machine } from '@/geometry/cutting/machine';
 import type { LaidGroup } from '@/geometry/nesting/lay-out';
 import { placedContour } from '@/geometry/nesting/placed';
+import { sheetCuts } from '@/geometry/nesting/sheet-cuts';
 
 type Look = 'rotor' | 'stator' | 'other';
 
@@ -17,8 +20,18 @@ const strokes: Record<Look, string> = {
 /** mm of sheet round the drawing, so that its edge is seen. */
 const ROUND = 2;
 
-/** One sheet with its parts, true shapes, holes open. */
-export function SheetPreview({ group, sheet }: { group: LaidGroup; sheet: number }) {
+/** One sheet with its parts, true shapes, holes open, and where the machine comes to each cut. */
+export function SheetPreview({
+  group,
+  sheet,
+  machine,
+  kerf,
+}: {
+  group: LaidGroup;
+  sheet: number;
+  machine: Machine;
+  kerf: KerfState;
+}) {
   const id = useId();
   const { width, height } = group.layout.sheets[sheet]!;
   const parts = new Map(group.parts.map((part) => [part.key, part]));
@@ -27,6 +40,15 @@ export function SheetPreview({ group, sheet }: { group: LaidGroup; sheet: number
     .map(({ key, label }) => ({ label, count: here.filter((p) => p.key === key).length }))
     .filter(({ count }) => count > 0)
     .map(({ label, count }) => `${count} × ${label}`);
+  const leads = useMemo(
+    () =>
+      sheetCuts(group, sheet, machine, kerf)
+        .flatMap(({ runs }) => runs)
+        .flatMap(({ leadIn }) => leadIn ?? [])
+        .map(({ from, to }) => `M${from.x} ${from.y}L${to.x} ${to.y}`)
+        .join(''),
+    [group, sheet, machine, kerf],
+  );
   // Hatching of about one line in ten pixels, whatever the sheet's size.
   const pitch = width / 90;
   const fills: Record<Look, string> = {
@@ -77,9 +99,16 @@ export function SheetPreview({ group, sheet }: { group: LaidGroup; sheet: number
             );
           })}
         </g>
+        <path
+          d={leads}
+          transform="scale(1 -1)"
+          className="fill-none stroke-action"
+          vectorEffect="non-scaling-stroke"
+        />
       </svg>
       <figcaption className="dense text-small text-ink-2">
-        Sheet {sheet + 1}, {width} by {height} mm: {counts.join(', ')}
+        Sheet {sheet + 1} of {group.thickness} mm {group.material}, {width} by {height} mm,{' '}
+        {kerf}: {counts.join(', ')}
       </figcaption>
     </figure>
   );

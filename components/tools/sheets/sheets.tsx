@@ -11,6 +11,7 @@ import { GroupResult } from './group-result';
 import { LayoutFields, type Asked } from './layout-fields';
 import { MachineFindings } from './machine-findings';
 import type { Question } from './lay-out.worker';
+import { SheetFiles } from './sheet-files';
 import { useShop } from './use-shop';
 
 /** ms without a change before it begins: nobody wants a layout of half a number. */
@@ -30,7 +31,7 @@ const first: Asked = {
 };
 
 /** All cut parts of the design on sheets: how they lie, and what they take. */
-export default function Sheets({ derived }: ToolProps) {
+export default function Sheets({ derived, saved }: ToolProps) {
   const [asked, setAsked] = useState(first);
   const { machines, stock } = useShop();
   const question = useMemo((): Question | null => {
@@ -85,16 +86,16 @@ export default function Sheets({ derived }: ToolProps) {
             <MachineFindings findings={laid.findings} />
           </PanelSection>
           {laid.groups.map((group) => (
-            <GroupResult
-              key={`${group.material} ${group.thickness}`}
-              group={group}
-              onSave={async (sheet) => {
-                if (!shown) return;
-                const { saveSheet } = await import('./save-sheet');
-                saveSheet(group, sheet, shown.machine, shown.kerf);
-              }}
-            />
+            <GroupResult key={`${group.material} ${group.thickness}`} group={group} />
           ))}
+          {shown && (
+            <SheetFiles
+              saved={saved}
+              question={shown}
+              laid={laid}
+              current={shown === question && !job.running}
+            />
+          )}
           <p className="text-small text-ink-2">
             From the store, sheet is taken at its own size and count; the size above is for what
             is not there. Time counts cutting and piercing; moves from cut to cut, loading and
