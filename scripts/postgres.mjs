@@ -103,7 +103,7 @@ function isReady(port) {
 }
 
 /** The server that already runs on this cluster, after a hard kill of ours; clears a stale lock. */
-async function runningServer(folder) {
+async function runningServer(folder, borrow) {
   const lock = join(folder, 'postmaster.pid');
   if (!existsSync(lock)) return null;
   const lines = readFileSync(lock, 'utf8').split('\n');
@@ -115,7 +115,7 @@ async function runningServer(folder) {
     existsSync(command) &&
     readFileSync(command, 'utf8').split('\0').includes(folder);
   if (ours && port > 0 && (await waitFor(() => isReady(port), 20_000))) {
-    return { port, stop: endWithUs(() => end(pid)) };
+    return { port, stop: borrow ? async () => {} : endWithUs(() => end(pid)) };
   }
   if (ours)
     throw new Stop(`PostgreSQL (process ${pid}) runs but does not answer; end it first.`);
@@ -181,8 +181,11 @@ function cluster({ port, stop }, password) {
   };
 }
 
-/** The cluster that lasts from start to start. It ends with this process. */
-export async function startPostgres() {
+/**
+ * The cluster that lasts from start to start. It ends with this process, unless it is `borrow`ed
+ * from another start that runs it.
+ */
+export async function startPostgres({ borrow = false } = {}) {
   const user = serverUser();
   const folder = lastingFolder(user);
   const passwordFile = join(data, 'postgres-password');
@@ -196,7 +199,7 @@ export async function startPostgres() {
   }
   const password = readFileSync(passwordFile, 'utf8');
   const server =
-    (await runningServer(folder)) ??
+    (await runningServer(folder, borrow)) ??
     (await launch(folder, join(data, 'postgres.log'), user, []));
   return cluster(server, password);
 }

@@ -1,54 +1,27 @@
 /** npm start: from a fresh clone to a served workshop. npm run dev: the same with `--dev`. */
 
-import { createHash, randomBytes } from 'node:crypto';
-import { existsSync, readFileSync, writeFileSync } from 'node:fs';
+import { createHash } from 'node:crypto';
+import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { appUrlOf } from './app-url.mjs';
 import { ensureBuild } from './build.mjs';
 import { mustRun } from './command.mjs';
+import { databases, isGiven } from './databases.mjs';
 import { claimClone, rememberServer } from './leftovers.mjs';
 import { startMail } from './mail.mjs';
 import { checkNode, ensureNodeModules, ensureSystemPackages } from './packages.mjs';
 import { data, makeData } from './paths.mjs';
 import { freePortFrom } from './port.mjs';
-import { startPostgres } from './postgres.mjs';
+import { secret } from './secret.mjs';
 import { startServer } from './server.mjs';
 import { runUntilStopped, Stop } from './stop.mjs';
 
 const dev = process.argv.includes('--dev');
-const given = process.env.DATABASE_URL;
 
 /** The demo's passwords, one file for each database: another's would open nothing here. */
 function signInsFile() {
+  const { DATABASE_URL: given } = process.env;
   const tag = given ? `-${createHash('sha256').update(given).digest('hex').slice(0, 12)}` : '';
   return join(data, `sign-ins${tag}.json`);
-}
-
-/**
- * The database's two addresses: its owner's, who migrates and sends mail, and the application's,
- * whose role is made by the migration. Of the one given, or of our own cluster, started for it.
- */
-async function databases() {
-  if (process.env.OWNER_DATABASE_URL) {
-    if (!given) throw new Stop('OWNER_DATABASE_URL is given, but no DATABASE_URL beside it.');
-    return { OWNER_DATABASE_URL: process.env.OWNER_DATABASE_URL, DATABASE_URL: given };
-  }
-  let owner = given;
-  if (!owner) {
-    console.log('Starting PostgreSQL');
-    owner = (await startPostgres()).ensureDatabase('vaneloft');
-  }
-  return { OWNER_DATABASE_URL: owner, DATABASE_URL: appUrlOf(owner, secret()) };
-}
-
-/** What session cookies are sealed with: made once, kept where only we can read it. */
-function secret() {
-  if (process.env.NEXTAUTH_SECRET) return process.env.NEXTAUTH_SECRET;
-  const file = join(data, 'session-secret');
-  if (!existsSync(file)) {
-    writeFileSync(file, randomBytes(32).toString('base64url'), { mode: 0o600 });
-  }
-  return readFileSync(file, 'utf8');
 }
 
 function printSignIns(signIns) {
@@ -67,13 +40,14 @@ function printSignIns(signIns) {
 async function main() {
   checkNode();
   makeData();
-  if (!given) {
+  if (!isGiven()) {
     await claimClone();
     await ensureSystemPackages(['postgresql']);
   }
   await ensureNodeModules();
 
   const signIns = signInsFile();
+  if (!isGiven()) console.log('Starting PostgreSQL');
   const env = { ...process.env, ...(await databases()) };
   await mustRun('The migration', process.execPath, ['--import', 'tsx', 'scripts/migrate.ts'], {
     env,
@@ -104,7 +78,7 @@ async function main() {
       ...mail,
     },
   });
-  if (!given) rememberServer(server.child.pid);
+  if (!isGiven()) rememberServer(server.child.pid);
 
   console.log(`\nVaneloft is at ${address}\n`);
   printSignIns(signIns);

@@ -19,7 +19,10 @@ const settings = z
       .regex(/@[^\s<>@]+>?$/)
       .default('Vaneloft <post@vaneloft.example>'),
   })
-  .parse(process.env);
+  .parse({
+    ...process.env,
+    OWNER_DATABASE_URL: process.env.OWNER_DATABASE_URL || process.env.DATABASE_URL,
+  });
 
 /** A number of our own, held by the worker that works. */
 const WORKER_LOCK = 80_411_909;
