@@ -1,52 +1,34 @@
-import { Color, Group, Mesh, MeshStandardMaterial, type BufferGeometry } from 'three';
-import { palette } from '@/components/floor/palette';
+import { Color, Group, Mesh, MeshStandardMaterial } from 'three';
 import type { Derived } from '@/geometry';
-import { assemblyOf } from '@/geometry/parts/assembly';
-import type { Part } from '@/geometry/parts/part';
-import { planOf } from '@/geometry/parts/solid';
 import { rotorTurn } from '@/geometry/rotor-turn';
+import { bodiesOf } from './bodies';
 import { plateGeometry } from './plate-geometry';
-
-const colours: Readonly<Record<string, string>> = { insulator: '#d9cfb4', steel: '#b9c0c4' };
-
-function colourOf(part: Part): string {
-  if (part.kind === 'bought') return '#b9c0c4';
-  if (part.key.includes('rotor')) return palette.brass;
-  if (part.key.includes('stator')) return palette.steel;
-  return colours[part.material] ?? '#c9d0d2';
-}
 
 /** mm. Arcs are chords in these files; this near, a fit is checked by them and not by the chords. */
 const SAGITTA = 0.01;
 
 /** Every part that has a place as a body of its own, mm, shaft along z, at a shaft angle (rad). */
 export function assemblyBodies(derived: Derived, angle: number): Group {
-  const { parts, placed } = assemblyOf(derived);
   const turned = rotorTurn(derived.turn, angle);
   const group = new Group();
-  for (const part of parts) {
-    const plan = planOf(part, derived.design);
-    const places = placed.filter((place) => place.part === part.key);
-    if (!plan || places.length === 0) continue;
+  const made = new Map<string, number>();
+  for (const { part, plan, thickness, places, turns, colour } of bodiesOf(derived)) {
     const material = new MeshStandardMaterial({
       name: part.kind === 'bought' ? part.label : part.material,
-      color: new Color(colourOf(part)),
+      color: new Color(colour),
       metalness: 0.4,
       roughness: 0.5,
     });
-    const shapes = new Map<string, BufferGeometry>();
-    places.forEach(({ x, y, from, to, angle: own, turns }, i) => {
-      const key = (to - from).toFixed(6);
-      const shape =
-        shapes.get(key) ?? plateGeometry({ ...plan, thickness: to - from }, SAGITTA);
-      shapes.set(key, shape);
+    const shape = plateGeometry({ ...plan, thickness }, SAGITTA);
+    for (const { x, y, from, to, angle: own } of places) {
+      const number = (made.get(part.key) ?? 0) + 1;
+      made.set(part.key, number);
       const mesh = new Mesh(shape, material);
-      mesh.name = `${part.key}-${i + 1}`;
-      const spin = own + (turns ? turned : 0);
+      mesh.name = `${part.key}-${number}`;
       mesh.position.set(x, y, (from + to) / 2);
-      mesh.rotation.z = spin;
+      mesh.rotation.z = own + (turns ? turned : 0);
       group.add(mesh);
-    });
+    }
   }
   group.updateMatrixWorld(true);
   return group;

@@ -1,49 +1,46 @@
 'use client';
 
 import { useThree } from '@react-three/fiber';
-import { useEffect, useLayoutEffect, useRef } from 'react';
-import { Matrix4, type BufferGeometry, type InstancedMesh } from 'three';
+import { useEffect, useLayoutEffect, useMemo, useRef } from 'react';
+import { Matrix4, type InstancedMesh } from 'three';
+import type { Body } from './bodies';
+import { plateGeometry } from './plate-geometry';
 
-/**
- * One body drawn once for each place. It disposes of the geometry when it gets another.
- * @param place puts the matrix of a place into the one given
- */
-export function BodySet<P>({
-  geometry,
-  places,
-  place,
-  colour,
-}: {
-  geometry: BufferGeometry;
-  places: readonly P[];
-  place: (matrix: Matrix4, at: P) => void;
-  colour: string;
-}) {
+/** What lies behind an end plate stays in sight. */
+const SHEER = 0.22;
+
+/** One body drawn once for each of its places. */
+export function BodySet({ body: { plan, thickness, places, kind, colour } }: { body: Body }) {
   const mesh = useRef<InstancedMesh>(null);
   const invalidate = useThree((state) => state.invalidate);
+  const geometry = useMemo(() => plateGeometry({ ...plan, thickness }), [plan, thickness]);
   useEffect(() => () => geometry.dispose(), [geometry]);
 
   useLayoutEffect(() => {
     const instances = mesh.current;
     if (!instances) return;
     const matrix = new Matrix4();
-    places.forEach((at, i) => {
-      place(matrix, at);
-      instances.setMatrixAt(i, matrix);
+    places.forEach(({ x, y, from, to, angle }, i) => {
+      instances.setMatrixAt(i, matrix.makeRotationZ(angle).setPosition(x, y, (from + to) / 2));
     });
     instances.instanceMatrix.needsUpdate = true;
     instances.computeBoundingSphere();
     invalidate();
-  }, [places, place, geometry, invalidate]);
+    // Taken away, it has to go from the picture, too.
+    return invalidate;
+  }, [places, geometry, invalidate]);
 
-  if (places.length === 0) return null;
   return (
     <instancedMesh
       key={`${geometry.uuid} ${places.length}`}
       ref={mesh}
       args={[geometry, undefined, places.length]}
     >
-      <meshLambertMaterial color={colour} />
+      {kind === 'end-plate' ? (
+        <meshLambertMaterial color={colour} transparent opacity={SHEER} depthWrite={false} />
+      ) : (
+        <meshLambertMaterial color={colour} />
+      )}
     </instancedMesh>
   );
 }

@@ -12,13 +12,16 @@ import { StackCanvas } from './stack-canvas';
 import { views, type ViewName } from './views';
 
 /**
- * The meshed stack in 3D: every plate, spacer and post and the shaft. It turns with the store. The
- * wrapper carries data-plates, and data-angle with the turn, in degrees, of the frame last drawn.
+ * The built capacitor in 3D: every part that has a place, its end plates sheer so that the stack
+ * stays in sight. It turns with the store. The wrapper carries data-plates, and data-angle with the
+ * turn, in degrees, of the frame last drawn.
  */
 export function StackView({ derived, store }: { derived: Derived; store: AngleStore }) {
   const wrapper = useRef<HTMLDivElement>(null);
   const eye = useRef<EyeHandle>(null);
   const [drawable, setDrawable] = useState(true);
+  const [frame, setFrame] = useState(true);
+  const framed = derived.design.frame !== 'none';
   const fail = useCallback(() => setDrawable(false), []);
   const onFrame = useCallback((angle: number) => {
     if (wrapper.current) wrapper.current.dataset.angle = toDegrees(angle).toFixed(1);
@@ -39,13 +42,20 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
             role="img"
             aria-label={
               `Meshed stack of ${rotors} rotor and ${plates.length - rotors} stator plates, ` +
-              `${depth.toFixed(1)} mm deep, turned to the shaft angle of the angle rule`
+              `${depth.toFixed(1)} mm deep, ${framed && frame ? 'in its frame, ' : ''}` +
+              'turned to the shaft angle of the angle rule'
             }
             className="relative min-h-0 flex-1"
           >
             <div className="absolute inset-0">
               <StackCanvas onFailure={fail}>
-                <Scene derived={derived} store={store} eye={eye} onFrame={onFrame} />
+                <Scene
+                  derived={derived}
+                  store={store}
+                  frame={framed && frame}
+                  eye={eye}
+                  onFrame={onFrame}
+                />
               </StackCanvas>
             </div>
           </div>
@@ -78,6 +88,15 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
             >
               Further
             </Button>
+            {framed && (
+              <Button
+                look="quiet"
+                className="grow px-1.5! text-small!"
+                onPress={() => setFrame((now) => !now)}
+              >
+                {frame ? 'Hide frame' : 'Show frame'}
+              </Button>
+            )}
           </div>
           <AssemblyLinks derived={derived} store={store} />
         </>

@@ -1,7 +1,9 @@
 import { describe, expect, it } from 'vitest';
+import { bodiesOf } from '@/components/stack/bodies';
 import { plateGeometry } from '@/components/stack/plate-geometry';
-import { stackRods } from '@/components/stack/rods';
+import { stackSize } from '@/components/stack/stack-size';
 import { defaultDesign, defaultSection, derive, type Derived } from '@/geometry';
+import { assemblyOf } from '@/geometry/parts/assembly';
 
 function derived(design = defaultDesign()): Derived {
   const derivation = derive(design);
@@ -35,22 +37,40 @@ describe('the stack in 3D', () => {
     expect(high).toBeCloseTo(plate.thickness / 2, 6);
   });
 
-  it('puts a spacer on the shaft and on every post wherever the kernel has one', () => {
+  it('shows every placed part once in every place, those of the shaft turning', () => {
     const result = derived({
       ...defaultDesign(),
       sections: [defaultSection(), { ...defaultSection(), rotorPlates: 4, statorPlates: 5 }],
     });
-    const { shaft, posts, rotorSpacers, statorSpacers } = stackRods(result);
-    const rotor = result.stack.spacers.filter(({ role }) => role === 'rotor');
-    const stator = result.stack.spacers.filter(({ role }) => role === 'stator');
-    expect(rotorSpacers).toHaveLength(rotor.length);
-    expect(statorSpacers).toHaveLength(stator.length * result.design.postCount);
-    expect(rotorSpacers[0]!.to - rotorSpacers[0]!.from).toBeCloseTo(rotor[0]!.length, 9);
-    expect(posts).toHaveLength(2 * result.design.postCount);
-    for (const post of posts) {
-      expect(post.from).toBeLessThan(post.to);
-      expect(post.from).toBeGreaterThan(shaft.from);
-      expect(post.to).toBeLessThan(shaft.to);
+    const bodies = bodiesOf(result);
+    const { placed } = assemblyOf(result);
+    expect(bodies.flatMap(({ places }) => places).length).toBe(placed.length);
+    for (const { turns, places, thickness } of bodies) {
+      for (const place of places) {
+        expect(place.turns).toBe(turns);
+        expect(place.to - place.from).toBeCloseTo(thickness, 6);
+      }
     }
+    const plates = bodies.filter(({ part }) => /-(rotor|stator)(-end)?$/.test(part.key));
+    expect(plates.reduce((sum, { places }) => sum + places.length, 0)).toBe(
+      result.stack.plates.length,
+    );
+  });
+
+  it('knows the frame from the stack, and the end plates that hide it', () => {
+    const design = { ...defaultDesign(), frame: 'end-plates', bracket: 'panel' } as const;
+    const result = derived(design);
+    const keys = (kind: string) =>
+      bodiesOf(result)
+        .filter((body) => body.kind === kind)
+        .map(({ part }) => part.key);
+    expect(keys('end-plate')).toEqual(['frame-front', 'frame-back', 'panel-plate']);
+    expect(keys('frame')).toEqual(['stop-arm', 'stop-pin', 'pillar', 'post-bush']);
+    expect(keys('stack')).toEqual(expect.arrayContaining(['shaft', 'post', 's1-rotor']));
+    const bodies = bodiesOf(result);
+    const whole = stackSize(result, bodies, true);
+    const bare = stackSize(result, bodies, false);
+    expect(whole.radius).toBeGreaterThan(bare.radius);
+    expect(bare.middle).toBeCloseTo(result.stack.depth / 2, 9);
   });
 });
