@@ -20,5 +20,9 @@ export const onRequestError: Instrumentation.onRequestError = async (
 ) => {
   if (process.env.NEXT_RUNTIME !== 'nodejs') return;
   const { log } = await import('./lib/log');
-  log.error({ err: error, path: request.path, kind: context.routeType }, 'render failed');
+  const { loggedPath } = await import('./lib/logged-path');
+  log.error(
+    { err: error, path: loggedPath(request.path), kind: context.routeType },
+    'render failed',
+  );
 };

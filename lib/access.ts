@@ -2,6 +2,7 @@ import 'server-only';
 import { cache } from 'react';
 import { redirect } from 'next/navigation';
 import { Membership } from '@/entities';
+import { findPerson } from './account/person';
 import { signedInUser } from './auth';
 import { chosenWorkshop } from './chosen-workshop';
 import { within } from './db';
@@ -58,6 +59,7 @@ const may = {
 /** May this role create, save, restore and delete designs, machines and sheet? */
 export const mayEdit = (role: Role): boolean => may[role].edit;
 export const mayRead = (role: Role): boolean => may[role].read;
+export const mayManagePeople = (role: Role): boolean => may[role].people;
 export const mayReadRecord = (role: Role): boolean => may[role].record;
 export const mayDownload = (role: Role): boolean => may[role].download;
 
@@ -142,7 +144,8 @@ export async function requireMember(allowed?: (role: Role) => boolean): Promise<
   return viewer;
 }
 
-/** The guard of pages: whoever is not signed in is sent to do so. */
+/** The guard of pages: whoever is not signed in is sent to do so; who has no workshop is told. */
 export async function requirePageMember(): Promise<Viewer> {
-  return (await findViewer()) ?? redirect('/sign-in');
+  const viewer = await findViewer();
+  return viewer ?? redirect((await findPerson()) ? '/account' : '/sign-in');
 }

@@ -15,6 +15,13 @@ const limits = {
   /** One email over all addresses, for a guesser with many of them. */
   signInEmail: { points: 40, duration: 60 * MINUTE },
   signUpAddress: { points: 10, duration: 60 * MINUTE },
+  /** Resets asked for from one address, and for one email. */
+  resetAddress: { points: 20, duration: 60 * MINUTE },
+  resetEmail: { points: 8, duration: 60 * MINUTE },
+  /** Mail that one owner has sent to addresses of their choice. */
+  invitation: { points: 60, duration: 60 * MINUTE },
+  /** One person's own password, asked again. */
+  ownPassword: { points: 10, duration: 15 * MINUTE },
 } as const;
 type Limit = keyof typeof limits;
 
@@ -68,6 +75,16 @@ export async function forgiveSignIn(email: string, address: string): Promise<voi
 }
 
 export const countSignUp = (address: string): Promise<void> => count('signUpAddress', address);
+
+/** Counted whether or not anybody has that email. */
+export async function countReset(email: string, address: string): Promise<void> {
+  await count('resetAddress', address);
+  await count('resetEmail', email);
+}
+
+export const countInvitation = (userId: string): Promise<void> => count('invitation', userId);
+
+export const countOwnPassword = (userId: string): Promise<void> => count('ownPassword', userId);
 
 /**
  * The address a request comes from: the last of X-Forwarded-For, which the nearest proxy wrote,

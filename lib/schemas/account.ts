@@ -33,3 +33,51 @@ export const signUpSchema = z.object({
   password: passwordSchema,
 });
 export type SignUp = z.input<typeof signUpSchema>;
+
+/** The secret part of a link from a mail. */
+const secretSchema = z
+  .string('Link: not whole; open it from the mail again')
+  .min(1, 'Link: not whole; open it from the mail again')
+  .max(200, 'Link: not one of ours; open it from the mail again');
+
+/** What joins a workshop; a new person also sends `newPersonSchema`. */
+export const joinSchema = z.object({ secret: secretSchema });
+
+export const newPersonSchema = z.object({ name: nameOf('Name'), password: passwordSchema });
+
+export const askResetSchema = z.object({ email: emailSchema });
+
+export const resetSchema = z.object({ secret: secretSchema, password: passwordSchema });
+
+export const ownNameSchema = z.object({ name: nameOf('Name') });
+
+export const changePasswordSchema = z.object({
+  current: z
+    .string('Password now: empty; fill it in')
+    .min(1, 'Password now: empty; fill it in')
+    .max(200, 'Password now: not right; type it again'),
+  password: passwordSchema,
+});
+
+export const newWorkshopSchema = z.object({ workshop: nameOf('Workshop') });
+
+/** What mail tells of, as a member may choose; the entity's list is the same. */
+export const mailChoiceSchema = z.enum([
+  'released',
+  'withdrawn',
+  'ordered',
+  'asked',
+  'answered',
+  'cut',
+]);
+
+export const chooseMailSchema = z.object({ muted: z.array(mailChoiceSchema).max(20) });
+
+/** The workshops of one person, each with what they do not want mail about. */
+export const ownWorkshopSchema = z.object({
+  id: z.uuid(),
+  name: z.string(),
+  role: z.enum(['owner', 'builder', 'machinist']),
+  muted: z.array(mailChoiceSchema),
+});
+export type OwnWorkshop = z.infer<typeof ownWorkshopSchema>;

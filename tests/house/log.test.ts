@@ -2,6 +2,7 @@ import { Writable } from 'node:stream';
 import pino from 'pino';
 import { expect, test } from 'vitest';
 import { logOptions } from '@/lib/log';
+import { loggedPath } from '@/lib/logged-path';
 
 /** What a logger with our options writes. */
 function written(write: (log: pino.Logger) => void): string {
@@ -37,4 +38,13 @@ test('an error is written with its causes and its code, without the values of a 
   expect(entry.err.message).toBe('failed');
   expect(entry.err.cause).toMatchObject({ message: 'duplicate key', code: '23505' });
   expect(line).not.toContain('HIDE');
+});
+
+test.each([
+  ['/join/HIDE', '/join/…'],
+  ['/reset/HIDE/more', '/reset/…'],
+  ['/sign-in?callbackUrl=%2Fjoin%2FHIDE', '/sign-in'],
+  ['/designs/1', '/designs/1'],
+])('the path %s is written as %s', (path, expected) => {
+  expect(loggedPath(path)).toBe(expected);
 });

@@ -25,6 +25,8 @@ interface Rule {
   readonly status: Readonly<Record<Caller, number>>;
   readonly body?: unknown;
   readonly query?: Record<string, string>;
+  /** Puts right what the call has changed for those who come after. */
+  readonly afterwards?: () => Promise<void>;
 }
 
 /** Answers in the order of `callers`: owner, builder, machinist, outsider, removed, signed out. */
@@ -127,6 +129,86 @@ Object.assign(routes, {
   'app/api/designs/[id]/sheets/route.ts': { POST: { status: reads, body: sheets } },
 } satisfies typeof routes);
 
+/** Somebody who is a member of ours for one call. */
+const ofAMember = async (people: Cast) => ({ id: await people.member('builder') });
+const ofAnInvitation = async (people: Cast) => ({ id: (await people.invitation()).id });
+const everybodySignedIn = (status: number) =>
+  answers(status, status, status, status, status, 401);
+/** Whoever has opened a workshop, or ended their sessions, is as before. */
+const asBefore = async () => {
+  const em = await entityManager();
+  await em.execute('update users set session_epoch = 0');
+  await em.execute(`delete from memberships m using workshops w
+    where w.id = m.workshop_id and w.name = 'Opened by a test'`);
+};
+
+Object.assign(routes, {
+  'app/api/people/route.ts': { GET: { status: answers(200, 200, 200, 200, 401, 401) } },
+  'app/api/people/[id]/route.ts': {
+    PUT: {
+      params: ofAMember,
+      status: answers(204, 403, 403, 404, 401, 401),
+      body: { role: 'machinist' },
+    },
+    DELETE: { params: ofAMember, status: answers(204, 403, 403, 404, 401, 401) },
+  },
+  'app/api/invitations/route.ts': {
+    POST: {
+      status: answers(201, 403, 403, 201, 401, 401),
+      body: { email: 'asked@test.example', role: 'builder' },
+    },
+  },
+  'app/api/invitations/[id]/route.ts': {
+    DELETE: { params: ofAnInvitation, status: answers(204, 403, 403, 404, 401, 401) },
+  },
+  'app/api/mails/route.ts': { GET: { status: answers(200, 403, 403, 200, 401, 401) } },
+  // Open to whoever holds a link from a mail; these hold none. tests/routes/people.test.ts
+  'app/api/join/route.ts': {
+    POST: {
+      status: answers(404, 404, 404, 404, 404, 404),
+      body: { secret: 'made up', name: 'Nobody', password: 'twelve or more' },
+    },
+  },
+  'app/api/reset/route.ts': {
+    POST: {
+      status: answers(404, 404, 404, 404, 404, 404),
+      body: { secret: 'made up', password: 'twelve or more' },
+    },
+  },
+  'app/api/forgot/route.ts': {
+    POST: {
+      status: answers(204, 204, 204, 204, 204, 204),
+      body: { email: 'nobody@test.example' },
+    },
+  },
+  'app/api/account/name/route.ts': {
+    PUT: { status: everybodySignedIn(200), body: { name: 'Renamed' } },
+  },
+  // Without the old password. tests/routes/account.test.ts
+  'app/api/account/password/route.ts': {
+    PUT: { status: everybodySignedIn(422), body: { password: 'twelve or more' } },
+  },
+  'app/api/account/sessions/route.ts': {
+    DELETE: { status: everybodySignedIn(204), afterwards: asBefore },
+  },
+  // Without naming one of one's own. tests/routes/account.test.ts
+  'app/api/account/workshop/route.ts': { POST: { status: everybodySignedIn(404) } },
+  'app/api/account/workshops/route.ts': {
+    POST: {
+      status: everybodySignedIn(201),
+      body: { workshop: 'Opened by a test' },
+      afterwards: asBefore,
+    },
+  },
+  'app/api/account/workshops/[id]/mail/route.ts': {
+    PUT: {
+      params: (people: Cast) => Promise.resolve({ id: people.workshopId }),
+      status: answers(200, 200, 200, 404, 404, 401),
+      body: { muted: ['cut'] },
+    },
+  },
+} satisfies typeof routes);
+
 const actions: Record<string, readonly string[]> = {
   // Open to everybody: it makes a workshop of one's own. tests/routes/sign-up.test.ts
   'app/(account)/sign-up/actions.ts': ['signUpAction'],
@@ -191,6 +273,7 @@ for (const [file, rules] of Object.entries(routes)) {
           const stream = response.headers.get('content-type')?.startsWith('text/event-stream');
           if (stream) await response.body!.cancel();
           const answer = stream ? '' : await response.text();
+          await rule.afterwards?.();
           expect({ status: response.status, answer: status < 400 ? '' : answer }).toEqual({
             status,
             answer: status < 400 ? '' : expect.stringContaining('"error"'),

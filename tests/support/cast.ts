@@ -2,9 +2,18 @@
 
 import { randomUUID } from 'node:crypto';
 import { encode } from 'next-auth/jwt';
-import { Design, Membership, RecordEntry, ShopItem, User, Workshop } from '@/entities';
+import {
+  Design,
+  Invitation,
+  Membership,
+  RecordEntry,
+  ShopItem,
+  User,
+  Workshop,
+} from '@/entities';
 import { defaultDesign, type Design as Parameters } from '@/geometry';
 import { assessDesign } from '@/lib/assess-design';
+import { makeSecret } from '@/lib/link-secret';
 import { entityManager } from './as-owner';
 import type { Role } from '@/lib/schemas/api';
 import { askWith } from './request-context';
@@ -118,6 +127,38 @@ export class Cast {
     });
     await em.flush();
     return id;
+  }
+
+  /** One more member of ours. Resolves to their id. */
+  async member(role: Role): Promise<string> {
+    const em = await entityManager();
+    const id = randomUUID();
+    const email = `${id}@test.example`;
+    const user = em.create(User, { id, name: `Test ${id}`, email, passwordHash: 'none' });
+    em.create(Membership, { user, workshop: em.getReference(Workshop, this.workshopId), role });
+    await em.flush();
+    return id;
+  }
+
+  /** An invitation into ours, and the secret of its link. */
+  async invitation(
+    given: Partial<Pick<Invitation, 'email' | 'role' | 'expiresAt'>> = {},
+  ): Promise<{ id: string; email: string; secret: string }> {
+    const em = await entityManager();
+    const id = randomUUID();
+    const { secret, hash } = makeSecret();
+    const email = given.email ?? `${id}@test.example`;
+    em.create(Invitation, {
+      id,
+      workshop: em.getReference(Workshop, this.workshopId),
+      email,
+      role: given.role ?? 'builder',
+      tokenHash: hash,
+      invitedBy: em.getReference(User, this.person('owner').id),
+      expiresAt: given.expiresAt ?? new Date(Date.now() + 3_600_000),
+    });
+    await em.flush();
+    return { id, email, secret };
   }
 
   /** The record's rows about one subject, oldest first. */
