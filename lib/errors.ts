@@ -1,18 +1,18 @@
 import 'server-only';
 import type { z } from 'zod';
-import type { ApiErrorCode, DesignRecord } from './schemas/api';
+import type { ApiErrorCode, Current } from './schemas/api';
 import { log } from './log';
 
 /** A refusal with words for the person who asked. Everything else is answered as `internal`. */
 export class RequestError extends Error {
   readonly code: ApiErrorCode;
   readonly field: string | undefined;
-  readonly current: DesignRecord | undefined;
+  readonly current: Current | undefined;
 
   constructor(
     code: ApiErrorCode,
     message: string,
-    options: { field?: string; current?: DesignRecord; cause?: unknown } = {},
+    options: { field?: string; current?: Current; cause?: unknown } = {},
   ) {
     super(message, { cause: options.cause });
     this.name = 'RequestError';

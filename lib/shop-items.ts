@@ -73,7 +73,7 @@ export function refuseStaleItem(
   }
   throw new RequestError(
     'conflict',
-    `${stored.name}: ${stored.updatedBy.name} has changed it since you opened it. Close this, look at theirs, and change it anew.`,
-    { field: 'version' },
+    `${stored.name}: ${stored.updatedBy.name} has changed it since you opened it; take theirs or save yours over it.`,
+    { field: 'version', current: toShopItem(stored) },
   );
 }

@@ -24,7 +24,7 @@ async function machineFor(viewer: Viewer, asked: Asked['machine']): Promise<Mach
     throw new RequestError(
       'conflict',
       `${stored.name}: ${stored.updatedBy.name} has changed it since; lay the sheets out anew.`,
-      { field: 'machine.version' },
+      { field: 'machine.version', current: stored },
     );
   }
   return machineOf(stored.name, stored.values as unknown as MachineValues);

@@ -1,11 +1,12 @@
-import type { ApiErrorCode, DesignRecord } from '@/lib/schemas/api';
+import type { ApiErrorCode, Current } from '@/lib/schemas/api';
 
 /** A refusal by the server, or `offline` when it could not be reached at all. */
 export class RequestError extends Error {
   readonly code: ApiErrorCode | 'offline';
-  readonly current: DesignRecord | undefined;
+  /** With `conflict`: what is stored now. */
+  readonly current: Current | undefined;
 
-  constructor(code: ApiErrorCode | 'offline', message: string, current?: DesignRecord) {
+  constructor(code: ApiErrorCode | 'offline', message: string, current?: Current) {
     super(message);
     this.name = 'RequestError';
     this.code = code;

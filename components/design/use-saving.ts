@@ -84,7 +84,7 @@ export function useSaving(
     },
     onError: (error) => {
       const current = error.current;
-      if (error.code !== 'conflict' || !current) {
+      if (error.code !== 'conflict' || !current || !('design' in current)) {
         setRefusal(error.message);
         return;
       }

@@ -2,7 +2,8 @@
 
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
-import { saveShopItem, shopKey } from '@/components/api/shop';
+import { RequestError } from '@/components/api/request-error';
+import { saveShopItem, shopKey, type SaveShopItem } from '@/components/api/shop';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { Notice } from '@/components/ui/notice';
@@ -11,6 +12,7 @@ import { TextField } from '@/components/ui/text-field';
 import { loadReader } from '@/components/units/load-reader';
 import type { Parameter } from '@/geometry';
 import type { ShopItem, ShopKind } from '@/lib/schemas/shop';
+import { ItemConflict } from './item-conflict';
 import { shopKinds, writtenValue } from './kinds';
 
 /** A value as typed, read as what its parameter asks; the text itself where that can't be. */
@@ -22,6 +24,24 @@ async function readValue(parameter: Parameter, text: string): Promise<string | n
     parameter.quantity === 'length' ? 'mm' : '',
   );
   return read ?? text;
+}
+
+/** The values of an item as they stand in its fields; without one, those to begin with. */
+const textsOf = (kind: ShopKind, item: ShopItem | null): Record<string, string> =>
+  Object.fromEntries(
+    Object.entries(shopKinds[kind].parameters).map(([key, parameter]) => {
+      const value = item?.values[key] ?? (parameter.default as string | number);
+      return [
+        key,
+        parameter.kind === 'choice' ? String(value) : writtenValue(parameter, value),
+      ];
+    }),
+  );
+
+/** What somebody else has stored meanwhile, if that is why a save was refused. */
+function theirsIn(error: Error | null): ShopItem | null {
+  if (!(error instanceof RequestError) || error.code !== 'conflict') return null;
+  return error.current && 'values' in error.current ? error.current : null;
 }
 
 /** Adds or changes a machine or a sheet. */
@@ -37,19 +57,12 @@ export default function ItemDialog({
   const { one, parameters, hints } = shopKinds[kind];
   const client = useQueryClient();
   const [name, setName] = useState(item?.name ?? '');
-  const [texts, setTexts] = useState<Record<string, string>>(() =>
-    Object.fromEntries(
-      Object.entries(parameters).map(([key, parameter]) => {
-        const value = item?.values[key] ?? (parameter.default as string | number);
-        return [
-          key,
-          parameter.kind === 'choice' ? String(value) : writtenValue(parameter, value),
-        ];
-      }),
-    ),
-  );
+  const [texts, setTexts] = useState(() => textsOf(kind, item));
+  /** The version that what stands in the fields began from. */
+  const [base, setBase] = useState(item?.version);
+  const [sent, setSent] = useState<Pick<SaveShopItem, 'name' | 'values'> | null>(null);
   const saving = useMutation({
-    mutationFn: async () => {
+    mutationFn: async (version: number | undefined) => {
       const values = Object.fromEntries(
         await Promise.all(
           Object.entries(parameters).map(async ([key, parameter]) => [
@@ -60,10 +73,11 @@ export default function ItemDialog({
       ) as Record<string, string | number>;
       // Told here, before anything is sent; the server checks the same again.
       shopKinds[kind].check(values);
+      setSent({ name, values });
       return saveShopItem(kind, item?.id ?? null, {
         name,
         values,
-        ...(item && { version: item.version }),
+        ...(version !== undefined && { version }),
       });
     },
     onSuccess: async () => {
@@ -71,6 +85,15 @@ export default function ItemDialog({
       onClose();
     },
   });
+  const theirs = theirsIn(saving.error);
+
+  function take(stored: ShopItem) {
+    setName(stored.name);
+    setTexts(textsOf(kind, stored));
+    setBase(stored.version);
+    saving.reset();
+    void client.invalidateQueries({ queryKey: shopKey(kind) });
+  }
   const set = (key: string) => (text: string) => setTexts((now) => ({ ...now, [key]: text }));
 
   return (
@@ -78,7 +101,7 @@ export default function ItemDialog({
       <form
         onSubmit={(event) => {
           event.preventDefault();
-          saving.mutate();
+          saving.mutate(base);
         }}
         className="flex flex-col gap-4"
       >
@@ -105,7 +128,18 @@ export default function ItemDialog({
             ),
           )}
         </div>
-        {saving.isError && <Notice look="bad">{saving.error.message}</Notice>}
+        {theirs && sent ? (
+          <ItemConflict
+            kind={kind}
+            mine={sent}
+            theirs={theirs}
+            isDisabled={saving.isPending}
+            onTake={() => take(theirs)}
+            onOverwrite={() => saving.mutate(theirs.version)}
+          />
+        ) : (
+          saving.isError && <Notice look="bad">{saving.error.message}</Notice>
+        )}
         <div className="flex flex-wrap justify-end gap-2">
           <Button onPress={onClose}>Cancel</Button>
           <Button type="submit" look="action" isDisabled={saving.isPending}>

@@ -2,6 +2,7 @@
 
 import { z } from 'zod';
 import { designSchema } from './design';
+import { shopItemSchema } from './shop-item';
 
 export const roles = ['owner', 'builder', 'machinist'] as const;
 export const roleSchema = z.enum(roles);
@@ -126,6 +127,7 @@ export const apiErrorSchema = z.object({
     field: z.string().optional(),
   }),
   /** With `conflict`: what is stored now. */
-  current: designRecordSchema.optional(),
+  current: z.union([designRecordSchema, shopItemSchema]).optional(),
 });
 export type ApiErrorCode = (typeof errorCodes)[number];
+export type Current = NonNullable<z.infer<typeof apiErrorSchema>['current']>;

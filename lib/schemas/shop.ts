@@ -1,6 +1,9 @@
 import { z } from 'zod';
 import { KernelError } from '@/geometry';
 import { checkMachine, checkSheet } from '@/geometry/cutting/shop-parameters';
+import { shopItemSchema } from './shop-item';
+
+export { shopItemSchema, type ShopItem } from './shop-item';
 
 /** As routes call them. */
 export const shopKindSchema = z.enum(['machines', 'sheets']);
@@ -36,15 +39,5 @@ export const saveItemSchemas = {
     values: valuesOf(checkSheet),
   }),
 } as const;
-
-export const shopItemSchema = z.object({
-  id: z.string(),
-  name: z.string(),
-  version: z.number().int(),
-  values: z.record(z.string(), z.union([z.string(), z.number()])),
-  updatedAt: z.string(),
-  updatedBy: z.object({ id: z.string(), name: z.string() }),
-});
-export type ShopItem = z.infer<typeof shopItemSchema>;
 
 export const shopItemsSchema = z.object({ items: z.array(shopItemSchema) });

@@ -1,7 +1,7 @@
 /** Machines and sheet of the workshop. */
 import AxeBuilder from '@axe-core/playwright';
 import { expect, test } from '../support/quiet-test';
-import { builder, machinist, outsider, signIn } from '../support/sign-ins';
+import { builder, machinist, outsider, owner, signIn } from '../support/sign-ins';
 
 test('a builder adds, changes and deletes a machine; wrong values are told', async ({
   page,
@@ -29,6 +29,46 @@ test('a builder adds, changes and deletes a machine; wrong values are told', asy
   await page.getByRole('button', { name: `Delete ${name}` }).click();
   await page.getByRole('button', { name: 'Delete it' }).click();
   await expect(row).toHaveCount(0);
+});
+
+test('two who change one machine see both and choose', async ({ page, browser }) => {
+  const name = `Shared ${Date.now()}`;
+  await signIn(page, builder);
+  await page.goto('/workshop');
+  await page.getByRole('button', { name: 'Add a machine' }).click();
+  await page.getByRole('dialog').getByLabel('Name').fill(name);
+  await page.getByRole('dialog').getByRole('button', { name: 'Save' }).click();
+  await page.getByRole('button', { name: `Change ${name}` }).click();
+  const mine = page.getByRole('dialog', { name: `Change ${name}` });
+
+  const other = await browser.newPage();
+  await signIn(other, owner);
+  /** The owner gives the machine another kerf while the builder has it open. */
+  async function changeKerf(kerf: string) {
+    await other.goto('/workshop');
+    await other.getByRole('button', { name: `Change ${name}` }).click();
+    await other.getByRole('dialog').getByLabel('Kerf').fill(kerf);
+    await other.getByRole('dialog').getByRole('button', { name: 'Save' }).click();
+    await expect(other.getByRole('dialog')).toHaveCount(0);
+  }
+  await changeKerf('0.3 mm');
+
+  await mine.getByLabel('Kerf').fill('0.2 mm');
+  await mine.getByRole('button', { name: 'Save', exact: true }).click();
+  const both = mine.getByRole('row', { name: 'Kerf' });
+  await expect(both).toContainText('0.2 mm');
+  await expect(both).toContainText('0.3 mm');
+  const { violations } = await new AxeBuilder({ page }).include('[role=dialog]').analyze();
+  expect(violations.map(({ id }) => id)).toEqual([]);
+  await mine.getByRole('button', { name: 'Take theirs' }).click();
+  await expect(mine.getByLabel('Kerf')).toHaveValue('0.3 mm');
+
+  await changeKerf('0.35 mm');
+  await mine.getByLabel('Kerf').fill('0.25 mm');
+  await mine.getByRole('button', { name: 'Save', exact: true }).click();
+  await mine.getByRole('button', { name: 'Save mine over it' }).click();
+  await expect(page.getByRole('row', { name: new RegExp(name) })).toContainText('0.25 mm');
+  await other.close();
 });
 
 test('a machinist reads them; another workshop has its own', async ({ page }) => {

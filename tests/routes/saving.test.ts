@@ -85,7 +85,7 @@ describe('saving', () => {
     expect(error.code).toBe('conflict');
     expect(error.message).toContain(cast.person('owner').name);
     expect(current).toMatchObject({ version: 2 });
-    expect(current!.design.sections[0]!.airGap).toBe(0.7);
+    expect(designRecordSchema.parse(current).design.sections[0]!.airGap).toBe(0.7);
     expect((await read(await save(id, 2, withGap(0.9)))).version).toBe(3);
   });
 

@@ -5,6 +5,7 @@ import { DELETE, PUT } from '@/app/api/shop/[kind]/[id]/route';
 import { GET, POST } from '@/app/api/shop/[kind]/route';
 import type { Parameter } from '@/geometry/parameters';
 import { machineParameters, sheetParameters } from '@/geometry/cutting/shop-parameters';
+import { apiErrorSchema } from '@/lib/schemas/api';
 import { shopItemSchema, shopItemsSchema, type ShopKind } from '@/lib/schemas/shop';
 import { call, refusal } from '../support/call';
 import { Cast } from '../support/cast';
@@ -65,7 +66,9 @@ describe('saving a machine', () => {
     cast.ask('builder');
     const late = await save('machines', id, { name, version: 1, values });
     expect(late.status).toBe(409);
-    expect(await refused(late)).toContain(cast.person('owner').name);
+    const { error, current } = apiErrorSchema.parse(await late.json());
+    expect(error.message).toContain(cast.person('owner').name);
+    expect(current).toMatchObject({ id, version: 2, values: { kerf: 0.3 } });
     const list = shopItemsSchema.parse(
       await (await call(GET, { kind: 'machines' }, {})).json(),
     );
