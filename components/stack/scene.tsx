@@ -3,24 +3,23 @@
 import { useFrame, useThree } from '@react-three/fiber';
 import { useMemo, useRef, type Ref } from 'react';
 import type { Group } from 'three';
-import type { Derived } from '@/geometry';
 import { rotorTurn } from '@/geometry/rotor-turn';
 import type { AngleStore } from '@/components/floor/angle-store';
 import { useAngle } from '@/components/floor/use-angle';
-import { bodiesOf } from './bodies';
 import { BodySet } from './body-set';
 import { Eye, type EyeHandle } from './eye';
 import { stackSize } from './stack-size';
+import type { Built } from './use-bodies';
 
 /** The built capacitor, mm, shaft along z. The rotor turns with the store, by no render. */
 export function Scene({
-  derived,
+  built: { derived, bodies },
   store,
   frame,
   eye,
   onFrame,
 }: {
-  derived: Derived;
+  built: Built;
   store: AngleStore;
   /** Show end plates, pillars, bushes, stop and panel plate? */
   frame: boolean;
@@ -30,7 +29,6 @@ export function Scene({
 }) {
   const rotor = useRef<Group>(null);
   const invalidate = useThree((state) => state.invalidate);
-  const bodies = useMemo(() => bodiesOf(derived), [derived]);
   const size = useMemo(() => stackSize(derived, bodies, frame), [derived, bodies, frame]);
 
   useAngle(store, (angle) => {

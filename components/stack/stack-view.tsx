@@ -9,6 +9,7 @@ import { AssemblyLinks } from './assembly-links';
 import type { EyeHandle } from './eye';
 import { Scene } from './scene';
 import { StackCanvas } from './stack-canvas';
+import { useBodies } from './use-bodies';
 import { views, type ViewName } from './views';
 
 /**
@@ -21,6 +22,7 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
   const eye = useRef<EyeHandle>(null);
   const [drawable, setDrawable] = useState(true);
   const [frame, setFrame] = useState(true);
+  const built = useBodies(derived);
   const framed = derived.design.frame !== 'none';
   const fail = useCallback(() => setDrawable(false), []);
   const onFrame = useCallback((angle: number) => {
@@ -49,13 +51,15 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
           >
             <div className="absolute inset-0">
               <StackCanvas onFailure={fail}>
-                <Scene
-                  derived={derived}
-                  store={store}
-                  frame={framed && frame}
-                  eye={eye}
-                  onFrame={onFrame}
-                />
+                {built && (
+                  <Scene
+                    built={built}
+                    store={store}
+                    frame={framed && frame}
+                    eye={eye}
+                    onFrame={onFrame}
+                  />
+                )}
               </StackCanvas>
             </div>
           </div>
