@@ -9,4 +9,6 @@ export interface Cluster {
 
 export function postgresBinaries(): string | null;
 export function startPostgres(): Promise<Cluster>;
-export function startThrowawayPostgres(): Promise<Cluster>;
+export function startThrowawayPostgres(options?: {
+  durable?: boolean;
+}): Promise<Cluster & { crash(): Promise<() => Promise<void>> }>;

@@ -124,9 +124,9 @@ async function runningServer(folder, borrow) {
   return null;
 }
 
-async function launch(folder, logFile, user, options) {
+async function launch(folder, logFile, user, options, wanted) {
   for (let attempt = 1; ; attempt++) {
-    const port = await freePort();
+    const port = wanted ?? (await freePort());
     const output = openSync(logFile, 'a', 0o600);
     const settings = [`listen_addresses=${LOOPBACK}`, 'unix_socket_directories=', ...options];
     const child = spawn(
@@ -140,7 +140,7 @@ async function launch(folder, logFile, user, options) {
     const started = await waitFor(() => over() || isReady(port), 60_000);
     if (started && !over()) {
       child.unref();
-      return { port, stop };
+      return { port, stop, pid: child.pid };
     }
     await stop();
     // After a hard kill the old server's processes may need a moment to go.
@@ -204,8 +204,11 @@ export async function startPostgres({ borrow = false } = {}) {
   return cluster(server, password);
 }
 
-/** A cluster for one run, without care for its data. It goes with this process. */
-export async function startThrowawayPostgres() {
+/**
+ * A cluster for one run. It goes with this process; `durable` for one whose data outlives a crash
+ * of the server within the run.
+ */
+export async function startThrowawayPostgres({ durable = false } = {}) {
   const user = serverUser();
   const parent = mkdtempSync('/var/tmp/vaneloft-test-');
   chmodSync(parent, 0o711);
@@ -215,10 +218,23 @@ export async function startThrowawayPostgres() {
   const password = randomBytes(24).toString('hex');
   initialise(folder, password, user, ['--no-sync']);
   const careless = ['fsync=off', 'synchronous_commit=off', 'full_page_writes=off'];
-  const server = await launch(folder, join(parent, 'log'), user, careless);
-  const stop = async () => {
-    await server.stop();
-    await clear();
+  const start = (port) =>
+    launch(folder, join(parent, 'log'), user, durable ? [] : careless, port);
+  let server = await start();
+  return {
+    ...cluster(server, password),
+    async stop() {
+      await server.stop();
+      await clear();
+    },
+    /** Kills the server as a crash would; resolves to what starts it again on the same port. */
+    async crash() {
+      process.kill(server.pid, 'SIGKILL');
+      await server.stop();
+      return async () => {
+        rmSync(join(folder, 'postmaster.pid'), { force: true });
+        server = await start(server.port);
+      };
+    },
   };
-  return cluster({ ...server, stop }, password);
 }

@@ -1,0 +1,1 @@
+export function freePort(): Promise<number>;

@@ -1,0 +1,6 @@
+export function startServer(options: {
+  mode?: 'start' | 'dev';
+  host: string;
+  port: number;
+  env: Record<string, string>;
+}): Promise<unknown>;
