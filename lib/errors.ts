@@ -42,7 +42,7 @@ export function badInput(error: z.ZodError): RequestError {
   const issue = error.issues[0]!;
   const field = issue.path.map(String).filter(Boolean).join('.');
   // Messages of ours begin with the field's label; zod's own get the path.
-  const message = issue.code === 'custom' || /^[A-Z][\w ]*: /.test(issue.message);
+  const message = issue.code === 'custom' || /^(?!Invalid )[A-Z][\w ]*: /.test(issue.message);
   return new RequestError(
     'bad-input',
     message || !field ? issue.message : `${field}: ${issue.message}`,
