@@ -28,6 +28,16 @@ export default function ToolSheet({
     };
   }, [tool]);
 
+  // What had the focus may be gone, or disabled by what it did: then it is nowhere.
+  useEffect(() => {
+    const onKey = ({ key, defaultPrevented }: KeyboardEvent): void => {
+      if (key !== 'Escape' || defaultPrevented) return;
+      if (document.activeElement === document.body) close();
+    };
+    document.addEventListener('keydown', onKey);
+    return () => document.removeEventListener('keydown', onKey);
+  }, [close]);
+
   return (
     <div
       role="dialog"

@@ -114,7 +114,7 @@ test('voltages stand side by side and say that they are no rating', async ({ pag
   // At once after a value is taken, and from the field itself.
   await tool.getByLabel('Working frequency').fill('8 MHz');
   await page.keyboard.press('Enter');
-  await expect(page.getByText('Working frequency set to 8 MHz.')).toBeVisible();
+  await expect(page.getByText('Working frequency set to 8000 kHz.')).toBeVisible();
   await page.keyboard.press('Escape');
   await expect(tool).toBeHidden();
   await page.getByRole('button', { name: 'Undo', exact: true }).last().click();

@@ -39,7 +39,10 @@ export function SheetFiles({
       : short || missing
         ? 'Not all parts are on a sheet yet: the checks above say what to add.'
         : null;
-  const waits = trouble !== null || saving.isPending;
+  // Not disabled while the files are made: that would take the focus from the button.
+  const save = (only?: { group: number; sheet: number }) => {
+    if (!saving.isPending) saving.mutate(only);
+  };
   const pieces = laid.groups.flatMap(({ parts }) => parts);
   return (
     <PanelSection title="Files">
@@ -50,8 +53,8 @@ export function SheetFiles({
       <Button
         look="action"
         className="min-h-12 self-stretch"
-        isDisabled={waits}
-        onPress={() => saving.mutate(undefined)}
+        isDisabled={trouble !== null}
+        onPress={() => save()}
       >
         {saving.isPending ? 'Making the files' : 'Save all in a ZIP'}
       </Button>
@@ -76,8 +79,8 @@ export function SheetFiles({
               <SheetPreview group={group} sheet={sheet} machine={machine} kerf={kerf} />
               <Button
                 className="self-start"
-                isDisabled={waits}
-                onPress={() => saving.mutate({ group: index, sheet })}
+                isDisabled={trouble !== null}
+                onPress={() => save({ group: index, sheet })}
               >
                 Save sheet {sheet + 1} as DXF, {kerf}
               </Button>
