@@ -1,13 +1,20 @@
 import type { ReactNode } from 'react';
 import { TopBar } from '@/components/account/top-bar';
 import { Providers } from '@/components/providers';
-import { requirePageMember } from '@/lib/access';
+import { mayReadRecord, requirePageMember } from '@/lib/access';
+import { findPerson } from '@/lib/account/person';
 
 export default async function WorkshopLayout({ children }: { children: ReactNode }) {
   const viewer = await requirePageMember();
+  const person = await findPerson();
   return (
     <div className="flex min-h-dvh flex-col">
-      <TopBar workshop={viewer.workshopName} person={viewer.name} />
+      <TopBar
+        person={viewer.name}
+        workshop={{ id: viewer.workshopId, name: viewer.workshopName }}
+        workshops={person?.workshops ?? []}
+        readsRecord={mayReadRecord(viewer.role)}
+      />
       <Providers>{children}</Providers>
     </div>
   );

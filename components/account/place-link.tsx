@@ -10,7 +10,7 @@ export function PlaceLink({ href, name }: { href: string; name: string }) {
     <Link
       href={href}
       aria-current={here ? 'page' : undefined}
-      className={`flex min-h-11 items-center border-b-2 font-medium text-ink no-underline hover:border-action ${here ? 'border-action' : 'border-transparent'}`}
+      className={`flex min-h-11 items-center border-b-2 whitespace-nowrap font-medium text-ink no-underline hover:border-action ${here ? 'border-action' : 'border-transparent'}`}
     >
       {name}
     </Link>

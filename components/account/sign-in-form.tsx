@@ -59,6 +59,11 @@ export function SignInForm({ callbackUrl }: { callbackUrl?: string | undefined }
         {busy ? 'Signing in' : 'Sign in'}
       </Button>
       <p className="text-ink-2">
+        <Link href="/forgot" className="underline">
+          Password forgotten?
+        </Link>
+      </p>
+      <p className="text-ink-2">
         No account?{' '}
         <Link href="/sign-up" className="underline">
           Set up a workshop
