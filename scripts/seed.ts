@@ -36,6 +36,11 @@ const demo: { workshop: string; people: { name: string; email: string; role: Rol
   },
 ];
 
+/** Who also lends a hand in another workshop, so that changing between two can be tried. */
+const guests: { workshop: string; email: string; role: Role }[] = [
+  { workshop: 'Tidewell Bench', email: 'ivo@larkfield.example', role: 'machinist' },
+];
+
 const SEED_LOCK = 80_411_908;
 const examples = join(import.meta.dirname, '..', 'public', 'examples');
 
@@ -134,6 +139,8 @@ async function seed(em: EntityManager, signInsFile: string): Promise<boolean> {
   await em.execute('select pg_advisory_xact_lock(?)', [SEED_LOCK]);
   if ((await em.count(Workshop)) > 0) return false;
   const signIns: Record<string, string>[] = [];
+  const users = new Map<string, User>();
+  const now = new Date();
   for (const { workshop: workshopName, people } of demo) {
     const workshop = em.create(Workshop, { id: randomUUID(), name: workshopName });
     for (const { name, email, role } of people) {
@@ -141,7 +148,8 @@ async function seed(em: EntityManager, signInsFile: string): Promise<boolean> {
       signIns.push({ workshop: workshopName, name, email, role, password });
       const passwordHash = await hashPassword(password);
       const user = em.create(User, { id: randomUUID(), name, email, passwordHash });
-      em.create(Membership, { workshop, user, role });
+      em.create(Membership, { workshop, user, role, createdAt: now });
+      users.set(email, user);
       if (role === 'owner') {
         em.create(RecordEntry, {
           workshop,
@@ -154,6 +162,11 @@ async function seed(em: EntityManager, signInsFile: string): Promise<boolean> {
       if (role !== 'builder') continue;
       addDesigns(em, workshop, user);
       addShop(em, workshop, user);
+    }
+    for (const { email, role } of guests.filter((guest) => guest.workshop === workshopName)) {
+      // Later than their own, which is the one that a browser opens first.
+      const createdAt = new Date(now.getTime() + 1);
+      em.create(Membership, { workshop, user: users.get(email)!, role, createdAt });
     }
   }
   // Before the commit: passwords that were lost would leave a demo nobody can enter.
