@@ -13,7 +13,8 @@ function corners(contour: Contour, sagitta: number): Vector2[] {
   );
 }
 
-function reach(contour: Contour): number {
+/** Farthest that a contour's corners come from where it is drawn about, mm. */
+export function reach(contour: Contour): number {
   if (contour.kind === 'circle') return Math.hypot(contour.x, contour.y) + contour.radius;
   return contour.vertices.reduce((most, { x, y }) => Math.max(most, Math.hypot(x, y)), 0);
 }

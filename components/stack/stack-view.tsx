@@ -40,16 +40,16 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
     >
       {drawable ? (
         <>
-          <div
-            role="img"
-            aria-label={
-              `Meshed stack of ${rotors} rotor and ${plates.length - rotors} stator plates, ` +
-              `${depth.toFixed(1)} mm deep, ${framed && frame ? 'in its frame, ' : ''}` +
-              'turned to the shaft angle of the angle rule'
-            }
-            className="relative min-h-0 flex-1"
-          >
-            <div className="absolute inset-0">
+          <div className="relative min-h-0 flex-1">
+            <div
+              role="img"
+              aria-label={
+                `Meshed stack of ${rotors} rotor and ${plates.length - rotors} stator plates, ` +
+                `${depth.toFixed(1)} mm deep, ${framed && frame ? 'in its frame, ' : ''}` +
+                'turned to the shaft angle of the angle rule'
+              }
+              className="absolute inset-0"
+            >
               <StackCanvas onFailure={fail}>
                 {built && (
                   <Scene
@@ -62,6 +62,15 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
                 )}
               </StackCanvas>
             </div>
+            {framed && (
+              <Button
+                look="quiet"
+                className="absolute top-0 right-0 px-2! text-small!"
+                onPress={() => setFrame((now) => !now)}
+              >
+                {frame ? 'Hide frame' : 'Show frame'}
+              </Button>
+            )}
           </div>
           <div
             role="group"
@@ -92,15 +101,6 @@ export function StackView({ derived, store }: { derived: Derived; store: AngleSt
             >
               Further
             </Button>
-            {framed && (
-              <Button
-                look="quiet"
-                className="grow px-1.5! text-small!"
-                onPress={() => setFrame((now) => !now)}
-              >
-                {frame ? 'Hide frame' : 'Show frame'}
-              </Button>
-            )}
           </div>
           <AssemblyLinks derived={derived} store={store} />
         </>
