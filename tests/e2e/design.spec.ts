@@ -84,6 +84,20 @@ test('a check that fails leads to the field to change', async ({ page }) => {
   await expect(focused).toHaveAttribute('id', /^field-/);
 });
 
+test('the frame is in the 3D view and can be taken out of it', async ({ page }) => {
+  await signIn(page, builder);
+  await makeDesign(page, 'Framed');
+  const stack = page.locator('[data-part=stack]');
+  const picture = stack.getByRole('img', { name: /^Meshed stack/ });
+  await expect(stack).toHaveAttribute('data-angle', /\d/);
+  await expect(picture).toHaveAccessibleName(/in its frame/);
+  const framed = await picture.screenshot();
+  await stack.getByRole('button', { name: 'Hide frame' }).click();
+  await expect(picture).not.toHaveAccessibleName(/in its frame/);
+  await expect.poll(async () => (await picture.screenshot()).equals(framed)).toBe(false);
+  await expect(stack.getByRole('button', { name: 'Show frame' })).toBeVisible();
+});
+
 test('the angle rule turns floor, chart and stack together, by keyboard', async ({ page }) => {
   await signIn(page, builder);
   await makeDesign(page, `Rule ${Date.now()}`);
