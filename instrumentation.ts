@@ -5,6 +5,10 @@ export async function register(): Promise<void> {
   if (process.env.NEXT_RUNTIME !== 'nodejs') return;
   const { env } = await import('./lib/env');
   env();
+  const { defaultDesign } = await import('./geometry');
+  const { warmKernel } = await import('./lib/kernel/kernel');
+  // Not waited for: reading is possible meanwhile.
+  void warmKernel(defaultDesign());
   // Streams to open screens never end by themselves; they would hold up the end of the server.
   const { changes } = await import('./lib/live/changes');
   for (const signal of ['SIGTERM', 'SIGINT'] as const) {

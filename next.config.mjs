@@ -28,6 +28,7 @@ const config = {
     'pdfkit',
     'pg',
     'pino',
+    'piscina',
   ],
   headers: () => Promise.resolve([{ source: '/:path*', headers: securityHeaders }]),
 };

@@ -1,15 +1,23 @@
 import 'server-only';
-import type { HashedFile } from './design-files';
+import type { HashedFile } from './kernel/hashed-file';
 
-/** A file as a download. Its hash is its ETag: a browser that has it already gets 304. */
-export function attachment(request: Request, file: HashedFile): Response {
+/**
+ * A file as a download, or to be shown in its place. Its hash is its ETag: a browser that has it
+ * already gets 304.
+ */
+export function attachment(
+  request: Request,
+  file: Pick<HashedFile, 'name' | 'mediaType' | 'sha256' | 'body'>,
+  disposition: 'attachment' | 'inline' = 'attachment',
+): Response {
   const etag = `"${file.sha256}"`;
   const headers = {
     ETag: etag,
     'Cache-Control': 'private, no-cache',
     'Content-Security-Policy': "default-src 'none'; sandbox",
+    'X-Content-Type-Options': 'nosniff',
     // RFC 6266: a plain name for old clients, the whole one in UTF-8.
-    'Content-Disposition': `attachment; filename="${file.name.replace(/[^\w.() -]/g, '_')}"; filename*=UTF-8''${encodeName(file.name)}`,
+    'Content-Disposition': `${disposition}; filename="${file.name.replace(/[^\w.() -]/g, '_')}"; filename*=UTF-8''${encodeName(file.name)}`,
   };
   const known = request.headers.get('if-none-match')?.split(',') ?? [];
   if (known.some((tag) => tag.trim().replace(/^W\//, '') === etag)) {

@@ -3,10 +3,10 @@ import { randomUUID } from 'node:crypto';
 import { Design, User, Workshop } from '@/entities';
 import { defaultDesign } from '@/geometry';
 import { mayEdit, requireMember } from './access';
-import { assessDesign } from './assess-design';
 import { inWorkshop } from './db';
 import { toRecord } from './design-record';
 import { badInput } from './errors';
+import { assessDesign } from './kernel/kernel';
 import { addRecord } from './record';
 import { createDesignSchema, type DesignRecord } from './schemas/api';
 
@@ -16,7 +16,7 @@ export async function createDesign(input: unknown): Promise<DesignRecord> {
   const parsed = createDesignSchema.safeParse(input);
   if (!parsed.success) throw badInput(parsed.error);
   const { name, design = defaultDesign() } = parsed.data;
-  const { kernel, checks } = assessDesign(design);
+  const { kernel, checks } = await assessDesign(design);
 
   return inWorkshop(viewer, async (tx) => {
     const person = await tx.findOneOrFail(User, viewer.userId);

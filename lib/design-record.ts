@@ -17,8 +17,8 @@ export function readParameters(stored: StoredDesign): Design {
   return checkDesign(stored.parameters);
 }
 
-/** A row of the list. */
-export function toSummary(stored: WithPerson): DesignSummary {
+/** What the list has of it. */
+function toSummary(stored: WithPerson): DesignSummary {
   const { id, name, status, version, checks, updatedBy } = stored;
   return {
     id,

@@ -8,6 +8,8 @@ const envSchema = z.object({
   PORT: z.coerce.number().int().min(0).max(65535).optional(),
   /** Where a stand-in for a mail server keeps what it was sent; there is none in earnest. */
   MAIL_FOLDER: z.string().optional(),
+  /** Threads that the kernel has for itself; 0 has it on the server's own. */
+  KERNEL_THREADS: z.coerce.number().int().min(0).max(64).optional(),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('info'),
 });
 export type Env = z.infer<typeof envSchema>;

@@ -2,8 +2,8 @@ import 'server-only';
 import { LockMode, type EntityManager, type Loaded } from '@mikro-orm/postgresql';
 import { Design } from '@/entities';
 import type { Viewer } from './access';
-import { toRecord } from './design-record';
 import { notFound, RequestError } from './errors';
+import type { DesignRecord } from './schemas/api';
 import { idSchema } from './schemas/id';
 
 type LockedDesign = Loaded<Design, 'updatedBy'>;
@@ -28,11 +28,11 @@ export async function lockDesign(
 }
 
 /** @throws RequestError conflict with what is stored, when the work began from another version. */
-export function refuseStale(design: LockedDesign, viewer: Viewer, version: number): void {
-  if (design.version === version) return;
+export function refuseStale(current: DesignRecord, version: number): void {
+  if (current.version === version) return;
   throw new RequestError(
     'conflict',
-    `Version: this began from ${version}, but ${design.updatedBy.name} has saved version ${design.version} since; take theirs or save yours over it.`,
-    { field: 'version', current: toRecord(design, viewer) },
+    `Version: this began from ${version}, but ${current.updatedBy.name} has saved version ${current.version} since; take theirs or save yours over it.`,
+    { field: 'version', current },
   );
 }

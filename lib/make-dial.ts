@@ -1,13 +1,13 @@
 import 'server-only';
-import { createHash } from 'node:crypto';
 import { dialOf } from '@/geometry/dial/dial';
 import { DialError } from '@/geometry/dial/settings';
 import { slugOf } from '@/geometry/files';
 import { mayDownload, requireMember } from './access';
 import { inWorkshop } from './db';
-import { derivePlates, type HashedFile } from './design-files';
-import { sketchesPdf } from './drawing-pdf';
 import { badInput, notFound, RequestError } from './errors';
+import { sketchesPdf } from './kernel/drawing-pdf';
+import { hashOf, type HashedFile } from './kernel/hashed-file';
+import { derivePlates } from './kernel/kernel';
 import { findDesign } from './queries';
 import { addRecord } from './record';
 import { dialQuerySchema } from './schemas/dial';
@@ -20,7 +20,7 @@ export async function makeDial(id: string, query: unknown): Promise<HashedFile> 
   const parsed = dialQuerySchema.safeParse(query);
   if (!parsed.success) throw badInput(parsed.error);
   const { section, ...settings } = parsed.data;
-  const derived = derivePlates(stored.design);
+  const derived = await derivePlates(stored.design);
   const result = derived.sections[section];
   if (!result) {
     throw new RequestError('bad-input', `Section: there is no section ${section + 1} in it.`, {
@@ -33,7 +33,7 @@ export async function makeDial(id: string, query: unknown): Promise<HashedFile> 
       author: viewer.workshopName,
       issued: new Date(stored.updatedAt),
     });
-    const sha256 = createHash('sha256').update(body).digest('hex');
+    const sha256 = hashOf(body);
     const name = `${slugOf(stored.name)}_dial-${settings.quantity}.pdf`;
     await inWorkshop(viewer, (tx) => {
       addRecord(tx, viewer, {

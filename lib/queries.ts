@@ -2,21 +2,39 @@ import 'server-only';
 import { Design } from '@/entities';
 import { mayRead, type Viewer } from './access';
 import { inWorkshop } from './db';
-import { toRecord, toSummary } from './design-record';
+import { toRecord } from './design-record';
 import { idSchema } from './schemas/id';
 import type { DesignRecord, DesignSummary } from './schemas/api';
 
-/** The workshop's designs, last changed first. */
+interface SummaryRow {
+  id: string;
+  name: string;
+  status: DesignSummary['status'];
+  version: number;
+  laws: string[];
+  checks: DesignSummary['checks'];
+  updatedAt: Date;
+  updatedBy: DesignSummary['updatedBy'];
+}
+
+/** The workshop's designs, last changed first. Their parameters stay where they are. */
 export async function listDesigns(viewer: Viewer): Promise<DesignSummary[]> {
   if (!mayRead(viewer.role)) return [];
-  const stored = await inWorkshop(viewer, (tx) =>
-    tx.find(
-      Design,
-      { workshop: viewer.workshopId, deletedAt: null },
-      { populate: ['updatedBy'], orderBy: { updatedAt: 'desc', id: 'asc' } },
+  const rows = await inWorkshop(viewer, (tx) =>
+    tx.execute<SummaryRow[]>(
+      `select d.id, d.name, d.status, d.version, d.checks, d.updated_at as "updatedAt",
+          jsonb_path_query_array(d.parameters, '$.sections[*].law') as laws,
+          jsonb_build_object('id', u.id, 'name', u.name) as "updatedBy"
+        from designs d join users u on u.id = d.updated_by_id
+        where d.workshop_id = ? and d.deleted_at is null
+        order by d.updated_at desc, d.id`,
+      [viewer.workshopId],
     ),
   );
-  return stored.map(toSummary);
+  return rows.map(({ updatedAt, ...row }) => ({
+    ...row,
+    updatedAt: new Date(updatedAt).toISOString(),
+  }));
 }
 
 /** One design of the workshop, or null: another workshop's, deleted, or no id at all. */

@@ -1,8 +1,10 @@
 import 'server-only';
 import { mayDownload, requireMember } from './access';
 import { inWorkshop } from './db';
-import { derivePlates, hashedFiles, type HashedFile } from './design-files';
+import { hashedFiles } from './design-files';
 import { notFound, RequestError } from './errors';
+import type { HashedFile } from './kernel/hashed-file';
+import { derivePlates } from './kernel/kernel';
 import { findDesign } from './queries';
 import { addRecord } from './record';
 
@@ -15,7 +17,7 @@ export async function recordDownload(id: string, fileName: string): Promise<Hash
   const viewer = await requireMember(mayDownload);
   const stored = await findDesign(viewer, id);
   if (!stored) throw notFound();
-  const derived = derivePlates(stored.design);
+  const derived = await derivePlates(stored.design);
   const files = await hashedFiles(stored, viewer.workshopName, derived);
   const file = files.find(({ name }) => name === fileName);
   if (!file) {

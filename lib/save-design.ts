@@ -1,12 +1,13 @@
 import 'server-only';
 import { User } from '@/entities';
 import { mayEdit, requireMember } from './access';
-import { assessDesign } from './assess-design';
 import { changesBetween } from './changes';
 import { inWorkshop } from './db';
 import { readParameters, toRecord } from './design-record';
-import { badInput } from './errors';
+import { badInput, notFound } from './errors';
+import { assessDesign } from './kernel/kernel';
 import { lockDesign, refuseStale } from './lock-design';
+import { findDesign } from './queries';
 import { addRecord } from './record';
 import { saveDesignSchema, type DesignRecord } from './schemas/api';
 
@@ -18,14 +19,17 @@ import { saveDesignSchema, type DesignRecord } from './schemas/api';
 export async function saveDesign(id: string, input: unknown): Promise<DesignRecord> {
   const viewer = await requireMember(mayEdit);
   // Whose design it is comes before what is wrong with the input.
+  const before = await findDesign(viewer, id);
+  if (!before) throw notFound();
+  const parsed = saveDesignSchema.safeParse(input);
+  if (!parsed.success) throw badInput(parsed.error);
+  const { version, name, design } = parsed.data;
+  refuseStale(before, version);
+  // Before the row is held: nobody waits for the kernel with a connection in hand.
+  const { kernel, checks } = await assessDesign(design);
   return inWorkshop(viewer, async (tx) => {
     const stored = await lockDesign(tx, viewer, id);
-    const parsed = saveDesignSchema.safeParse(input);
-    if (!parsed.success) throw badInput(parsed.error);
-    const { version, name, design } = parsed.data;
-    refuseStale(stored, viewer, version);
-
-    const { kernel, checks } = assessDesign(design);
+    refuseStale(toRecord(stored, viewer), version);
     const changes = changesBetween(
       { name: stored.name, design: readParameters(stored) },
       { name, design },

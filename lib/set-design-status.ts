@@ -1,11 +1,13 @@
 import 'server-only';
 import { User } from '@/entities';
 import { mayEdit, requireMember } from './access';
-import { assessDesign, describeFailure } from './assess-design';
 import { inWorkshop } from './db';
-import { readParameters, toRecord } from './design-record';
-import { badInput, RequestError } from './errors';
+import { toRecord } from './design-record';
+import { badInput, notFound, RequestError } from './errors';
 import { lockDesign, refuseStale } from './lock-design';
+import { assessmentOf, describeFailure, findingsOf } from './kernel/assessment';
+import { deriveDesign } from './kernel/kernel';
+import { findDesign } from './queries';
 import { addRecord } from './record';
 import { setStatusSchema, type DesignRecord } from './schemas/api';
 
@@ -15,15 +17,20 @@ import { setStatusSchema, type DesignRecord } from './schemas/api';
  */
 export async function setDesignStatus(id: string, input: unknown): Promise<DesignRecord> {
   const viewer = await requireMember(mayEdit);
+  const before = await findDesign(viewer, id);
+  if (!before) throw notFound();
+  const parsed = setStatusSchema.safeParse(input);
+  if (!parsed.success) throw badInput(parsed.error);
+  const { version, status } = parsed.data;
+  refuseStale(before, version);
+  const derivation = await deriveDesign(before.design);
   return inWorkshop(viewer, async (tx) => {
     const stored = await lockDesign(tx, viewer, id);
-    const parsed = setStatusSchema.safeParse(input);
-    if (!parsed.success) throw badInput(parsed.error);
-    const { version, status } = parsed.data;
-    refuseStale(stored, viewer, version);
+    refuseStale(toRecord(stored, viewer), version);
     if (stored.status === status) return toRecord(stored, viewer);
 
-    const { kernel, checks, failing } = assessDesign(readParameters(stored));
+    const { kernel, checks } = assessmentOf(derivation);
+    const failing = findingsOf(derivation).find(({ severity }) => severity === 'fail');
     if (status === 'ready' && failing) {
       throw new RequestError(
         'checks-fail',

@@ -1,5 +1,4 @@
 import 'server-only';
-import { createHash } from 'node:crypto';
 import type { Derived } from '@/geometry';
 import { partFindings } from '@/geometry/cutting/part-findings';
 import { kerfWords } from '@/geometry/files/kerf-words';
@@ -8,11 +7,9 @@ import { slugOf } from '@/geometry/files';
 import { heldLayout, LayoutError, type GivenLayout } from '@/geometry/nesting/given-layout';
 import type { LaidGroup } from '@/geometry/nesting/lay-out';
 import { partsOf } from '@/geometry/parts/assembly';
-import type { HashedFile } from './design-files';
 import { RequestError } from './errors';
-import { zipOf } from './zip';
-
-const hashOf = (body: Buffer): string => createHash('sha256').update(body).digest('hex');
+import { hashOf, type HashedFile } from './kernel/hashed-file';
+import { zipOf } from './kernel/zip';
 
 function hashed({ name, label, kind, mediaType, text }: SheetFile): HashedFile {
   const body = Buffer.from(text, 'utf8');

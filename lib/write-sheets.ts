@@ -3,8 +3,9 @@ import { machineOf, type MachineValues } from '@/geometry/cutting/shop-parameter
 import type { Machine } from '@/geometry/cutting/machine';
 import { mayDownload, requireMember, type Viewer } from './access';
 import { inWorkshop } from './db';
-import { derivePlates, type HashedFile } from './design-files';
 import { badInput, notFound, RequestError } from './errors';
+import type { HashedFile } from './kernel/hashed-file';
+import { derivePlates } from './kernel/kernel';
 import { findDesign } from './queries';
 import { addRecord } from './record';
 import { writeSheetsSchema } from './schemas/sheets';
@@ -52,7 +53,7 @@ export async function writeSheets(id: string, input: unknown): Promise<HashedFil
     );
   }
   const given = { ...rest, machine: await machineFor(viewer, named) };
-  const derived = derivePlates(stored.design);
+  const derived = await derivePlates(stored.design);
   const names = { design: stored.name, revision: String(version) };
   const made = only
     ? sheetAlone(derived, names, given, only)

@@ -16,7 +16,8 @@ import {
   machineParameters,
   sheetParameters,
 } from '../geometry/cutting/shop-parameters';
-import { assessDesign } from '../lib/assess-design';
+import { assessmentOf } from '../lib/kernel/assessment';
+import { deriveDesign } from '../lib/kernel/derive-design';
 import { hashPassword } from '../lib/password';
 import type { Role } from '../lib/schemas/api';
 import config from '../mikro-orm.config';
@@ -64,7 +65,7 @@ function workedDesigns(): { name: string; design: unknown }[] {
 function addDesigns(em: EntityManager, workshop: Workshop, builder: User): void {
   for (const { name, design } of workedDesigns()) {
     const parameters = checkDesign(design);
-    const { kernel, checks } = assessDesign(parameters);
+    const { kernel, checks } = assessmentOf(deriveDesign(parameters));
     const now = new Date();
     const people = { createdBy: builder, updatedBy: builder };
     const times = { createdAt: now, updatedAt: now };

@@ -12,7 +12,8 @@ import {
   Workshop,
 } from '@/entities';
 import { defaultDesign, type Design as Parameters } from '@/geometry';
-import { assessDesign } from '@/lib/assess-design';
+import { assessmentOf } from '@/lib/kernel/assessment';
+import { deriveDesign } from '@/lib/kernel/derive-design';
 import { makeSecret } from '@/lib/link-secret';
 import { entityManager } from './as-owner';
 import type { Role } from '@/lib/schemas/api';
@@ -96,7 +97,7 @@ export class Cast {
       workshop: em.getReference(Workshop, this.workshopId),
       name,
       parameters,
-      ...assessDesign(parameters),
+      ...assessmentOf(deriveDesign(parameters)),
       createdBy: builder,
       updatedBy: builder,
       createdAt: now,

@@ -29,6 +29,8 @@ for (const [variable, known] of [
 }
 process.env.NEXTAUTH_URL = 'http://127.0.0.1:3000';
 process.env.NEXTAUTH_SECRET = randomUUID();
+// Threads would have to read the whole kernel again for each test file.
+process.env.KERNEL_THREADS = '0';
 process.env.LOG_LEVEL ??= 'silent';
 
 afterAll(async () => {

@@ -1,7 +1,7 @@
 import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
 import { DesignScreen } from '@/components/design/design-screen';
-import { deriveDesign } from '@/lib/derive-design';
+import { deriveDesign } from '@/lib/kernel/kernel';
 import { requirePageMember } from '@/lib/access';
 import { listFiles } from '@/lib/design-files';
 import { RequestError } from '@/lib/errors';
@@ -28,7 +28,7 @@ export default async function DesignPage({ params }: Props) {
     <DesignScreen
       key={record.id}
       record={record}
-      derivation={deriveDesign(record.design)}
+      derivation={await deriveDesign(record.design)}
       files={await listFiles(record.id).catch(noFiles)}
       userId={viewer.userId}
     />

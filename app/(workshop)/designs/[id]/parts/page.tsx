@@ -5,8 +5,8 @@ import { Cautions } from '@/components/design/cautions';
 import { PartsTable } from '@/components/parts/parts-table';
 import { partsOf } from '@/geometry/parts/assembly';
 import { requirePageMember } from '@/lib/access';
-import { describeFailure } from '@/lib/assess-design';
-import { deriveDesign } from '@/lib/derive-design';
+import { describeFailure } from '@/lib/kernel/assessment';
+import { deriveDesign } from '@/lib/kernel/kernel';
 import { findDesign } from '@/lib/queries';
 
 type Props = { params: Promise<{ id: string }> };
@@ -20,7 +20,7 @@ export default async function PartsPage({ params }: Props) {
   const viewer = await requirePageMember();
   const record = await findDesign(viewer, (await params).id);
   if (!record) notFound();
-  const derivation = deriveDesign(record.design);
+  const derivation = await deriveDesign(record.design);
   return (
     <main id="main" className="mx-auto flex w-full max-w-6xl flex-col gap-4 px-5 py-5">
       <h1 className="wide-letter text-title font-semibold">Parts of {record.name}</h1>

@@ -1,4 +1,3 @@
-import 'server-only';
 import { join } from 'node:path';
 import PDFDocument from 'pdfkit';
 import { CAPITALS, type Mark, type Sketch } from '@/geometry/sketch/sketch';

@@ -1,14 +1,13 @@
-import 'server-only';
 import type { Derived } from '@/geometry';
 import { slugOf } from '@/geometry/files';
 import { partsOf } from '@/geometry/parts/assembly';
-import type { HashedFile } from './design-files';
+import type { HashedFile } from './hashed-file';
+import type { FileNames } from './file-names';
 import { zipOf } from './zip';
 
 /** What the files hold, for a person and for a program. */
 function manifestOf(
-  name: string,
-  version: number,
+  { name, revision }: FileNames,
   derived: Derived,
   files: readonly HashedFile[],
 ): string {
@@ -16,7 +15,7 @@ function manifestOf(
   return `${JSON.stringify(
     {
       design: name,
-      revision: version,
+      revision,
       kernel: derived.kernel,
       units: 'mm',
       kerf: 'nominal: no kerf is added or taken off',
@@ -44,13 +43,12 @@ function manifestOf(
 
 /** All files of a design in one, with a manifest that names each by its hash. */
 export function bundleOf(
-  name: string,
-  version: number,
+  names: FileNames,
   derived: Derived,
   files: readonly HashedFile[],
 ): { readonly name: string; readonly body: Buffer } {
-  const folder = slugOf(name);
-  const manifest = Buffer.from(manifestOf(name, version, derived, files), 'utf8');
+  const folder = slugOf(names.name);
+  const manifest = Buffer.from(manifestOf(names, derived, files), 'utf8');
   return {
     name: `${folder}_all-files.zip`,
     body: zipOf(folder, [{ name: 'manifest.json', body: manifest }, ...files]),

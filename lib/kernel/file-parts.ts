@@ -4,7 +4,7 @@ import { partFileName } from '@/geometry/files/file-name';
 import { contourBounds } from '@/geometry/measure';
 import { partsOf } from '@/geometry/parts/assembly';
 import { outline } from '@/geometry/sketch/sketch';
-import type { DesignFiles } from './schemas/api';
+import type { DesignFiles } from '../schemas/api';
 
 const AS_DRAWN = { x: 0, y: 0, scale: 1 };
 

@@ -1,4 +1,3 @@
-import 'server-only';
 import { zipSync, type Zippable } from 'fflate';
 
 /** ZIP has no time before 1980; every file gets this one, so that equal files give equal bytes. */

@@ -1,0 +1,24 @@
+/** What a thread of the kernel does when it is asked (kernel.ts). */
+
+import type { Derivation, Derived, Design } from '@/geometry';
+import { deriveDesign } from './derive-design';
+import type { FileNames } from './file-names';
+import type { HashedFile } from './hashed-file';
+import { makeFiles } from './make-files';
+
+export interface Tasks {
+  derive: (design: Design) => Derivation;
+  makeFiles: (derived: Derived, names: FileNames) => Promise<HashedFile[]>;
+}
+
+const tasks: Tasks = { derive: deriveDesign, makeFiles };
+
+/** One thing to do, with what it takes. */
+export type Task = {
+  [Name in keyof Tasks]: { readonly name: Name; readonly args: Parameters<Tasks[Name]> };
+}[keyof Tasks];
+
+export default function perform(task: Task): unknown {
+  const perform = tasks[task.name] as (...args: readonly unknown[]) => unknown;
+  return perform(...task.args);
+}
