@@ -62,6 +62,10 @@ export const mayRead = (role: Role): boolean => may[role].read;
 export const mayManagePeople = (role: Role): boolean => may[role].people;
 export const mayReadRecord = (role: Role): boolean => may[role].record;
 export const mayDownload = (role: Role): boolean => may[role].download;
+/** May this role ask for cutting, answer questions about it, and cancel it? */
+export const mayOrder = (role: Role): boolean => may[role].order;
+/** May this role take an order, return it with a question, and finish it? */
+export const mayCut = (role: Role): boolean => may[role].cut;
 
 /** A signed-in person with the epoch of the session that they came with. */
 interface Session {

@@ -22,7 +22,9 @@ export class RequestError extends Error {
   }
 }
 
-export const notFound = (what: 'design' | 'machine' | 'sheet' = 'design') =>
+type Noun = 'design' | 'revision' | 'machine' | 'sheet' | 'order' | 'attachment';
+
+export const notFound = (what: Noun = 'design') =>
   new RequestError('not-found', `No such ${what} in your workshop; it may have been deleted.`);
 
 const statuses: Record<ApiErrorCode, number> = {

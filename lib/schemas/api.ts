@@ -2,6 +2,8 @@
 
 import { z } from 'zod';
 import { designSchema } from './design';
+import { designFileSchema, filePartSchema } from './file-part';
+import { orderSchema } from './order';
 import { shopItemSchema } from './shop-item';
 
 export const roles = ['owner', 'builder', 'machinist'] as const;
@@ -68,36 +70,7 @@ export const setStatusSchema = z.object({
   status: designStatusSchema,
 });
 
-export const designFileSchema = z.object({
-  name: z.string(),
-  /** What it holds, for a person: `Rotor plate, section 1`. */
-  label: z.string(),
-  kind: z.enum(['dxf', 'svg', 'csv', 'json', 'pdf', 'zip']),
-  bytes: z.number().int(),
-  sha256: z.string(),
-});
-/** A part that is cut, as its own files have it. mm */
-export const filePartSchema = z.object({
-  /** Of the names of its files. */
-  stem: z.string(),
-  label: z.string(),
-  material: z.string(),
-  thickness: z.number(),
-  quantity: z.number().int(),
-  /** Nominal: no kerf is allowed for. */
-  kerf: z.enum(['nominal', 'compensated']),
-  note: z.string(),
-  caution: z.string(),
-  /** Path data of outside and holes, y downwards, and the box it fills. */
-  picture: z.object({
-    x: z.number(),
-    y: z.number(),
-    width: z.number(),
-    height: z.number(),
-    path: z.string(),
-  }),
-});
-export type FilePart = z.infer<typeof filePartSchema>;
+export type { FilePart } from './file-part';
 export const designFilesSchema = z.object({
   version: z.number().int(),
   files: z.array(designFileSchema),
@@ -127,7 +100,7 @@ export const apiErrorSchema = z.object({
     field: z.string().optional(),
   }),
   /** With `conflict`: what is stored now. */
-  current: z.union([designRecordSchema, shopItemSchema]).optional(),
+  current: z.union([designRecordSchema, shopItemSchema, orderSchema]).optional(),
 });
 export type ApiErrorCode = (typeof errorCodes)[number];
 export type Current = NonNullable<z.infer<typeof apiErrorSchema>['current']>;
