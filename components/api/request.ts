@@ -44,10 +44,12 @@ export async function send(
   try {
     response = await fetch(path, {
       method: options.method ?? 'GET',
-      ...(options.body !== undefined && {
-        headers: { 'content-type': 'application/json' },
-        body: JSON.stringify(options.body),
-      }),
+      ...(options.body instanceof FormData
+        ? { body: options.body }
+        : options.body !== undefined && {
+            headers: { 'content-type': 'application/json' },
+            body: JSON.stringify(options.body),
+          }),
     });
   } catch {
     throw new RequestError('offline', 'The server could not be reached.');

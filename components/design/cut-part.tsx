@@ -6,7 +6,7 @@ import { FileLink, type ListedFile } from './file-link';
 /** mm round a part in its picture, as a share of its size. */
 const ROUND = 0.04;
 
-function Picture({ part: { label, picture } }: { part: FilePart }) {
+export function Picture({ part: { label, picture } }: { part: FilePart }) {
   const { x, y, width, height, path } = picture;
   const round = ROUND * Math.max(width, height);
   return (

@@ -11,7 +11,7 @@ const kinds = {
   zip: 'ZIP',
 } as const;
 
-function size(bytes: number): string {
+export function fileSize(bytes: number): string {
   return bytes < 1000 ? `${bytes} B` : `${Number((bytes / 1000).toPrecision(2))} kB`;
 }
 
@@ -25,7 +25,7 @@ export function FileLink({ id, file }: { id: string; file: ListedFile }) {
       className="flex min-h-11 grow items-center justify-center gap-2 rounded-[3px] border border-edge bg-white px-3 text-ink no-underline hover:border-action"
     >
       <span className="font-semibold text-action">{kinds[file.kind]}</span>
-      <span className="text-small text-ink-2">{size(file.bytes)}</span>
+      <span className="text-small text-ink-2">{fileSize(file.bytes)}</span>
     </a>
   );
 }

@@ -1,0 +1,32 @@
+'use client';
+
+import { useHydrated } from '@/components/ui/local-time';
+
+const written = new Intl.DateTimeFormat('en-GB', {
+  day: 'numeric',
+  month: 'short',
+  year: 'numeric',
+  timeZone: 'UTC',
+});
+
+const two = (value: number): string => String(value).padStart(2, '0');
+
+/** Today where the reader is, as 2026-03-31; in UTC until the page is hydrated. */
+export function useToday(): string {
+  const hydrated = useHydrated();
+  const now = new Date();
+  if (!hydrated) return now.toISOString().slice(0, 10);
+  return `${now.getFullYear()}-${two(now.getMonth() + 1)}-${two(now.getDate())}`;
+}
+
+/** A due date; one that has passed says so in words as well. */
+export function DueDay({ day, overdue }: { day: string; overdue: boolean }) {
+  return (
+    <span className={overdue ? 'font-semibold text-bad' : ''}>
+      <time dateTime={day} className="whitespace-nowrap">
+        {written.format(new Date(day))}
+      </time>
+      {overdue && ', overdue'}
+    </span>
+  );
+}

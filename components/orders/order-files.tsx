@@ -1,0 +1,62 @@
+import { PanelSection } from '@/components/design/panel-section';
+import type { Order } from '@/lib/schemas/order';
+import { OrderFile } from './order-file';
+import { OrderPartItem } from './order-part';
+
+/** What is cut, from the files of exactly the revision that was ordered. */
+export function OrderFiles({ order, stopped }: { order: Order; stopped: boolean }) {
+  const { revision, parts, otherFiles, otherParts, quantity } = order;
+  return (
+    <>
+      <PanelSection title="Files to cut from">
+        <p>
+          Of revision {revision.number}, {revision.name}, as it was released, in millimetres at
+          nominal size: no kerf is allowed for.
+        </p>
+        <ul aria-label="Parts to cut" className="flex flex-col">
+          {parts.map((part) => (
+            <OrderPartItem
+              key={part.stem}
+              part={part}
+              revision={revision.id}
+              quantity={quantity}
+              stopped={stopped}
+            />
+          ))}
+        </ul>
+        {parts.length === 0 && (
+          <p>No part of this revision is cut from the sheet that stands in the order.</p>
+        )}
+      </PanelSection>
+      {otherParts.length > 0 && (
+        <PanelSection title="Not in this order">
+          <p>These want other sheet, hence an order of their own:</p>
+          <ul className="list-disc pl-5">
+            {otherParts.map(({ label, sheet }) => (
+              <li key={label}>
+                {label}: {sheet}
+              </li>
+            ))}
+          </ul>
+        </PanelSection>
+      )}
+      {!stopped && otherFiles.length > 0 && (
+        <PanelSection title="Drawing, lists and all in one">
+          <ul className="flex flex-col">
+            {otherFiles.map((file) => (
+              <li
+                key={file.name}
+                className="flex items-center justify-between gap-3 border-b border-line py-1.5 last:border-0"
+              >
+                <span className="min-w-0">{file.label}</span>
+                <span className="flex w-32 shrink-0">
+                  <OrderFile revision={revision.id} file={file} />
+                </span>
+              </li>
+            ))}
+          </ul>
+        </PanelSection>
+      )}
+    </>
+  );
+}
