@@ -22,7 +22,7 @@ export function AccountMenu({
       <button
         type="button"
         popoverTarget={ID}
-        className={`${buttonClass('quiet')} ml-auto max-w-[60vw] font-normal text-ink-2`}
+        className={`${buttonClass('quiet')} ml-auto max-w-[50vw] text-ink-2`}
       >
         <span className="truncate">
           {workshop === null ? person : `${workshop.name}, ${person}`}

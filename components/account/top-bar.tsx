@@ -28,7 +28,7 @@ export function TopBar({
 }) {
   const shown = workshop === null ? [] : readsRecord ? [...places, record] : places;
   return (
-    <header className="flex min-h-12 flex-wrap items-center gap-x-7 border-b border-line bg-panel px-5">
+    <header className="flex min-h-12 flex-wrap items-center gap-x-7 border-b border-line max-bench:gap-x-2 bg-panel px-5">
       <a
         href="#main"
         className="sr-only focus:not-sr-only focus:absolute focus:z-50 focus:m-1 focus:bg-white focus:p-2"

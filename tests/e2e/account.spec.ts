@@ -33,6 +33,7 @@ test('a workshop is set up, told what to do first, and left', async ({ page }) =
   await page.getByRole('button', { name: 'Set up the workshop' }).click();
   await expect(page.getByText('No designs yet. Start with New design')).toBeVisible();
   await expect(page.getByText('Cooper Row, Ada Brandt')).toBeVisible();
+  await page.getByRole('button', { name: 'Cooper Row, Ada Brandt' }).click();
   await page.getByRole('button', { name: 'Sign out' }).click();
   await expect(page.getByRole('heading', { name: 'Sign in' })).toBeVisible();
   await page.goto('/designs');
