@@ -7,7 +7,7 @@ import type { Body } from './bodies';
 import { plateGeometry } from './plate-geometry';
 
 /** What lies behind an end plate stays in sight. */
-const SHEER = 0.22;
+const SHEER = 0.32;
 
 /** One body drawn once for each of its places. */
 export function BodySet({ body: { plan, thickness, places, kind, colour } }: { body: Body }) {
