@@ -7,6 +7,8 @@ interface Call {
   body?: unknown;
   /** Sent as it stands instead of a body in JSON. */
   raw?: string;
+  /** Sent instead, as a browser sends a form with files. */
+  form?: FormData;
   headers?: Record<string, string>;
   query?: Record<string, string>;
 }
@@ -14,7 +16,7 @@ interface Call {
 export function call<P>(
   handler: Handler<P>,
   params: P,
-  { method = 'GET', body, raw, headers = {}, query = {} }: Call = {},
+  { method = 'GET', body, raw, form, headers = {}, query = {} }: Call = {},
 ): Promise<Response> {
   const text = raw ?? (body === undefined ? undefined : JSON.stringify(body));
   const request = new Request(
@@ -26,7 +28,7 @@ export function call<P>(
         ...(text !== undefined && { 'content-type': 'application/json' }),
         ...headers,
       },
-      ...(text !== undefined && { body: text }),
+      ...(form ? { body: form } : text !== undefined && { body: text }),
     },
   );
   return handler(request, { params: Promise.resolve(params) });
