@@ -3,6 +3,8 @@ import { availableParallelism } from 'node:os';
 import { join } from 'node:path';
 import { Piscina } from 'piscina';
 import type { Derivation, Derived, Design } from '@/geometry';
+import type { Machine } from '@/geometry/cutting/machine';
+import type { CutPart } from '@/geometry/parts/part';
 import { env } from '../env';
 import { RequestError } from '../errors';
 import { assessmentOf, describeFailure, findingsOf, type Assessment } from './assessment';
@@ -30,6 +32,7 @@ const store = globalThis as typeof globalThis & {
   vaneloftThreads?: Piscina;
   vaneloftDerivations?: Latest<Derivation>;
   vaneloftFiles?: Latest<HashedFile[]>;
+  vaneloftCautions?: Latest<string[]>;
 };
 
 async function perform<Name extends keyof Tasks>(
@@ -96,5 +99,20 @@ export function makeFiles(
   store.vaneloftFiles ??= new Latest();
   return store.vaneloftFiles.get(JSON.stringify([design, derived.kernel, names]), () =>
     perform('makeFiles', derived, names),
+  );
+}
+
+/**
+ * What a machine makes of parts. @param from names the parts for good, as a revision's id with
+ * its sheet does
+ */
+export function machineCautions(
+  from: string,
+  parts: readonly CutPart[],
+  machine: Machine,
+): Promise<string[]> {
+  store.vaneloftCautions ??= new Latest();
+  return store.vaneloftCautions.get(JSON.stringify([from, machine]), () =>
+    perform('machineCautions', parts, machine),
   );
 }

@@ -1,17 +1,21 @@
 /** What a thread of the kernel does when it is asked (kernel.ts). */
 
 import type { Derivation, Derived, Design } from '@/geometry';
+import type { Machine } from '@/geometry/cutting/machine';
+import type { CutPart } from '@/geometry/parts/part';
 import { deriveDesign } from './derive-design';
 import type { FileNames } from './file-names';
 import type { HashedFile } from './hashed-file';
+import { machineCautions } from './machine-cautions';
 import { makeFiles } from './make-files';
 
 export interface Tasks {
   derive: (design: Design) => Derivation;
   makeFiles: (derived: Derived, names: FileNames) => Promise<HashedFile[]>;
+  machineCautions: (parts: readonly CutPart[], machine: Machine) => string[];
 }
 
-const tasks: Tasks = { derive: deriveDesign, makeFiles };
+const tasks: Tasks = { derive: deriveDesign, makeFiles, machineCautions };
 
 /** One thing to do, with what it takes. */
 export type Task = {

@@ -7,9 +7,9 @@ import {
   type CutOrder,
   type ShopItem,
 } from '@/entities';
-import { partFindings } from '@/geometry/cutting/part-findings';
 import { machineOf, type MachineValues } from '@/geometry/cutting/shop-parameters';
 import { mayCut, mayEdit, mayOrder, type Viewer } from '../access';
+import { machineCautions } from '../kernel/kernel';
 import { toShopItem } from '../shop-items';
 import type { Order, OrderSummary } from '../schemas/order';
 import { hindranceOf, orderedRevisions, type StoredRevision } from './ordered-revision';
@@ -154,15 +154,13 @@ async function messagesOf(tx: EntityManager, order: string): Promise<Order['mess
   }));
 }
 
-/** What the machine says of the parts where it does not simply hold, each once. */
-function cautionsOf(parts: readonly RevisionPart[], machine: ShopItem): string[] {
-  const asMachine = machineOf(machine.name, machine.values as MachineValues);
-  const findings = parts.flatMap(({ part }) => partFindings(part, asMachine));
-  const said = findings
-    .filter(({ severity }) => severity !== 'ok')
-    .map(({ label, change }) => `${label}. ${change}`);
-  return [...new Set([...parts.map(({ shown }) => shown.caution), ...said])].filter(Boolean);
-}
+/** What the machine makes of the parts, reckoned once for each revision, sheet and machine. */
+const cautionsOf = ({ revision, sheet, machine }: Shown, parts: readonly RevisionPart[]) =>
+  machineCautions(
+    `${revision.id} ${sheetWords(kindOf(sheet.values))}`,
+    parts.map(({ part }) => part),
+    machineOf(machine.name, machine.values as MachineValues),
+  );
 
 /** All of an order, as this person may see it. */
 export async function toOrder(
@@ -201,7 +199,7 @@ export async function toOrder(
     parts,
     otherFiles: files.filter((file) => !all.some((each) => isOf(each, file))),
     otherParts: others.map(({ part }) => ({ label: part.label, sheet: sheetWords(part) })),
-    cautions: cautionsOf(covered, order.machine),
+    cautions: await cautionsOf(order, covered),
     hindrance: open ? hindranceOf(revision) : null,
     successor:
       revision.released && revision.released.id !== revisionId ? revision.released : null,
