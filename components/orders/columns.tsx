@@ -29,6 +29,7 @@ export const columnsFor = (today: string) =>
     helper.accessor('number', {
       header: 'Order',
       sortFn: 'basic',
+      sortDescFirst: false,
       cell: ({ row, getValue }) => (
         <Link
           href={`/orders/${row.original.id}`}
@@ -86,12 +87,21 @@ export const columnsFor = (today: string) =>
       header: 'Due',
       sortFn: 'basic',
       cell: ({ row: { original } }) => (
-        <DueDay day={original.dueOn} overdue={isOverdue(original, today)} />
+        <>
+          <span className="bench:hidden">due </span>
+          <DueDay day={original.dueOn} overdue={isOverdue(original, today)} />
+        </>
       ),
     }),
     helper.accessor((order) => order.orderedBy.name, {
       id: 'by',
       header: 'Ordered by',
       sortFn: 'text',
+      cell: ({ getValue }) => (
+        <>
+          <span className="bench:hidden">ordered by </span>
+          {getValue()}
+        </>
+      ),
     }),
   ]);

@@ -11,11 +11,14 @@ const written = new Intl.DateTimeFormat('en-GB', {
 
 const two = (value: number): string => String(value).padStart(2, '0');
 
-/** Today where the reader is, as 2026-03-31; in UTC until the page is hydrated. */
+/**
+ * Today where the reader is, as 2026-03-31. Empty until the page is hydrated, before which nothing
+ * is overdue: the server doesn't know the zone.
+ */
 export function useToday(): string {
   const hydrated = useHydrated();
   const now = new Date();
-  if (!hydrated) return now.toISOString().slice(0, 10);
+  if (!hydrated) return '';
   return `${now.getFullYear()}-${two(now.getMonth() + 1)}-${two(now.getDate())}`;
 }
 

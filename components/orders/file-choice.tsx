@@ -47,7 +47,7 @@ export function FileChoice({
         multiple
         accept={OFFERED}
         aria-describedby={`${id}-taken`}
-        className="min-h-11 w-full py-2"
+        className="min-h-11 w-full py-1 file:mr-3 file:min-h-9 file:rounded-[3px] file:border file:border-solid file:border-edge file:bg-panel file:px-3.5 file:font-semibold max-bench:file:min-h-11"
         onChange={(event) => {
           add([...(event.target.files ?? [])]);
           // So that the same can be chosen again after it was taken off the list.

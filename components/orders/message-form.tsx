@@ -43,7 +43,6 @@ export default function MessageForm({
 
   return (
     <form
-      aria-label={words[kinds[0]].label}
       onSubmit={(event) => {
         event.preventDefault();
         send(kinds[0]);

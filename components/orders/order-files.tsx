@@ -1,33 +1,44 @@
 import { PanelSection } from '@/components/design/panel-section';
+import { formatQuantity } from '@/geometry';
 import type { Order } from '@/lib/schemas/order';
 import { OrderFile } from './order-file';
 import { OrderPartItem } from './order-part';
 
+const millimetres = (value: unknown): string => formatQuantity(Number(value), 'length');
+
 /** What is cut, from the files of exactly the revision that was ordered. */
-export function OrderFiles({ order, stopped }: { order: Order; stopped: boolean }) {
-  const { revision, parts, otherFiles, otherParts, quantity } = order;
+export function OrderParts({ order, stopped }: { order: Order; stopped: boolean }) {
+  const { revision, parts, quantity, sheets, sheet, machine } = order;
+  return (
+    <PanelSection title="Files to cut from">
+      <p>
+        Of revision {revision.number}, {revision.name}, as it was released: in millimetres, at
+        nominal size. From {sheets} × {sheet.name}, on {machine.name}, whose kerf of{' '}
+        {millimetres(machine.values.kerf)} is not allowed for in them.
+      </p>
+      <ul aria-label="Parts to cut" className="flex flex-col">
+        {parts.map((part) => (
+          <OrderPartItem
+            key={part.stem}
+            part={part}
+            revision={revision.id}
+            quantity={quantity}
+            stopped={stopped}
+          />
+        ))}
+      </ul>
+      {parts.length === 0 && (
+        <p>No part of this revision is cut from the sheet that stands in the order.</p>
+      )}
+    </PanelSection>
+  );
+}
+
+/** Parts that this order leaves out, and what goes with all of them. */
+export function OtherFiles({ order, stopped }: { order: Order; stopped: boolean }) {
+  const { revision, otherFiles, otherParts } = order;
   return (
     <>
-      <PanelSection title="Files to cut from">
-        <p>
-          Of revision {revision.number}, {revision.name}, as it was released, in millimetres at
-          nominal size: no kerf is allowed for.
-        </p>
-        <ul aria-label="Parts to cut" className="flex flex-col">
-          {parts.map((part) => (
-            <OrderPartItem
-              key={part.stem}
-              part={part}
-              revision={revision.id}
-              quantity={quantity}
-              stopped={stopped}
-            />
-          ))}
-        </ul>
-        {parts.length === 0 && (
-          <p>No part of this revision is cut from the sheet that stands in the order.</p>
-        )}
-      </PanelSection>
       {otherParts.length > 0 && (
         <PanelSection title="Not in this order">
           <p>These want other sheet, hence an order of their own:</p>

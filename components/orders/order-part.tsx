@@ -18,11 +18,14 @@ export function OrderPartItem({
   stopped: boolean;
 }) {
   const { picture } = part;
+  const pieces = part.quantity * quantity;
   return (
     <li className="flex flex-col gap-2 border-b border-line py-4 first:pt-1 last:border-0">
       <h3 className="text-lead leading-tight">{part.label}</h3>
       <p>
-        <strong>{part.quantity * quantity} pieces</strong>
+        <strong>
+          {pieces} {pieces === 1 ? 'piece' : 'pieces'}
+        </strong>
         {quantity > 1 && `: ${part.quantity} × ${quantity}`}, each {picture.width.toFixed(1)} ×{' '}
         {picture.height.toFixed(1)} mm
       </p>

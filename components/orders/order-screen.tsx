@@ -12,7 +12,7 @@ import type { Order } from '@/lib/schemas/order';
 import { useToday } from './due-day';
 import { OrderActions } from './order-actions';
 import { OrderFacts } from './order-facts';
-import { OrderFiles } from './order-files';
+import { OrderParts, OtherFiles } from './order-files';
 import { isOverdue } from './search';
 import { StateBadge } from './state-badge';
 import { Thread } from './thread';
@@ -71,8 +71,12 @@ export function OrderScreen({ initial }: { initial: Order }) {
       <OrderActions order={order} />
       <Suspense>{kerf !== null && <KerfOffer order={order} kerf={kerf} />}</Suspense>
       <div className="grid gap-6 bench:grid-cols-[minmax(0,1fr)_minmax(0,1fr)]">
-        <div className="flex min-w-0 flex-col gap-5">
-          <OrderFiles order={order} stopped={hindrance !== null} />
+        <div className="contents min-w-0 gap-5 bench:flex bench:flex-col">
+          <OrderParts order={order} stopped={hindrance !== null} />
+          {/* Read at a desk, so on a phone after what is read at the machine. */}
+          <div className="flex flex-col gap-5 max-bench:order-last">
+            <OtherFiles order={order} stopped={hindrance !== null} />
+          </div>
         </div>
         <div className="flex min-w-0 flex-col gap-5">
           <PanelSection title="What was ordered">

@@ -75,7 +75,7 @@ export function OrdersTable({
           <tr
             key={row.id}
             role="row"
-            className="border-b border-line align-top last:border-0 hover:bg-white max-bench:flex max-bench:flex-wrap max-bench:items-center max-bench:gap-y-0.5 max-bench:py-2"
+            className="border-b border-line last:border-0 hover:bg-white max-bench:flex max-bench:flex-wrap max-bench:items-center max-bench:gap-y-0.5 max-bench:py-2"
           >
             {row.getAllCells().map((cell) => (
               <td
