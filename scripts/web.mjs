@@ -7,6 +7,7 @@ import { appUrlOf } from './app-url.mjs';
 import { ensureBuild } from './build.mjs';
 import { checkNode, ensureNodeModules } from './packages.mjs';
 import { makeData } from './paths.mjs';
+import { freePortFrom } from './port.mjs';
 import { startServer } from './server.mjs';
 import { runUntilStopped, Stop } from './stop.mjs';
 
@@ -20,8 +21,10 @@ await runUntilStopped(async () => {
   await ensureNodeModules();
   await ensureBuild();
   const port = Number(process.env.PORT || 3000);
+  const host = process.env.HOST || '127.0.0.1';
+  if ((await freePortFrom(port, host)) !== port) throw new Stop(`PORT: ${port} is taken.`);
   const server = await startServer({
-    host: process.env.HOST || '127.0.0.1',
+    host,
     port,
     env: {
       DATABASE_URL: appUrlOf(DATABASE_URL, NEXTAUTH_SECRET),
