@@ -8,6 +8,7 @@ export type FindingCode =
   | 'plate-counts'
   | 'turn'
   | 'own-law'
+  | 'tracking'
   | 'table-span'
   | 'table-rough'
   | 'law-held'

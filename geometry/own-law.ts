@@ -1,4 +1,4 @@
-/** The law that a section asks for: a named one, the builder's table, or a formula. */
+/** The law that a section asks for: a named one, the builder's table, a formula, or section 1's. */
 
 import type { Section } from './design';
 import type { Finding } from './finding';
@@ -6,7 +6,9 @@ import { readFormula } from './formula';
 import { lawBetween, type Law } from './law';
 import { monotoneCubic } from './law-points';
 import { tableFinding, totalsOf, unreadable } from './own-table';
-import type { Target } from './target';
+import { targetOf, type Target } from './target';
+import { oscillatorCoilOf, trackedLaw } from './tracking/tracked-law';
+import { followed, followsItself, nothingToFollow } from './tracking/tracked-target';
 
 /** Looks over the law for where it doesn't rise. */
 const LOOKS = 400;
@@ -70,8 +72,28 @@ function lawOfFormula(
   };
 }
 
-/** The law between the ends of a target, or the finding that says why there is none. */
-export function lawOf(section: Section, index: number, target: Target): Law | Finding {
+function lawThatFollows(section: Section, index: number, first: Section): Law | Finding {
+  if (index === 0) return followsItself();
+  const range = targetOf(first, 0, first);
+  if ('code' in range) return nothingToFollow(index);
+  const signal = followed(range, index);
+  if ('code' in signal) return signal;
+  const law = lawOf(first, 0, range, first);
+  if ('code' in law) return nothingToFollow(index);
+  return trackedLaw(section, signal, law, oscillatorCoilOf(section, signal, range.stray));
+}
+
+/**
+ * The law between the ends of a target, or the finding that says why there is none.
+ * @param first section 1 of the same shaft, which an oscillator section follows
+ */
+export function lawOf(
+  section: Section,
+  index: number,
+  target: Target,
+  first: Section,
+): Law | Finding {
+  if (section.law === 'tracked') return lawThatFollows(section, index, first);
   if (section.law === 'points') return tableFinding(section, index) ?? lawOfPoints(section);
   if (section.law === 'formula') return lawOfFormula(section.lawFormula, index, target);
   return lawBetween(section.law, target.totalMin, target.totalMax);

@@ -3,7 +3,7 @@
 import type { SectionKey, SharedKey } from './parameters';
 
 export const parameterHelp: Readonly<Record<SectionKey | SharedKey, string>> = {
-  law: 'What moves by equal steps as the shaft turns. The law acts on the total capacitance.',
+  law: 'What moves by equal steps as the shaft turns. The law acts on the total capacitance. Oscillator: stays a fixed frequency away from section 1.',
   targetKind:
     'Capacitance at the terminals, or the band to be tuned with its coil and circuit stray.',
   lawPoints:
@@ -17,6 +17,13 @@ export const parameterHelp: Readonly<Record<SectionKey | SharedKey, string>> = {
   inductance: 'The coil that this section tunes.',
   stray:
     'Coil, wiring and valve or transistor capacitance across the section, without the section itself.',
+  intermediateFrequency:
+    'By how much the oscillator of section 1’s circuit stays away from it. Plates cut for it serve one band and this one frequency. Usual: 450 to 470 kHz (common practice).',
+  oscillatorSide: 'Above: signal plus intermediate frequency. Below: signal less it.',
+  oscillatorCoil:
+    'The coil that this section tunes. Left empty: with which its capacitance begins where that of section 1 does.',
+  oscillatorStray:
+    'Oscillator coil, wiring and valve or transistor across this section, without the section itself.',
   frameAllowance:
     'What the section has besides its plates: insulators, posts to frame, terminals. An allowance; measure it on a built one.',
   statorForm:

@@ -136,17 +136,25 @@ function choice<V extends string>(
 
 const DEGREE = Math.PI / 180;
 
-/** Laws whose range is given beside them; a table brings its own. */
+/** Laws whose range is given beside them; a table brings its own, an oscillator follows section 1. */
 const RANGED = ['capacitance', 'wavelength', 'frequency', 'logarithmic', 'formula'];
 const TERMINALS: AppliesTo = { targetKind: ['terminals'], law: RANGED };
 const BAND_ENDS: AppliesTo = { targetKind: ['band'], law: RANGED };
-const BAND: AppliesTo = { targetKind: ['band'] };
+const OWN_RANGE = [...RANGED, 'points'];
+const BAND: AppliesTo = { targetKind: ['band'], law: OWN_RANGE };
+const TRACKED: AppliesTo = { law: ['tracked'] };
 const FRAMED: AppliesTo = { frame: ['end-plates'] };
 
 /** Parameters of one section: its law, its target and its plates. */
 export const sectionParameters = {
   law: choice<
-    'capacitance' | 'wavelength' | 'frequency' | 'logarithmic' | 'points' | 'formula'
+    | 'capacitance'
+    | 'wavelength'
+    | 'frequency'
+    | 'logarithmic'
+    | 'points'
+    | 'formula'
+    | 'tracked'
   >('law', {
     label: 'Tuning law',
     options: [
@@ -156,6 +164,7 @@ export const sectionParameters = {
       { value: 'logarithmic', label: 'log' },
       { value: 'points', label: 'own table' },
       { value: 'formula', label: 'formula' },
+      { value: 'tracked', label: 'oscillator' },
     ],
     default: 'frequency',
   }),
@@ -166,6 +175,7 @@ export const sectionParameters = {
       { value: 'terminals', label: 'capacitance' },
     ],
     default: 'band',
+    appliesTo: { law: OWN_RANGE },
   }),
   lawPoints: {
     kind: 'points',
@@ -225,6 +235,39 @@ export const sectionParameters = {
     max: 5e-9,
     default: 15e-12,
     appliesTo: BAND,
+  }),
+  intermediateFrequency: frequency('law', {
+    label: 'Intermediate frequency',
+    min: 1e3,
+    max: 1e9,
+    default: 455e3,
+    appliesTo: TRACKED,
+    cameLater: true,
+  }),
+  oscillatorSide: choice<'above' | 'below'>('law', {
+    label: 'Oscillator',
+    options: [
+      { value: 'above', label: 'above the signal' },
+      { value: 'below', label: 'below the signal' },
+    ],
+    default: 'above',
+    appliesTo: TRACKED,
+    cameLater: true,
+  }),
+  oscillatorCoil: optional('inductance', 'law', {
+    label: 'Oscillator coil',
+    min: 1e-9,
+    max: 1,
+    appliesTo: TRACKED,
+    cameLater: true,
+  }),
+  oscillatorStray: capacitance('law', {
+    label: 'Oscillator stray',
+    min: 0,
+    max: 5e-9,
+    default: 15e-12,
+    appliesTo: TRACKED,
+    cameLater: true,
   }),
   frameAllowance: capacitance('law', {
     label: 'Insulators and frame',

@@ -62,11 +62,12 @@ export function deriveSection(
 ): SectionOutcome {
   const section = design.sections[index]!;
   const blocked = shapeFindings(design, section, index);
-  const target = targetOf(section, index);
+  const first = design.sections[0]!;
+  const target = targetOf(section, index, first);
   if ('code' in target) return refused(target, ...blocked);
   if (blocked.length > 0) return refused(...blocked);
 
-  const law = lawOf(section, index, target);
+  const law = lawOf(section, index, target, first);
   if ('code' in law) return refused(law);
   const { totalMin, totalMax, stray, inductance } = target;
   const setting = settingOf(design, turn, section, cache);

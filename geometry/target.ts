@@ -2,6 +2,12 @@ import type { Section } from './design';
 import type { Finding } from './finding';
 import { tableFinding, totalsOf } from './own-table';
 import { resonantCapacitance } from './resonance';
+import {
+  followed,
+  followsItself,
+  nothingToFollow,
+  trackedTarget,
+} from './tracking/tracked-target';
 
 /** What a section must reach, F and H. */
 export interface Target {
@@ -46,8 +52,19 @@ function targetOfTable(section: Section, index: number): Target | Finding {
   return strayFinding(section, index, stray, ends.totalMin);
 }
 
-/** The total range of a section, or the finding that says why there is none. */
-export function targetOf(section: Section, index: number): Target | Finding {
+/**
+ * The total range of a section, or the finding that says why there is none.
+ * @param first section 1 of the same shaft, which an oscillator section follows
+ */
+export function targetOf(section: Section, index: number, first: Section): Target | Finding {
+  if (section.law === 'tracked') {
+    if (index === 0) return followsItself();
+    const range = targetOf(first, 0, first);
+    if ('code' in range) return nothingToFollow(index);
+    const signal = followed(range, index);
+    if ('code' in signal) return signal;
+    return trackedTarget(section, index, signal, range.stray);
+  }
   if (section.law === 'points') return targetOfTable(section, index);
   if (section.targetKind === 'terminals') {
     const { minCapacitance: min, maxCapacitance: max } = section;

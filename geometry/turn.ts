@@ -25,10 +25,12 @@ const LEAVES_AT_END = (30 * Math.PI) / 180;
 
 /** Rotor radius by area alone at the beginning (x = 0) or the end (x = 1) of a law, mm. */
 function radiusByArea(design: Design, section: Section, x: 0 | 1): number {
-  const target = targetOf(section, 0);
+  const [first] = design.sections;
+  const index = design.sections.indexOf(section);
+  const target = targetOf(section, index, first!);
   const rc = design.cutoutRadius;
   if ('code' in target) return rc;
-  const law = lawOf(section, 0, target);
+  const law = lawOf(section, index, target, first!);
   if ('code' in law) return rc;
   const slope = law.slope(x) / design.travel;
   const gaps = arrangementOf(design).share * Math.max(1, gapsOf(section));

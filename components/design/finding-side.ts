@@ -12,6 +12,7 @@ const sides: Record<
   'plate-counts': 'at most',
   turn: 'at least',
   'own-law': 'at least',
+  tracking: 'at most',
   'table-span': 'law over',
   'table-rough': 'at most',
   'law-held': 'at most',

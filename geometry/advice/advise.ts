@@ -148,9 +148,9 @@ export function candidateOf(
 ): Candidate | null {
   const sections = design.sections.map((section, i) => (i === index ? variant : section));
   const whole: Design = { ...design, sections };
-  const target = targetOf(variant, index);
+  const target = targetOf(variant, index, sections[0]!);
   if ('code' in target) return null;
-  const law = lawOf(variant, index, target);
+  const law = lawOf(variant, index, target, sections[0]!);
   if ('code' in law) return null;
   const turn: Turn = turnOf(whole);
   if (radiusByArea(whole, variant, turn, law) * SURELY_OUT > design.largestRadius) return null;

@@ -12,14 +12,13 @@ import {
   type Band,
   type ErrorPoint,
 } from './error-curve';
+import { settingWith } from './circuit-setting';
 import {
   checkPoints,
-  paddedFrequency,
   plainCapacitance,
   plainFrequency,
   threePoints,
   trackingError,
-  twoPoints,
   type Conversion,
   type PaddedPair,
 } from './padded-pair';
@@ -131,17 +130,11 @@ export function leastPeak(conversion: Conversion, band: Band): Placement {
   );
 }
 
-/** Looks over the band while a setting is sought, and steps of the search. */
+/** Looks over the band while a setting is sought. */
 const LOOKS = 120;
-const SEARCH_STEPS = 70;
-const SEARCH_WIDTH = 20;
-
-const GOLDEN = (Math.sqrt(5) - 1) / 2;
 
 /**
- * The setting of trimmer and coil of least peak error over a band, for a padder as it is. The coil
- * only scales the padded circuit's frequency, so that for each trimmer the best one makes the
- * largest error to either side alike; the trimmer is then sought.
+ * The setting of trimmer and coil of least peak error over a band, for a padder as it is.
  * @param padder F, or null for none
  */
 export function leastPeakWith(
@@ -150,43 +143,16 @@ export function leastPeakWith(
   band: Band,
 ): Placement {
   checkPoints(conversion, [band.low, band.high]);
-  const [first, last] = chebyshevPoints(band, 2) as [number, number];
-  const start = twoPoints(conversion, padder, [first, last]);
-  const high = plainCapacitance(conversion, band.high);
   const looks = errorCurve((at) => at, band, LOOKS).map(({ frequency }) => frequency);
-  const wanted = looks.map((at) => plainFrequency(conversion, at) + conversion.intermediate);
-
-  const withTrimmer = (trimmer: number): { pair: PaddedPair; peak: number } => {
-    const pair = { ...start, trimmer };
-    const tuned = looks.map((at) => paddedFrequency(pair, at));
-    const peakBy = (scale: number): readonly [above: number, below: number] => {
-      const errors = tuned.map((value, i) => scale * value - wanted[i]!);
-      return [Math.max(...errors), Math.min(...errors)];
-    };
-    const ratios = tuned.map((value, i) => wanted[i]! / value);
-    let [small, large] = [Math.min(...ratios), Math.max(...ratios)];
-    for (let i = 0; i < 60; i++) {
-      const middle = (small + large) / 2;
-      const [above, below] = peakBy(middle);
-      if (above + below > 0) large = middle;
-      else small = middle;
-    }
-    const scale = (small + large) / 2;
-    return {
-      pair: { ...pair, paddedCoil: pair.paddedCoil / scale ** 2 },
-      peak: peakBy(scale)[0],
-    };
-  };
-
-  const across = (at: number): number => (start.trimmer + high) * SEARCH_WIDTH ** at - high;
-  let [a, b] = [-1, 1];
-  for (let i = 0; i < SEARCH_STEPS; i++) {
-    const left = b - GOLDEN * (b - a);
-    const right = a + GOLDEN * (b - a);
-    if (withTrimmer(across(left)).peak < withTrimmer(across(right)).peak) b = right;
-    else a = left;
-  }
-  const { pair } = withTrimmer(across((a + b) / 2));
+  const { intermediate } = conversion;
+  const setting = settingWith(
+    {
+      across: looks.map((at) => plainCapacitance(conversion, at)),
+      wanted: looks.map((at) => plainFrequency(conversion, at) + intermediate),
+    },
+    padder,
+  );
+  const pair = { ...conversion, padder, trimmer: setting.trimmer, paddedCoil: setting.coil };
   return placed(
     pair,
     zerosOf((at) => trackingError(pair, at), band),

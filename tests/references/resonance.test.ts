@@ -15,6 +15,7 @@ test.each([
   const target = targetOf(
     { ...defaultSection(), bandLow, bandHigh, inductance: 200e-6, stray: 0 },
     0,
+    defaultSection(),
   );
   if ('code' in target) throw new Error(target.change);
   expect(target.totalMax / target.totalMin).toBeCloseTo(ratio, 7);
