@@ -41,12 +41,15 @@ export async function addMessage(
   const author = tx.getReference(User, viewer.userId);
   const id = randomUUID();
   const message = tx.create(OrderMessage, { id, workshop, order, author, kind, text });
-  for (const { name, mediaType, sha256, body } of files) {
+  const now = Date.now();
+  files.forEach(({ name, mediaType, sha256, body }, index) => {
     tx.create(Attachment, {
       ...{ workshop, message, name, mediaType, sha256, body },
       bytes: body.byteLength,
+      // A millisecond apart, so that they keep their order.
+      createdAt: new Date(now + index),
     });
-  }
+  });
   return id;
 }
 

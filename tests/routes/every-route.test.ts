@@ -3,6 +3,7 @@
  * fails the test, so none can come without saying who may use it.
  */
 
+import { randomUUID } from 'node:crypto';
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { beforeAll, describe, expect, test } from 'vitest';
@@ -10,9 +11,12 @@ import { defaultDesign, derive } from '@/geometry';
 import { cutFiles } from '@/geometry/files';
 import { machineParameters } from '@/geometry/cutting/shop-parameters';
 import { partsOf } from '@/geometry/parts/assembly';
-import { RecordEntry } from '@/entities';
+import { Attachment, CutOrder, OrderMessage, RecordEntry, User, Workshop } from '@/entities';
+import type { Order } from '@/lib/schemas/order';
 import { entityManager } from '../support/as-owner';
 import { call } from '../support/call';
+import { addMachine, addSheet, formOf, orderIs, termsOf } from '../support/orders';
+import { revisionOf } from '../support/released';
 import { rowLayout } from '../support/row-layout';
 import { callers, Cast, storedDesign, type Caller } from '../support/cast';
 
@@ -23,7 +27,9 @@ interface Rule {
   /** What the route is called with beside the design's id and the file's name. */
   readonly params?: (cast: Cast) => Promise<Record<string, string>>;
   readonly status: Readonly<Record<Caller, number>>;
+  /** What is sent, or what makes it. */
   readonly body?: unknown;
+  readonly form?: () => FormData;
   readonly query?: Record<string, string>;
   /** Puts right what the call has changed for those who come after. */
   readonly afterwards?: () => Promise<void>;
@@ -209,6 +215,82 @@ Object.assign(routes, {
   },
 } satisfies typeof routes);
 
+const attachedTo = async (cast: Cast, id: string) => {
+  const em = await entityManager();
+  const workshop = em.getReference(Workshop, cast.workshopId);
+  const author = em.getReference(User, cast.person('builder').id);
+  const kept = em.create(OrderMessage, {
+    id: randomUUID(),
+    order: em.getReference(CutOrder, id),
+    ...{ workshop, author, kind: 'remark', text: 'See' },
+  });
+  const attachment = em.create(Attachment, {
+    id: randomUUID(),
+    ...{ workshop, message: kept, name: 'a.txt', mediaType: 'text/plain' },
+    ...{ bytes: 1, sha256: 'a'.repeat(64), body: Buffer.from('a') },
+  });
+  await em.flush();
+  return attachment.id;
+};
+/** What our orders are placed with, made once. */
+let orderTerms: Promise<ReturnType<typeof termsOf>> | undefined;
+const termsIn = (cast: Cast) =>
+  (orderTerms ??= (async () => {
+    const revision = await revisionOf(cast, await cast.design(), 1);
+    return termsOf(revision, await addSheet(cast), await addMachine(cast));
+  })());
+const ofAnOrder =
+  (state: Order['state'] = 'queued') =>
+  async (cast: Cast) => ({ id: (await orderIs(cast, state, await termsIn(cast))).id });
+const remark = () => formOf({ kind: 'remark', text: 'See' });
+
+Object.assign(routes, {
+  'app/api/orders/route.ts': {
+    GET: { status: answers(200, 200, 200, 200, 401, 401) },
+    POST: { status: answers(201, 201, 403, 404, 401, 401), body: termsIn },
+  },
+  'app/api/orders/orderable/route.ts': {
+    GET: { status: answers(200, 200, 403, 200, 401, 401) },
+  },
+  'app/api/orders/[id]/route.ts': {
+    GET: { params: ofAnOrder(), status: reads },
+    PUT: {
+      params: ofAnOrder(),
+      status: writes,
+      body: async (cast: Cast) => ({ ...(await termsIn(cast)), version: 1 }),
+    },
+  },
+  'app/api/orders/[id]/begin/route.ts': {
+    POST: { params: ofAnOrder(), status: reads, body: { version: 1 } },
+  },
+  'app/api/orders/[id]/finish/route.ts': {
+    POST: {
+      params: ofAnOrder('cutting'),
+      status: reads,
+      body: { version: 2, sheets: 0, scrap: 0 },
+    },
+  },
+  'app/api/orders/[id]/cancel/route.ts': {
+    POST: { params: ofAnOrder(), status: writes, body: { version: 1 } },
+  },
+  // Who may ask and who may answer: tests/routes/orders.test.ts
+  'app/api/orders/[id]/messages/route.ts': {
+    POST: {
+      params: ofAnOrder(),
+      status: answers(201, 201, 201, 404, 401, 401),
+      form: remark,
+    },
+  },
+  'app/api/attachments/[id]/route.ts': {
+    GET: {
+      params: async (cast: Cast) => ({
+        id: await attachedTo(cast, (await ofAnOrder()(cast)).id),
+      }),
+      status: reads,
+    },
+  },
+} satisfies typeof routes);
+
 const actions: Record<string, readonly string[]> = {
   // Open to everybody: it makes a workshop of one's own. tests/routes/sign-up.test.ts
   'app/(account)/sign-up/actions.ts': ['signUpAction'],
@@ -262,12 +344,16 @@ for (const [file, rules] of Object.entries(routes)) {
           const params = { id, name: fileName, ...(await rule.params?.(cast)) };
           const em = await entityManager();
           const rows = await em.count(RecordEntry);
+          const body: unknown =
+            typeof rule.body === 'function' ? await rule.body(cast) : rule.body;
+          const form = rule.form?.();
           cast.ask(caller);
           const handler = (await load(file))[method]!;
           const response = await call(handler, params, {
             method,
             ...(rule.query && { query: rule.query }),
-            ...(rule.body !== undefined && { body: rule.body }),
+            ...(body !== undefined && { body }),
+            ...(form && { form }),
           });
           // A stream has no end to wait for. tests/routes/live.test.ts
           const stream = response.headers.get('content-type')?.startsWith('text/event-stream');
