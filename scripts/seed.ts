@@ -21,6 +21,7 @@ import { deriveDesign } from '../lib/kernel/derive-design';
 import { hashPassword } from '../lib/password';
 import type { Role } from '../lib/schemas/api';
 import config from '../mikro-orm.config';
+import { addOrders } from './seed-orders';
 
 const demo: { workshop: string; people: { name: string; email: string; role: Role }[] }[] = [
   {
@@ -170,6 +171,9 @@ async function seed(em: EntityManager, signInsFile: string): Promise<boolean> {
       em.create(Membership, { workshop, user: users.get(email)!, role, createdAt });
     }
   }
+  // What is ordered is found among what is stored.
+  await em.flush();
+  for (const workshop of await em.find(Workshop, {})) await addOrders(em, workshop);
   // Before the commit: passwords that were lost would leave a demo nobody can enter.
   writeFileSync(signInsFile, JSON.stringify(signIns, null, 2), { mode: 0o600 });
   return true;
