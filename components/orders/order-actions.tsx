@@ -7,19 +7,20 @@ import type { Order } from '@/lib/schemas/order';
 import { isOpen } from './search';
 import { useOrderChange } from './use-order-change';
 
+const OrderDialog = lazy(() => import('./order-dialog'));
 const dialogs = {
   return: lazy(() => import('./return-dialog')),
   finish: lazy(() => import('./finish-dialog')),
   cancel: lazy(() => import('./cancel-dialog')),
-  change: lazy(() => import('./order-dialog')),
+  change: OrderDialog,
 };
 
 /** What this person can do with the order as it stands. */
 export function OrderActions({ order }: { order: Order }) {
-  const [open, setOpen] = useState<keyof typeof dialogs | null>(null);
+  const [open, setOpen] = useState<keyof typeof dialogs | 'again' | null>(null);
   const beginning = useOrderChange(order.id, () => undefined);
-  const { state, may, hindrance } = order;
-  const Dialog = open && dialogs[open];
+  const { state, may, hindrance, successor } = order;
+  const Dialog = open && open !== 'again' && dialogs[open];
   const close = () => setOpen(null);
   const still = hindrance === null;
   const inHand = state === 'queued' || state === 'cutting';
@@ -46,6 +47,11 @@ export function OrderActions({ order }: { order: Order }) {
         {may.order && still && (state === 'queued' || state === 'returned') && (
           <Button onPress={() => setOpen('change')}>Change the order</Button>
         )}
+        {may.order && successor && (!still || state === 'cancelled') && (
+          <Button onPress={() => setOpen('again')}>
+            Order revision {successor.number} instead
+          </Button>
+        )}
         {may.order && isOpen(order) && (
           <Button look="danger" onPress={() => setOpen('cancel')}>
             Cancel the order
@@ -53,7 +59,12 @@ export function OrderActions({ order }: { order: Order }) {
         )}
       </div>
       {beginning.isError && <Notice look="bad">{beginning.error.message}</Notice>}
-      <Suspense>{Dialog && <Dialog order={order} onClose={close} />}</Suspense>
+      <Suspense>
+        {Dialog && <Dialog order={order} onClose={close} />}
+        {open === 'again' && successor && (
+          <OrderDialog revision={successor.id} like={order} onClose={close} />
+        )}
+      </Suspense>
     </>
   );
 }

@@ -39,12 +39,15 @@ function Placed({ order, onClose }: { order: Order; onClose: () => void }) {
 export default function OrderDialog({
   revision: fixed,
   order = null,
+  like = null,
   onClose,
 }: {
   /** Id of the one to order; without it one is chosen. */
   revision?: string;
   /** The order to change. */
   order?: Order | null;
+  /** An earlier one, for what a new one begins with. */
+  like?: Order | null;
   onClose: () => void;
 }) {
   const client = useQueryClient();
@@ -101,7 +104,7 @@ export default function OrderDialog({
               // Another revision wants other sheet.
               key={revision.id}
               revision={revision}
-              order={order}
+              begin={order ?? like}
               sheets={sheets.data}
               machines={machines.data}
               pending={saving.isPending}

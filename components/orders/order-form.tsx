@@ -41,7 +41,7 @@ const optionOf = ({ id, name }: ShopItem) => ({ value: id, label: name });
 /** Quantity, sheet, machine, day and note of an order for one revision. */
 export function OrderForm({
   revision,
-  order,
+  begin,
   sheets,
   machines,
   pending,
@@ -51,8 +51,8 @@ export function OrderForm({
   onClose,
 }: {
   revision: Orderable;
-  /** The one that is changed. */
-  order: Order | null;
+  /** The one that is changed, or that a new one is like. */
+  begin: Order | null;
   sheets: readonly ShopItem[];
   machines: readonly ShopItem[];
   pending: boolean;
@@ -62,7 +62,7 @@ export function OrderForm({
   onSend: (terms: Terms) => void;
   onClose: () => void;
 }) {
-  const [texts, setTexts] = useState(() => textsOf(order));
+  const [texts, setTexts] = useState(() => textsOf(begin));
   const set = (key: keyof Terms) => (text: string) =>
     setTexts((now) => ({ ...now, [key]: text }));
   const { wants } = revision;

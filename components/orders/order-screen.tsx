@@ -35,7 +35,7 @@ export function OrderScreen({ initial }: { initial: Order }) {
     initialData: initial,
   });
   const order = query.data;
-  const { hindrance, revision, successor, cautions } = order;
+  const { hindrance, revision, cautions } = order;
   const overdue = isOverdue(order, useToday());
   const kerf = kerfToOffer(order);
 
@@ -60,12 +60,6 @@ export function OrderScreen({ initial }: { initial: Order }) {
         <Notice look="bad">
           <strong>Do not cut. </strong>
           {hindrance}
-          {successor && (
-            <>
-              {' '}
-              <Link href="/orders">Order revision {successor.number}</Link>
-            </>
-          )}
         </Notice>
       )}
       <OrderActions order={order} />
