@@ -1,128 +1,153 @@
-/** Balance of the rotor: exact moments, torque over the turn, and the weight that cancels it. */
+/** The rotor's weight about the shaft. */
 import { describe, expect, it } from 'vitest';
 import {
   createEdgeCache,
   defaultDesign,
   defaultSection,
   derive,
-  type Contour,
-  type Derived,
-  type Design,
+  type Path,
 } from '../../../geometry';
+import { couplingsOf } from '../../../geometry/electrical/coupling';
 import { flatten } from '../../../geometry/flatten';
-import { contourArea } from '../../../geometry/measure';
 import { balanceOf } from '../../../geometry/mechanics/balance';
-import { contourMoment, faceMoment } from '../../../geometry/mechanics/centroid';
-import { arcVertices } from '../../../geometry/polar';
+import { contourMoment } from '../../../geometry/mechanics/moment';
+import { sheetMaterials } from '../../../geometry/material';
 
 const cache = createEdgeCache();
 
-function derivedOf(design: Design): Derived {
+const plates = (edit: (design: ReturnType<typeof defaultDesign>) => void = () => undefined) => {
+  const design = { ...defaultDesign(), largestDepth: 200 };
+  edit(design);
   const result = derive(design, { model: 'edges', cache });
   if (!result.ok) throw new Error(result.findings.map(({ change }) => change).join());
   return result.derived;
-}
+};
 
-const gang = (count: number, changes: Partial<Design> = {}): Derived =>
-  derivedOf({
-    ...defaultDesign(),
-    largestDepth: 200,
-    ...changes,
-    sections: Array.from({ length: count }, defaultSection),
+describe('the first moment', () => {
+  // Computed: a half disc of radius r has ∫y dA = 2/3·r³; a disc has its area at its centre.
+  it('of a half disc is two thirds of the cube of its radius', () => {
+    const half: Path = {
+      kind: 'path',
+      vertices: [
+        { x: 25, y: 0, bulge: 1 },
+        { x: -25, y: 0, bulge: 0 },
+      ],
+    };
+    const { x, y } = contourMoment(half);
+    expect(x).toBeCloseTo(0, 9);
+    expect(y / ((2 / 3) * 25 ** 3)).toBeCloseTo(1, 12);
   });
 
-const sector = (radius: number, from: number, sweep: number): Contour => ({
-  kind: 'path',
-  vertices: [
-    { x: 0, y: 0, bulge: 0 },
-    ...arcVertices(radius, from, sweep),
-    { x: radius * Math.cos(from + sweep), y: radius * Math.sin(from + sweep), bulge: 0 },
-  ],
-});
-
-describe('the first moment of a contour', () => {
-  // Centre of a circular sector: 2·R·sin(α/2)/(3·α/2) from its corner (textbook, from memory).
-  it.each([
-    [20, 0, Math.PI],
-    [35, 0.4, 1.1],
-    [12, -1, 2.6],
-  ])('of a sector of radius %f from %f over %f', (radius, from, sweep) => {
-    const face = sector(radius, from, sweep);
-    const area = contourArea(face);
-    const { x, y } = contourMoment(face);
-    expect(area / (radius ** 2 * (sweep / 2))).toBeCloseTo(1, 12);
-    const offset = (2 * radius * Math.sin(sweep / 2)) / (1.5 * sweep);
-    expect(Math.hypot(x, y) / area / offset).toBeCloseTo(1, 12);
-    expect(Math.atan2(y, x)).toBeCloseTo(from + sweep / 2, 12);
+  it('of a crescent is that of the half disc less what is hollow', () => {
+    const [r, bulge] = [25, 0.3];
+    const crescent: Path = {
+      kind: 'path',
+      vertices: [
+        { x: r, y: 0, bulge: 1 },
+        { x: -r, y: 0, bulge: -bulge },
+      ],
+    };
+    const segment: Path = {
+      kind: 'path',
+      vertices: [
+        { x: -r, y: 0, bulge: 0 },
+        { x: r, y: 0, bulge },
+      ],
+    };
+    expect(contourMoment(segment).y).toBeGreaterThan(0);
+    expect(contourMoment(crescent).y + contourMoment(segment).y).toBeCloseTo(
+      (2 / 3) * r ** 3,
+      8,
+    );
   });
 
-  it('of a face with a hole out of the middle', () => {
-    const hole: Contour = { kind: 'circle', x: 4, y: -2, radius: 3 };
-    const plate: Contour = { kind: 'circle', x: 0, y: 0, radius: 10 };
-    expect(faceMoment(plate, [hole])).toEqual({
-      x: -4 * Math.PI * 9,
-      y: 2 * Math.PI * 9,
-    });
-  });
-
-  it('of a finished rotor is that of its polygon', () => {
-    const { outside } = gang(1).sections[0]!.rotor;
-    const flat = flatten(outside, 1e-4);
-    let [mx, my] = [0, 0];
+  it('of a rotor is that of its polygon', () => {
+    const { outside } = plates().sections[0]!.rotor;
+    const flat = flatten(outside, 0.0002);
+    let [x, y] = [0, 0];
     for (let i = 0; i < flat.length; i += 2) {
       const [ax, ay] = [flat[i]!, flat[i + 1]!];
       const [bx, by] = [flat[(i + 2) % flat.length]!, flat[(i + 3) % flat.length]!];
-      mx += ((ax * by - bx * ay) * (ax + bx)) / 6;
-      my += ((ax * by - bx * ay) * (ay + by)) / 6;
+      x += ((ax + bx) * (ax * by - bx * ay)) / 6;
+      y += ((ay + by) * (ax * by - bx * ay)) / 6;
     }
     const exact = contourMoment(outside);
-    const size = Math.hypot(mx, my);
-    expect(Math.hypot(exact.x - mx, exact.y - my) / size).toBeLessThan(1e-5);
+    expect(exact.x / x).toBeCloseTo(1, 5);
+    expect(exact.y / y).toBeCloseTo(1, 5);
   });
 });
 
-describe('the balance of a shaft', () => {
-  it('has the torque of a hung weight', () => {
-    const derived = gang(1, { frame: 'none' });
-    const { rotor } = derived.sections[0]!;
-    const { x, y } = faceMoment(rotor.outside, rotor.holes);
-    const balance = balanceOf(derived);
-    // kg·m times m/s².
-    const expected = (14 * rotor.mass * 1e-3 * Math.hypot(x, y) * 1e-3 * 9.80665) / rotor.area;
-    expect(balance.largestTorque / expected).toBeCloseTo(1, 10);
-    expect(balance.mass).toBeCloseTo(14 * rotor.mass, 9);
-    expect(Math.abs(balance.worst.torque)).toBeLessThanOrEqual(balance.largestTorque);
+describe('the balance of a rotor', () => {
+  const one = plates();
+  const { outside, thickness, quantity } = one.sections[0]!.rotor;
+
+  it('is its moment times density, thickness and count', () => {
+    const { x, y } = contourMoment(outside);
+    const { density } = sheetMaterials[one.design.material];
+    const balance = balanceOf(one);
+    const unbalance = Math.hypot(x, y) * density * thickness * quantity;
+    expect(balance.unbalance / unbalance).toBeCloseTo(1, 9);
+    // g·mm to N·m: 1e-6·9.80665 (standard gravity).
+    expect(balance.worst / (unbalance * 9.80665e-6)).toBeCloseTo(1, 9);
+    expect(balance.turn.every(({ torque }) => Math.abs(torque) <= balance.worst)).toBe(true);
   });
 
-  it('is largest with the centre level with the shaft, and nothing with it straight below', () => {
-    const derived = gang(1);
-    const { bearing, largestTorque } = balanceOf(derived);
-    const { meshAtOpen, direction } = derived.turn;
-    const atOpen = bearing + direction * meshAtOpen;
-    const hung = balanceOf(derived, { down: atOpen });
-    const level = balanceOf(derived, { down: atOpen + Math.PI / 2 });
-    expect(hung.over[0]!.torque / largestTorque).toBeCloseTo(0, 12);
-    expect(level.over[0]!.torque / largestTorque).toBeCloseTo(1, 12);
+  it('is nothing with its counterweight', () => {
+    const { unbalance, bearing, counterweight } = balanceOf(one);
+    const left =
+      Math.cos(bearing) * unbalance + Math.cos(counterweight.bearing) * counterweight.moment;
+    expect(left / unbalance).toBeCloseTo(0, 12);
   });
 
-  it('of equal sections without a stop adds up, and each has its own', () => {
-    const [one, three] = [gang(1, { frame: 'none' }), gang(3, { frame: 'none' })];
-    expect(balanceOf(three).moment / balanceOf(one).moment).toBeCloseTo(3, 10);
-    expect(balanceOf(three, { section: 1 }).moment / balanceOf(one).moment).toBeCloseTo(1, 10);
+  it('doubles with a second section, and is nothing with two blades opposite', () => {
+    const two = plates((design) => design.sections.push(defaultSection()));
+    expect(balanceOf(two).unbalance / balanceOf(one).unbalance).toBeCloseTo(2, 9);
+    expect(balanceOf(two).sections).toHaveLength(2);
+    const butterfly = plates((design) => {
+      design.arrangement = 'butterfly';
+      design.travel = design.travel / 2;
+      design.rotorSector = 1.4;
+      design.statorSector = 1.4;
+      design.postCount = 2;
+      Object.assign(design.sections[0]!, {
+        law: 'capacitance',
+        targetKind: 'terminals',
+        minCapacitance: 30e-12,
+        maxCapacitance: 90e-12,
+      });
+    });
+    expect(balanceOf(butterfly).unbalance / balanceOf(one).unbalance).toBeLessThan(1e-6);
   });
 
-  it('is cancelled by its counterweight', () => {
-    const { moment, bearing, counterweight } = balanceOf(gang(2));
-    const x =
-      moment * Math.cos(bearing) + counterweight.moment * Math.cos(counterweight.bearing);
-    const y =
-      moment * Math.sin(bearing) + counterweight.moment * Math.sin(counterweight.bearing);
-    expect(Math.hypot(x, y) / moment).toBeLessThan(1e-12);
+  it('turns the other way where the rotor does, with the same torque', () => {
+    const clockwise = plates((design) => {
+      design.sense = 'clockwise';
+    });
+    const [here, there] = [balanceOf(one), balanceOf(clockwise)];
+    expect(there.bearing).toBeCloseTo(-here.bearing, 9);
+    there.turn.forEach(({ torque }, i) => expect(torque).toBeCloseTo(here.turn[i]!.torque, 12));
+  });
+});
+
+describe('coupling between sections', () => {
+  const coupled = (sectionSpacing: number) =>
+    couplingsOf(
+      plates((design) => {
+        design.sectionSpacing = sectionSpacing;
+        design.sections.push(defaultSection());
+      }),
+    )[0]!;
+
+  it('is that of the facing stators over their distance, and a screen takes most of it', () => {
+    const near = coupled(6);
+    // A rotor plate and its gap may stand between; here both end plates are stators.
+    expect(near.distance).toBeCloseTo(6, 9);
+    expect(near.open).toBeCloseTo((8.8541878188e-15 * near.area) / 6, 24);
+    expect(near.screened).toBeLessThan(0.01 * near.open);
+    expect(coupled(12).open / near.open).toBeCloseTo(0.5, 9);
   });
 
-  it('mirrors with the way round', () => {
-    const [left, right] = [gang(1), gang(1, { sense: 'clockwise' })];
-    expect(balanceOf(right).moment / balanceOf(left).moment).toBeCloseTo(1, 6);
-    expect(Math.sin(balanceOf(right).bearing + balanceOf(left).bearing)).toBeCloseTo(0, 6);
+  it('is asked of neighbours only', () => {
+    expect(couplingsOf(plates())).toEqual([]);
   });
 });
