@@ -33,3 +33,15 @@ export function DueDay({ day, overdue }: { day: string; overdue: boolean }) {
     </span>
   );
 }
+
+/** By whose day something is overdue. */
+export function TodayWords({ today }: { today: string }) {
+  if (today === '') return null;
+  const { timeZone } = new Intl.DateTimeFormat().resolvedOptions();
+  return (
+    <p className="text-small text-ink-2">
+      Overdue is what was due before today, {written.format(new Date(today))} in your time zone,{' '}
+      {timeZone}.
+    </p>
+  );
+}

@@ -10,7 +10,7 @@ import { Notice } from '@/components/ui/notice';
 import { SearchField } from '@/components/ui/search-field';
 import { SelectField } from '@/components/ui/select-field';
 import type { OrderSummary } from '@/lib/schemas/order';
-import { useToday } from './due-day';
+import { TodayWords, useToday } from './due-day';
 import { OrdersTable } from './orders-table';
 import { found, isOverdue, stateOptions, type Asked } from './search';
 
@@ -93,6 +93,7 @@ export function OrdersScreen({
             </p>
           </div>
           <OrdersTable orders={shown} today={today} />
+          <TodayWords today={today} />
         </>
       )}
       <Suspense>{ordering && <OrderDialog onClose={() => setOrdering(false)} />}</Suspense>

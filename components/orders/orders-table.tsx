@@ -12,6 +12,9 @@ function ariaSort(direction: false | 'asc' | 'desc') {
   return direction === 'asc' ? ('ascending' as const) : ('descending' as const);
 }
 
+/** Cells that say which order it is; on a card the files follow them, then the rest. */
+const NAMING = 2;
+
 // On a narrow screen every row becomes a card, which would take the table's meaning from it: hence
 // the roles.
 export function OrdersTable({
@@ -77,16 +80,16 @@ export function OrdersTable({
             role="row"
             className="border-b border-line last:border-0 hover:bg-white max-bench:flex max-bench:flex-wrap max-bench:items-center max-bench:gap-y-0.5 max-bench:py-2"
           >
-            {row.getAllCells().map((cell) => (
+            {row.getAllCells().map((cell, index) => (
               <td
                 key={cell.id}
                 role="cell"
-                className="px-3 py-1.5 max-bench:py-0.5 max-bench:nth-3:basis-full"
+                className={`px-3 py-1.5 max-bench:py-0.5 max-bench:nth-3:basis-full ${index < NAMING ? '' : 'max-bench:order-2'}`}
               >
                 <table.FlexRender cell={cell} />
               </td>
             ))}
-            <td role="cell" className="px-3 max-bench:basis-full">
+            <td role="cell" className="px-3 max-bench:order-1 max-bench:basis-full">
               <QueueFiles order={row.original} />
             </td>
           </tr>
