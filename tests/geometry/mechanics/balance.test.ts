@@ -7,7 +7,6 @@ import {
   derive,
   type Path,
 } from '../../../geometry';
-import { couplingsOf } from '../../../geometry/electrical/coupling';
 import { flatten } from '../../../geometry/flatten';
 import { balanceOf } from '../../../geometry/mechanics/balance';
 import { contourMoment } from '../../../geometry/mechanics/moment';
@@ -126,28 +125,5 @@ describe('the balance of a rotor', () => {
     const [here, there] = [balanceOf(one), balanceOf(clockwise)];
     expect(there.bearing).toBeCloseTo(-here.bearing, 9);
     there.turn.forEach(({ torque }, i) => expect(torque).toBeCloseTo(here.turn[i]!.torque, 12));
-  });
-});
-
-describe('coupling between sections', () => {
-  const coupled = (sectionSpacing: number) =>
-    couplingsOf(
-      plates((design) => {
-        design.sectionSpacing = sectionSpacing;
-        design.sections.push(defaultSection());
-      }),
-    )[0]!;
-
-  it('is that of the facing stators over their distance, and a screen takes most of it', () => {
-    const near = coupled(6);
-    // A rotor plate and its gap may stand between; here both end plates are stators.
-    expect(near.distance).toBeCloseTo(6, 9);
-    expect(near.open).toBeCloseTo((8.8541878188e-15 * near.area) / 6, 24);
-    expect(near.screened).toBeLessThan(0.01 * near.open);
-    expect(coupled(12).open / near.open).toBeCloseTo(0.5, 9);
-  });
-
-  it('is asked of neighbours only', () => {
-    expect(couplingsOf(plates())).toEqual([]);
   });
 });
