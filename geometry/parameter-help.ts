@@ -69,7 +69,8 @@ export const parameterHelp: Readonly<Record<SectionKey | SharedKey, string>> = {
     'Distance of the posts from the shaft. Left empty: as near as the clearance allows.',
   largestRadius: 'From the shaft to the furthest part, stator ears and sweep included.',
   largestDepth: 'Along the shaft, over all plates of all sections.',
-  sectionSpacing: 'Clear distance along the shaft between neighbouring sections.',
+  sectionSpacing:
+    'Clear distance along the shaft between neighbouring sections; a screen between them adds its thickness.',
   material: 'What the plates are cut from.',
   finish:
     'Silver plated plates lose less at radio frequency, if the silver is some skin depths thick.',
@@ -80,6 +81,9 @@ export const parameterHelp: Readonly<Record<SectionKey | SharedKey, string>> = {
   endSlots:
     'Divide the first and the last rotor plate of a section into segments that are bent to trim the law. 0 for none.',
   endSlotWidth: 'One sheet thickness or more can be cut safely (common practice).',
+  screens:
+    'An earthed plate midway between neighbouring sections, held on the posts between insulating spacers, so that their stators do not act on each other.',
+  screenThickness: 'Thickness of a screen; it adds to the depth.',
   frame:
     'Two end plates that carry shaft, posts and pillars, or none: plates and spacers alone.',
   frameMaterial: 'What the end plates are cut from.',

@@ -577,6 +577,23 @@ export const sharedParameters = {
     default: 0.8,
     cameLater: true,
   }),
+  screens: choice<'none' | 'between'>('frame', {
+    label: 'Screens',
+    options: [
+      { value: 'none', label: 'none' },
+      { value: 'between', label: 'between sections' },
+    ],
+    default: 'none',
+    cameLater: true,
+  }),
+  screenThickness: length('frame', {
+    label: 'Screen thickness',
+    min: 0.2,
+    max: 6,
+    default: 1,
+    appliesTo: { screens: ['between'] },
+    cameLater: true,
+  }),
   frame: choice<'end-plates' | 'none'>('frame', {
     label: 'Frame',
     options: [

@@ -22,6 +22,15 @@ export function endPlatesOf({ rotorPlates, statorPlates }: Section): [PlateRole,
   return [first, last];
 }
 
+/** Along the shaft between the last plate of a section and the first of the next, mm. */
+export function roomBetween({
+  sectionSpacing,
+  screens,
+  screenThickness,
+}: Pick<Design, 'sectionSpacing' | 'screens' | 'screenThickness'>): number {
+  return sectionSpacing + (screens === 'between' ? screenThickness : 0);
+}
+
 function packPlates(
   section: Section,
   { stators }: Arrangement,
@@ -71,7 +80,8 @@ export function stackOf(design: Design, sections: readonly SectionResult[]): Sta
       spacers.push(...spacersBetween(own, 'rotor'), ...spacersBetween(own, 'stator'));
       const last = own[own.length - 1]!;
       depth = last.z + last.thickness / 2;
-      start = depth + design.sectionSpacing;
+      const within = pack < arrangement.packs - 1;
+      start = depth + (within ? design.sectionSpacing : roomBetween(design));
     }
   });
   const allPlates = sections.flatMap(({ rotor, stator }) => [rotor, stator]);

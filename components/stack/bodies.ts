@@ -21,7 +21,7 @@ export interface Body {
 }
 
 const END_PLATES = ['frame-front', 'frame-back', 'panel-plate'];
-const FRAME = [...END_PLATES, 'pillar', 'post-bush', 'stop-arm', 'stop-pin'];
+const FRAME = [...END_PLATES, 'pillar', 'post-bush', 'stop-arm', 'stop-pin', 'screen'];
 
 /** Turned steel of shaft and posts: between the two metals of the plates. */
 const TURNED = '#b9c0c4';

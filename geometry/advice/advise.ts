@@ -18,6 +18,7 @@ import { bladeWithEdges, problemOf } from '../inverse';
 import type { Law } from '../law';
 import { sheetMaterials } from '../material';
 import { lawOf } from '../own-law';
+import { roomBetween } from '../stack';
 import { settingOf } from '../setting';
 import { statorRadius, type StatorForm } from '../stator';
 import { targetOf } from '../target';
@@ -65,8 +66,10 @@ function roomFor(design: Design, index: number): number {
     (sum, section, i) => (i === index ? sum : sum + packs * depthOf(section)),
     0,
   );
-  const sets = packs * design.sections.length;
-  return (design.largestDepth - others - (sets - 1) * design.sectionSpacing) / packs;
+  const count = design.sections.length;
+  const between =
+    (count - 1) * roomBetween(design) + count * (packs - 1) * design.sectionSpacing;
+  return (design.largestDepth - others - between) / packs;
 }
 
 /** Rotor plate counts from 1 to the most that fit, spread evenly by ratio when they are many. */

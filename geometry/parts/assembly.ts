@@ -6,6 +6,7 @@ import { addFrame, frameLayout } from './frame';
 import type { Part } from './part';
 import { addPlates } from './plates';
 import { addRods } from './rods';
+import { addScreens } from './screens';
 import { addRotorSpacers, addStatorSpacers } from './spacers';
 
 export interface Assembly {
@@ -27,6 +28,7 @@ export function assemblyOf(derived: Derived): Assembly {
       to: layout.front - derived.design.bushFlange,
     },
   );
+  addScreens(collection, derived, layout);
   if (layout) addFrame(collection, derived, layout);
   addRods(collection, derived, layout);
   return collection;

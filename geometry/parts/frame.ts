@@ -11,7 +11,7 @@ import { armOutline, circle, roundedHull, roundedRectangle } from './contours';
 import { clearanceHole } from './thread';
 
 /** mm. Metal left round what an end plate carries. */
-const RIM = 3;
+export const RIM = 3;
 
 /** mm. Wall of the bush's shoulder between post and frame. */
 const SHOULDER = 1.5;

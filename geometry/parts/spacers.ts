@@ -10,6 +10,7 @@ import {
   type Place,
 } from './collection';
 import { circle } from './contours';
+import { screenRooms } from './screens';
 
 /** mm. Lengths nearer than this are one part. */
 const SAME_LENGTH = 1e-6;
@@ -160,6 +161,16 @@ export function addRotorSpacers(
   );
 }
 
+/** What a screen leaves of a room along a post. */
+function withoutScreen({ from, to }: Room, screens: readonly Room[]): Room[] {
+  const screen = screens.find((one) => one.from > from && one.to < to);
+  if (!screen) return [{ from, to }];
+  return [
+    { from, to: screen.from },
+    { from: screen.to, to },
+  ];
+}
+
 const onPost = ({ x, y }: Post, { from, to }: Room): Place => ({
   x,
   y,
@@ -178,6 +189,7 @@ export function addStatorSpacers(
   const { design, stack, sections } = derived;
   const stators = stack.plates.filter(({ role, angle }) => role === 'stator' && angle === 0);
   const rooms = between(stators);
+  const screens = screenRooms(derived);
   const ring = {
     outer: 2 * design.postSpacerRadius,
     bore: design.postHoleDiameter,
@@ -212,7 +224,11 @@ export function addStatorSpacers(
     },
     rooms
       .filter((room) => !samePack(room))
-      .flatMap((room) => sections[room.after.section]!.posts.map((post) => onPost(post, room))),
+      .flatMap((room) =>
+        withoutScreen(room, screens).flatMap((part) =>
+          sections[room.after.section]!.posts.map((post) => onPost(post, part)),
+        ),
+      ),
   );
   if (!frame) return;
   const [first, last] = [sections[0]!, sections.at(-1)!];

@@ -41,6 +41,17 @@ slotted.bracket = 'panel';
 const gang = defaultDesign();
 gang.sections.push({ ...gang.sections[0]! });
 gang.largestDepth = 120;
+const screened = defaultDesign();
+screened.sections = [0.4, 0.5, 0.6].map((airGap, i) => ({
+  ...screened.sections[0]!,
+  airGap,
+  rotorPlates: 10 + i,
+  statorPlates: 10 + 1 - (i % 2),
+}));
+screened.largestDepth = 200;
+screened.largestRadius = 90;
+screened.postCircleRadius = 60;
+screened.screens = 'between';
 const clockwise = defaultDesign();
 clockwise.sense = 'clockwise';
 
@@ -48,6 +59,7 @@ const designs: [string, Design][] = [
   ...examples,
   ['slotted end plates and a panel plate', slotted],
   ['two equal sections', gang],
+  ['three unlike sections with screens', screened],
   ['clockwise', clockwise],
 ];
 
@@ -136,7 +148,9 @@ describe.each(designs)('%s', (_name, design) => {
           const part = partBy(assembly, at.part);
           const plate =
             part.kind === 'cut' &&
-            (part.key.includes('rotor') || part.key.includes('stator')) &&
+            (part.key.includes('rotor') ||
+              part.key.includes('stator') ||
+              part.key === 'screen') &&
             !part.key.includes('spacer');
           return plate || Math.hypot(at.x - x, at.y - y) < MICROMETRE;
         })
