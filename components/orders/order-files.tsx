@@ -10,12 +10,16 @@ const millimetres = (value: unknown): string => formatQuantity(Number(value), 'l
 export function OrderParts({ order, stopped }: { order: Order; stopped: boolean }) {
   const { revision, parts, quantity, sheets, sheet, machine } = order;
   return (
-    <PanelSection title="Files to cut from">
-      <p>
-        Of revision {revision.number}, {revision.name}, as it was released: in millimetres, at
-        nominal size. From {sheets} × {sheet.name}, on {machine.name}, whose kerf of{' '}
-        {millimetres(machine.values.kerf)} is not allowed for in them.
-      </p>
+    <PanelSection title={stopped ? 'Parts that were ordered' : 'Files to cut from'}>
+      {stopped ? (
+        <p>No file is given out: this revision must not be cut.</p>
+      ) : (
+        <p>
+          Of revision {revision.number}, {revision.name}, as it was released: in millimetres, at
+          nominal size. From {sheets} × {sheet.name}, on {machine.name}, whose kerf of{' '}
+          {millimetres(machine.values.kerf)} is not allowed for in them.
+        </p>
+      )}
       <ul aria-label="Parts to cut" className="flex flex-col">
         {parts.map((part) => (
           <OrderPartItem
