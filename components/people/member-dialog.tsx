@@ -46,8 +46,9 @@ export default function MemberDialog({
       {removes ? (
         <p>
           {isMe ? 'You leave the workshop' : `${member.name} is out of the workshop`} at once,
-          in every browser. What was made and recorded stays. An invitation lets{' '}
-          {isMe ? 'you' : 'them'} back in.
+          in every browser. What was made and recorded stays; open invitations that{' '}
+          {isMe ? 'you' : 'they'} sent are withdrawn. An invitation lets {isMe ? 'you' : 'them'}{' '}
+          back in.
         </p>
       ) : (
         <>

@@ -5,6 +5,7 @@ import { badInput } from '../errors';
 import { addRecord } from '../record';
 import { setRoleSchema } from '../schemas/people';
 import { findMember, lockPeople, refuseLastOwner } from './lock-people';
+import { withdrawInvitationsOf } from './withdraw-invitations-of';
 
 /** Gives a member another role. @throws RequestError not-found, bad-input for the last owner */
 export async function setMemberRole(userId: string, input: unknown): Promise<void> {
@@ -17,6 +18,7 @@ export async function setMemberRole(userId: string, input: unknown): Promise<voi
     const { role } = parsed.data;
     if (member.role === role) return;
     await refuseLastOwner(tx, viewer, member);
+    if (!mayManagePeople(role)) await withdrawInvitationsOf(tx, viewer, userId);
     const from = member.role;
     member.role = role;
     addRecord(tx, viewer, {

@@ -228,6 +228,26 @@ describe('members', () => {
     expect(more).toEqual([]);
   });
 
+  test.each([
+    ['removed', remove],
+    ['no longer an owner', (id: string) => setRole(id, 'builder')],
+  ])('whoever is %s leaves no open invitation behind', async (_what, act) => {
+    const second = await cast.member('owner');
+    askWith({ cookie: await cookieFor(second) });
+    const email = `${randomUUID()}@test.example`;
+    const { id } = (await (await invite(email, 'owner')).json()) as { id: string };
+    const secret = await secretFor(email);
+    const { secret: another } = await cast.invitation();
+    cast.ask('owner');
+    expect((await act(second)).status).toBe(204);
+    await expect(openInvitation(secret)).rejects.toThrow('withdrawn');
+    expect(await openInvitation(another)).toBeTruthy();
+    expect((await cast.record(id)).map(({ what }) => what)).toEqual([
+      'member-invited',
+      'invitation-withdrawn',
+    ]);
+  });
+
   test.each(['x', randomUUID()])('%s is no member', async (id) => {
     expect((await setRole(id, 'builder')).status).toBe(404);
     expect((await remove(id)).status).toBe(404);
