@@ -1,6 +1,8 @@
 /** The tools of the design screen, by what their button says. */
 export const openers = {
   'old-plate': 'Copy an old plate',
+  'printed-dial': 'Follow a printed dial',
+  'two-circuits': 'Two circuits on one shaft',
   'plates-that-fit': 'Which plates and gap fit',
   tolerance: 'What tolerances do to it',
   'voltage-and-loss': 'Voltage, loss and drift',
@@ -12,7 +14,7 @@ export type ToolName = keyof typeof openers;
 
 /** Where a tool is opened from: where its answer is used. */
 export const toolsAt = {
-  law: ['old-plate'],
+  law: ['old-plate', 'printed-dial', 'two-circuits'],
   stack: ['plates-that-fit'],
   checks: ['voltage-and-loss'],
   held: ['tolerance', 'dial'],

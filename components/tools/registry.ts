@@ -14,6 +14,14 @@ export const tools: Readonly<Record<ToolName, Tool>> = {
     title: 'Copy an old plate',
     Component: dynamic(() => import('./old-plate/old-plate')),
   },
+  'printed-dial': {
+    title: 'Printed dial',
+    Component: dynamic(() => import('./printed-dial/printed-dial')),
+  },
+  'two-circuits': {
+    title: 'Two circuits on one shaft',
+    Component: dynamic(() => import('./two-circuits/two-circuits')),
+  },
   'plates-that-fit': {
     title: 'Plates that fit',
     Component: dynamic(() => import('./plates-that-fit/plates-that-fit')),

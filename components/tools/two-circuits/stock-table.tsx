@@ -1,0 +1,58 @@
+import { formatQuantity } from '@/geometry';
+import type { PaddedAnswer } from './two-circuits.worker';
+
+const headings = ['Series', 'Padder', 'Trimmer', 'Coil', 'Largest error', 'More than best'];
+
+/** The nearest padder of each series, trimmer and coil set anew for it. */
+export function StockTable({ stock, best }: { stock: PaddedAnswer['stock']; best: number }) {
+  return (
+    <>
+      <div
+        role="region"
+        aria-label="Padder from stock"
+        tabIndex={0}
+        className="overflow-x-auto"
+      >
+        <table className="dense w-full text-right text-small tabular-nums">
+          <thead>
+            <tr className="border-b border-edge">
+              {headings.map((title) => (
+                <th key={title} scope="col" className="py-1.5 pl-3 font-medium first:pl-0">
+                  {title}
+                </th>
+              ))}
+            </tr>
+          </thead>
+          <tbody>
+            {stock.map(({ series, placement: { pair, peak } }) => (
+              <tr key={series} className="border-b border-line">
+                <th scope="row" className="py-1.5 text-left font-normal">
+                  {series}
+                </th>
+                <td className="whitespace-nowrap">
+                  {formatQuantity(pair.padder ?? 0, 'capacitance', 3)}
+                </td>
+                <td className="whitespace-nowrap">
+                  {formatQuantity(pair.trimmer, 'capacitance', 4)}
+                </td>
+                <td className="whitespace-nowrap">
+                  {formatQuantity(pair.paddedCoil, 'inductance', 4)}
+                </td>
+                <td className="whitespace-nowrap">
+                  {formatQuantity(Math.abs(peak.error), 'frequency', 3)}
+                </td>
+                <td className="whitespace-nowrap">
+                  {Math.round(100 * (Math.abs(peak.error) / best - 1))} %
+                </td>
+              </tr>
+            ))}
+          </tbody>
+        </table>
+      </div>
+      <p className="text-small text-ink-2">
+        Preferred values of IEC 60063, nearest to the best padder; trimmer and coil set anew for
+        the least peak error.
+      </p>
+    </>
+  );
+}
