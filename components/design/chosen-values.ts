@@ -19,22 +19,25 @@ function postCircle({ sections }: Derived): number | undefined {
   return radii.every((radius) => Math.abs(radius - first) < SAME_CIRCLE) ? first : undefined;
 }
 
-export function chosenIn(derived: Derived): ChosenValues {
+export function chosenIn(derived: Derived, section: number): ChosenValues {
   const { travel, lawFrom, lawTo } = derived.turn;
   return {
     openRest: lawFrom,
     meshedRest: travel - lawTo,
     postCircleRadius: postCircle(derived),
+    oscillatorCoil: derived.sections[section]?.inductance ?? undefined,
   };
 }
 
 const NONE: ChosenValues = {};
 
 /** The same object until one of its values changes, so that fields are not drawn for nothing. */
-export function useChosenValues(derived: Derived | null): ChosenValues {
-  const { openRest, meshedRest, postCircleRadius } = derived ? chosenIn(derived) : NONE;
+export function useChosenValues(derived: Derived | null, section: number): ChosenValues {
+  const { openRest, meshedRest, postCircleRadius, oscillatorCoil } = derived
+    ? chosenIn(derived, section)
+    : NONE;
   return useMemo(
-    () => ({ openRest, meshedRest, postCircleRadius }),
-    [openRest, meshedRest, postCircleRadius],
+    () => ({ openRest, meshedRest, postCircleRadius, oscillatorCoil }),
+    [openRest, meshedRest, postCircleRadius, oscillatorCoil],
   );
 }

@@ -4,6 +4,8 @@ const laws: Record<string, (part: number) => number> = {
   wavelength: (part) => (Math.sqrt(0.1) + (1 - Math.sqrt(0.1)) * part) ** 2,
   frequency: (part) => (0.1 ** -0.5 + (1 - 0.1 ** -0.5) * part) ** -2,
   logarithmic: (part) => 0.1 * 10 ** part,
+  // An oscillator 0.27 of the highest signal above a circuit of equal steps of frequency.
+  tracked: (part) => ((0.1 ** 0.5 + 0.27) / (1 + (0.1 ** 0.5 - 1) * part + 0.27)) ** 2,
 };
 
 export function LawCurve({ law }: { law: string }) {

@@ -51,7 +51,7 @@ export function Workbench({
   const [section, setSection] = useState(0);
   const store = useAngleStore(plates.derived);
   // Of plates that are not of this design nothing is said in its fields.
-  const chosen = useChosenValues(plates.current && !invalid ? plates.derived : null);
+  const chosen = useChosenValues(plates.current && !invalid ? plates.derived : null, section);
 
   useEffect(
     () =>

@@ -92,3 +92,31 @@ export function RotorPlate({
     </g>
   );
 }
+
+/** One plate of the sections that are not picked, as lines over those of the one that is. */
+export function OtherPlates({
+  sections,
+  role,
+}: {
+  sections: readonly SectionResult[];
+  role: 'rotor' | 'stator';
+}) {
+  return (
+    <g data-part={`other-${role}s`} className="pointer-events-none">
+      {sections.flatMap((section, i) =>
+        (role === 'rotor' ? [0] : section.statorAngles).map((angle) => (
+          <path
+            key={`${i} ${angle}`}
+            d={svgPath([section[role].outside])}
+            transform={`rotate(${toDegrees(angle)})`}
+            fill="none"
+            className={role === 'rotor' ? 'stroke-brass' : 'stroke-steel'}
+            strokeDasharray="7 4"
+            strokeWidth="1.5"
+            vectorEffect="non-scaling-stroke"
+          />
+        )),
+      )}
+    </g>
+  );
+}

@@ -1,13 +1,13 @@
 'use client';
 
-import { useId, useRef, type CSSProperties } from 'react';
+import { useId, useRef, useState, type CSSProperties } from 'react';
 import { formatQuantity } from '@/geometry/quantity';
 import type { Derived, Turn } from '@/geometry';
 import { rotorTurn } from '@/geometry/rotor-turn';
 import type { AngleStore } from './angle-store';
 import { toDegrees, writeDegrees } from './degrees';
 import { FloorKey, FloorReadout } from './floor-lettering';
-import { RotorPlate, StatorPlate } from './floor-plates';
+import { OtherPlates, RotorPlate, StatorPlate } from './floor-plates';
 import { floorGrid } from './polar-grid';
 import { PolarLines, RingLetters } from './polar-lines';
 import { useAngle } from './use-angle';
@@ -15,7 +15,7 @@ import { useRotorDrag } from './use-rotor-drag';
 import { assumedView, useFittedView } from './use-fitted-view';
 
 /**
- * One section in plan on the marking-out blue floor, seen along the shaft. It fills its container;
+ * One section in plan, or all laid over it, on the marking-out blue floor, seen along the shaft. It fills its container;
  * the rotor turns with the store, by no render, and can be turned by dragging it.
  */
 export function Floor({
@@ -31,9 +31,12 @@ export function Floor({
   const id = useId();
   const frame = useRef<HTMLDivElement>(null);
   const rotorLayer = useRef<SVGSVGElement>(null);
+  const [overlaid, setOverlaid] = useState(false);
   const { design, turn, stack, sections } = derived;
   const section = sections[index];
   if (!section) throw new RangeError(`invalid section: ${index} of ${sections.length}`);
+
+  const others = overlaid ? sections.filter((_, i) => i !== index) : [];
 
   const grid = floorGrid(stack.outerRadius, design.largestRadius);
   const view = assumedView(grid.radius);
@@ -56,6 +59,16 @@ export function Floor({
   return (
     <div className="@container relative flex h-full min-h-80 w-full flex-col overflow-hidden bg-floor select-none">
       <FloorReadout section={section} store={store} />
+      {sections.length > 1 && (
+        <button
+          type="button"
+          aria-pressed={overlaid}
+          onClick={() => setOverlaid(!overlaid)}
+          className="absolute top-2 right-2 z-10 min-h-8 rounded-[3px] border border-scribe/60 bg-floor px-2 text-small text-scribe aria-pressed:bg-scribe aria-pressed:text-floor max-bench:min-h-11"
+        >
+          All sections
+        </button>
+      )}
       {/* Three layers, so that turning moves a picture of the rotor and draws nothing again. */}
       <div
         ref={frame}
@@ -71,6 +84,7 @@ export function Floor({
           <PolarLines grid={grid} />
           <g transform="scale(1 -1)">
             <StatorPlate section={section} hatch={`${id}-hatch`} />
+            <OtherPlates sections={others} role="stator" />
           </g>
           {grid.limitShown && (
             <circle
@@ -96,6 +110,7 @@ export function Floor({
               mark={grid.radius}
               drag={drag}
             />
+            <OtherPlates sections={others} role="rotor" />
           </g>
         </svg>
         <svg {...layer} className={`${layer.className} pointer-events-none`}>

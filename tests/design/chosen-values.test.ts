@@ -7,7 +7,7 @@ function chosen(change: (design: Design) => void) {
   change(design);
   const derivation = derive(design, { model: 'edges' });
   if (!derivation.ok) throw new Error(derivation.findings.map((f) => f.change).join(' '));
-  return chosenIn(derivation.derived);
+  return chosenIn(derivation.derived, 0);
 }
 
 test('typing in what was chosen changes nothing', () => {
