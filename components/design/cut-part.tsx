@@ -34,11 +34,12 @@ const kerfs: Record<FilePart['kerf'], string> = {
 
 /** One part to cut: its file and how it looks first, then what to cut it from and how often. */
 export function CutPart({
-  id,
+  href,
   part,
   files,
 }: {
-  id: string;
+  /** Address of the folder of files. */
+  href: string;
   part: FilePart;
   files: readonly ListedFile[];
 }) {
@@ -50,7 +51,7 @@ export function CutPart({
         <Picture part={part} />
         <div className="flex w-32 shrink-0 flex-col justify-center gap-2 *:min-h-12 *:grow-0">
           {files.map((file) => (
-            <FileLink key={file.name} id={id} file={file} />
+            <FileLink key={file.name} href={href} file={file} />
           ))}
         </div>
       </div>

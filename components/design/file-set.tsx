@@ -12,8 +12,8 @@ export function byStem(files: readonly ListedFile[]): ListedFile[][] {
   return [...sets.values()];
 }
 
-/** One thing in all its formats. */
-export function FileSet({ id, files }: { id: string; files: readonly ListedFile[] }) {
+/** One thing in all its formats. @param href address of the folder of files */
+export function FileSet({ href, files }: { href: string; files: readonly ListedFile[] }) {
   const [first] = files;
   if (!first) return null;
   return (
@@ -29,7 +29,7 @@ export function FileSet({ id, files }: { id: string; files: readonly ListedFile[
       </p>
       <p className="flex flex-wrap gap-1.5">
         {files.map((file) => (
-          <FileLink key={file.name} id={id} file={file} />
+          <FileLink key={file.name} href={href} file={file} />
         ))}
       </p>
     </li>

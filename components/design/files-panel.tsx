@@ -31,7 +31,7 @@ export function FilesPanel({
       {query.isError && <p className="text-bad">{query.error.message}</p>}
       <ul className="flex flex-col">
         {byStem(query.data?.files ?? []).map((files) => (
-          <FileSet key={files[0]?.name} id={id} files={files} />
+          <FileSet key={files[0]?.name} href={`/api/designs/${id}/files`} files={files} />
         ))}
       </ul>
     </div>

@@ -1,7 +1,10 @@
 'use client';
 
-import { useMutation } from '@tanstack/react-query';
+import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { useRouter } from 'next/navigation';
+import { designKeys } from '@/components/api/design-keys';
 import { loadRevisions } from '@/components/api/load-revisions';
+import { revisionKeys } from '@/components/api/revision-keys';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { Notice } from '@/components/ui/notice';
@@ -23,10 +26,15 @@ export default function RestoreDialog({
   what: string;
   onClose: () => void;
 }) {
+  const client = useQueryClient();
+  const router = useRouter();
   const restoring = useMutation({
     mutationFn: async () => (await loadRevisions()).restoreDesign(designId, { version, from }),
-    // Afresh, since the design screen may be kept with what it held before.
-    onSuccess: () => window.location.assign(`/designs/${designId}`),
+    onSuccess: (record) => {
+      client.setQueryData(designKeys.record(designId), record);
+      void client.invalidateQueries({ queryKey: revisionKeys.history(designId) });
+      router.push(`/designs/${designId}`);
+    },
   });
   return (
     <Dialog title={`Go on from ${what}?`} role="alertdialog" isOpen onClose={onClose}>

@@ -10,6 +10,12 @@ export interface Pair {
 export const compareHref = (designId: string, { a, b }: Pair): string =>
   `/designs/${designId}/compare?${new URLSearchParams({ a, b })}`;
 
+/** As `Revision 2`. */
+export function titleOfState(which: string): string {
+  if (which === 'draft') return 'As saved';
+  return `${which.startsWith('r') ? 'Revision' : 'Version'} ${which.slice(1)}`;
+}
+
 /** What one looks for most: what has changed since the last revision, or else the last save. */
 export function likelyPair({ revisions, versions }: History): Pair {
   const [revision] = revisions;

@@ -22,9 +22,14 @@ export function useRevision(first: Revision) {
   return { revision: data, gone, trouble: error && !gone ? error.message : null };
 }
 
-/** The files of a revision as they are kept. @param first the list as the page came with it */
+/**
+ * The files of a revision as they are kept.
+ * @param since when the revision that the page came with had last been moved
+ * @param first its list
+ */
 export function useRevisionFiles(
   { id, updatedAt }: Revision,
+  since: string,
   first: DesignFiles | null,
   wanted: boolean,
 ) {
@@ -33,7 +38,7 @@ export function useRevisionFiles(
     queryKey: [...revisionKeys.files(id), updatedAt],
     queryFn: async () => (await loadRevisions()).fetchRevisionFiles(id),
     enabled: wanted,
-    ...(first && { placeholderData: first }),
+    ...(first && updatedAt === since && { initialData: first }),
     retry: false,
   });
 }

@@ -1,0 +1,60 @@
+'use client';
+
+import { useMutation } from '@tanstack/react-query';
+import { PanelSection } from '@/components/design/panel-section';
+import { Button } from '@/components/ui/button';
+import { Notice } from '@/components/ui/notice';
+import { KERNEL_VERSION, type Derivation, type Derived } from '@/geometry';
+import { deriveToday } from './derive-today';
+import { figurePairs } from './figures-of';
+import { PairTable } from './pair-table';
+
+function Changes({ then, now }: { then: Derived; now: Derivation }) {
+  if (!now.ok) {
+    return (
+      <>
+        <p>Today’s kernel makes no plates of it:</p>
+        <ul className="list-disc pl-5">
+          {now.findings.map(({ label, change }) => (
+            <li key={label}>{change ? `${label}: ${change}` : label}</li>
+          ))}
+        </ul>
+      </>
+    );
+  }
+  const changed = figurePairs(then, now.derived).filter(({ same }) => !same);
+  return (
+    <PairTable
+      caption="What today’s kernel would change"
+      titles={[
+        'Figure',
+        `Kept, kernel ${then.kernel}`,
+        `Today, kernel ${now.derived.kernel}`,
+        'Change',
+      ]}
+      rows={changed.map(({ label, a, b, change }) => [label, a ?? '–', b ?? '–', change])}
+      none="No figure would change."
+    />
+  );
+}
+
+/** For a revision of an earlier kernel: what today's would make of the same parameters. */
+export default function TodayKernel({ derived }: { derived: Derived }) {
+  const today = useMutation({ mutationFn: () => deriveToday(derived.design) });
+  return (
+    <PanelSection title="Made by an earlier kernel">
+      <p>
+        Kernel {derived.kernel} derived these plates, and they stay so. Today’s is{' '}
+        {KERNEL_VERSION}; it may make others of the same parameters.
+      </p>
+      {today.data ? (
+        <Changes then={derived} now={today.data} />
+      ) : (
+        <Button isDisabled={today.isPending} onPress={() => today.mutate()}>
+          {today.isPending ? 'Deriving' : 'Show what today’s kernel would change'}
+        </Button>
+      )}
+      {today.isError && <Notice look="bad">{today.error.message}</Notice>}
+    </PanelSection>
+  );
+}
