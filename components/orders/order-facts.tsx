@@ -12,7 +12,7 @@ export function OrderFacts({ order, overdue }: { order: Order; overdue: boolean 
   const rows: (readonly [string, React.ReactNode])[] = [
     [
       'Revision',
-      <a key="revision" href={`/designs/${revision.designId}`}>
+      <a key="revision" href={`/designs/${revision.designId}/revisions/${revision.number}`}>
         {revision.designName}, revision {revision.number}: {revision.name} ({revision.state})
       </a>,
     ],
