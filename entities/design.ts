@@ -23,7 +23,6 @@ export const Design = defineEntity({
     ...base(),
     workshop: () => p.manyToOne(Workshop),
     name: p.string().length(80),
-    status: p.enum(['draft', 'ready']).default('draft'),
     /** Goes up by one at every change; a writer must name the one it began from. */
     version: p.integer().default(1),
     parameters: p.json<DesignParameters>(),

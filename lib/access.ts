@@ -60,6 +60,10 @@ const may = {
 export const mayEdit = (role: Role): boolean => may[role].edit;
 export const mayRead = (role: Role): boolean => may[role].read;
 export const mayManagePeople = (role: Role): boolean => may[role].people;
+/** May this role say that a revision is the one to cut, or no longer? */
+export const mayRelease = (role: Role): boolean => may[role].release;
+/** May this role release in spite of a check that fails? */
+export const mayWaive = (role: Role): boolean => may[role].waive;
 export const mayReadRecord = (role: Role): boolean => may[role].record;
 export const mayDownload = (role: Role): boolean => may[role].download;
 /** May this role ask for cutting, answer questions about it, and cancel it? */

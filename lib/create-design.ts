@@ -1,6 +1,6 @@
 import 'server-only';
 import { randomUUID } from 'node:crypto';
-import { Design, User, Workshop } from '@/entities';
+import { Design, PARAMETERS_FORMAT, User, Workshop } from '@/entities';
 import { defaultDesign } from '@/geometry';
 import { mayEdit, requireMember } from './access';
 import { inWorkshop } from './db';
@@ -8,6 +8,7 @@ import { toRecord } from './design-record';
 import { badInput } from './errors';
 import { assessDesign } from './kernel/kernel';
 import { addRecord } from './record';
+import { keepVersion } from './revisions/keep-version';
 import { createDesignSchema, type DesignRecord } from './schemas/api';
 
 /** Makes a design in the viewer's workshop, from the one given or the kernel's default. */
@@ -27,17 +28,20 @@ export async function createDesign(input: unknown): Promise<DesignRecord> {
       parameters: design,
       kernel,
       checks,
+      version: 1,
+      parametersFormat: PARAMETERS_FORMAT,
       createdBy: person,
       updatedBy: person,
       createdAt: new Date(),
       updatedAt: new Date(),
     });
+    keepVersion(tx, stored);
     addRecord(tx, viewer, {
       what: 'design-created',
       subject: stored.id,
       detail: { name, kernel, checks },
     });
     await tx.flush();
-    return toRecord(stored, viewer);
+    return toRecord(tx, stored, viewer);
   });
 }

@@ -20,10 +20,12 @@ export function hashedFiles(
     name,
     owner,
     number: id.slice(0, 8).toUpperCase(),
-    revision: String(version),
+    revision: `v${version}`,
     issued: updatedAt,
     creator: updatedBy.name,
     approved: '',
+    status: 'Draft, not released',
+    waivers: [],
   });
 }
 

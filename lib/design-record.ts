@@ -1,9 +1,10 @@
 import 'server-only';
-import type { Loaded } from '@mikro-orm/postgresql';
+import type { EntityManager, Loaded } from '@mikro-orm/postgresql';
 import { PARAMETERS_FORMAT, type Design as StoredDesign } from '@/entities';
 import { checkDesign, type Design } from '@/geometry';
 import { mayEdit, type Viewer } from './access';
-import type { DesignRecord, DesignSummary } from './schemas/api';
+import { designState, revisionsOf } from './revisions/design-state';
+import type { DesignRecord } from './schemas/api';
 
 type WithPerson = Loaded<StoredDesign, 'updatedBy'>;
 
@@ -17,25 +18,22 @@ export function readParameters(stored: StoredDesign): Design {
   return checkDesign(stored.parameters);
 }
 
-/** What the list has of it. */
-function toSummary(stored: WithPerson): DesignSummary {
-  const { id, name, status, version, checks, updatedBy } = stored;
+/** All of a design, as this person may see it. */
+export async function toRecord(
+  tx: EntityManager,
+  stored: WithPerson,
+  viewer: Viewer,
+): Promise<DesignRecord> {
+  const { id, name, version, checks, updatedBy } = stored;
   return {
     id,
     name,
-    status,
+    state: designState(version, (await revisionsOf(tx, [id])).get(id) ?? []),
     version,
     laws: stored.parameters.sections.map((section) => section.law),
     checks,
     updatedAt: stored.updatedAt.toISOString(),
     updatedBy: { id: updatedBy.id, name: updatedBy.name },
-  };
-}
-
-/** All of a design, as this person may see it. */
-export function toRecord(stored: WithPerson, viewer: Viewer): DesignRecord {
-  return {
-    ...toSummary(stored),
     design: readParameters(stored),
     kernel: stored.kernel,
     createdAt: stored.createdAt.toISOString(),

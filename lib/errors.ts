@@ -34,6 +34,7 @@ const statuses: Record<ApiErrorCode, number> = {
   'not-found': 404,
   conflict: 409,
   'checks-fail': 422,
+  withdrawn: 410,
   'too-many': 429,
   unavailable: 503,
   internal: 500,

@@ -3,24 +3,23 @@ import { dialOf } from '@/geometry/dial/dial';
 import { DialError } from '@/geometry/dial/settings';
 import { slugOf } from '@/geometry/files';
 import { mayDownload, requireMember } from './access';
+import { findCutSource } from './cut-source';
 import { inWorkshop } from './db';
 import { badInput, notFound, RequestError } from './errors';
 import { sketchesPdf } from './kernel/drawing-pdf';
 import { hashOf, type HashedFile } from './kernel/hashed-file';
-import { derivePlates } from './kernel/kernel';
-import { findDesign } from './queries';
 import { addRecord } from './record';
 import { dialQuerySchema } from './schemas/dial';
 
-/** A dial of the saved version as PDF, true size, with a row in the record. @throws RequestError */
+/** A dial of the saved version, or of the released revision for who may not edit, as PDF, true size, with a row in the record. @throws RequestError */
 export async function makeDial(id: string, query: unknown): Promise<HashedFile> {
   const viewer = await requireMember(mayDownload);
-  const stored = await findDesign(viewer, id);
-  if (!stored) throw notFound();
+  const source = await findCutSource(viewer, id);
+  if (!source) throw notFound();
   const parsed = dialQuerySchema.safeParse(query);
   if (!parsed.success) throw badInput(parsed.error);
   const { section, ...settings } = parsed.data;
-  const derived = await derivePlates(stored.design);
+  const { derived } = source;
   const result = derived.sections[section];
   if (!result) {
     throw new RequestError('bad-input', `Section: there is no section ${section + 1} in it.`, {
@@ -29,21 +28,22 @@ export async function makeDial(id: string, query: unknown): Promise<HashedFile> 
   }
   try {
     const body = await sketchesPdf([dialOf(result, derived.turn, settings)], {
-      title: `Dial of ${stored.name}`,
+      title: `Dial of ${source.name}`,
       author: viewer.workshopName,
-      issued: new Date(stored.updatedAt),
+      issued: source.issued,
     });
     const sha256 = hashOf(body);
-    const name = `${slugOf(stored.name)}_dial-${settings.quantity}.pdf`;
+    const name = `${slugOf(source.name)}_dial-${settings.quantity}.pdf`;
     await inWorkshop(viewer, (tx) => {
       addRecord(tx, viewer, {
         what: 'file-downloaded',
         subject: id,
+        ...(source.revisionId && { revision: source.revisionId }),
         detail: {
           file: name,
           sha256,
           bytes: body.byteLength,
-          version: stored.version,
+          version: source.version,
           settings,
         },
       });

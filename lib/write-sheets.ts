@@ -2,11 +2,10 @@ import 'server-only';
 import { machineOf, type MachineValues } from '@/geometry/cutting/shop-parameters';
 import type { Machine } from '@/geometry/cutting/machine';
 import { mayDownload, requireMember, type Viewer } from './access';
+import { findCutSource } from './cut-source';
 import { inWorkshop } from './db';
 import { badInput, notFound, RequestError } from './errors';
 import type { HashedFile } from './kernel/hashed-file';
-import { derivePlates } from './kernel/kernel';
-import { findDesign } from './queries';
 import { addRecord } from './record';
 import { writeSheetsSchema } from './schemas/sheets';
 import { sheetAlone, sheetBundle, sheetFiles } from './sheet-files';
@@ -40,21 +39,21 @@ async function machineFor(viewer: Viewer, asked: Asked['machine']): Promise<Mach
  */
 export async function writeSheets(id: string, input: unknown): Promise<HashedFile> {
   const viewer = await requireMember(mayDownload);
-  const stored = await findDesign(viewer, id);
-  if (!stored) throw notFound();
+  const source = await findCutSource(viewer, id);
+  if (!source) throw notFound();
   const parsed = writeSheetsSchema.safeParse(input);
   if (!parsed.success) throw badInput(parsed.error);
   const { version, machine: named, only, ...rest } = parsed.data;
-  if (stored.version !== version) {
+  if (source.version !== version) {
     throw new RequestError(
       'conflict',
-      `Version: this layout is of ${version}, but ${stored.updatedBy.name} has saved version ${stored.version} since; lay it out anew.`,
-      { field: 'version', current: stored },
+      `Version: this layout is of ${version}, but ${source.by} has made it version ${source.version} since; lay it out anew.`,
+      { field: 'version', current: source.current },
     );
   }
   const given = { ...rest, machine: await machineFor(viewer, named) };
-  const derived = await derivePlates(stored.design);
-  const names = { design: stored.name, revision: String(version) };
+  const { derived } = source;
+  const names = { design: source.name, revision: source.revision };
   const made = only
     ? sheetAlone(derived, names, given, only)
     : sheetBundle(names, given.kerf, sheetFiles(derived, names, given));
@@ -67,6 +66,7 @@ export async function writeSheets(id: string, input: unknown): Promise<HashedFil
     addRecord(tx, viewer, {
       what: 'file-downloaded',
       subject: id,
+      ...(source.revisionId && { revision: source.revisionId }),
       detail: {
         file: made.name,
         sha256: made.sha256,

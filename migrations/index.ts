@@ -5,6 +5,7 @@ import { Migration004Revisions } from './004-revisions';
 import { Migration005Orders } from './005-orders';
 import { Migration006Walls } from './006-walls';
 import { Migration007Changes } from './007-changes';
+import { Migration008StateByRevision } from './008-state-by-revision';
 
 /** Every migration, oldest first. */
 export const migrationsList = [
@@ -15,4 +16,5 @@ export const migrationsList = [
   { name: '005-orders', class: Migration005Orders },
   { name: '006-walls', class: Migration006Walls },
   { name: '007-changes', class: Migration007Changes },
+  { name: '008-state-by-revision', class: Migration008StateByRevision },
 ];

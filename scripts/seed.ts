@@ -8,7 +8,15 @@ import { randomBytes, randomUUID } from 'node:crypto';
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { MikroORM, type EntityManager } from '@mikro-orm/postgresql';
-import { Design, Membership, RecordEntry, ShopItem, User, Workshop } from '../entities';
+import {
+  Design,
+  PARAMETERS_FORMAT,
+  Membership,
+  RecordEntry,
+  ShopItem,
+  User,
+  Workshop,
+} from '../entities';
 import { checkDesign, type Parameter } from '../geometry';
 import {
   checkMachine,
@@ -21,7 +29,9 @@ import { deriveDesign } from '../lib/kernel/derive-design';
 import { hashPassword } from '../lib/password';
 import type { Role } from '../lib/schemas/api';
 import config from '../mikro-orm.config';
+import { keepVersion } from '../lib/revisions/keep-version';
 import { addOrders } from './seed-orders';
+import { addRevisions } from './seed-revisions';
 
 const demo: { workshop: string; people: { name: string; email: string; role: Role }[] }[] = [
   {
@@ -72,7 +82,8 @@ function addDesigns(em: EntityManager, workshop: Workshop, builder: User): void 
     const times = { createdAt: now, updatedAt: now };
     const id = randomUUID();
     const made = { id, workshop, name, parameters, kernel, checks, ...people, ...times };
-    em.create(Design, made);
+    const format = { version: 1, parametersFormat: PARAMETERS_FORMAT };
+    keepVersion(em, em.create(Design, { ...made, ...format }));
     em.create(RecordEntry, {
       workshop,
       who: builder,
@@ -173,7 +184,10 @@ async function seed(em: EntityManager, signInsFile: string): Promise<boolean> {
   }
   // What is ordered is found among what is stored.
   await em.flush();
-  for (const workshop of await em.find(Workshop, {})) await addOrders(em, workshop);
+  for (const workshop of await em.find(Workshop, {})) {
+    await addRevisions(em, workshop);
+    await addOrders(em, workshop);
+  }
   // Before the commit: passwords that were lost would leave a demo nobody can enter.
   writeFileSync(signInsFile, JSON.stringify(signIns, null, 2), { mode: 0o600 });
   return true;

@@ -4,7 +4,6 @@ import {
   designRecordSchema,
   type CreateDesign,
   type DesignRecord,
-  type DesignStatus,
   type SaveDesign,
 } from '@/lib/schemas/api';
 import { request, send } from './request';
@@ -20,12 +19,6 @@ export const createDesign = (body: CreateDesign): Promise<DesignRecord> =>
 
 export const saveDesign = (id: string, body: SaveDesign): Promise<DesignRecord> =>
   request(designRecordSchema, `/api/designs/${id}`, { method: 'PUT', body });
-
-export const setDesignStatus = (
-  id: string,
-  body: { version: number; status: DesignStatus },
-): Promise<DesignRecord> =>
-  request(designRecordSchema, `/api/designs/${id}/status`, { method: 'PUT', body });
 
 export async function deleteDesign(id: string): Promise<void> {
   await send(`/api/designs/${id}`, { method: 'DELETE' });

@@ -1,16 +1,16 @@
 'use client';
 
-import { useMutation } from '@tanstack/react-query';
-import { useState } from 'react';
+import Link from 'next/link';
 import { Input, Label, TextField } from 'react-aria-components/TextField';
 import { useController, useFormContext } from 'react-hook-form';
-import { loadApi } from '@/components/api/load-api';
 import { Button } from '@/components/ui/button';
+import { buttonClass } from '@/components/ui/button-class';
 import { Notice } from '@/components/ui/notice';
 import { StatusBadge } from '@/components/ui/status-badge';
 import type { Draft } from './draft';
 import { SaveState } from './save-state';
 import type { History } from './use-history';
+import { useNews } from './use-news';
 import type { Saving } from './use-saving';
 
 function NameField() {
@@ -30,26 +30,17 @@ function NameField() {
   );
 }
 
-/** Name, status, where saving stands, and the two things to do with the whole design. */
+/** Name, state, where saving stands, and what there is to do with the whole design. */
 export function DesignBar({ saving, history }: { saving: Saving; history: History }) {
   const { stored, dirty, state, refusal } = saving;
-  const [hint, setHint] = useState<string | null>(null);
-  const next = stored.status === 'ready' ? 'draft' : 'ready';
-  const status = useMutation({
-    mutationFn: async () => {
-      const { setDesignStatus } = await loadApi();
-      return setDesignStatus(stored.id, { version: stored.version, status: next });
-    },
-    onSuccess: saving.adopt,
-  });
-  const trouble = refusal ?? hint ?? status.error?.message;
+  const { state: standing } = useNews(stored);
 
   return (
     <>
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-line px-5 py-2.5 max-wide:px-3">
         <h1 className="sr-only">{stored.name}</h1>
         <NameField />
-        <StatusBadge status={stored.status} />
+        <StatusBadge state={standing} />
         <SaveState saving={saving} />
         <div className="ml-auto flex flex-wrap gap-2">
           <Button look="quiet" isDisabled={!history.canUndo} onPress={history.undo}>
@@ -58,23 +49,12 @@ export function DesignBar({ saving, history }: { saving: Saving; history: Histor
           <Button look="quiet" isDisabled={!history.canRedo} onPress={history.redo}>
             Redo
           </Button>
-          <Button
-            isDisabled={status.isPending}
-            onPress={() => {
-              if (dirty) {
-                setHint('Save first: it is a saved version that is ready to cut or a draft.');
-                return;
-              }
-              setHint(null);
-              status.mutate();
-            }}
-          >
-            {next === 'ready' ? 'Mark ready to cut' : 'Back to draft'}
-          </Button>
+          <Link href={`/designs/${stored.id}/revisions`} className={buttonClass('plain')}>
+            Revisions
+          </Link>
           <Button
             look="action"
             onPress={() => {
-              setHint(null);
               if (dirty) saving.save();
             }}
           >
@@ -82,7 +62,7 @@ export function DesignBar({ saving, history }: { saving: Saving; history: Histor
           </Button>
         </div>
       </div>
-      {trouble && <Notice look="bad">{trouble}</Notice>}
+      {refusal && <Notice look="bad">{refusal}</Notice>}
     </>
   );
 }

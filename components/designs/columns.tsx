@@ -7,7 +7,7 @@ import {
 } from '@tanstack/react-table';
 import Link from 'next/link';
 import { LocalTime } from '@/components/ui/local-time';
-import { StatusBadge } from '@/components/ui/status-badge';
+import { StatusBadge, writtenState } from '@/components/ui/status-badge';
 import type { DesignSummary } from '@/lib/schemas/api';
 import { ChecksCell, checksRank } from './checks-cell';
 import { lawsOf } from './search';
@@ -35,10 +35,11 @@ export const columnsWith = (labels: Record<string, string>) =>
         </Link>
       ),
     }),
-    helper.accessor('status', {
+    helper.accessor((design) => writtenState(design.state), {
+      id: 'status',
       header: 'Status',
       sortFn: 'text',
-      cell: ({ getValue }) => <StatusBadge status={getValue()} />,
+      cell: ({ row }) => <StatusBadge state={row.original.state} />,
     }),
     helper.accessor((design) => checksRank(design.checks), {
       id: 'checks',

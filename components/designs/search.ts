@@ -1,13 +1,15 @@
-import { statusWords } from '@/components/ui/status-badge';
-import type { DesignSummary } from '@/lib/schemas/api';
+import { stateWords, writtenState } from '@/components/ui/status-badge';
+import type { DesignState, DesignSummary } from '@/lib/schemas/api';
 
-export const statusOptions = [
+export type StatusAsked = 'all' | DesignState['kind'];
+
+export const statusOptions: readonly { value: StatusAsked; label: string }[] = [
   { value: 'all', label: 'all' },
-  { value: 'draft', label: statusWords.draft },
-  { value: 'ready', label: statusWords.ready },
-] as const;
-
-export type StatusAsked = (typeof statusOptions)[number]['value'];
+  ...(Object.keys(stateWords) as DesignState['kind'][]).map((kind) => ({
+    value: kind,
+    label: stateWords[kind],
+  })),
+];
 
 /** The laws of a design's sections, each named once. */
 export const lawsOf = ({ laws }: DesignSummary, labels: Record<string, string>): string =>
@@ -23,10 +25,10 @@ export function found(
   const asked = words.trim().toLowerCase();
   return designs.filter(
     (design) =>
-      (status === 'all' || design.status === status) &&
+      (status === 'all' || design.state.kind === status) &&
       [
         design.name,
-        statusWords[design.status],
+        writtenState(design.state),
         lawsOf(design, labels),
         design.updatedBy.name,
       ].some((text) => text.toLowerCase().includes(asked)),

@@ -1,20 +1,36 @@
-import type { DesignStatus } from '@/lib/schemas/api';
+import type { DesignState } from '@/lib/schemas/api';
 
-export const statusWords: Record<DesignStatus, string> = {
+export const stateWords: Record<DesignState['kind'], string> = {
   draft: 'draft',
-  ready: 'ready to cut',
+  'in-review': 'in review',
+  released: 'released',
+  changed: 'changed since release',
+  withdrawn: 'withdrawn',
 };
 
-export function StatusBadge({ status }: { status: DesignStatus }) {
-  const look =
-    status === 'ready'
-      ? 'border-ok text-ok font-semibold'
-      : 'border-edge text-ink-2 border-dashed';
+/** As `released, revision 3`. */
+export function writtenState({ kind, revision }: DesignState): string {
+  if (revision === null) return stateWords[kind];
+  return kind === 'changed'
+    ? `changed since revision ${revision}`
+    : `${stateWords[kind]}, revision ${revision}`;
+}
+
+const looks: Record<DesignState['kind'], string> = {
+  draft: 'border-edge text-ink-2 border-dashed',
+  'in-review': 'border-warn text-ink',
+  released: 'border-ok text-ok font-semibold',
+  changed: 'border-ok text-ink border-dashed',
+  withdrawn: 'border-bad text-bad font-semibold',
+};
+
+/** Where a design stands by its revisions. */
+export function StatusBadge({ state }: { state: DesignState }) {
   return (
     <span
-      className={`inline-block rounded-[3px] border bg-panel px-2 py-0.5 text-small whitespace-nowrap ${look}`}
+      className={`inline-block rounded-[3px] border bg-panel px-2 py-0.5 text-small whitespace-nowrap ${looks[state.kind]}`}
     >
-      {statusWords[status]}
+      {writtenState(state)}
     </span>
   );
 }

@@ -171,10 +171,28 @@ function lawChart(derived: Derived): Mark[] {
   return marks;
 }
 
+/** Lines that there is room for between the views and the cautions. */
+const WAIVER_LINES = 4;
+
+/** What was released in spite of a failing check; the manifest has all of it. */
+function waiverNotes(waivers: readonly string[]): Mark[] {
+  const shown =
+    waivers.length > WAIVER_LINES
+      ? [
+          ...waivers.slice(0, WAIVER_LINES - 1),
+          `and ${waivers.length - WAIVER_LINES + 1} more: see the manifest`,
+        ]
+      : waivers;
+  return shown.map((waiver, i) =>
+    text(25, 147 + 4 * i, fitted(`Released in spite of: ${waiver}`, 120, 2), 2, { bold: true }),
+  );
+}
+
 export function assemblySheet(
   derived: Derived,
   name: string,
   sheet: Omit<Sheet, 'scale' | 'title' | 'material'>,
+  waivers: readonly string[],
 ): Sketch {
   const { parts, placed } = assemblyOf(derived);
   const from = Math.min(...placed.map((place) => place.from));
@@ -196,6 +214,7 @@ export function assemblySheet(
       ...across(at(0), at(derived.stack.depth), y, SIDE.y + SIDE.h + 20, derived.stack.depth),
       ...lawChart(derived),
       ...partsList(parts),
+      ...waiverNotes(waivers),
       text(
         25,
         165,

@@ -16,6 +16,10 @@ export interface DrawingFacts {
   readonly issued: string;
   readonly creator: string;
   readonly approved: string;
+  /** May it be cut? In words: `Draft, not released`. */
+  readonly status: string;
+  /** What was released in spite of a failing check, and why. */
+  readonly waivers: readonly string[];
   /** What a sheet material is called. */
   readonly materialOf: (material: CutPart['material']) => string;
 }
@@ -34,6 +38,7 @@ export function drawingOf(derived: Derived, facts: DrawingFacts): Sketch[] {
     creator: facts.creator,
     approved: facts.approved,
     revision: facts.revision,
+    status: facts.status,
     sheet: `${index} / ${total}`,
     documentType,
     finish,
@@ -41,7 +46,7 @@ export function drawingOf(derived: Derived, facts: DrawingFacts): Sketch[] {
     projection: derived.design.projection,
   });
   return [
-    assemblySheet(derived, facts.name, common(1, 'Assembly drawing')),
+    assemblySheet(derived, facts.name, common(1, 'Assembly drawing'), facts.waivers),
     ...cut.map((part, i) =>
       partSheet(
         derived,

@@ -22,6 +22,8 @@ export interface Sheet {
   readonly finish: string;
   readonly tolerances: string;
   readonly revision: string;
+  /** ISO 7200 calls it document status. */
+  readonly status: string;
   readonly projection: 'first' | 'third';
 }
 
@@ -51,7 +53,7 @@ function projectionSymbol(projection: Sheet['projection'], x: number, y: number)
 /** The revision table, over the title block: what is on this sheet. */
 export function revisionTable(
   paper: Paper,
-  { revision, issued, creator, approved }: Sheet,
+  { revision, issued, creator, approved, status }: Sheet,
 ): Mark[] {
   const { x, y } = blockCorner(paper);
   const [w, h] = [BLOCK.w, 5];
@@ -59,8 +61,9 @@ export function revisionTable(
   const columns: [number, string, string][] = [
     [0, 'Rev.', revision],
     [20, 'Date', issued],
-    [60, 'Issued by', creator],
-    [110, 'Approved by', approved],
+    [45, 'Issued by', creator],
+    [90, 'Approved by', approved],
+    [135, 'Status', status],
   ];
   return [
     box(x, top, w, 2 * h, NARROW),

@@ -7,7 +7,7 @@ import { zipOf } from './zip';
 
 /** What the files hold, for a person and for a program. */
 function manifestOf(
-  { name, revision }: FileNames,
+  { name, revision, status, waivers, approved }: FileNames,
   derived: Derived,
   files: readonly HashedFile[],
 ): string {
@@ -16,6 +16,9 @@ function manifestOf(
     {
       design: name,
       revision,
+      status,
+      ...(approved && { approved }),
+      ...(waivers.length > 0 && { releasedInSpiteOf: waivers }),
       kernel: derived.kernel,
       units: 'mm',
       kerf: 'nominal: no kerf is added or taken off',

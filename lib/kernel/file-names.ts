@@ -11,4 +11,8 @@ export interface FileNames {
   readonly issued: string;
   readonly creator: string;
   readonly approved: string;
+  /** May it be cut? In words: `Draft, not released`. */
+  readonly status: string;
+  /** What was released in spite of a failing check, and why: one sentence each. */
+  readonly waivers: readonly string[];
 }

@@ -2,18 +2,22 @@
 
 import { z } from 'zod';
 import { designSchema } from './design';
-import { designFileSchema, filePartSchema } from './file-part';
 import { orderSchema } from './order';
+import { revisionSchema } from './revision';
 import { shopItemSchema } from './shop-item';
 
 export const roles = ['owner', 'builder', 'machinist'] as const;
 export const roleSchema = z.enum(roles);
 export type Role = z.infer<typeof roleSchema>;
 
-/** `ready` is the builder's word that this may be cut; any change puts it back to `draft`. */
-export const designStatuses = ['draft', 'ready'] as const;
-export const designStatusSchema = z.enum(designStatuses);
-export type DesignStatus = z.infer<typeof designStatusSchema>;
+/** Where a design stands by its revisions; `changed` is saved since the one that is released. */
+export const designStates = ['draft', 'in-review', 'released', 'changed', 'withdrawn'] as const;
+export const designStateSchema = z.object({
+  kind: z.enum(designStates),
+  /** Number of the revision that says so. */
+  revision: z.number().int().nullable(),
+});
+export type DesignState = z.infer<typeof designStateSchema>;
 
 export const designNameSchema = z
   .string()
@@ -27,7 +31,7 @@ const personSchema = z.object({ id: z.uuid(), name: z.string() });
 export const designSummarySchema = z.object({
   id: z.uuid(),
   name: z.string(),
-  status: designStatusSchema,
+  state: designStateSchema,
   version: z.number().int(),
   /** Laws of the sections in order, as `frequency`. */
   laws: z.array(z.string()),
@@ -65,18 +69,8 @@ export const saveDesignSchema = z.object({
 });
 export type SaveDesign = z.input<typeof saveDesignSchema>;
 
-export const setStatusSchema = z.object({
-  version: z.number().int().positive(),
-  status: designStatusSchema,
-});
-
-export type { FilePart } from './file-part';
-export const designFilesSchema = z.object({
-  version: z.number().int(),
-  files: z.array(designFileSchema),
-  parts: z.array(filePartSchema),
-});
-export type DesignFiles = z.infer<typeof designFilesSchema>;
+export type { FilePart, DesignFiles } from './file-part';
+export { designFilesSchema } from './file-part';
 
 export const errorCodes = [
   'bad-input',
@@ -85,6 +79,7 @@ export const errorCodes = [
   'not-found',
   'conflict',
   'checks-fail',
+  'withdrawn',
   'too-many',
   'unavailable',
   'internal',
@@ -100,7 +95,9 @@ export const apiErrorSchema = z.object({
     field: z.string().optional(),
   }),
   /** With `conflict`: what is stored now. */
-  current: z.union([designRecordSchema, shopItemSchema, orderSchema]).optional(),
+  current: z
+    .union([designRecordSchema, shopItemSchema, orderSchema, revisionSchema])
+    .optional(),
 });
 export type ApiErrorCode = (typeof errorCodes)[number];
 export type Current = NonNullable<z.infer<typeof apiErrorSchema>['current']>;

@@ -32,3 +32,10 @@ export const filePartSchema = z.object({
   }),
 });
 export type FilePart = z.infer<typeof filePartSchema>;
+
+export const designFilesSchema = z.object({
+  version: z.number().int(),
+  files: z.array(designFileSchema),
+  parts: z.array(filePartSchema),
+});
+export type DesignFiles = z.infer<typeof designFilesSchema>;

@@ -1,6 +1,5 @@
 import { z } from 'zod';
-import { designFilesSchema } from './api';
-import { designSchema } from './design';
+import { designFilesSchema } from './file-part';
 
 export const revisionStates = [
   'draft',
@@ -122,6 +121,3 @@ export type Restore = z.input<typeof restoreSchema>;
 
 /** A revision's files, as they are kept. */
 export const revisionFilesSchema = designFilesSchema;
-
-/** What two states of a design are compared by. */
-export const comparedSchema = z.object({ name: z.string(), design: designSchema });

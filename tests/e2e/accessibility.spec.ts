@@ -49,6 +49,9 @@ for (const width of [1440, 390]) {
     await check(page, 'design, builder');
     await page.getByRole('textbox', { name: 'Air gap', exact: true }).fill('90 mm');
     await check(page, 'design with a field to put right');
+    await page.goto('/record');
+    await expect(page.getByRole('heading', { name: 'Record' })).toBeVisible();
+    await check(page, 'record');
     await page.context().clearCookies();
 
     await signIn(page, machinist);

@@ -1,11 +1,11 @@
 import { beforeAll, describe, expect, test } from 'vitest';
 import { DELETE, GET, PUT } from '@/app/api/designs/[id]/route';
 import { GET as FILES } from '@/app/api/designs/[id]/files/route';
-import { PUT as PUT_STATUS } from '@/app/api/designs/[id]/status/route';
+import { POST as NAME } from '@/app/api/designs/[id]/revisions/route';
 import { POST } from '@/app/api/designs/route';
 import { defaultDesign } from '@/geometry';
 import { call, refusal } from '../support/call';
-import { Cast, storedDesign } from '../support/cast';
+import { Cast } from '../support/cast';
 
 let cast: Cast;
 
@@ -28,7 +28,7 @@ describe('an id that is none', () => {
       await call(FILES, { id }),
       await call(DELETE, { id }, { method: 'DELETE' }),
       await call(PUT, { id }, { method: 'PUT', body }),
-      await call(PUT_STATUS, { id }, { method: 'PUT', body: { version: 1, status: 'ready' } }),
+      await call(NAME, { id }, { method: 'POST', body: { version: 1, name: 'First' } }),
     ];
     expect(answers.map(({ status }) => status)).toEqual([404, 404, 404, 404, 404]);
   });
@@ -92,15 +92,14 @@ describe('a value that is not taken is named with its field and range', () => {
     expect(error.message).toContain(words);
   });
 
-  test('so is a version or a status', async () => {
+  test('so is a version or a name of a revision', async () => {
     const id = await cast.design();
     cast.ask('builder');
-    const put = async (body: unknown) =>
-      refusal(await call(PUT_STATUS, { id }, { method: 'PUT', body }));
-    expect(await put({ version: '1', status: 'ready' })).toMatchObject({ field: 'version' });
-    expect(await put({ version: 1, status: 'cut' })).toMatchObject({ field: 'status' });
-    expect(await put([])).toMatchObject({ code: 'bad-input' });
-    expect((await storedDesign(id)).status).toBe('draft');
+    const name = async (body: unknown) =>
+      refusal(await call(NAME, { id }, { method: 'POST', body }));
+    expect(await name({ version: '1', name: 'First' })).toMatchObject({ field: 'version' });
+    expect(await name({ version: 1, name: ' ' })).toMatchObject({ field: 'name' });
+    expect(await name([])).toMatchObject({ code: 'bad-input' });
   });
 });
 

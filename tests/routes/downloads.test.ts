@@ -19,9 +19,9 @@ const filesOf = async (id: string) =>
 const sha256 = (bytes: ArrayBuffer) =>
   createHash('sha256').update(Buffer.from(bytes)).digest('hex');
 
-test('a machinist gets every file, byte for byte as listed, and the record has its hash', async () => {
+test('a builder gets every file, byte for byte as listed, and the record has its hash', async () => {
   const id = await cast.design();
-  cast.ask('machinist');
+  cast.ask('builder');
   const files = await filesOf(id);
   expect(new Set(files.map(({ kind }) => kind))).toContain('dxf');
   for (const { name, sha256: listed, bytes } of files) {
@@ -39,12 +39,12 @@ test('a machinist gets every file, byte for byte as listed, and the record has i
   expect(rows.map(({ detail }) => [detail.file, detail.sha256])).toEqual(
     files.map(({ name, sha256: listed }) => [name, listed]),
   );
-  expect(rows.every(({ who }) => who.id === cast.person('machinist').id)).toBe(true);
+  expect(rows.every(({ who }) => who.id === cast.person('builder').id)).toBe(true);
 });
 
 test('every cut part is listed with its own files, as many and as large as they say', async () => {
   const id = await cast.design();
-  cast.ask('machinist');
+  cast.ask('builder');
   const { files, parts } = designFilesSchema.parse(await (await call(LIST, { id })).json());
   expect(parts.map(({ label }) => label)).toContain('Rotor plate, section 1');
   for (const { stem, quantity, thickness, picture } of parts) {
@@ -70,7 +70,7 @@ test('who has it already gets no second copy, and the record says so all the sam
 
 test('the ZIP holds every other file, and a manifest with its hash, part and quantity', async () => {
   const id = await cast.design();
-  cast.ask('machinist');
+  cast.ask('builder');
   const files = await filesOf(id);
   const zip = files.find(({ kind }) => kind === 'zip')!;
   const response = await call(DOWNLOAD, { id, name: zip.name });
@@ -124,7 +124,7 @@ test('a design without plates has no files, and says why', async () => {
   Object.assign(design.sections[0]!, { targetKind: 'terminals', maxCapacitance: 40e-9 });
   design.largestRadius = 20;
   const id = await cast.design(design);
-  cast.ask('machinist');
+  cast.ask('builder');
   const answers = [await call(LIST, { id }), await call(DOWNLOAD, { id, name: 'all.dxf' })];
   for (const answer of answers) {
     expect(answer.status).toBe(422);

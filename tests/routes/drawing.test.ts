@@ -16,7 +16,7 @@ let folder: string;
 beforeAll(async () => {
   const cast = await Cast.gather();
   const id = await cast.design();
-  cast.ask('machinist');
+  cast.ask('builder');
   const { files } = designFilesSchema.parse(await (await call(LIST, { id })).json());
   const { name } = files.find(({ kind }) => kind === 'pdf')!;
   bytes = Buffer.from(await (await call(DOWNLOAD, { id, name })).arrayBuffer());

@@ -11,12 +11,20 @@ import { defaultDesign, derive } from '@/geometry';
 import { cutFiles } from '@/geometry/files';
 import { machineParameters } from '@/geometry/cutting/shop-parameters';
 import { partsOf } from '@/geometry/parts/assembly';
-import { Attachment, CutOrder, OrderMessage, RecordEntry, User, Workshop } from '@/entities';
+import {
+  Attachment,
+  CutOrder,
+  OrderMessage,
+  RecordEntry,
+  RevisionFile,
+  User,
+  Workshop,
+} from '@/entities';
 import type { Order } from '@/lib/schemas/order';
 import { entityManager } from '../support/as-owner';
 import { call } from '../support/call';
 import { addMachine, addSheet, formOf, orderIs, termsOf } from '../support/orders';
-import { revisionOf } from '../support/released';
+import { revisionOf, type RevisionState } from '../support/released';
 import { rowLayout } from '../support/row-layout';
 import { callers, Cast, storedDesign, type Caller } from '../support/cast';
 
@@ -45,6 +53,8 @@ function answers(
 }
 
 const reads = answers(200, 200, 200, 404, 401, 401);
+/** What is saved and not released is not for machinists. */
+const draftReads = answers(200, 200, 404, 404, 401, 401);
 const writes = answers(200, 200, 403, 404, 401, 401);
 const change = { version: 1, name: 'Renamed', design: defaultDesign() };
 
@@ -75,16 +85,13 @@ const routes: Record<string, Record<string, Rule>> = {
     POST: { status: answers(201, 201, 403, 201, 401, 401), body: { name: 'New' } },
   },
   'app/api/designs/[id]/route.ts': {
-    GET: { status: reads },
+    GET: { status: draftReads },
     PUT: { status: writes, body: change },
     DELETE: { status: answers(204, 204, 403, 404, 401, 401) },
   },
-  'app/api/designs/[id]/status/route.ts': {
-    PUT: { status: writes, body: { version: 1, status: 'ready' } },
-  },
-  'app/api/designs/[id]/dial/route.ts': { GET: { status: reads, query: dial } },
-  'app/api/designs/[id]/files/route.ts': { GET: { status: reads } },
-  'app/api/designs/[id]/files/[name]/route.ts': { GET: { status: reads } },
+  'app/api/designs/[id]/dial/route.ts': { GET: { status: draftReads, query: dial } },
+  'app/api/designs/[id]/files/route.ts': { GET: { status: draftReads } },
+  'app/api/designs/[id]/files/[name]/route.ts': { GET: { status: draftReads } },
 };
 
 const machine = {
@@ -132,7 +139,7 @@ const sheets = {
   ),
 };
 Object.assign(routes, {
-  'app/api/designs/[id]/sheets/route.ts': { POST: { status: reads, body: sheets } },
+  'app/api/designs/[id]/sheets/route.ts': { POST: { status: draftReads, body: sheets } },
 } satisfies typeof routes);
 
 /** Somebody who is a member of ours for one call. */
@@ -291,6 +298,39 @@ Object.assign(routes, {
   },
 } satisfies typeof routes);
 
+/** A revision of ours, on its way as far as `state`. */
+const ofARevision = (state: RevisionState) => async (people: Cast) => {
+  const id = await revisionOf(people, await people.design(), 1, state);
+  const em = await entityManager();
+  const file = await em.findOneOrFail(RevisionFile, { revision: id, position: 0 });
+  return { id, name: file.name };
+};
+const ofReleased = ofARevision('released');
+Object.assign(routes, {
+  'app/api/designs/[id]/history/route.ts': { GET: { status: draftReads } },
+  'app/api/designs/[id]/revisions/route.ts': {
+    POST: {
+      status: answers(201, 201, 403, 404, 401, 401),
+      body: { version: 1, name: 'First' },
+    },
+  },
+  'app/api/designs/[id]/restore/route.ts': {
+    POST: { status: writes, body: { version: 1, from: { version: 1 } } },
+  },
+  'app/api/revisions/[id]/route.ts': { GET: { params: ofReleased, status: reads } },
+  'app/api/revisions/[id]/state/route.ts': {
+    PUT: {
+      params: ofReleased,
+      status: writes,
+      body: { to: 'withdrawn', from: 'released', reason: 'Too small' },
+    },
+  },
+  'app/api/revisions/[id]/files/route.ts': { GET: { params: ofReleased, status: reads } },
+  'app/api/revisions/[id]/files/[name]/route.ts': {
+    GET: { params: ofReleased, status: reads },
+  },
+} satisfies typeof routes);
+
 const actions: Record<string, readonly string[]> = {
   // Open to everybody: it makes a workshop of one's own. tests/routes/sign-up.test.ts
   'app/(account)/sign-up/actions.ts': ['signUpAction'],
@@ -380,6 +420,6 @@ test('an outsider sees none of our designs in the list', async () => {
   const { GET } = await import('@/app/api/designs/route');
   cast.ask('outsider');
   expect(await (await call(GET, {})).text()).not.toContain(id);
-  cast.ask('machinist');
+  cast.ask('builder');
   expect(await (await call(GET, {})).text()).toContain(id);
 });

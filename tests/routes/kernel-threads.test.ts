@@ -11,6 +11,8 @@ const names = {
   issued: '2026-03-01T12:00:00.000Z',
   creator: 'Test builder',
   approved: '',
+  status: 'Draft, not released',
+  waivers: [],
 };
 
 afterAll(() => {

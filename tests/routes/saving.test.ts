@@ -1,6 +1,5 @@
 import { beforeAll, describe, expect, test } from 'vitest';
 import { DELETE, GET, PUT } from '@/app/api/designs/[id]/route';
-import { PUT as PUT_STATUS } from '@/app/api/designs/[id]/status/route';
 import { GET as LIST, POST } from '@/app/api/designs/route';
 import { Design as StoredDesign } from '@/entities';
 import { defaultDesign, derive, KERNEL_VERSION, type Design } from '@/geometry';
@@ -31,8 +30,6 @@ function impossible(): Design {
 
 const save = (id: string, version: number, design: Design, name = 'Bench section') =>
   call(PUT, { id }, { method: 'PUT', body: { version, name, design } });
-const setStatus = (id: string, version: number, status: string) =>
-  call(PUT_STATUS, { id }, { method: 'PUT', body: { version, status } });
 const read = async (response: Response) => designRecordSchema.parse(await response.json());
 
 describe('creating', () => {
@@ -42,7 +39,12 @@ describe('creating', () => {
     const made = await read(response);
     const derivation = derive(defaultDesign());
     const findings = derivation.ok ? derivation.derived.findings : derivation.findings;
-    expect(made).toMatchObject({ name: 'First', status: 'draft', version: 1, mayEdit: true });
+    expect(made).toMatchObject({
+      name: 'First',
+      state: { kind: 'draft', revision: null },
+      version: 1,
+      mayEdit: true,
+    });
     expect(made.design).toEqual(defaultDesign());
     expect(made.kernel).toBe(KERNEL_VERSION);
     expect(made.checks.ok + made.checks.warn + made.checks.fail).toBe(findings.length);
@@ -64,7 +66,11 @@ describe('saving', () => {
     const id = await cast.design();
     cast.ask('owner');
     const saved = await read(await save(id, 1, withGap(0.625), 'Renamed'));
-    expect(saved).toMatchObject({ version: 2, name: 'Renamed', status: 'draft' });
+    expect(saved).toMatchObject({
+      version: 2,
+      name: 'Renamed',
+      state: { kind: 'draft', revision: null },
+    });
     expect(saved.updatedBy.name).toBe(cast.person('owner').name);
     expect((await read(await call(GET, { id }))).design).toEqual(withGap(0.625));
     const [row] = await cast.record(id);
@@ -131,35 +137,6 @@ describe('saving', () => {
   });
 });
 
-describe('setting ready', () => {
-  test('holds until the next change', async () => {
-    const id = await cast.design();
-    cast.ask('builder');
-    const ready = await read(await setStatus(id, 1, 'ready'));
-    expect(ready).toMatchObject({ status: 'ready', version: 2 });
-    const changed = await read(await save(id, 2, withGap(0.55)));
-    expect(changed).toMatchObject({ status: 'draft', version: 3 });
-    const whats = (await cast.record(id)).map(({ what }) => what);
-    expect(whats).toEqual(['design-status-set', 'design-saved']);
-  });
-
-  test('is refused while a check fails', async () => {
-    const id = await cast.design(impossible());
-    cast.ask('owner');
-    const response = await setStatus(id, 1, 'ready');
-    expect(response.status).toBe(422);
-    expect((await refusal(response)).code).toBe('checks-fail');
-    expect((await storedDesign(id)).status).toBe('draft');
-  });
-
-  test('is refused over an older version', async () => {
-    const id = await cast.design();
-    cast.ask('owner');
-    await save(id, 1, withGap(0.7));
-    expect((await setStatus(id, 1, 'ready')).status).toBe(409);
-  });
-});
-
 describe('deleting', () => {
   test('takes it out of sight and keeps the row', async () => {
     const id = await cast.design();
@@ -167,7 +144,6 @@ describe('deleting', () => {
     expect((await call(DELETE, { id }, { method: 'DELETE' })).status).toBe(204);
     expect((await call(GET, { id })).status).toBe(404);
     expect((await save(id, 1, withGap(0.7))).status).toBe(404);
-    expect((await setStatus(id, 1, 'ready')).status).toBe(404);
     expect((await call(DELETE, { id }, { method: 'DELETE' })).status).toBe(404);
     expect(await (await call(LIST, {})).text()).not.toContain(id);
     expect((await storedDesign(id)).deletedAt).toBeInstanceOf(Date);

@@ -42,7 +42,7 @@ let id: string;
 beforeAll(async () => {
   cast = await Cast.gather();
   id = await cast.design();
-  cast.ask('machinist');
+  cast.ask('builder');
 });
 
 const post = (change: object = {}, to = id) =>
@@ -145,7 +145,7 @@ describe('the files', () => {
       what: 'file-downloaded',
       detail: { sha256: sha256(body), kerf: 'compensated', version: 1 },
     });
-    expect(row!.who.id).toBe(cast.person('machinist').id);
+    expect(row!.who.id).toBe(cast.person('builder').id);
     const again = new Uint8Array(await (await post({}, own)).arrayBuffer());
     expect(sha256(again)).toBe(sha256(body));
 
@@ -261,7 +261,7 @@ describe('what has been saved since', () => {
     cast.ask('builder');
     const body = { version: 1, name: 'Renamed since', design: defaultDesign() };
     await call(SAVE_DESIGN, { id: own }, { method: 'PUT', body });
-    cast.ask('machinist');
+    cast.ask('builder');
     const answer = await post({}, own);
     expect(answer.status).toBe(409);
     const said = (await answer.json()) as { current: { version: number; name: string } };
@@ -279,7 +279,7 @@ describe('what has been saved since', () => {
     cast.ask('builder');
     const body = { name: 'Bench laser', version: 1, values: { ...values, kerf: 0.3 } };
     await call(SAVE_ITEM, { kind: 'machines', id: laser }, { method: 'PUT', body });
-    cast.ask('machinist');
+    cast.ask('builder');
     expect((await post({ machine })).status).toBe(409);
     expect((await post({ machine: { ...machine, id: id } })).status).toBe(404);
   });
@@ -289,7 +289,7 @@ test('another workshop finds neither design nor machine', async () => {
   const laser = await cast.item('machine', 'Ours', values);
   cast.ask('outsider');
   expect((await post()).status).toBe(404);
-  cast.ask('machinist');
+  cast.ask('builder');
   expect((await post({ machine: { from: 'workshop', id: laser, version: 1 } })).status).toBe(
     200,
   );

@@ -3,6 +3,7 @@
 import { randomUUID } from 'node:crypto';
 import { encode } from 'next-auth/jwt';
 import {
+  PARAMETERS_FORMAT,
   Design,
   Invitation,
   Membership,
@@ -12,6 +13,7 @@ import {
   Workshop,
 } from '@/entities';
 import { defaultDesign, type Design as Parameters } from '@/geometry';
+import { keepVersion } from '@/lib/revisions/keep-version';
 import { assessmentOf } from '@/lib/kernel/assessment';
 import { deriveDesign } from '@/lib/kernel/derive-design';
 import { makeSecret } from '@/lib/link-secret';
@@ -92,17 +94,20 @@ export class Cast {
     const id = randomUUID();
     const now = new Date();
     const builder = em.getReference(User, this.person('builder').id);
-    em.create(Design, {
+    const design = em.create(Design, {
       id,
       workshop: em.getReference(Workshop, this.workshopId),
       name,
+      version: 1,
       parameters,
+      parametersFormat: PARAMETERS_FORMAT,
       ...assessmentOf(deriveDesign(parameters)),
       createdBy: builder,
       updatedBy: builder,
       createdAt: now,
       updatedAt: now,
     });
+    keepVersion(em, design);
     await em.flush();
     return id;
   }

@@ -32,6 +32,8 @@ const facts = {
   issued: '2026-12-01',
   creator: 'A. Person',
   approved: '',
+  status: 'Draft, not released',
+  waivers: Array.from({ length: 6 }, (_, i) => `Check ${i + 1}: ${'a long reason '.repeat(9)}`),
   materialOf: (material: string) => material,
 };
 

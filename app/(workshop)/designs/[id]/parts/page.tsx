@@ -6,27 +6,26 @@ import { PartsTable } from '@/components/parts/parts-table';
 import { partsOf } from '@/geometry/parts/assembly';
 import { requirePageMember } from '@/lib/access';
 import { describeFailure } from '@/lib/kernel/assessment';
-import { deriveDesign } from '@/lib/kernel/kernel';
-import { findDesign } from '@/lib/queries';
+import { designName, designPage } from '@/lib/design-page';
 
 type Props = { params: Promise<{ id: string }> };
 
 export async function generateMetadata({ params }: Props): Promise<Metadata> {
-  const record = await findDesign(await requirePageMember(), (await params).id);
-  return { title: record ? `Parts of ${record.name}` : 'Nothing here' };
+  const name = await designName(await requirePageMember(), (await params).id);
+  return { title: name === null ? 'Nothing here' : `Parts of ${name}` };
 }
 
 export default async function PartsPage({ params }: Props) {
   const viewer = await requirePageMember();
-  const record = await findDesign(viewer, (await params).id);
-  if (!record) notFound();
-  const derivation = await deriveDesign(record.design);
+  const page = await designPage(viewer, (await params).id);
+  if (!page) notFound();
+  const { record, derivation, revision } = page;
   return (
     <main id="main" className="mx-auto flex w-full max-w-6xl flex-col gap-4 px-5 py-5">
       <h1 className="wide-letter text-title font-semibold">Parts of {record.name}</h1>
       <p>
-        <Link href={`/designs/${record.id}`}>Back to the design</Link>, saved version{' '}
-        {record.version}
+        <Link href={`/designs/${record.id}`}>Back to the design</Link>,{' '}
+        {revision ? `revision ${revision.number}` : `saved version ${record.version}`}
       </p>
       {derivation.ok ? (
         <PartsTable

@@ -1,7 +1,7 @@
 import { readJson } from '@/lib/json-body';
+import { moveRevision } from '@/lib/revisions/move-revision';
 import { json, route } from '@/lib/route';
-import { setDesignStatus } from '@/lib/set-design-status';
 
 export const PUT = route<{ id: string }>(async (request, { id }) =>
-  json(await setDesignStatus(id, await readJson(request))),
+  json(await moveRevision(id, await readJson(request))),
 );
