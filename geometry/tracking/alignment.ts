@@ -174,7 +174,7 @@ export function alignmentOf(derived: Derived): readonly AlignmentStep[] | null {
     words:
       left === null
         ? `Try ${hertz(marks.middle)} (${degrees(angle)}): turning a trimmer a little either way must not raise the output.`
-        : `Try ${hertz(marks.middle)} (${degrees(angle)}): with plates as drawn the oscillator is ${hertz(Math.abs(left))} ${left < 0 ? 'low' : 'high'} here; turning the signal circuit's trimmer a little either way must not raise the output noticeably.`,
+        : `Try ${hertz(marks.middle)} (${degrees(angle)}): with plates as drawn the oscillator is ${formatQuantity(Math.abs(left), 'frequency', 2)} ${left < 0 ? 'low' : 'high'} here; turning the signal circuit's trimmer a little either way must not raise the output noticeably.`,
   });
   return steps;
 }

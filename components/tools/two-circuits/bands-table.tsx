@@ -15,7 +15,11 @@ export function BandsTable({ bands }: { bands: readonly BandResult[] }) {
           <thead>
             <tr className="border-b border-edge">
               {headings.map((title) => (
-                <th key={title} scope="col" className="py-1.5 pl-3 font-medium first:pl-0">
+                <th
+                  key={title}
+                  scope="col"
+                  className="py-1.5 pl-3 font-medium first:pl-0 first:text-left"
+                >
                   {title}
                 </th>
               ))}
@@ -27,21 +31,21 @@ export function BandsTable({ bands }: { bands: readonly BandResult[] }) {
                 <th scope="row" className="py-1.5 text-left font-normal">
                   {name}
                 </th>
-                <td className="whitespace-nowrap">
+                <td className="pl-3 whitespace-nowrap">
                   {hertz(low)} to {hertz(high)}
                 </td>
-                <td className="whitespace-nowrap">
+                <td className="pl-3 whitespace-nowrap">
                   {formatQuantity(setting.coil, 'inductance', 4)}
                 </td>
-                <td className="whitespace-nowrap">
+                <td className="pl-3 whitespace-nowrap">
                   {formatQuantity(setting.trimmer, 'capacitance', 3)}
                 </td>
-                <td className="whitespace-nowrap">
+                <td className="pl-3 whitespace-nowrap">
                   {setting.padder === null
                     ? 'none'
                     : formatQuantity(setting.padder, 'capacitance', 4)}
                 </td>
-                <td className="whitespace-nowrap">{hertz(setting.peak, 3)}</td>
+                <td className="pl-3 whitespace-nowrap">{hertz(setting.peak, 3)}</td>
               </tr>
             ))}
           </tbody>

@@ -128,8 +128,8 @@ function Answer({ answer }: { answer: SettingUpAnswer }) {
           <Figures
             rows={answer.couplings.flatMap(({ section, unscreened, screened, coefficient }) => [
               [`Sections ${section + 1} and ${section + 2}, no screen`, farads(unscreened)],
-              ['with an earthed screen, at most', farads(screened)],
-              ['coefficient as designed', coefficient.toExponential(1)],
+              ['With an earthed screen, at most', farads(screened)],
+              ['Coefficient, as designed', `${Number((100 * coefficient).toPrecision(2))} %`],
             ])}
           />
           <p className="text-small text-ink-2">

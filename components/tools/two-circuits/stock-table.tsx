@@ -17,7 +17,11 @@ export function StockTable({ stock, best }: { stock: PaddedAnswer['stock']; best
           <thead>
             <tr className="border-b border-edge">
               {headings.map((title) => (
-                <th key={title} scope="col" className="py-1.5 pl-3 font-medium first:pl-0">
+                <th
+                  key={title}
+                  scope="col"
+                  className="py-1.5 pl-3 font-medium first:pl-0 first:text-left"
+                >
                   {title}
                 </th>
               ))}
@@ -29,19 +33,19 @@ export function StockTable({ stock, best }: { stock: PaddedAnswer['stock']; best
                 <th scope="row" className="py-1.5 text-left font-normal">
                   {series}
                 </th>
-                <td className="whitespace-nowrap">
+                <td className="pl-3 whitespace-nowrap">
                   {formatQuantity(pair.padder ?? 0, 'capacitance', 3)}
                 </td>
-                <td className="whitespace-nowrap">
+                <td className="pl-3 whitespace-nowrap">
                   {formatQuantity(pair.trimmer, 'capacitance', 4)}
                 </td>
-                <td className="whitespace-nowrap">
+                <td className="pl-3 whitespace-nowrap">
                   {formatQuantity(pair.paddedCoil, 'inductance', 4)}
                 </td>
-                <td className="whitespace-nowrap">
+                <td className="pl-3 whitespace-nowrap">
                   {formatQuantity(Math.abs(peak.error), 'frequency', 3)}
                 </td>
-                <td className="whitespace-nowrap">
+                <td className="pl-3 whitespace-nowrap">
                   {Math.round(100 * (Math.abs(peak.error) / best - 1))} %
                 </td>
               </tr>
