@@ -7,7 +7,7 @@ export { Mail } from './mail';
 export { Membership, mailChoices, type MailChoice } from './membership';
 export { OrderMessage } from './order-message';
 export { PasswordReset } from './password-reset';
-export { RecordEntry, recordVerbs, type RecordVerb } from './record-entry';
+export { RecordEntry, type RecordVerb } from './record-entry';
 export { Revision, type Waiver } from './revision';
 export { RevisionFile } from './revision-file';
 export { ShopItem } from './shop-item';

@@ -3,39 +3,37 @@ import { User } from './user';
 import { Workshop } from './workshop';
 
 /** What can be done, as the record names it. */
-export const recordVerbs = [
-  'workshop-opened',
-  'member-invited',
-  'invitation-withdrawn',
-  'member-joined',
-  'member-role-set',
-  'member-removed',
-  'design-created',
-  'design-saved',
-  'design-restored',
-  'design-status-set',
-  'design-deleted',
-  'revision-named',
-  'review-asked',
-  'review-refused',
-  'revision-released',
-  'revision-superseded',
-  'revision-withdrawn',
-  'file-downloaded',
-  'item-created',
-  'item-saved',
-  'item-deleted',
-  'stock-drawn',
-  'order-placed',
-  'order-changed',
-  'order-begun',
-  'order-returned',
-  'order-answered',
-  'order-remarked',
-  'order-cut',
-  'order-cancelled',
-] as const;
-export type RecordVerb = (typeof recordVerbs)[number];
+export type RecordVerb =
+  | 'workshop-opened'
+  | 'member-invited'
+  | 'invitation-withdrawn'
+  | 'member-joined'
+  | 'member-role-set'
+  | 'member-removed'
+  | 'design-created'
+  | 'design-saved'
+  | 'design-restored'
+  | 'design-status-set'
+  | 'design-deleted'
+  | 'revision-named'
+  | 'review-asked'
+  | 'review-refused'
+  | 'revision-released'
+  | 'revision-superseded'
+  | 'revision-withdrawn'
+  | 'file-downloaded'
+  | 'item-created'
+  | 'item-saved'
+  | 'item-deleted'
+  | 'stock-drawn'
+  | 'order-placed'
+  | 'order-changed'
+  | 'order-begun'
+  | 'order-returned'
+  | 'order-answered'
+  | 'order-remarked'
+  | 'order-cut'
+  | 'order-cancelled';
 
 /** Who did what, in order. The database refuses to change or take away a row. */
 export const RecordEntry = defineEntity({

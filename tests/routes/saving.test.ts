@@ -5,7 +5,7 @@ import { Design as StoredDesign } from '@/entities';
 import { defaultDesign, derive, KERNEL_VERSION, type Design } from '@/geometry';
 import { entityManager } from '../support/as-owner';
 import { apiErrorSchema, designListSchema, designRecordSchema } from '@/lib/schemas/api';
-import { call, refusal } from '../support/call';
+import { call } from '../support/call';
 import { Cast, storedDesign } from '../support/cast';
 
 let cast: Cast;
