@@ -4,13 +4,17 @@ import { useQuery } from '@tanstack/react-query';
 import { designKeys } from '@/components/api/design-keys';
 import { loadApi } from '@/components/api/load-api';
 import { RequestError } from '@/components/api/request-error';
-import type { DesignRecord } from '@/lib/schemas/api';
+import type { DesignRecord, DesignState } from '@/lib/schemas/api';
 
 /** How often an open design is looked at for others' changes, ms. */
 const PERIOD = 10_000;
 
-/** What others did to the open design: a later version, or its end. */
-export function useNews(known: DesignRecord): { later: DesignRecord | null; gone: boolean } {
+/** What others did to the open design: a later version, its end, or where its revisions stand. */
+export function useNews(known: DesignRecord): {
+  later: DesignRecord | null;
+  gone: boolean;
+  state: DesignState;
+} {
   const { data, error } = useQuery({
     queryKey: designKeys.record(known.id),
     queryFn: async () => (await loadApi()).fetchDesign(known.id),
@@ -25,6 +29,7 @@ export function useNews(known: DesignRecord): { later: DesignRecord | null; gone
     (data.version === known.version && data.updatedAt > known.updatedAt);
   return {
     later: changed ? data : null,
+    state: data.version < known.version ? known.state : data.state,
     gone: error instanceof RequestError && error.code === 'not-found',
   };
 }

@@ -35,10 +35,11 @@ export function useRevisionFiles(
 ) {
   return useQuery({
     // A release writes them anew, with its name in the drawing.
-    queryKey: [...revisionKeys.files(id), updatedAt],
+    queryKey: revisionKeys.files(id, updatedAt),
     queryFn: async () => (await loadRevisions()).fetchRevisionFiles(id),
     enabled: wanted,
     ...(first && updatedAt === since && { initialData: first }),
+    staleTime: Infinity,
     retry: false,
   });
 }

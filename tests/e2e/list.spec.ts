@@ -31,7 +31,7 @@ test('designs are found, sorted, duplicated and deleted', async ({ page }) => {
   await expect(head).toHaveAttribute('aria-sort', 'descending');
   await expect(rows.first().getByRole('link')).toHaveText(`${name}, copy`);
 
-  await page.getByLabel('Status').selectOption('ready');
+  await page.getByLabel('Status').selectOption('released');
   await expect(page.getByText('No design fits this search')).toBeVisible();
   await page.getByLabel('Status').selectOption('all');
 

@@ -4,16 +4,14 @@ import { readFileSync } from 'node:fs';
 import AxeBuilder from '@axe-core/playwright';
 import { unzipSync } from 'fflate';
 import { expect, test } from '../support/quiet-test';
-import { ready } from '../support/design-screen';
+import { openReleased } from '../support/design-screen';
 import { machinist, signIn } from '../support/sign-ins';
 
 test.use({ viewport: { width: 390, height: 844 } });
 
 test.beforeEach(async ({ page }) => {
   await signIn(page, machinist);
-  await page.goto('/designs');
-  await page.getByRole('table').getByRole('link').first().click();
-  await ready(page);
+  await openReleased(page);
 });
 
 test('each part has its file first, a picture, sheet, kerf and pieces; all by a glove', async ({

@@ -2,12 +2,12 @@
 
 import { readFileSync } from 'node:fs';
 import { expect, test } from '../support/quiet-test';
-import { makeDesign, ready } from '../support/design-screen';
+import { makeDesign, openReleased } from '../support/design-screen';
 import { builder, machinist, outsider, signIn } from '../support/sign-ins';
 
 test.use({ viewport: { width: 390, height: 844 } });
 
-test('a machinist reads a design and downloads its DXF, and can change nothing', async ({
+test('a machinist reads the released revision and downloads its DXF, and can change nothing', async ({
   page,
 }) => {
   await signIn(page, machinist);
@@ -15,13 +15,19 @@ test('a machinist reads a design and downloads its DXF, and can change nothing',
   for (const name of ['New design', /Duplicate/, /Delete/]) {
     await expect(page.getByRole('button', { name })).toHaveCount(0);
   }
-  await page.getByRole('table').getByRole('link').first().click();
-  await ready(page);
+  const list = page.getByRole('table');
+  // Drafts and what is in review are nothing to them.
+  await expect(list.getByText(/released|withdrawn/).first()).toBeVisible();
+  await expect(list.getByText(/^(draft|in review|changed)/)).toHaveCount(0);
+  await openReleased(page);
+  await expect(page.getByRole('status').filter({ hasText: 'Revision 1' })).toContainText(
+    /released .* by /,
+  );
   await expect(page.getByRole('heading', { name: 'Files to cut from' })).toBeInViewport();
   const parameters = page.locator('main input:not([type=range])');
   // The angle field alone, which turns the view and no design.
   await expect(parameters).toHaveCount(1);
-  for (const name of ['Save', 'Mark ready to cut', 'Back to draft']) {
+  for (const name of ['Save', 'Ask for review', 'Release', 'Withdraw', 'Order cutting']) {
     await expect(page.getByRole('button', { name, exact: true })).toHaveCount(0);
   }
 

@@ -1,6 +1,7 @@
 /** The served build by plain requests: sign-in, session cookie, roles, headers. */
 
 import { expect, test } from '@playwright/test';
+import { RELEASED } from '../support/design-screen';
 import {
   builder,
   machinist,
@@ -78,31 +79,44 @@ test('a machinist downloads and changes nothing; another workshop finds nothing'
     expect((await signInByRequest(context, person)).ok()).toBe(true);
     return context;
   };
-  const [reader, stranger] = [await as(machinist), await as(outsider)];
-  const [design] = await designsOf(reader);
-  const path = `/api/designs/${design!.id}`;
-  const { files } = (await (await reader.get(`${path}/files`)).json()) as {
+  const [writer, reader, stranger] = [
+    await as(builder),
+    await as(machinist),
+    await as(outsider),
+  ];
+  const design = (await designsOf(reader)).find(({ name }) => name === RELEASED)!;
+  const path = `/api/designs/${design.id}`;
+  const { revisions } = (await (await writer.get(`${path}/history`)).json()) as {
+    revisions: { id: string; state: string }[];
+  };
+  const released = revisions.find(({ state }) => state === 'released')!;
+  const frozen = `/api/revisions/${released.id}`;
+  const { files } = (await (await reader.get(`${frozen}/files`)).json()) as {
     files: { name: string; kind: string }[];
   };
   for (const kind of ['dxf', 'svg']) {
     const { name } = files.find((file) => file.kind === kind)!;
-    const file = `${path}/files/${encodeURIComponent(name)}`;
+    const file = `${frozen}/files/${encodeURIComponent(name)}`;
     expect((await reader.get(file)).status()).toBe(200);
     expect((await stranger.get(file)).status()).toBe(404);
   }
-  const stored = (await (await reader.get(path)).json()) as Record<string, unknown>;
-  const data = { version: design!.version, name: 'Changed by hand', design: stored.design };
+  // What is saved is not for those who cut, nor are its saves.
+  for (const draft of [path, `${path}/files`, `${path}/history`]) {
+    expect((await reader.get(draft)).status(), draft).toBe(404);
+  }
+  const stored = (await (await writer.get(path)).json()) as Record<string, unknown>;
+  const data = { version: stored.version, name: 'Changed by hand', design: stored.design };
   for (const [context, status] of [
     [reader, 403],
     [stranger, 404],
   ] as const) {
     expect((await context.put(path, { data })).status()).toBe(status);
     expect((await context.delete(path)).status()).toBe(status);
-    const ready = { version: design!.version, status: 'ready' };
-    expect((await context.put(`${path}/status`, { data: ready })).status()).toBe(status);
+    const move = { to: 'withdrawn', from: 'released', reason: 'by hand' };
+    expect((await context.put(`${frozen}/state`, { data: move })).status()).toBe(status);
   }
-  expect(await (await reader.get(path)).json()).toEqual(stored);
-  await Promise.all([reader.dispose(), stranger.dispose()]);
+  expect(await (await writer.get(path)).json()).toEqual(stored);
+  await Promise.all([writer.dispose(), reader.dispose(), stranger.dispose()]);
 });
 
 test('every page has its own nonce and the headers that keep others out', async ({

@@ -18,6 +18,16 @@ export async function makeDesign(
   await ready(page);
 }
 
+/** A worked design whose first revision the demo workshop has released. */
+export const RELEASED = 'Broadcast section, straight-line frequency';
+
+/** Opens it as somebody who cuts does. */
+export async function openReleased(page: Page): Promise<void> {
+  await page.goto('/designs');
+  await page.getByRole('link', { name: RELEASED, exact: true }).click();
+  await ready(page);
+}
+
 /** The design screen is alive once the stack has drawn its first frame. */
 export async function ready(page: Page): Promise<void> {
   await expect(page.locator('[data-part=stack]')).toHaveAttribute('data-angle', /./);

@@ -5,6 +5,7 @@ import { likelyPair, titleOfState } from '@/components/revisions/state-pair';
 import { requirePageMember } from '@/lib/access';
 import { findDesign } from '@/lib/queries';
 import { historyOf, stateOf } from '@/lib/revisions/queries';
+import type { History } from '@/lib/schemas/revision';
 
 interface Props {
   params: Promise<{ id: string }>;
@@ -13,8 +14,15 @@ interface Props {
 
 export const metadata: Metadata = { title: 'Compare two states' };
 
-const word = (asked: string | string[] | undefined, otherwise: string): string =>
-  typeof asked === 'string' ? asked : otherwise;
+/** The state that is asked for; the version that is saved goes by one name. */
+function asState(
+  asked: string | string[] | undefined,
+  otherwise: string,
+  { versions }: History,
+): string {
+  if (typeof asked !== 'string') return otherwise;
+  return asked === `v${versions[0]?.version}` ? 'draft' : asked;
+}
 
 export default async function ComparePage({ params, searchParams }: Props) {
   const viewer = await requirePageMember();
@@ -24,7 +32,10 @@ export default async function ComparePage({ params, searchParams }: Props) {
   if (!history) notFound();
   const asked = await searchParams;
   const likely = likelyPair(history);
-  const pair = { a: word(asked.a, likely.a), b: word(asked.b, likely.b) };
+  const pair = {
+    a: asState(asked.a, likely.a, history),
+    b: asState(asked.b, likely.b, history),
+  };
   const [a, b] = await Promise.all([stateOf(viewer, id, pair.a), stateOf(viewer, id, pair.b)]);
   if (!a || !b) notFound();
   return (
