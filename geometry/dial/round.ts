@@ -25,10 +25,10 @@ import { DialError, type DialSettings } from './settings';
 
 const TURN = 2 * Math.PI;
 /** rad. A round scale leaves this much open. */
-const OPEN = (10 * Math.PI) / 180;
+export const OPEN = (10 * Math.PI) / 180;
 /** From the cut edge to the line that the marks stand on; from the edge of the paper to the cut. */
-const EDGE = 1;
-const MARGIN = 10;
+export const EDGE = 1;
+export const MARGIN = 10;
 
 /** Bearing of a shaft angle on the dial, rad clockwise from the top. */
 export function dialBearing(
@@ -43,7 +43,7 @@ export function dialBearing(
 }
 
 /** Where a number is lettered: inside its mark, along the ring, never upside down. */
-function numberBox(label: string, bearing: number, radius: number, axis: Point): Box {
+export function numberBox(label: string, bearing: number, radius: number, axis: Point): Box {
   const width = widthOf(label, NUMBER);
   const outer = radius - EDGE - LENGTHS.long - ROOM;
   const middle = Math.sqrt(outer ** 2 - (width / 2) ** 2) - NUMBER / 2;
@@ -57,13 +57,13 @@ function numberBox(label: string, bearing: number, radius: number, axis: Point):
   };
 }
 
-const roomy = (box: Box): Box => ({
+export const roomy = (box: Box): Box => ({
   ...box,
   width: box.width + 1.5 * ROOM,
   height: box.height + ROOM,
 });
 
-function lettered(label: string, { x, y, turn }: Box): Mark {
+export function lettered(label: string, { x, y, turn }: Box): Mark {
   return text(
     x - (Math.sin(turn) * NUMBER) / 2,
     y + (Math.cos(turn) * NUMBER) / 2,

@@ -1,6 +1,6 @@
 /** The same gang on several coils: what each band covers, and how well it tracks there. */
 
-import type { Derived } from '../derived';
+import type { Derived, SectionResult } from '../derived';
 import { KernelError } from '../error';
 import { formatQuantity } from '../quantity';
 import { resonantFrequency } from '../resonance';
@@ -42,6 +42,16 @@ function platesOver({ sections }: Derived, index: number): number[] {
   return law.achieved.flatMap((total, i) =>
     law.target[i] === null ? [] : [total - stray - trimmer],
   );
+}
+
+/** What the signal's circuit of a band has over the whole turn, for its dial. */
+export function bandScale(
+  { sections }: Derived,
+  { signalCoil, signalStray }: Pick<BandCircuits, 'signalCoil' | 'signalStray'>,
+): Pick<SectionResult, 'law' | 'inductance'> {
+  const { law, stray, trimmer } = sections[0]!;
+  const achieved = law.achieved.map((total) => total - stray - trimmer + signalStray);
+  return { law: { ...law, achieved }, inductance: signalCoil };
 }
 
 /**
