@@ -101,6 +101,12 @@ test('the pair serves its own band well and others less; it is aligned and weigh
     .last();
   expect(await kilohertz(last)).toBeGreaterThan(10);
 
+  await expect(
+    tool.getByRole('img', { name: 'The dial with an arc for each band' }),
+  ).toContainText('Band 2, MHz');
+  await tool.getByLabel('Outer radius, mm').fill('30');
+  await expect(tool.getByRole('alert')).toContainText(/30 mm has no room for 2 bands/);
+
   await tool.getByLabel('To work on').selectOption('setting-up');
   const steps = tool.locator('[data-part=to-print] li');
   await expect(steps.nth(2)).toContainText(/section 2/, { timeout: 20_000 });

@@ -10,19 +10,11 @@ import type { Sketch } from '@/geometry/sketch/sketch';
 import { sketchSvg } from '@/geometry/sketch/svg';
 import type { ToolProps } from '../tool-props';
 import { DialFields } from './dial-fields';
+import { saveSvg } from './save-svg';
 
 type Made =
   | { readonly sketch: Sketch; readonly trouble: null }
   | { readonly sketch: null; readonly trouble: string };
-
-function save(svg: string): void {
-  const address = URL.createObjectURL(new Blob([svg], { type: 'image/svg+xml' }));
-  const link = document.createElement('a');
-  link.href = address;
-  link.download = 'dial_true-size.svg';
-  link.click();
-  setTimeout(() => URL.revokeObjectURL(address), 60_000);
-}
 
 const texts = (settings: DialSettings): Record<string, string> =>
   Object.fromEntries(Object.entries(settings).map(([key, value]) => [key, String(value)]));
@@ -93,7 +85,7 @@ export default function DialTool({ derived, section }: ToolProps) {
           />
           <p>{paperWords(made.sketch)}</p>
           <p className="flex flex-wrap gap-2">
-            <Button look="action" onPress={() => save(svg)}>
+            <Button look="action" onPress={() => saveSvg(svg, 'dial_true-size.svg')}>
               Save as SVG, true size
             </Button>
             <a

@@ -30,6 +30,32 @@ function startingPoints(low: number, high: number): Points {
   ) as unknown as Points;
 }
 
+/** The order of common practice: trimmer high, coil low, the padder between, again and again. */
+function PaddedSteps({ placement: { points, pair } }: Pick<PaddedAnswer['best'], 'placement'>) {
+  const [low, middle, high] = points.map((at) => `${(at / 1e3).toFixed(0)} kHz`);
+  const padded = pair.side === 'above' ? 'oscillator' : 'signal';
+  const plain = pair.side === 'above' ? 'signal' : 'oscillator';
+  return (
+    <ol className="flex list-decimal flex-col gap-1.5 pl-6">
+      <li>
+        Set the {plain} circuit first, alone: its coil at {low}, its trimmer at {high}, until
+        the dial is right at both.
+      </li>
+      <li>
+        Dial and generator at {high}: the {padded} circuit’s trimmer for the loudest.
+      </li>
+      <li>
+        At {low}: the {padded} circuit’s coil for the loudest. Go back to {high} and repeat both
+        until neither asks for more.
+      </li>
+      <li>
+        At {middle}: if the {padded} circuit’s trimmer wants to be turned, the padder is off.
+        Change it a little, and begin again at {high}.
+      </li>
+    </ol>
+  );
+}
+
 function Result({ answer }: { answer: PaddedAnswer }) {
   const { given, best } = answer;
   const [mine, least] = [given, best].map(({ placement }) =>
@@ -74,6 +100,9 @@ function Result({ answer }: { answer: PaddedAnswer }) {
             ? `They beat your points by ${hertz(mine - least)}: the largest error falls by ${Math.round(100 * (1 - least / mine))} %.`
             : 'Your points are the best there are.'}
         </p>
+      </PanelSection>
+      <PanelSection title="Setting it up">
+        <PaddedSteps placement={best.placement} />
       </PanelSection>
       <PanelSection title="Padder from stock">
         <StockTable stock={answer.stock} best={least} />

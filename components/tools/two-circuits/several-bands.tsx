@@ -11,6 +11,7 @@ import type { BandCircuits } from '@/geometry/tracking/bands';
 import { JobProgress } from '../job/job-progress';
 import { NumberField } from '../number-field';
 import type { ToolProps } from '../tool-props';
+import { BandsDial } from './bands-dial';
 import { BandsTable } from './bands-table';
 import { oscillatorIn } from './oscillator-circuit';
 import { usePairJob } from './use-pair-job';
@@ -153,6 +154,9 @@ function Bands({ derived, oscillator }: { derived: Derived; oscillator: number }
           <BandsTable bands={answer} />
         </PanelSection>
       )}
+      <PanelSection title="Dial with an arc for each band">
+        <BandsDial derived={derived} bands={bands} />
+      </PanelSection>
     </>
   );
 }
