@@ -6,6 +6,14 @@ const alias = {
   'server-only': `${import.meta.dirname}/tests/support/server-only.ts`,
 };
 
+/** npm run verify has a minute: what goes through many whole designs is left to npm test. */
+const thorough = [
+  'tests/geometry/nesting/{nest,lay-out}.test.ts',
+  'tests/geometry/parts/assembly.test.ts',
+  'tests/geometry/cutting/offset.test.ts',
+  'tests/geometry/examples.test.ts',
+];
+
 export default defineConfig({
   test: {
     projects: [
@@ -14,16 +22,15 @@ export default defineConfig({
         test: {
           name: 'kernel',
           include: ['tests/{geometry,references,golden,floor,units,design}/**/*.test.ts'],
-          // npm run verify has a minute; laying out every worked design takes most of one.
-          exclude: ['tests/geometry/nesting/nest.test.ts'],
+          exclude: thorough,
           testTimeout: 30_000,
         },
       },
       {
         resolve: { alias },
         test: {
-          name: 'layout',
-          include: ['tests/geometry/nesting/nest.test.ts'],
+          name: 'thorough',
+          include: thorough,
           testTimeout: 30_000,
         },
       },

@@ -54,7 +54,7 @@ await runUntilStopped(async () => {
 
   await verify();
   await unused();
-  await vitest('layout and house', ['layout', 'house']);
+  await vitest('thorough kernel and house', ['thorough', 'house']);
 
   const cluster = await startThrowawayPostgres();
   await vitest('route', ['routes'], { TEST_DATABASE_URL: cluster.ensureDatabase('template') });
