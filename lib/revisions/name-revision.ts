@@ -1,4 +1,5 @@
 import 'server-only';
+import type { EntityManager } from '@mikro-orm/postgresql';
 import { Revision } from '@/entities';
 import { mayEdit, requireMember } from '../access';
 import { inWorkshop } from '../db';
@@ -11,6 +12,16 @@ import { addRecord } from '../record';
 import { nameRevisionSchema, type Revision as RevisionRecord } from '../schemas/revision';
 import { freeze, revisionNames } from './freeze';
 import { revisionPeople, toRevision } from './revision-record';
+
+/** The highest number that a design's revisions have; 0 when it has none. */
+async function lastNumber(tx: EntityManager, design: string): Promise<number> {
+  const [last] = await tx.find(
+    Revision,
+    { design },
+    { fields: ['number'], orderBy: { number: 'desc' }, limit: 1 },
+  );
+  return last?.number ?? 0;
+}
 
 /**
  * Freezes a design as it is saved under a name and the next number.
@@ -27,32 +38,31 @@ export async function nameRevision(id: string, input: unknown): Promise<Revision
   const derived = await derivePlates(before.design);
   const derivation = await deriveDesign(before.design);
 
-  return inWorkshop(viewer, async (tx) => {
-    const stored = await lockDesign(tx, viewer, id);
-    refuseStale(await toRecord(tx, stored, viewer), version);
-    const [last] = await tx.find(
-      Revision,
-      { design: id },
-      { fields: ['number'], orderBy: { number: 'desc' }, limit: 1 },
-    );
-    const number = (last?.number ?? 0) + 1;
+  // The number stands in the drawing, which is made before the row is held: whoever finds it taken
+  // by then makes the drawing anew.
+  for (;;) {
+    const number = (await inWorkshop(viewer, (tx) => lastNumber(tx, id))) + 1;
     const at = new Date();
-    // With the row held, since the number stands in the drawing; naming is rare.
-    const names = revisionNames(stored, viewer.workshopName, {
-      number,
-      creator: viewer.name,
-      issued: at,
+    const files = await makeFiles(
+      before.design,
+      derived,
+      revisionNames(before, viewer.workshopName, { number, creator: viewer.name, issued: at }),
+    );
+    const revision = await inWorkshop(viewer, async (tx) => {
+      const stored = await lockDesign(tx, viewer, id);
+      refuseStale(await toRecord(tx, stored, viewer), version);
+      if ((await lastNumber(tx, id)) + 1 !== number) return null;
+      const by = viewer.userId;
+      const made = freeze(tx, stored, derivation, files, { number, name, note, by, at });
+      addRecord(tx, viewer, {
+        what: 'revision-named',
+        subject: id,
+        revision: made.id,
+        detail: { number, name, version, kernel: made.kernel },
+      });
+      await tx.flush();
+      return toRevision(await tx.populate(made, [...revisionPeople]));
     });
-    const files = await makeFiles(before.design, derived, names);
-    const by = viewer.userId;
-    const revision = freeze(tx, stored, derivation, files, { number, name, note, by, at });
-    addRecord(tx, viewer, {
-      what: 'revision-named',
-      subject: id,
-      revision: revision.id,
-      detail: { number, name, version, kernel: revision.kernel },
-    });
-    await tx.flush();
-    return toRevision(await tx.populate(revision, [...revisionPeople]));
-  });
+    if (revision) return revision;
+  }
 }
