@@ -149,6 +149,7 @@ test('with a check that fails only the owner releases, and says why', async ({
   await ready(master);
   await master.getByRole('button', { name: 'Release', exact: true }).click();
   const dialog = master.getByRole('dialog');
+  await expect(dialog.getByRole('textbox').first()).toBeVisible();
   for (const reason of await dialog.getByRole('textbox').all()) {
     await reason.fill('under oil, measured on the bench');
   }
