@@ -225,6 +225,34 @@ test('the queue shows what is overdue, and one finds an order by state, hand and
   await expect(page.getByRole('button', { name: 'Begin cutting' })).toHaveCount(0);
 });
 
+test('the same order is overdue where its day has passed, and not yet elsewhere', async ({
+  page,
+  browser,
+}) => {
+  await signIn(page, builder);
+  const due = dayIn(2);
+  const number = await order(page, due);
+  // Five in the morning of the next day, UTC.
+  const moment = new Date(Date.parse(due) + DAY + 5 * 3_600_000);
+  for (const [timezoneId, overdue] of [
+    ['Pacific/Kiritimati', true],
+    ['Pacific/Pago_Pago', false],
+  ] as const) {
+    const context = await browser.newContext({ timezoneId });
+    const there = await context.newPage();
+    await signIn(there, builder);
+    await there.clock.setFixedTime(moment);
+    await there.goto('/orders');
+    await expect(there.getByText(`in your time zone, ${timezoneId}.`)).toBeVisible();
+    const row = there
+      .getByRole('row')
+      .filter({ has: there.getByRole('link', { name: `Order ${number}`, exact: true }) });
+    await expect(row).toBeVisible();
+    await expect(row.getByText('overdue')).toHaveCount(overdue ? 1 : 0);
+    await context.close();
+  }
+});
+
 test('nobody of another workshop sees an order', async ({ page, browser }) => {
   await order(page, dayIn(5));
   await page.goto('/orders');
