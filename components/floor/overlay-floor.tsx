@@ -1,6 +1,6 @@
 'use client';
 
-import { useRef, type CSSProperties, type RefObject } from 'react';
+import { useRef, type CSSProperties, type ReactNode, type RefObject } from 'react';
 import type { Derived, Turn } from '@/geometry';
 import { rotorTurn } from '@/geometry/rotor-turn';
 import type { AngleStore } from './angle-store';
@@ -11,10 +11,10 @@ import { svgPath } from './svg-path';
 import { useAngle } from './use-angle';
 import { assumedView, useFittedView } from './use-fitted-view';
 
-/** How each of the two is drawn: the first solid, the second dashed and brighter. */
+/** How each of the two is drawn: the first solid, the second dashed and white. */
 const looks = [
   { rotor: 'stroke-brass', stator: 'stroke-steel', dash: undefined },
-  { rotor: 'stroke-white', stator: 'stroke-scribe', dash: '7 4' },
+  { rotor: 'stroke-white', stator: 'stroke-white', dash: '7 4' },
 ] as const;
 
 /** The rotor is drawn at mesh angle 0. CSS turns clockwise, the drawing counter-clockwise. */
@@ -87,6 +87,18 @@ function Stator({
   ));
 }
 
+/** A line and what it is. */
+function Line({ look, dash, children }: { look: string; dash?: string; children: ReactNode }) {
+  return (
+    <li className="flex items-center gap-2">
+      <svg width="26" height="8" viewBox="0 0 26 8" aria-hidden="true">
+        <path d="M0 4H26" strokeWidth="2" strokeDasharray={dash} className={look} />
+      </svg>
+      <span>{children}</span>
+    </li>
+  );
+}
+
 /** Rotor and stator of one section of two states, their outlines over one another. */
 export function OverlayFloor({
   states,
@@ -136,22 +148,11 @@ export function OverlayFloor({
         aria-label="Lines"
         className="flex flex-wrap gap-x-5 gap-y-0.5 px-3 pb-2 font-mono text-small text-scribe"
       >
-        {states.flatMap(({ title }, index) => {
-          const { rotor, stator, dash } = looks[index]!;
-          return (['rotor', 'stator'] as const).map((part) => (
-            <li key={`${index} ${part}`} className="flex items-center gap-2">
-              <svg width="26" height="8" viewBox="0 0 26 8" aria-hidden="true">
-                <path
-                  d="M0 4H26"
-                  strokeWidth="2"
-                  strokeDasharray={dash}
-                  className={part === 'rotor' ? rotor : stator}
-                />
-              </svg>
-              {part}, {title}
-            </li>
-          ));
-        })}
+        <Line look="stroke-brass">rotor, {titles[0]}</Line>
+        <Line look="stroke-steel">stator, {titles[0]}</Line>
+        <Line look="stroke-white" dash={looks[1].dash}>
+          both, {titles[1]}
+        </Line>
       </ul>
     </div>
   );

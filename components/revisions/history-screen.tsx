@@ -59,6 +59,7 @@ export function HistoryScreen({
         <Notice look="warn">{query.error.message} This list may be out of date.</Notice>
       )}
       <section aria-label="Compare two" className="flex flex-wrap items-end gap-3">
+        <h2 className="basis-full text-title">Compare two</h2>
         <StatePair history={query.data} pair={pair} onChange={setPair} />
         <Link href={compareHref(designId, pair)} className={buttonClass('plain')}>
           Compare
