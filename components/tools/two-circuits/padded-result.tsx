@@ -83,7 +83,7 @@ export function PaddedResult({ answer }: { answer: PaddedAnswer }) {
         <PaddedSteps placement={best.placement} />
       </PanelSection>
       <PanelSection title="Padder from stock">
-        <StockTable stock={answer.stock} best={least} />
+        <StockTable stock={answer.stock} />
       </PanelSection>
     </>
   );

@@ -1,10 +1,10 @@
 import { formatQuantity } from '@/geometry';
 import type { PaddedAnswer } from './two-circuits.worker';
 
-const headings = ['Series', 'Padder', 'Trimmer', 'Coil', 'Largest error', 'More than best'];
+const headings = ['Series', 'Padder', 'Trimmer', 'Coil', 'Largest error', 'Set at two points'];
 
 /** The nearest padder of each series, trimmer and coil set anew for it. */
-export function StockTable({ stock, best }: { stock: PaddedAnswer['stock']; best: number }) {
+export function StockTable({ stock }: { stock: PaddedAnswer['stock'] }) {
   return (
     <>
       <div
@@ -28,13 +28,13 @@ export function StockTable({ stock, best }: { stock: PaddedAnswer['stock']; best
             </tr>
           </thead>
           <tbody>
-            {stock.map(({ series, placement: { pair, peak } }) => (
-              <tr key={series} className="border-b border-line">
+            {stock.map(({ series, best: { pair, peak }, atTwo }) => (
+              <tr key={series ?? 'none'} className="border-b border-line">
                 <th scope="row" className="py-1.5 text-left font-normal">
-                  {series}
+                  {series ?? 'none'}
                 </th>
                 <td className="pl-3 whitespace-nowrap">
-                  {formatQuantity(pair.padder ?? 0, 'capacitance', 3)}
+                  {pair.padder === null ? '' : formatQuantity(pair.padder, 'capacitance', 3)}
                 </td>
                 <td className="pl-3 whitespace-nowrap">
                   {formatQuantity(pair.trimmer, 'capacitance', 4)}
@@ -46,7 +46,7 @@ export function StockTable({ stock, best }: { stock: PaddedAnswer['stock']; best
                   {formatQuantity(Math.abs(peak.error), 'frequency', 3)}
                 </td>
                 <td className="pl-3 whitespace-nowrap">
-                  {Math.round(100 * (Math.abs(peak.error) / best - 1))} %
+                  {formatQuantity(Math.abs(atTwo.peak.error), 'frequency', 3)}
                 </td>
               </tr>
             ))}
@@ -55,7 +55,8 @@ export function StockTable({ stock, best }: { stock: PaddedAnswer['stock']; best
       </div>
       <p className="text-small text-ink-2">
         Preferred values of IEC 60063, nearest to the best padder; trimmer and coil set anew for
-        the least peak error.
+        the least peak error over the band. Last column: largest error with both set at the
+        first and the last of your points instead.
       </p>
     </>
   );

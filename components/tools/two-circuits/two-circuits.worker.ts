@@ -10,7 +10,12 @@ import {
   placed,
   type Placement,
 } from '@/geometry/tracking/least-peak';
-import { threePoints, trackingError, type Conversion } from '@/geometry/tracking/padded-pair';
+import {
+  threePoints,
+  trackingError,
+  twoPoints,
+  type Conversion,
+} from '@/geometry/tracking/padded-pair';
 import {
   nearestPreferred,
   preferredSeries,
@@ -43,14 +48,20 @@ export type PairQuestion =
     }
   | { readonly kind: 'setting-up'; readonly derived: Derived };
 
+export interface StockPadder {
+  /** null: without a padder. */
+  readonly series: PreferredSeries | null;
+  /** Trimmer and coil at their best over the band. */
+  readonly best: Placement;
+  /** Trimmer and coil as the first and the last of the given points set them. */
+  readonly atTwo: Placement;
+}
+
 export interface PaddedAnswer {
   readonly kind: 'padded';
   readonly given: PlacedCurve;
   readonly best: PlacedCurve;
-  readonly stock: readonly {
-    readonly series: PreferredSeries;
-    readonly placement: Placement;
-  }[];
+  readonly stock: readonly StockPadder[];
 }
 
 export interface SettingUpAnswer {
@@ -80,14 +91,20 @@ function padded({
   });
   const best = leastPeak(conversion, band);
   const names = Object.keys(preferredSeries) as PreferredSeries[];
+  const ends = [points[0], points[2]] as const;
+  const stock = [...names, null].map((series): StockPadder => {
+    const padder = series && nearestPreferred(series, best.pair.padder!);
+    return {
+      series,
+      best: leastPeakWith(conversion, padder, band),
+      atTwo: placed(twoPoints(conversion, padder, ends), ends, band),
+    };
+  });
   return {
     kind: 'padded',
     given: curveOf(placed(threePoints(conversion, points), points, band)),
     best: curveOf(best),
-    stock: names.map((series) => ({
-      series,
-      placement: leastPeakWith(conversion, nearestPreferred(series, best.pair.padder!), band),
-    })),
+    stock,
   };
 }
 
