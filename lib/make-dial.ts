@@ -9,6 +9,7 @@ import { badInput, notFound, RequestError } from './errors';
 import { sketchesPdf } from './kernel/drawing-pdf';
 import { hashOf, type HashedFile } from './kernel/hashed-file';
 import { addRecord } from './record';
+import { holdInUse } from './revisions/out-of-use';
 import { dialQuerySchema } from './schemas/dial';
 
 /** A dial of the saved version, or of the released revision for who may not edit, as PDF, true size, with a row in the record. @throws RequestError */
@@ -34,7 +35,8 @@ export async function makeDial(id: string, query: unknown): Promise<HashedFile> 
     });
     const sha256 = hashOf(body);
     const name = `${slugOf(source.name)}_dial-${settings.quantity}.pdf`;
-    await inWorkshop(viewer, (tx) => {
+    await inWorkshop(viewer, async (tx) => {
+      if (source.revisionId) await holdInUse(tx, viewer, source.revisionId);
       addRecord(tx, viewer, {
         what: 'file-downloaded',
         subject: id,

@@ -54,7 +54,7 @@ async function releasedDesigns(
           and r.state in ('released', 'superseded', 'withdrawn')
         join users u on u.id = coalesce(r.withdrawn_by_id, r.released_by_id, r.created_by_id)
         where d.workshop_id = ? and d.deleted_at is null
-        order by d.id, r.state = 'released' desc, r.number desc) latest
+        order by d.id, r.state = 'released' desc, r.released_at desc, r.number desc) latest
       order by "updatedAt" desc, id`,
     [workshopId],
   );

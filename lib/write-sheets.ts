@@ -7,6 +7,7 @@ import { inWorkshop } from './db';
 import { badInput, notFound, RequestError } from './errors';
 import type { HashedFile } from './kernel/hashed-file';
 import { addRecord } from './record';
+import { holdInUse } from './revisions/out-of-use';
 import { writeSheetsSchema } from './schemas/sheets';
 import { sheetAlone, sheetBundle, sheetFiles } from './sheet-files';
 import { listShopItems } from './shop-items';
@@ -62,7 +63,8 @@ export async function writeSheets(id: string, input: unknown): Promise<HashedFil
       field: 'only',
     });
   }
-  await inWorkshop(viewer, (tx) => {
+  await inWorkshop(viewer, async (tx) => {
+    if (source.revisionId) await holdInUse(tx, viewer, source.revisionId);
     addRecord(tx, viewer, {
       what: 'file-downloaded',
       subject: id,

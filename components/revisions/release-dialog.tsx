@@ -10,18 +10,7 @@ import type { Finding } from '@/geometry';
 import type { Revision } from '@/lib/schemas/revision';
 import { useMove } from './use-move';
 
-const keyOf = ({ code, section }: Finding): string => `${code} ${section}`;
-
-/** One for each word that the server takes: a check and section. */
-function failing(findings: readonly Finding[]): Finding[] {
-  const first = new Map<string, Finding>();
-  for (const finding of findings) {
-    if (finding.severity === 'fail' && !first.has(keyOf(finding))) {
-      first.set(keyOf(finding), finding);
-    }
-  }
-  return [...first.values()];
-}
+const keyOf = ({ code, section, label }: Finding): string => `${code} ${section} ${label}`;
 
 const labelOf = ({ label, section }: Finding): string =>
   section === null ? label : `${label}, section ${section + 1}`;
@@ -38,7 +27,7 @@ export default function ReleaseDialog({
   mayWaive: boolean;
   onClose: () => void;
 }) {
-  const fails = failing(findings);
+  const fails = findings.filter(({ severity }) => severity === 'fail');
   const [reasons, setReasons] = useState<Readonly<Record<string, string>>>({});
   const move = useMove(revision, onClose);
   const barred = fails.length > 0 && !mayWaive;
@@ -58,6 +47,7 @@ export default function ReleaseDialog({
             waivers: fails.map((finding) => ({
               code: finding.code,
               section: finding.section,
+              label: finding.label,
               reason: reasons[keyOf(finding)] ?? '',
             })),
           });

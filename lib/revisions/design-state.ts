@@ -6,7 +6,10 @@ type Known = Pick<Revision, 'number' | 'state' | 'version'>;
 
 /** What a design's revisions say of it. @param version the one that is saved */
 export function designState(version: number, revisions: readonly Known[]): DesignState {
-  const latest = [...revisions].sort((a, b) => b.number - a.number)[0];
+  // A superseded one says nothing by itself: the one that took its place does, whatever its number.
+  const latest = revisions
+    .filter(({ state }) => state !== 'superseded')
+    .sort((a, b) => b.number - a.number)[0];
   if (latest?.state === 'in-review') return { kind: 'in-review', revision: latest.number };
   const released = revisions.find(({ state }) => state === 'released');
   if (released) {

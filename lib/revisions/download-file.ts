@@ -1,5 +1,5 @@
 import 'server-only';
-import { Revision, RevisionFile } from '@/entities';
+import { RevisionFile } from '@/entities';
 import { mayDownload, requireMember, type Viewer } from '../access';
 import { inWorkshop } from '../db';
 import { notFound, RequestError } from '../errors';
@@ -7,7 +7,7 @@ import type { HashedFile } from '../kernel/hashed-file';
 import { addRecord } from '../record';
 import type { DesignFiles } from '../schemas/api';
 import type { Revision as RevisionRecord } from '../schemas/revision';
-import { refuseOutOfUse } from './out-of-use';
+import { holdInUse, refuseOutOfUse } from './out-of-use';
 import { findRevision, revisionFiles } from './queries';
 
 async function requireRevision(id: string): Promise<[Viewer, RevisionRecord]> {
@@ -32,9 +32,7 @@ export async function downloadRevisionFile(id: string, name: string): Promise<Ha
     if (!file) {
       throw new RequestError('not-found', `No such file in revision ${revision.number}.`);
     }
-    // Read again with the bytes: a withdrawal in between counts.
-    const { state } = await tx.findOneOrFail(Revision, { id }, { fields: ['state'] });
-    await refuseOutOfUse(viewer, { ...revision, state });
+    const { state } = await holdInUse(tx, viewer, id);
     const { label, kind, mediaType, sha256, bytes } = file;
     addRecord(tx, viewer, {
       what: 'file-downloaded',

@@ -63,6 +63,13 @@ export const findRevisionByNumber = async (
     ? findOne(viewer, { design: designId, number })
     : null;
 
+/** The one released last, which need not have the highest number. */
+const lastReleased = (revisions: readonly RevisionRecord[]): RevisionRecord | null =>
+  revisions.reduce<RevisionRecord | null>(
+    (last, one) => (last && (last.releasedAt ?? '') >= (one.releasedAt ?? '') ? last : one),
+    null,
+  );
+
 /** What a design is cut from: its released revision, else the last that was; null if none was. */
 export async function findReleased(
   viewer: Viewer,
@@ -73,7 +80,7 @@ export async function findReleased(
   const found = await inWorkshop(viewer, (tx) =>
     readRevisions(tx, { $and: [known(viewer), { design: designId, state }] }),
   );
-  return found.find((one) => one.state === 'released') ?? found[0] ?? null;
+  return found.find((one) => one.state === 'released') ?? lastReleased(found);
 }
 
 /** Revisions and saves of a design, newest first; null where there is no such design. */

@@ -18,6 +18,7 @@ import { toRevision } from './revision-record';
 interface Word {
   readonly code: string;
   readonly section: number | null;
+  readonly label: string;
   readonly reason: string;
 }
 
@@ -33,7 +34,9 @@ function waiversFor(
   const failing = findings.filter(({ severity }) => severity === 'fail');
   return failing.map((finding) => {
     const { code, section, label } = finding;
-    const word = words.find((one) => one.code === code && one.section === section);
+    const word = words.find(
+      (one) => one.code === code && one.section === section && one.label === label,
+    );
     if (!word) {
       throw new RequestError(
         'checks-fail',

@@ -98,6 +98,8 @@ export const moveRevisionSchema = z.discriminatedUnion('to', [
         z.object({
           code: z.string().max(60),
           section: z.number().int().nullable(),
+          /** Tells apart checks of one code. */
+          label: z.string().max(200),
           reason: reasonSchema,
         }),
       )
