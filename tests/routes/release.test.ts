@@ -66,6 +66,20 @@ function tooDeep(): Design {
   return { ...defaultDesign(), largestDepth: 20 };
 }
 
+const dial = {
+  section: '0',
+  quantity: 'frequency',
+  form: 'round',
+  radius: '50',
+  ratio: '1',
+  drum: '100',
+  sense: 'clockwise',
+  moves: 'pointer',
+  place: 'upper',
+  open: '0',
+  hole: '6',
+};
+
 describe('the way of a revision', () => {
   test('leads through review; sent back, it may be asked for again', async () => {
     const { id } = await named(await make());
@@ -125,9 +139,10 @@ describe('a check that fails', () => {
     expect(bare.status).toBe(422);
     expect((await refusal(bare)).code).toBe('checks-fail');
 
-    const waivers = failing.map(({ code, section }) => ({
+    const waivers = failing.map(({ code, section, label }) => ({
       code,
       section,
+      label,
       reason: 'The bench has room',
     }));
     const body = { to: 'released', from: 'in-review', waivers } as const;
@@ -143,6 +158,41 @@ describe('a check that fails', () => {
     const last = (await cast.record(designId)).at(-1)!;
     expect(JSON.stringify(last.detail)).toContain('The bench has room');
   });
+});
+
+test('each check that fails needs a word of its own, also two of one code', async () => {
+  const [section] = defaultDesign().sections;
+  const design: Design = {
+    ...defaultDesign(),
+    frameClearance: 1,
+    sections: [section!, { ...section!, airGap: 1.5 * section!.airGap }],
+  };
+  const derivation = derive(design);
+  if (!derivation.ok) throw new Error('meant to have plates');
+  const failing = derivation.derived.findings.filter(({ severity }) => severity === 'fail');
+  const frame = failing.filter(({ code }) => code === 'frame');
+  expect(frame).toHaveLength(2);
+
+  const { id } = await inReview(await make(design));
+  const waivers = failing.map(({ code, section: of, label }) => ({
+    code,
+    section: of,
+    label,
+    reason: `Seen: ${label}`,
+  }));
+  const without = waivers.filter(({ label }) => label !== frame[1]!.label);
+  const silent = await move(
+    id,
+    { to: 'released', from: 'in-review', waivers: without },
+    'owner',
+  );
+  expect(silent.status).toBe(422);
+  expect((await refusal(silent)).message).toContain(frame[1]!.label);
+  const answer = await move(id, { to: 'released', from: 'in-review', waivers }, 'owner');
+  const revision = revisionSchema.parse(await answer.json());
+  expect(revision.waivers.map(({ reason }) => reason)).toEqual(
+    failing.map(({ label }) => `Seen: ${label}`),
+  );
 });
 
 describe('what is released', () => {
@@ -175,20 +225,6 @@ describe('what is released', () => {
 });
 
 describe('a machinist', () => {
-  const dial = {
-    section: '0',
-    quantity: 'frequency',
-    form: 'round',
-    radius: '50',
-    ratio: '1',
-    drum: '100',
-    sense: 'clockwise',
-    moves: 'pointer',
-    place: 'upper',
-    open: '0',
-    hole: '6',
-  };
-
   test('sees nothing of what is not released', async () => {
     const designId = await make();
     const { id } = await inReview(designId);
@@ -265,6 +301,49 @@ describe('a withdrawn revision', () => {
     });
     const em = await entityManager();
     expect(await em.count(Mail, { event: `revision-withdrawn:${id}` })).toBe(2);
+  });
+
+  test('also stops a download that had begun before it', async () => {
+    const { id } = await released(await make());
+    const [file] = await filesOf(id);
+    const em = await entityManager();
+    cast.ask('machinist');
+    const begun = await em.transactional(async (tx) => {
+      await tx.execute(
+        "update revisions set state = 'withdrawn', withdrawn_reason = 'Cracked' where id = ?",
+        [id],
+      );
+      // What is not committed yet is not seen, so it goes on until it has to wait.
+      const answer = call(FILE, { id, name: file!.name });
+      await expect(
+        Promise.race([answer, new Promise((done) => setTimeout(done, 400, 'waits'))]),
+      ).resolves.toBe('waits');
+      return { answer };
+    });
+    const answer = await begun.answer;
+    expect(answer.status).toBe(410);
+    expect((await refusal(answer)).message).toContain('Cracked');
+  });
+
+  test('is what a machinist is told of, also when it has a lower number than one before', async () => {
+    const designId = await make();
+    const first = await inReview(designId);
+    const second = await released(designId);
+    expect((await move(first.id, { to: 'released', from: 'in-review' })).status).toBe(200);
+    const out = { to: 'withdrawn', from: 'released', reason: 'Cracked' } as const;
+    expect((await move(first.id, out)).status).toBe(200);
+    for (const who of ['machinist', 'builder'] as const) {
+      cast.ask(who);
+      const list = designListSchema.parse(await (await call(LIST, {})).json()).designs;
+      expect(list.find((design) => design.id === designId)!.state).toEqual({
+        kind: 'withdrawn',
+        revision: 1,
+      });
+    }
+    cast.ask('machinist');
+    const answer = await call(DIAL, { id: designId }, { query: dial });
+    expect((await refusal(answer)).message).toContain('Cracked');
+    expect((await call(FILES, { id: second.id })).status).toBe(410);
   });
 
   test('needs a reason', async () => {
