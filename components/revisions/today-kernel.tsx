@@ -7,7 +7,6 @@ import { Notice } from '@/components/ui/notice';
 import { KERNEL_VERSION, type Derivation, type Derived } from '@/geometry';
 import { deriveToday } from './derive-today';
 import { figurePairs } from './figures-of';
-import { PairTable } from './pair-table';
 
 function Changes({ then, now }: { then: Derived; now: Derivation }) {
   if (!now.ok) {
@@ -23,18 +22,24 @@ function Changes({ then, now }: { then: Derived; now: Derivation }) {
     );
   }
   const changed = figurePairs(then, now.derived).filter(({ same }) => !same);
+  if (changed.length === 0) return <p>No figure would change.</p>;
   return (
-    <PairTable
-      caption="What today’s kernel would change"
-      titles={[
-        'Figure',
-        `Kept, kernel ${then.kernel}`,
-        `Today, kernel ${now.derived.kernel}`,
-        'Change',
-      ]}
-      rows={changed.map(({ label, a, b, change }) => [label, a ?? '–', b ?? '–', change])}
-      none="No figure would change."
-    />
+    <>
+      <p>
+        As kept by kernel {then.kernel}, then by kernel {now.derived.kernel}:
+      </p>
+      <dl aria-label="What today’s kernel would change" className="flex flex-col">
+        {changed.map(({ label, a, b, change }) => (
+          <div key={label} className="border-b border-line py-1.5 last:border-0">
+            <dt>{label}</dt>
+            <dd className="text-ink-2">
+              {a ?? 'none'}, then {b ?? 'none'}
+            </dd>
+            {change && <dd>{change}</dd>}
+          </div>
+        ))}
+      </dl>
+    </>
   );
 }
 
