@@ -3,6 +3,7 @@ import type { Derived } from '@/geometry';
 import { mayEdit, type Viewer } from './access';
 import { derivePlates } from './kernel/kernel';
 import { findDesign } from './queries';
+import { NOT_RELEASED, waiverWords } from './revisions/freeze';
 import { refuseOutOfUse } from './revisions/out-of-use';
 import { derivationOf, findReleased } from './revisions/queries';
 import type { Current } from './schemas/api';
@@ -17,6 +18,10 @@ export interface CutSource {
   /** Id of the revision, where it is one. */
   readonly revisionId: string | undefined;
   readonly issued: Date;
+  /** May it be cut? In words. */
+  readonly status: string;
+  /** What it was released in spite of, and why. */
+  readonly waivers: readonly string[];
   /** Who saved or released it last. */
   readonly by: string;
   readonly derived: Derived;
@@ -38,6 +43,8 @@ export async function findCutSource(viewer: Viewer, id: string): Promise<CutSour
       version: saved.version,
       revisionId: undefined,
       issued: new Date(saved.updatedAt),
+      status: NOT_RELEASED,
+      waivers: [],
       by: saved.updatedBy.name,
       derived: await derivePlates(saved.design),
       current: saved,
@@ -53,6 +60,8 @@ export async function findCutSource(viewer: Viewer, id: string): Promise<CutSour
     version: revision!.version,
     revisionId: revision!.id,
     issued: new Date(revision!.releasedAt!),
+    status: 'Released',
+    waivers: revision!.waivers.map(waiverWords),
     by: revision!.releasedBy?.name ?? '',
     derived: frozen.derivation.derived,
     current: revision!,

@@ -7,6 +7,7 @@ import type { HashedFile } from './kernel/hashed-file';
 import { derivePlates, makeFiles } from './kernel/kernel';
 import { materialWords } from './kernel/make-files';
 import { findDesign } from './queries';
+import { NOT_RELEASED } from './revisions/freeze';
 import type { DesignFiles, DesignRecord } from './schemas/api';
 
 /** Every file of a stored version, as it would be downloaded. The same version, the same bytes. */
@@ -24,7 +25,7 @@ export function hashedFiles(
     issued: updatedAt,
     creator: updatedBy.name,
     approved: '',
-    status: 'Draft, not released',
+    status: NOT_RELEASED,
     waivers: [],
   });
 }

@@ -16,6 +16,12 @@ function hashed({ name, label, kind, mediaType, text }: SheetFile): HashedFile {
   return { name, label, kind, mediaType, body, sha256: hashOf(body) };
 }
 
+/** Names with what the manifest says of the plates' release. */
+type MarkedNames = SheetNames & {
+  readonly status: string;
+  readonly waivers: readonly string[];
+};
+
 /** The layout with the plates' own parts in it. @throws RequestError bad-input */
 function checkLayout(derived: Derived, given: GivenLayout): LaidGroup[] {
   const parts = partsOf(derived).filter((part) => part.kind === 'cut');
@@ -29,7 +35,7 @@ function checkLayout(derived: Derived, given: GivenLayout): LaidGroup[] {
 
 function manifestOf(
   derived: Derived,
-  names: SheetNames,
+  names: MarkedNames,
   { machine, kerf, copies, settings }: GivenLayout,
   groups: readonly LaidGroup[],
   files: readonly (readonly [SheetFile, HashedFile])[],
@@ -41,6 +47,8 @@ function manifestOf(
     {
       design: names.design,
       revision: names.revision,
+      status: names.status,
+      ...(names.waivers.length > 0 && { releasedInSpiteOf: names.waivers }),
       kernel: derived.kernel,
       units: 'mm',
       kerf: `${kerf}: ${kerfWords(kerf, machine)}`,
@@ -73,7 +81,7 @@ function manifestOf(
  */
 export function sheetFiles(
   derived: Derived,
-  names: SheetNames,
+  names: MarkedNames,
   given: GivenLayout,
 ): HashedFile[] {
   const groups = checkLayout(derived, given);

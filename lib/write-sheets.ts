@@ -53,8 +53,8 @@ export async function writeSheets(id: string, input: unknown): Promise<HashedFil
     );
   }
   const given = { ...rest, machine: await machineFor(viewer, named) };
-  const { derived } = source;
-  const names = { design: source.name, revision: source.revision };
+  const { derived, status, waivers } = source;
+  const names = { design: source.name, revision: source.revision, status, waivers };
   const made = only
     ? sheetAlone(derived, names, given, only)
     : sheetBundle(names, given.kerf, sheetFiles(derived, names, given));

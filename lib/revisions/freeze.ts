@@ -1,6 +1,13 @@
 import { randomUUID } from 'node:crypto';
 import type { EntityManager } from '@mikro-orm/postgresql';
-import { PARAMETERS_FORMAT, Revision, RevisionFile, User, type Design } from '@/entities';
+import {
+  PARAMETERS_FORMAT,
+  Revision,
+  RevisionFile,
+  User,
+  type Design,
+  type Waiver,
+} from '@/entities';
 import type { Derivation } from '@/geometry';
 import { assessmentOf } from '../kernel/assessment';
 import type { FileNames } from '../kernel/file-names';
@@ -13,6 +20,13 @@ interface Named {
   readonly by: string;
   readonly at: Date;
 }
+
+/** What the files of a saved design say of it. */
+export const NOT_RELEASED = 'Draft, not released';
+
+/** A waiver as the files have it. */
+export const waiverWords = ({ label, reason, by }: Waiver): string =>
+  `${label}. ${by}: ${reason}`;
 
 /** What a revision's files are called, and what stands in their title blocks. */
 export function revisionNames(

@@ -10,7 +10,7 @@ import { deriveDesign, derivePlates, makeFiles } from '../kernel/kernel';
 import { tellMembers } from '../mail/tell-members';
 import { addRecord } from '../record';
 import type { Revision as RevisionRecord, RevisionState } from '../schemas/revision';
-import { addFiles, revisionNames } from './freeze';
+import { addFiles, revisionNames, waiverWords } from './freeze';
 import { lockRevision, refuseMoved } from './lock-revision';
 import { derivationOf } from './queries';
 import { toRevision } from './revision-record';
@@ -94,7 +94,7 @@ export async function releaseRevision(
       { number, creator: revision.createdBy.name, issued: at },
       {
         by: viewer.name,
-        waivers: waivers.map(({ label, reason, by }) => `${label}. ${by}: ${reason}`),
+        waivers: waivers.map(waiverWords),
       },
     ),
   );

@@ -151,6 +151,7 @@ describe('the files', () => {
 
     const held = await zip();
     const manifest = JSON.parse(strFromU8(held['manifest.json']!)) as {
+      status: string;
       kerf: string;
       files: {
         file: string;
@@ -162,6 +163,7 @@ describe('the files', () => {
         pieces?: { part: string; quantity: number }[];
       }[];
     };
+    expect(manifest.status).toBe('Draft, not released');
     expect(manifest.kerf).toBe(
       'compensated: contours moved by half of 0.24 mm of kerf, outer out, holes in',
     );
