@@ -3,9 +3,12 @@ import { TopBar } from '@/components/account/top-bar';
 import { Providers } from '@/components/providers';
 import { mayReadRecord, requirePageMember } from '@/lib/access';
 import { findPerson } from '@/lib/account/person';
+import { latestChange } from '@/lib/live/latest-change';
 
 export default async function WorkshopLayout({ children }: { children: ReactNode }) {
   const viewer = await requirePageMember();
+  // Before the page reads: what comes after this is news to it.
+  const since = await latestChange(viewer);
   const person = await findPerson();
   return (
     <div className="flex min-h-dvh flex-col">
@@ -15,7 +18,7 @@ export default async function WorkshopLayout({ children }: { children: ReactNode
         workshops={person?.workshops ?? []}
         readsRecord={mayReadRecord(viewer.role)}
       />
-      <Providers>{children}</Providers>
+      <Providers since={since}>{children}</Providers>
     </div>
   );
 }

@@ -9,8 +9,9 @@ const POLL = 5_000;
  * Keeps what is on the screen as it is in the workshop: hears of changes by server-sent events, or
  * asks again every few seconds while that does not work. A hidden tab holds no connection, since a
  * browser has few for one site; it looks at everything again when it is shown.
+ * @param since the last change that the page was made with
  */
-export function useLive(client: QueryClient): void {
+export function useLive(client: QueryClient, since: string): void {
   useEffect(() => {
     let source: EventSource | null = null;
     let poll: ReturnType<typeof setInterval> | undefined;
@@ -22,7 +23,7 @@ export function useLive(client: QueryClient): void {
     };
 
     function open(): void {
-      source = new EventSource('/api/live');
+      source = new EventSource(`/api/live?since=${since}`);
       let before = false;
       source.onopen = () => {
         // After a pause some may have been missed.
@@ -68,5 +69,5 @@ export function useLive(client: QueryClient): void {
       document.removeEventListener('visibilitychange', onVisibility);
       close();
     };
-  }, [client]);
+  }, [client, since]);
 }

@@ -2,6 +2,9 @@ import 'server-only';
 import { isStillMember, type Viewer } from '../access';
 import { log } from '../log';
 import { changes } from './changes';
+import { latestChange } from './latest-change';
+
+const AGAIN = 'event: again\ndata: {}\n\n';
 
 /** Keeps proxies from closing a quiet stream, and asks whether the person still belongs here. */
 const BEAT = 15_000;
@@ -9,10 +12,12 @@ const BEAT = 15_000;
 /**
  * Server-sent events for one screen: `change` with what was recorded, `again` when some may have
  * been missed. Ends with the request, and with the membership or session that opened it.
+ * @param since the last change that the screen's page knew of, if it says so
  */
 export function changeStream(
   viewer: Viewer,
   epoch: number,
+  since: string | null,
   signal: AbortSignal,
 ): ReadableStream {
   const encoder = new TextEncoder();
@@ -47,7 +52,7 @@ export function changeStream(
           write(`event: change\ndata: ${JSON.stringify({ what, subject, revision })}\n\n`);
           if (what.startsWith('member-')) check();
         },
-        lookAgain: () => write('event: again\ndata: {}\n\n'),
+        lookAgain: () => write(AGAIN),
         end,
       });
       const beat = setInterval(() => {
@@ -58,6 +63,13 @@ export function changeStream(
       signal.addEventListener('abort', end);
       stop = letGo;
       write('retry: 1000\n\n');
+      // What was recorded while the page was on its way to the screen.
+      if (since !== null) {
+        latestChange(viewer).then(
+          (latest) => latest !== since && write(AGAIN),
+          () => write(AGAIN),
+        );
+      }
       if (signal.aborted) end();
     },
     cancel: () => stop(),

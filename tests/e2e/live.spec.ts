@@ -14,7 +14,7 @@ test('a new design, its new name and its end appear in a list that is open', asy
   const context = await browser.newContext();
   const list = await context.newPage();
   await signIn(list, owner);
-  const stream = list.waitForRequest((request) => request.url().endsWith('/api/live'));
+  const stream = list.waitForRequest((request) => request.url().includes('/api/live?since='));
   await list.goto('/designs');
   await stream;
 

@@ -3,6 +3,7 @@ import { afterEach, beforeAll, expect, test } from 'vitest';
 import { GET } from '@/app/api/live/route';
 import { Membership, User } from '@/entities';
 import { defaultDesign } from '@/geometry';
+import { latestChange } from '@/lib/live/latest-change';
 import { saveDesign } from '@/lib/save-design';
 import { entityManager } from '../support/as-owner';
 import { Cast, type Caller } from '../support/cast';
@@ -18,12 +19,14 @@ afterEach(() => {
 });
 
 /** A screen of somebody's, and what it hears. */
-async function screen(caller: Caller) {
+async function screen(caller: Caller, since?: string) {
   cast.ask(caller);
   const controller = new AbortController();
   open.push(controller);
   const response = await GET(
-    new Request('http://127.0.0.1:3000/api/live', { signal: controller.signal }),
+    new Request(`http://127.0.0.1:3000/api/live${since ? `?since=${since}` : ''}`, {
+      signal: controller.signal,
+    }),
     { params: Promise.resolve({}) },
   );
   expect(response.status).toBe(200);
@@ -54,6 +57,18 @@ test('a save is heard on the workshop’s screens and on no others', async () =>
     .poll(() => mine.text, { timeout: 2_000 })
     .toContain(`data: {"what":"design-saved","subject":"${id}","revision":null}`);
   expect(theirs.text).not.toContain(id);
+});
+
+test('what was recorded while the page was on its way is looked for', async () => {
+  const id = await cast.design();
+  cast.ask('owner');
+  const { requireMember } = await import('@/lib/access');
+  const since = await latestChange(await requireMember());
+  const untouched = await screen('owner', since);
+  await save(id, 1);
+  const stale = await screen('owner', since);
+  await expect.poll(() => stale.text, { timeout: 2_000 }).toContain('event: again');
+  expect(untouched.text).not.toContain('event: again');
 });
 
 test('after the database has cut the line, screens look again and hear on', async () => {

@@ -6,7 +6,8 @@ export const dynamic = 'force-dynamic';
 
 export const GET = route(async (request) => {
   const { viewer, epoch } = await requireSession();
-  return new Response(changeStream(viewer, epoch, request.signal), {
+  const since = new URL(request.url).searchParams.get('since');
+  return new Response(changeStream(viewer, epoch, since, request.signal), {
     headers: {
       'Content-Type': 'text/event-stream; charset=utf-8',
       'Cache-Control': 'no-store',
