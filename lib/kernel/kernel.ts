@@ -50,7 +50,7 @@ async function perform<Name extends keyof Tasks>(
 
 /** What was made last, so that a page, its list of files and a download share it. */
 class Latest<T> {
-  private static readonly KEPT = 32;
+  private static readonly KEPT = 64;
   private readonly made = new Map<string, Promise<T>>();
 
   get(key: string, make: () => Promise<T>): Promise<T> {

@@ -1,5 +1,7 @@
 /** What a thread of the kernel does when it is asked (kernel.ts). */
 
+import { constants, setPriority } from 'node:os';
+import { isMainThread } from 'node:worker_threads';
 import type { Derivation, Derived, Design } from '@/geometry';
 import type { Machine } from '@/geometry/cutting/machine';
 import type { CutPart } from '@/geometry/parts/part';
@@ -14,6 +16,9 @@ export interface Tasks {
   makeFiles: (derived: Derived, names: FileNames) => Promise<HashedFile[]>;
   machineCautions: (parts: readonly CutPart[], machine: Machine) => string[];
 }
+
+// Linux has it for each thread: who only reads goes before who derives, on few cores too.
+if (!isMainThread) setPriority(constants.priority.PRIORITY_BELOW_NORMAL);
 
 const tasks: Tasks = { derive: deriveDesign, makeFiles, machineCautions };
 
