@@ -80,14 +80,6 @@ export class Builder {
     );
   }
 
-  /** Each thing once, so that what is measured afterwards is a server that has been in use. */
-  async warm(): Promise<void> {
-    await this.client.ask('list', '/api/designs');
-    await this.client.ask('open', `/api/designs/${this.id}`);
-    await this.save();
-    await this.download();
-  }
-
   /** Works until `over`. */
   async work(over: () => boolean): Promise<void> {
     await wait(this.random() * PAUSE);

@@ -11,7 +11,7 @@ export async function inviteUntil(over: () => boolean, client: Client): Promise<
       email: `guest-${i}@load.example`,
       role: 'machinist',
     });
-    await wait(1_000);
+    await wait(1_500);
   }
 }
 
