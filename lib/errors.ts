@@ -57,7 +57,7 @@ export function badInput(error: z.ZodError): RequestError {
 const GONE =
   /^(08...|53...|57P0.|ECONNREFUSED|ECONNRESET|ENOTFOUND|ETIMEDOUT|EPIPE|EAI_AGAIN)$/;
 const GONE_WORDS =
-  /timeout|Connection terminated|connection is not open|Unable to acquire|Knex: Timeout/i;
+  /timeout|Connection terminated|connection error|Client was closed|Transaction query already complete|connection is not open|Unable to acquire|Knex: Timeout/i;
 
 function isDatabaseGone(error: unknown): boolean {
   for (let at: unknown = error, depth = 0; at instanceof Error && depth < 5; depth++) {
