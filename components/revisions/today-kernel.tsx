@@ -28,7 +28,7 @@ function Changes({ then, now }: { then: Derived; now: Derivation }) {
       <p>
         As kept by kernel {then.kernel}, then by kernel {now.derived.kernel}:
       </p>
-      <dl aria-label="What today’s kernel would change" className="flex flex-col">
+      <dl className="flex flex-col">
         {changed.map(({ label, a, b, change }) => (
           <div key={label} className="border-b border-line py-1.5 last:border-0">
             <dt>{label}</dt>
