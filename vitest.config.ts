@@ -12,6 +12,10 @@ const thorough = [
   'tests/geometry/parts/assembly.test.ts',
   'tests/geometry/cutting/offset.test.ts',
   'tests/geometry/examples.test.ts',
+  'tests/geometry/derive.test.ts',
+  'tests/geometry/advice/advise.test.ts',
+  'tests/geometry/tolerance/stacks.test.ts',
+  'tests/geometry/electrical/loss.test.ts',
 ];
 
 export default defineConfig({
