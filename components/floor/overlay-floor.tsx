@@ -22,7 +22,7 @@ const turned = (turn: Turn, angle: number) =>
   `rotate(${-toDegrees(rotorTurn(turn, angle))}deg)`;
 
 /** One of the two states whose outlines lie over one another. */
-export interface Overlaid {
+interface Overlaid {
   readonly title: string;
   readonly derived: Derived;
 }

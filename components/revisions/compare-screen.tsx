@@ -17,7 +17,7 @@ import { PairTable } from './pair-table';
 import { compareHref, StatePair, type Pair } from './state-pair';
 
 /** One of the two states that lie beside each other. */
-export interface Compared {
+interface Compared {
   /** As `Revision 2`. */
   readonly title: string;
   readonly design: Design;

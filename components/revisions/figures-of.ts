@@ -1,7 +1,7 @@
 import { formatQuantity, type Derived, type Quantity, type SectionResult } from '@/geometry';
 
 /** One figure of what the kernel made of a design, in its unit. */
-export interface Figure {
+interface Figure {
   readonly label: string;
   readonly value: number;
   /** Written with this many digits. */
@@ -44,7 +44,7 @@ function sectionFigures(section: SectionResult, where: string): Figure[] {
 }
 
 /** What was achieved, and what is cut for it. */
-export function figuresOf({ sections, stack, findings }: Derived): Figure[] {
+function figuresOf({ sections, stack, findings }: Derived): Figure[] {
   const counted = (severity: string) =>
     findings.filter((finding) => finding.severity === severity).length;
   return [
@@ -61,7 +61,7 @@ export function figuresOf({ sections, stack, findings }: Derived): Figure[] {
 }
 
 /** One figure of two states; null where one of them has none of it. */
-export interface FigurePair {
+interface FigurePair {
   readonly label: string;
   readonly a: string | null;
   readonly b: string | null;

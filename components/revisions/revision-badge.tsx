@@ -1,6 +1,6 @@
 import type { RevisionState } from '@/lib/schemas/revision';
 
-export const revisionWords: Readonly<Record<RevisionState, string>> = {
+const revisionWords: Readonly<Record<RevisionState, string>> = {
   draft: 'draft',
   'in-review': 'in review',
   released: 'released',

@@ -6,7 +6,7 @@ import type { Revision } from '@/lib/schemas/revision';
 import { RevisionBadge } from './revision-badge';
 import { WaiverList } from './waiver-list';
 
-export const revisionHref = ({ designId, number }: Revision): string =>
+const revisionHref = ({ designId, number }: Revision): string =>
   `/designs/${designId}/revisions/${number}`;
 
 /** One revision in the list of a design's. */
