@@ -1,6 +1,7 @@
 import 'server-only';
 import type { Derived } from '@/geometry';
 import { mayEdit, type Viewer } from './access';
+import { inWorkshop } from './db';
 import { derivePlates } from './kernel/kernel';
 import { findDesign } from './queries';
 import { NOT_RELEASED, waiverWords } from './revisions/freeze';
@@ -53,7 +54,7 @@ export async function findCutSource(viewer: Viewer, id: string): Promise<CutSour
   const revision = await findReleased(viewer, id);
   const frozen = revision && (await derivationOf(viewer, revision.id));
   if (!frozen?.derivation.ok) return null;
-  await refuseOutOfUse(viewer, revision!);
+  await inWorkshop(viewer, (tx) => refuseOutOfUse(tx, viewer, revision!));
   return {
     name: revision!.designName,
     revision: String(revision!.number),

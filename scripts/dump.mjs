@@ -1,7 +1,7 @@
 /** PostgreSQL's own dump and restore, all or nothing. */
 
 import { spawn, spawnSync } from 'node:child_process';
-import { existsSync, renameSync, rmSync } from 'node:fs';
+import { closeSync, existsSync, openSync, renameSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { postgresBinaries } from './postgres.mjs';
 import { Stop } from './stop.mjs';
@@ -12,12 +12,25 @@ function program(name) {
   return join(folder, name);
 }
 
+/** How a program reaches the database: the password in its environment, where others can't list it. */
+function access(url) {
+  const address = new URL(url);
+  const env = { ...process.env, PGPASSWORD: decodeURIComponent(address.password) };
+  address.password = '';
+  return { address: address.href, env };
+}
+
 /** Everything the database at `url` holds, into one file, which is whole or not there. */
 export function dumpTo(url, file) {
   if (existsSync(file)) throw new Stop(`${file} is there already; name another file.`);
   const partial = `${file}.partial`;
-  const args = ['--format=custom', '--no-owner', '--no-acl', `--file=${partial}`, url];
-  const { status, stderr, error } = spawnSync(program('pg_dump'), args, { encoding: 'utf8' });
+  const { address, env } = access(url);
+  const args = ['--format=custom', '--no-owner', '--no-acl', `--file=${partial}`, address];
+  // Passwords' hashes are in it, and all that a workshop would not show.
+  rmSync(partial, { force: true });
+  closeSync(openSync(partial, 'wx', 0o600));
+  const options = { encoding: 'utf8', env };
+  const { status, stderr, error } = spawnSync(program('pg_dump'), args, options);
   if (status !== 0) {
     rmSync(partial, { force: true });
     throw new Stop(`The backup failed: ${error?.message ?? stderr.trim()}`);
@@ -34,10 +47,11 @@ export async function restoreFrom(url, file) {
   const script = spawn(program('pg_restore'), ['--no-owner', '--no-acl', '--file=-', file], {
     stdio: ['ignore', 'pipe', 'pipe'],
   });
+  const { address, env } = access(url);
   const into = spawn(
     program('psql'),
-    ['-X', '-q', '--single-transaction', '-v', 'ON_ERROR_STOP=1', '-o', '/dev/null', url],
-    { stdio: ['pipe', 'ignore', 'pipe'] },
+    ['-X', '-q', '--single-transaction', '-v', 'ON_ERROR_STOP=1', '-o', '/dev/null', address],
+    { stdio: ['pipe', 'ignore', 'pipe'], env },
   );
   const said = [];
   for (const { stderr } of [script, into]) stderr.on('data', (chunk) => said.push(chunk));

@@ -2,6 +2,7 @@
 
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
+import { DifferenceTable } from '@/components/ui/difference-table';
 import { LocalTime } from '@/components/ui/local-time';
 import type { DesignRecord } from '@/lib/schemas/api';
 import { differences } from './differences';
@@ -40,39 +41,7 @@ export default function ConflictDialog({
         Version {theirs.version}, <LocalTime iso={theirs.updatedAt} />. Nothing of yours is
         lost; choose what becomes of both.
       </p>
-      <table className="dense w-full text-left">
-        <thead>
-          <tr className="border-b border-line text-small text-ink-2">
-            <th scope="col" className="py-1 pr-3 font-semibold">
-              Differs in
-            </th>
-            <th scope="col" className="py-1 pr-3 font-semibold">
-              Yours
-            </th>
-            <th scope="col" className="py-1 font-semibold">
-              {theirs.updatedBy.name}
-            </th>
-          </tr>
-        </thead>
-        <tbody>
-          {rows.map((row) => (
-            <tr key={row.label} className="border-b border-line">
-              <th scope="row" className="py-1 pr-3 font-normal">
-                {row.label}
-              </th>
-              <td className="py-1 pr-3">{row.mine}</td>
-              <td className="py-1">{row.theirs}</td>
-            </tr>
-          ))}
-          {rows.length === 0 && (
-            <tr>
-              <td colSpan={3} className="py-2">
-                Nothing: both hold the same values.
-              </td>
-            </tr>
-          )}
-        </tbody>
-      </table>
+      <DifferenceTable rows={rows} theirName={theirs.updatedBy.name} />
       <div className="flex flex-wrap justify-end gap-2">
         <Button onPress={onClose}>Decide later</Button>
         <Button onPress={onTakeTheirs}>Take theirs</Button>

@@ -10,7 +10,11 @@ export function designState(version: number, revisions: readonly Known[]): Desig
   const latest = revisions
     .filter(({ state }) => state !== 'superseded')
     .sort((a, b) => b.number - a.number)[0];
-  if (latest?.state === 'in-review') return { kind: 'in-review', revision: latest.number };
+  const inReview = revisions
+    .filter(({ state }) => state === 'in-review')
+    .sort((a, b) => b.number - a.number)[0];
+  // Somebody waits for it, whatever has been named on top of it.
+  if (inReview) return { kind: 'in-review', revision: inReview.number };
   const released = revisions.find(({ state }) => state === 'released');
   if (released) {
     const kind = version > released.version ? 'changed' : 'released';

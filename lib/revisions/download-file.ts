@@ -14,7 +14,7 @@ async function requireRevision(id: string): Promise<[Viewer, RevisionRecord]> {
   const viewer = await requireMember(mayDownload);
   const revision = await findRevision(viewer, id);
   if (!revision) throw notFound('revision');
-  await refuseOutOfUse(viewer, revision);
+  await inWorkshop(viewer, (tx) => refuseOutOfUse(tx, viewer, revision));
   return [viewer, revision];
 }
 

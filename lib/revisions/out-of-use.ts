@@ -4,11 +4,14 @@ import { Revision } from '@/entities';
 import { mayEdit, type Viewer } from '../access';
 import { RequestError } from '../errors';
 import type { Revision as RevisionRecord } from '../schemas/revision';
-import { findReleased } from './queries';
 import { revisionPeople, toRevision } from './revision-record';
 
 /** @throws RequestError withdrawn, when nobody or not this person may cut from it any more */
-export async function refuseOutOfUse(viewer: Viewer, revision: RevisionRecord): Promise<void> {
+export async function refuseOutOfUse(
+  tx: EntityManager,
+  viewer: Viewer,
+  revision: RevisionRecord,
+): Promise<void> {
   const { number, state, designId, withdrawnBy, withdrawnReason } = revision;
   if (state === 'withdrawn') {
     throw new RequestError(
@@ -17,10 +20,14 @@ export async function refuseOutOfUse(viewer: Viewer, revision: RevisionRecord): 
     );
   }
   if (state === 'superseded' && !mayEdit(viewer.role)) {
-    const now = await findReleased(viewer, designId);
+    const now = await tx.findOne(
+      Revision,
+      { design: designId, state: 'released' },
+      { fields: ['number'] },
+    );
     throw new RequestError(
       'withdrawn',
-      `Revision ${number} is superseded${now?.state === 'released' ? `; cut revision ${now.number}` : ''}.`,
+      `Revision ${number} is superseded${now ? `; cut revision ${now.number}` : ''}.`,
     );
   }
 }
@@ -40,6 +47,6 @@ export async function holdInUse(
     { exclude: ['derivation', 'parameters'], lockMode: LockMode.PESSIMISTIC_READ },
   );
   const revision = toRevision(await tx.populate(stored, [...revisionPeople]));
-  await refuseOutOfUse(viewer, revision);
+  await refuseOutOfUse(tx, viewer, revision);
   return revision;
 }

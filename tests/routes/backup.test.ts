@@ -2,7 +2,7 @@
 
 import { execFile } from 'node:child_process';
 import { randomUUID } from 'node:crypto';
-import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdtempSync, rmSync, statSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { promisify } from 'node:util';
@@ -73,6 +73,8 @@ afterAll(async () => {
 test('holds everything, and the application can work on it', async () => {
   const owner = process.env.OWNER_DATABASE_URL!;
   await command('backup.mjs', owner, file);
+  // Nobody else on the machine may read it.
+  expect(statSync(file).mode & 0o777).toBe(0o600);
   await command('restore.mjs', restored, file);
   const before = await contents(owner);
   expect(before.record_entries).toContain('design-saved');

@@ -11,7 +11,13 @@ import { PUT as MOVE } from '@/app/api/revisions/[id]/state/route';
 import { Mail } from '@/entities';
 import { defaultDesign, derive, type Design } from '@/geometry';
 import { designFilesSchema, designListSchema, designRecordSchema } from '@/lib/schemas/api';
-import { revisionSchema, type MoveRevision, type Revision } from '@/lib/schemas/revision';
+import { designState } from '@/lib/revisions/design-state';
+import {
+  revisionSchema,
+  type MoveRevision,
+  type Revision,
+  type RevisionState,
+} from '@/lib/schemas/revision';
 import { entityManager } from '../support/as-owner';
 import { call, refusal } from '../support/call';
 import { Cast, type Caller } from '../support/cast';
@@ -274,6 +280,30 @@ describe('a machinist', () => {
     expect((await refusal(answer)).message).toContain('cut revision 2');
     cast.ask('builder');
     expect((await call(FILES, { id: first.id })).status).toBe(200);
+  });
+});
+
+describe('where a design stands', () => {
+  const known = (number: number, state: RevisionState, version = 1) => ({
+    number,
+    state,
+    version,
+  });
+  test.each([
+    ['nothing named', [], 'draft', null],
+    ['a draft', [known(1, 'draft')], 'draft', null],
+    [
+      'in review under a newer draft',
+      [known(1, 'in-review'), known(2, 'draft')],
+      'in-review',
+      1,
+    ],
+    ['released', [known(1, 'released', 2)], 'released', 1],
+    ['saved since', [known(1, 'released')], 'changed', 1],
+    ['released again', [known(1, 'superseded'), known(2, 'released', 2)], 'released', 2],
+    ['an older one last', [known(1, 'withdrawn'), known(2, 'superseded')], 'withdrawn', 1],
+  ] as const)('%s', (_words, revisions, kind, revision) => {
+    expect(designState(2, revisions)).toEqual({ kind, revision });
   });
 });
 
